@@ -1,0 +1,21 @@
+package perveance.engine.base;
+
+/** Findings about how far the answer can be trusted. */
+public enum DataMessage implements MessageCode {
+  OUTSIDE_EVIDENCE("{0} works outside its published data: {1}."),
+  SPREAD_ASSUMED("{0}: one published point only; the grid's spread is the usual value of {1}."),
+  FIT_LOOSE("{0}: the law misses its published data by up to {1}."),
+  NOT_SOLVED("{0}: no operating point was found: {1}."),
+  ASSUMED("{0}: {1} is not stated; assumed {2}.");
+
+  private final String template;
+
+  DataMessage(String template) {
+    this.template = template;
+  }
+
+  @Override
+  public String template() {
+    return template;
+  }
+}

@@ -1,0 +1,27 @@
+package perveance.engine.base;
+
+/** Findings about signal: headroom, distortion, response, noise. */
+public enum SignalMessage implements MessageCode {
+  GRID_CURRENT_FIRST("{0} overloads by grid current first, at {1} peak in; cut-off comes at {2}."),
+  CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; grid current starts at {2}."),
+  KNEE_FIRST("{0} overloads at the anode knee first, at {1} peak in."),
+  NO_HEADROOM("{0} is driven with {1} peak but is clean only to {2}."),
+  LITTLE_HEADROOM("{0} has only {1} of headroom over the stated drive."),
+  HIGH_DISTORTION("{0} distorts {1} at the stated drive."),
+  LOW_CORNER_HIGH("{0}: the low corner is {1}."),
+  HIGH_CORNER_LOW("{0}: the high corner is {1}, set by {2} and the input capacitance of {3}."),
+  BYPASS_SHELF("{0}: below {1} the gain falls by {2} because {3} stops bypassing."),
+  BLOCKING("{0}: after overload the bias takes {1} to recover."),
+  HIGH_NOISE("{0}: noise at the input is {1}, most of it from {2}.");
+
+  private final String template;
+
+  SignalMessage(String template) {
+    this.template = template;
+  }
+
+  @Override
+  public String template() {
+    return template;
+  }
+}

@@ -1,0 +1,66 @@
+package perveance.engine.analysis;
+
+import java.util.Map;
+import java.util.OptionalDouble;
+
+/**
+ * Clean swing: how far the input may go each way and what ends it.
+ *
+ * @param inputPeak largest symmetrical peak input, source behind its resistance [V]
+ * @param outputPeak peak output at that input, the smaller side [V]
+ * @param limitedBy what ends it first
+ * @param positivePeak input peak to the end on the positive side [V]
+ * @param positiveLimit what ends the positive side
+ * @param negativePeak input peak to the end on the negative side [V]
+ * @param negativeLimit what ends the negative side
+ * @param outputDown output swing at the positive-side end, signed [V]
+ * @param outputUp output swing at the negative-side end, signed [V]
+ * @param toZeroBias input peak to zero volts grid to cathode, the textbook limit [V]
+ * @param headroom against the stated drive, empty when no drive is stated [dB]
+ * @param bands bands by component name
+ */
+public record CleanSwing(
+    double inputPeak,
+    double outputPeak,
+    Limit limitedBy,
+    double positivePeak,
+    Limit positiveLimit,
+    double negativePeak,
+    Limit negativeLimit,
+    double outputDown,
+    double outputUp,
+    double toZeroBias,
+    OptionalDouble headroom,
+    Map<String, Band> bands) {
+  /** Copies the map. */
+  public CleanSwing {
+    bands = Map.copyOf(bands);
+  }
+
+  /** What ends a swing. */
+  public enum Limit {
+    /** Grid current begins. */
+    GRID_CURRENT("grid-current"),
+    /** The valve cuts off. */
+    CUT_OFF("cut-off"),
+    /** The anode reaches the knee. */
+    KNEE("knee"),
+    /** Nothing within the range tried. */
+    NONE("none");
+
+    private final String word;
+
+    Limit(String word) {
+      this.word = word;
+    }
+
+    /**
+     * Word used in reports and files.
+     *
+     * @return for example {@code grid-current}
+     */
+    public String word() {
+      return word;
+    }
+  }
+}

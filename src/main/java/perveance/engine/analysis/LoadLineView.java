@@ -1,0 +1,40 @@
+package perveance.engine.analysis;
+
+import java.util.List;
+
+/**
+ * The load lines that a device sees: the Thevenin line of the same circuit.
+ *
+ * @param ref valve section
+ * @param dc dc load line, anode to cathode volts against anode current
+ * @param ac ac load line through the operating point
+ * @param excursion path of the driven or clean swing
+ * @param anode operating point [V]
+ * @param current operating point [A]
+ * @param dcResistance slope of the dc line [ohm]
+ * @param acResistance slope of the ac line [ohm]
+ */
+public record LoadLineView(
+    String ref,
+    List<Point> dc,
+    List<Point> ac,
+    List<Point> excursion,
+    double anode,
+    double current,
+    double dcResistance,
+    double acResistance) {
+  /** Copies the lists. */
+  public LoadLineView {
+    dc = List.copyOf(dc);
+    ac = List.copyOf(ac);
+    excursion = List.copyOf(excursion);
+  }
+
+  /**
+   * A point of a line.
+   *
+   * @param voltage anode to cathode [V]
+   * @param current anode current [A]
+   */
+  public record Point(double voltage, double current) {}
+}

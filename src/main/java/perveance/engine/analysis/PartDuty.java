@@ -1,0 +1,30 @@
+package perveance.engine.analysis;
+
+import java.util.Optional;
+import perveance.engine.stage.StageCircuit;
+
+/**
+ * What a part has to stand, and what to buy.
+ *
+ * @param part the part
+ * @param designator for example {@code R1}
+ * @param idleVoltage across it at idle [V]
+ * @param idlePower [W]
+ * @param worstVoltage in the worst case (valve shorted, or drive) [V]
+ * @param worstPower in the worst case [W]
+ * @param worstCase what the worst case is
+ * @param coldVoltage across it with cold valves [V]
+ * @param nearest nearest preferred value, in the part's unit [1]
+ * @param buy rating to buy, in words: {@code 1 W, 350 V or more}
+ */
+public record PartDuty(
+    StageCircuit.Part part,
+    String designator,
+    double idleVoltage,
+    double idlePower,
+    double worstVoltage,
+    double worstPower,
+    String worstCase,
+    double coldVoltage,
+    double nearest,
+    Optional<String> buy) {}

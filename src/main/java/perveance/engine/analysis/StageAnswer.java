@@ -1,0 +1,54 @@
+package perveance.engine.analysis;
+
+import java.util.List;
+import java.util.Optional;
+import perveance.engine.base.Finding;
+import perveance.engine.stage.StageCircuit;
+
+/**
+ * Everything a stage answers; the same shape for every kind.
+ *
+ * @param ref reference
+ * @param kind name of the kind
+ * @param circuit what is where
+ * @param points operating point of each valve section
+ * @param limits use of every published limit
+ * @param smallSignal small-signal figures
+ * @param clean clean swing
+ * @param driven at the stated drive, empty when none is stated
+ * @param levels against level, rising
+ * @param parts what each part has to stand
+ * @param readings expected meter readings in measuring order
+ * @param loadLine load lines, empty when the kind has none
+ * @param sums hand sums
+ * @param assumptions what the figures assume
+ * @param findings worst first
+ */
+public record StageAnswer(
+    String ref,
+    String kind,
+    StageCircuit circuit,
+    List<DevicePoint> points,
+    List<LimitUse> limits,
+    SmallSignalAnswer smallSignal,
+    CleanSwing clean,
+    Optional<DrivenAnswer> driven,
+    List<DrivenAnswer> levels,
+    List<PartDuty> parts,
+    List<ExpectedReading> readings,
+    Optional<LoadLineView> loadLine,
+    List<HandSum> sums,
+    List<String> assumptions,
+    List<Finding> findings) {
+  /** Copies the lists. */
+  public StageAnswer {
+    points = List.copyOf(points);
+    limits = List.copyOf(limits);
+    levels = List.copyOf(levels);
+    parts = List.copyOf(parts);
+    readings = List.copyOf(readings);
+    sums = List.copyOf(sums);
+    assumptions = List.copyOf(assumptions);
+    findings = List.copyOf(findings);
+  }
+}

@@ -12,10 +12,37 @@ import java.util.Map;
  * @param elements in the order they were added
  */
 public record Circuit(List<String> nodes, List<Element> elements) {
-  /** Copies the lists. */
+  /**
+   * Copies the lists.
+   *
+   * @throws IllegalArgumentException when an element is joined to a node that does not exist
+   */
   public Circuit {
     nodes = List.copyOf(nodes);
     elements = List.copyOf(elements);
+    for (Element element : elements) {
+      for (int node : Terminals.of(element)) {
+        if (node < 0 || node >= nodes.size()) {
+          throw new IllegalArgumentException(element.name() + " is joined to node " + node);
+        }
+      }
+    }
+  }
+
+  /**
+   * Place of a named element in {@link #elements}.
+   *
+   * @param name element name
+   * @return index
+   * @throws IllegalArgumentException when there is no such element
+   */
+  public int element(String name) {
+    for (int i = 0; i < elements.size(); i++) {
+      if (elements.get(i).name().equals(name)) {
+        return i;
+      }
+    }
+    throw new IllegalArgumentException("no element named " + name);
   }
 
   /**

@@ -3,8 +3,12 @@ package perveance.engine.circuit;
 import perveance.engine.device.DeviceLaw;
 
 /**
- * A circuit element. Nodes are numbers handed out by {@link Circuit.Builder#node}; 0 is chassis.
- * The name is the part's key, unique in its circuit, for example {@code V1a.anode_load}.
+ * A circuit element. The current of a two-terminal element is counted from its first node through
+ * the element to its second, so that voltage times current is the power it takes; sources that
+ * deliver have a negative power.
+ *
+ * <p>Nodes are numbers handed out by {@link Circuit.Builder#node}; 0 is chassis. The name is the
+ * part's key, unique in its circuit, for example {@code V1a.anode_load}.
  */
 public sealed interface Element {
   /**
@@ -22,7 +26,13 @@ public sealed interface Element {
    * @param b node
    * @param resistance above zero [ohm]
    */
-  record Resistor(String name, int a, int b, double resistance) implements Element {}
+  record Resistor(String name, int a, int b, double resistance) implements Element {
+    /** Checks the value. */
+    public Resistor {
+      ElementChecks.named(name);
+      ElementChecks.positive("resistance", resistance);
+    }
+  }
 
   /**
    * A capacitor.
@@ -34,7 +44,13 @@ public sealed interface Element {
    * @param role what it does at audio frequency
    */
   record Capacitor(String name, int a, int b, double capacitance, CapacitorRole role)
-      implements Element {}
+      implements Element {
+    /** Checks the value. */
+    public Capacitor {
+      ElementChecks.named(name);
+      ElementChecks.positive("capacitance", capacitance);
+    }
+  }
 
   /**
    * An inductor with its winding resistance.
@@ -46,7 +62,14 @@ public sealed interface Element {
    * @param resistance winding resistance, zero allowed [ohm]
    */
   record Inductor(String name, int a, int b, double inductance, double resistance)
-      implements Element {}
+      implements Element {
+    /** Checks the values. */
+    public Inductor {
+      ElementChecks.named(name);
+      ElementChecks.positive("inductance", inductance);
+      ElementChecks.notNegative("resistance", resistance);
+    }
+  }
 
   /**
    * Coupled windings on one core. All winding voltages are in proportion to their turns behind
@@ -59,9 +82,16 @@ public sealed interface Element {
    */
   record Transformer(String name, java.util.List<Winding> windings, double magnetising)
       implements Element {
-    /** Copies the list. */
+    /** Copies the list and checks the values. */
     public Transformer {
+      ElementChecks.named(name);
       windings = java.util.List.copyOf(windings);
+      if (windings.size() < 2) {
+        throw new IllegalArgumentException("windings of " + name + ": " + windings.size());
+      }
+      if (!(magnetising > 0)) {
+        throw new IllegalArgumentException("magnetising is not above zero: " + magnetising);
+      }
     }
   }
 
@@ -74,7 +104,14 @@ public sealed interface Element {
    * @param resistance winding resistance, zero allowed [ohm]
    * @param leakage leakage inductance of this winding, zero allowed [H]
    */
-  record Winding(int start, int end, double turns, double resistance, double leakage) {}
+  record Winding(int start, int end, double turns, double resistance, double leakage) {
+    /** Checks the values. */
+    public Winding {
+      ElementChecks.positive("turns", turns);
+      ElementChecks.notNegative("resistance", resistance);
+      ElementChecks.notNegative("leakage", leakage);
+    }
+  }
 
   /**
    * A voltage source; also the input of a stage.
@@ -84,7 +121,13 @@ public sealed interface Element {
    * @param minus node
    * @param voltage dc value [V]
    */
-  record VoltageSource(String name, int plus, int minus, double voltage) implements Element {}
+  record VoltageSource(String name, int plus, int minus, double voltage) implements Element {
+    /** Checks the value. */
+    public VoltageSource {
+      ElementChecks.named(name);
+      ElementChecks.finite("voltage", voltage);
+    }
+  }
 
   /**
    * A current source.
@@ -94,7 +137,13 @@ public sealed interface Element {
    * @param to node the current flows into
    * @param current dc value [A]
    */
-  record CurrentSource(String name, int from, int to, double current) implements Element {}
+  record CurrentSource(String name, int from, int to, double current) implements Element {
+    /** Checks the value. */
+    public CurrentSource {
+      ElementChecks.named(name);
+      ElementChecks.finite("current", current);
+    }
+  }
 
   /**
    * A junction: rectifier diode, zener or LED.
@@ -104,7 +153,12 @@ public sealed interface Element {
    * @param cathode node
    * @param law forward and reverse law
    */
-  record Junction(String name, int anode, int cathode, JunctionLaw law) implements Element {}
+  record Junction(String name, int anode, int cathode, JunctionLaw law) implements Element {
+    /** Checks the name. */
+    public Junction {
+      ElementChecks.named(name);
+    }
+  }
 
   /**
    * A valve section. A grid or screen that the law does not have is tied to the cathode node.
@@ -117,5 +171,10 @@ public sealed interface Element {
    * @param cathode node
    */
   record Valve(String name, DeviceLaw law, int anode, int grid, int screen, int cathode)
-      implements Element {}
+      implements Element {
+    /** Checks the name. */
+    public Valve {
+      ElementChecks.named(name);
+    }
+  }
 }

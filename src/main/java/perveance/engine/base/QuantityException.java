@@ -36,4 +36,13 @@ public final class QuantityException extends Exception {
   public String expected() {
     return expected;
   }
+
+  /**
+   * Says both in one line.
+   *
+   * @return the sentence, the same as {@link #getMessage()}
+   */
+  public String message() {
+    return "found " + found + ", expected " + expected;
+  }
 }

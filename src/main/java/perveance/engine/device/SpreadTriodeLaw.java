@@ -1,0 +1,133 @@
+package perveance.engine.device;
+
+import java.util.List;
+
+/**
+ * Triode with a spread penetration factor: the project's triode law.
+ *
+ * <p>What it predicts: anode and grid current of a triode and their partial derivatives, from
+ * cut-off to positive grid voltages, so that mu falls towards cut-off as that of a real valve does.
+ *
+ * <pre>{@code
+ * Ik = space charge behind a spread grid, see SpreadCathode
+ * Ia = Ik (1 - r),   r = 1 / (1 + (Va / Vt)^2)^2 for Va > 0, else 1
+ * Ig = Ig0 + Ik r o,  Ig0 and the openness o: see GridCurrent
+ * }</pre>
+ *
+ * <p>r says which part of the electrons that pass the grid turns back: at a low anode voltage they
+ * form a virtual cathode between grid and anode and turn back (C. E. Fay, A. L. Samuel and W.
+ * Shockley, Bell System Tech. J. 17, 49, 1938). They return to the cathode while the grid is
+ * negative and end on the grid when it is positive. Vt is small against any working anode voltage.
+ *
+ * <p>Validity: the region that the device's evidence covers ({@link Validity}). Outside it the law
+ * still follows the three-halves law but nobody has checked it there. Emission is unlimited.
+ * Voltages beyond one megavolt are taken as one megavolt.
+ */
+public final class SpreadTriodeLaw implements DeviceLaw {
+  /** Name of the law in device files. */
+  public static final String NAME = "spread-triode";
+
+  private static final double HIGHEST_VOLTAGE = 1e6;
+
+  private final SpreadTriodeParameters parameters;
+  private final SpreadCathode cathode;
+  private final GridCurrent gridCurrent;
+  private final double turnBackSquared;
+
+  /**
+   * A law with these constants.
+   *
+   * @param parameters the constants
+   */
+  public SpreadTriodeLaw(SpreadTriodeParameters parameters) {
+    this.parameters = parameters;
+    this.cathode =
+        new SpreadCathode(
+            parameters.perveance(),
+            parameters.contactPotential(),
+            parameters.penetration(),
+            parameters.spread());
+    this.gridCurrent =
+        new GridCurrent(
+            parameters.gridPerveance(), parameters.gridOnset(), parameters.thermalVoltage());
+    this.turnBackSquared = parameters.turnBack() * parameters.turnBack();
+  }
+
+  /**
+   * The constants.
+   *
+   * @return the constants of this law
+   */
+  public SpreadTriodeParameters constants() {
+    return parameters;
+  }
+
+  @Override
+  public LawKind kind() {
+    return LawKind.TRIODE;
+  }
+
+  @Override
+  public void evaluate(double anode, double grid, double screen, ElectrodeCurrents out) {
+    if (Double.isNaN(anode) || Double.isNaN(grid)) {
+      throw new IllegalArgumentException("voltage is NaN: anode " + anode + ", grid " + grid);
+    }
+    double va = bounded(anode);
+    double vg = bounded(grid);
+    cathode.evaluate(vg, va, out);
+    double emitted = out.current(ElectrodeCurrents.ANODE);
+    double byAnode = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
+    double byGrid = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
+    double refused = 1;
+    double refusedSlope = 0;
+    if (va > 0) {
+      double root = turnBackSquared / (turnBackSquared + va * va);
+      refused = root * root;
+      refusedSlope = -4 * va * refused * root / turnBackSquared;
+    }
+    double passed = 1 - refused;
+    out.set(
+        ElectrodeCurrents.ANODE,
+        emitted * passed,
+        byAnode * passed - emitted * refusedSlope,
+        byGrid * passed,
+        0);
+    double open = gridCurrent.openness(vg);
+    out.set(
+        ElectrodeCurrents.GRID,
+        gridCurrent.current(vg, open) + emitted * refused * open,
+        (byAnode * refused + emitted * refusedSlope) * open,
+        gridCurrent.slope(vg, open)
+            + refused * (byGrid * open + emitted * gridCurrent.opennessSlope(open)),
+        0);
+    out.set(ElectrodeCurrents.SCREEN, 0, 0, 0, 0);
+  }
+
+  private static double bounded(double voltage) {
+    return Math.max(-HIGHEST_VOLTAGE, Math.min(HIGHEST_VOLTAGE, voltage));
+  }
+
+  @Override
+  public DeviceLaw specimen(double conduction, double contactShift) {
+    return new SpreadTriodeLaw(
+        new SpreadTriodeParameters(
+            parameters.perveance() * conduction,
+            parameters.contactPotential() + contactShift,
+            parameters.penetration(),
+            parameters.spread(),
+            parameters.turnBack(),
+            parameters.gridPerveance() * conduction,
+            parameters.gridOnset() - contactShift,
+            parameters.thermalVoltage()));
+  }
+
+  @Override
+  public double gridCurrentOnset() {
+    return parameters.gridOnset();
+  }
+
+  @Override
+  public List<LawParameter> parameters() {
+    return parameters.list();
+  }
+}

@@ -1,0 +1,104 @@
+package perveance.engine.device;
+
+import java.util.List;
+import java.util.Map;
+
+/**
+ * The constants of a {@link SpreadTriodeLaw}.
+ *
+ * @param perveance G of the cathode, above 0 [A V^-1.5]
+ * @param contactPotential Vc, added to the grid voltage [V]
+ * @param penetration mean penetration factor D0 = 1/mu0, above 0 [1]
+ * @param spread half width of the spread of D relative to D0, 0 to 1 [1]
+ * @param turnBack anode voltage at which a quarter of the electrons turns back, above 0 [V]
+ * @param gridPerveance Gg of the grid, above 0 [A V^-1.5]
+ * @param gridOnset grid voltage at 0.3 uA of grid current [V]
+ * @param thermalVoltage k T / e of the cathode, above 0 [V]
+ */
+public record SpreadTriodeParameters(
+    double perveance,
+    double contactPotential,
+    double penetration,
+    double spread,
+    double turnBack,
+    double gridPerveance,
+    double gridOnset,
+    double thermalVoltage) {
+  /** Checks the ranges. */
+  public SpreadTriodeParameters {
+    above0("perveance", perveance);
+    finite("contactPotential", contactPotential);
+    above0("penetration", penetration);
+    if (!(spread >= 0 && spread <= 1)) {
+      throw new IllegalArgumentException("spread is not between 0 and 1: " + spread);
+    }
+    above0("turnBack", turnBack);
+    above0("gridPerveance", gridPerveance);
+    finite("gridOnset", gridOnset);
+    above0("thermalVoltage", thermalVoltage);
+  }
+
+  /** Keys in the order of {@link #list}. */
+  static final List<String> KEYS =
+      List.of(
+          "perveance",
+          "contact_potential",
+          "penetration",
+          "spread",
+          "turn_back",
+          "grid_perveance",
+          "grid_onset",
+          "thermal_voltage");
+
+  /**
+   * Reads the constants by the keys of a device file.
+   *
+   * @param values value by key, in SI units; further keys are not looked at
+   * @return the constants
+   * @throws IllegalArgumentException when a key is missing or a value is out of range
+   */
+  public static SpreadTriodeParameters of(Map<String, Double> values) {
+    double[] v = new double[KEYS.size()];
+    for (int i = 0; i < v.length; i++) {
+      Double value = values.get(KEYS.get(i));
+      if (value == null) {
+        throw new IllegalArgumentException("parameter is missing: " + KEYS.get(i));
+      }
+      v[i] = value;
+    }
+    return new SpreadTriodeParameters(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7]);
+  }
+
+  /**
+   * The constants with keys, units and meaning.
+   *
+   * @return in the order of the record
+   */
+  public List<LawParameter> list() {
+    return List.of(
+        parameter(0, perveance, "A V^-1.5", "perveance of the cathode"),
+        parameter(1, contactPotential, "V", "contact potential, added to the grid voltage"),
+        parameter(2, penetration, "1", "mean penetration factor of the grid, 1/mu"),
+        parameter(3, spread, "1", "half width of the spread of the penetration factor"),
+        parameter(4, turnBack, "V", "anode voltage at which a quarter of the electrons turns back"),
+        parameter(5, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(6, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(7, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+  }
+
+  private static LawParameter parameter(int index, double value, String unit, String meaning) {
+    return new LawParameter(KEYS.get(index), value, unit, meaning);
+  }
+
+  private static void above0(String name, double value) {
+    if (!(value > 0) || Double.isInfinite(value)) {
+      throw new IllegalArgumentException(name + " is not above 0 and finite: " + value);
+    }
+  }
+
+  private static void finite(String name, double value) {
+    if (!Double.isFinite(value)) {
+      throw new IllegalArgumentException(name + " is not finite: " + value);
+    }
+  }
+}

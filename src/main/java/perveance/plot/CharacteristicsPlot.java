@@ -1,0 +1,158 @@
+package perveance.plot;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import perveance.engine.analysis.LoadLineView;
+import perveance.engine.device.CurveFamily;
+
+/**
+ * Describes anode characteristics, alone or with the load lines of a stage. Currents are shown in
+ * milliamperes.
+ */
+public final class CharacteristicsPlot {
+  private static final double MILLI = 1e-3;
+
+  private CharacteristicsPlot() {}
+
+  /**
+   * The family alone.
+   *
+   * @param family characteristics
+   * @param dissipation anode limit drawn as a hyperbola, empty for none [W]
+   * @return description
+   */
+  public static PlotDescription of(CurveFamily family, OptionalDouble dissipation) {
+    return describe(family, dissipation, Optional.empty());
+  }
+
+  /**
+   * The family with the load lines and the swing of a stage.
+   *
+   * @param family characteristics
+   * @param dissipation anode limit drawn as a hyperbola, empty for none [W]
+   * @param lines load lines
+   * @return description
+   */
+  public static PlotDescription of(
+      CurveFamily family, OptionalDouble dissipation, LoadLineView lines) {
+    return describe(family, dissipation, Optional.of(lines));
+  }
+
+  private static PlotDescription describe(
+      CurveFamily family, OptionalDouble dissipation, Optional<LoadLineView> lines) {
+    List<PlotSeries> series = new ArrayList<>();
+    List<PlotDescription.Label> labels = new ArrayList<>();
+    for (int i = 0; i < family.curves().size(); i++) {
+      addCurve(family, i, series, labels);
+    }
+    dissipation.ifPresent(watts -> addLimit(family, watts, series, labels));
+    lines.ifPresent(view -> addLines(family, view, series, labels));
+    return new PlotDescription(
+        family.type(),
+        new PlotAxis("anode to cathode, V", 0, family.highestVoltage(), false),
+        new PlotAxis("anode current, mA", 0, family.highestCurrent() / MILLI, false),
+        series,
+        labels);
+  }
+
+  private static void addCurve(
+      CurveFamily family, int index, List<PlotSeries> series, List<PlotDescription.Label> labels) {
+    CurveFamily.Curve curve = family.curves().get(index);
+    List<PlotPoint> points = new ArrayList<>();
+    for (CurveFamily.Point p : curve.points()) {
+      points.add(new PlotPoint(p.anode(), p.current() / MILLI));
+    }
+    boolean major = index % 2 == 0;
+    String name = gridLabel(curve.grid());
+    series.add(
+        new PlotSeries(name, major ? PlotSeries.Role.CURVE : PlotSeries.Role.MINOR_CURVE, points));
+    if (major) {
+      labels.add(endLabel(name, points, family.highestVoltage(), family.highestCurrent() / MILLI));
+    }
+  }
+
+  /** The label stands where the curve leaves the picture: at the top, or at the right. */
+  private static PlotDescription.Label endLabel(
+      String name, List<PlotPoint> points, double right, double top) {
+    for (int i = 1; i < points.size(); i++) {
+      if (points.get(i).y() > top) {
+        PlotPoint a = points.get(i - 1);
+        PlotPoint b = points.get(i);
+        double x = a.x() + (b.x() - a.x()) * (top - a.y()) / (b.y() - a.y());
+        return new PlotDescription.Label(
+            name, new PlotPoint(x, top), PlotDescription.Anchor.TOP_RIGHT, false);
+      }
+    }
+    PlotPoint last = points.get(points.size() - 1);
+    return new PlotDescription.Label(
+        name, new PlotPoint(right, last.y()), PlotDescription.Anchor.BOTTOM_RIGHT, false);
+  }
+
+  private static void addLimit(
+      CurveFamily family,
+      double watts,
+      List<PlotSeries> series,
+      List<PlotDescription.Label> labels) {
+    double top = family.highestCurrent();
+    double from = watts / top;
+    if (from >= family.highestVoltage()) {
+      return;
+    }
+    List<PlotPoint> points = new ArrayList<>();
+    for (int i = 0; i <= 60; i++) {
+      double v = from + (family.highestVoltage() - from) * i / 60;
+      points.add(new PlotPoint(v, watts / v / MILLI));
+    }
+    series.add(new PlotSeries(watts + " W limit", PlotSeries.Role.LIMIT, points));
+    labels.add(
+        new PlotDescription.Label(
+            trim(watts) + " W limit", points.get(24), PlotDescription.Anchor.BOTTOM_LEFT, false));
+  }
+
+  private static void addLines(
+      CurveFamily family,
+      LoadLineView view,
+      List<PlotSeries> series,
+      List<PlotDescription.Label> labels) {
+    series.add(line("dc load line", PlotSeries.Role.DC_LINE, view.dc()));
+    series.add(line("ac load line", PlotSeries.Role.AC_LINE, view.ac()));
+    series.add(line("swing", PlotSeries.Role.EXCURSION, view.excursion()));
+    PlotPoint q = new PlotPoint(view.anode(), view.current() / MILLI);
+    series.add(new PlotSeries("operating point", PlotSeries.Role.POINT, List.of(q)));
+    boolean right = q.x() < 0.6 * family.highestVoltage();
+    labels.add(
+        new PlotDescription.Label(
+            String.format(
+                Locale.ROOT, "%.0f V, %s mA", view.anode(), threeFigures(view.current() / MILLI)),
+            new PlotPoint(
+                q.x() + (right ? 1 : -1) * 0.02 * family.highestVoltage(),
+                q.y() + 0.02 * family.highestCurrent() / MILLI),
+            right ? PlotDescription.Anchor.BOTTOM_LEFT : PlotDescription.Anchor.BOTTOM_RIGHT,
+            true));
+  }
+
+  private static PlotSeries line(String name, PlotSeries.Role role, List<LoadLineView.Point> line) {
+    List<PlotPoint> points = new ArrayList<>();
+    for (LoadLineView.Point p : line) {
+      points.add(new PlotPoint(p.voltage(), p.current() / MILLI));
+    }
+    return new PlotSeries(name, role, points);
+  }
+
+  private static String gridLabel(double grid) {
+    return grid == 0 ? "0 V" : "\u2212" + trim(-grid) + " V";
+  }
+
+  private static String threeFigures(double value) {
+    int decimals = Math.max(0, 2 - (int) Math.floor(Math.log10(Math.max(1e-9, value))));
+    return String.format(Locale.ROOT, "%." + Math.min(6, decimals) + "f", value);
+  }
+
+  private static String trim(double value) {
+    String text = String.format(Locale.ROOT, "%.2f", value);
+    return text.contains(".") ? text.replaceAll("0+$", "").replaceAll("\\.$", "") : text;
+  }
+}

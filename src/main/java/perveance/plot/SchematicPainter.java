@@ -1,0 +1,117 @@
+package perveance.plot;
+
+import java.awt.Graphics2D;
+import java.awt.Shape;
+import java.awt.geom.AffineTransform;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import perveance.engine.stage.Drawing;
+
+/**
+ * Draws a schematic in grid units. The caller scales the graphics; the same painter serves page,
+ * picture and window.
+ */
+public final class SchematicPainter {
+  private final Look look;
+  private final SchematicLabels labels;
+
+  /**
+   * A painter.
+   *
+   * @param look colours
+   * @param fonts faces
+   */
+  public SchematicPainter(Look look, PlotFonts fonts) {
+    this.look = look;
+    this.labels = new SchematicLabels(look, fonts);
+  }
+
+  /**
+   * Draws and reports where things are.
+   *
+   * @param g graphics whose user unit is one grid unit
+   * @param drawing geometry
+   * @param text words and figures
+   * @return where parts and nodes are, in grid units
+   */
+  public List<Hotspot> paint(Graphics2D g, Drawing drawing, SchematicText text) {
+    List<Hotspot> spots = new ArrayList<>();
+    g.setPaint(look.ink());
+    g.setStroke(ValveShapes.stroke(false));
+    for (Drawing.Wire wire : drawing.wires()) {
+      g.draw(SymbolShapes.line(wire.x1(), wire.y1(), wire.x2(), wire.y2()));
+    }
+    for (Drawing.Symbol symbol : drawing.symbols()) {
+      paintSymbol(g, symbol, text);
+      labels.symbol(g, symbol, text).ifPresent(spots::add);
+    }
+    for (Drawing.NodeMark mark : drawing.marks()) {
+      paintDot(g, mark.x(), mark.y());
+      labels.node(g, mark, text).ifPresent(spots::add);
+    }
+    return List.copyOf(spots);
+  }
+
+  private void paintDot(Graphics2D g, double x, double y) {
+    g.setPaint(look.ink());
+    g.fill(new java.awt.geom.Ellipse2D.Double(x - 0.24, y - 0.24, 0.48, 0.48));
+  }
+
+  private void paintSymbol(Graphics2D g, Drawing.Symbol symbol, SchematicText text) {
+    AffineTransform place = AffineTransform.getTranslateInstance(symbol.x(), symbol.y());
+    if (symbol.turned()) {
+      place.rotate(-Math.PI / 2);
+    }
+    if (symbol.mirrored()) {
+      place.scale(-1, 1);
+    }
+    Optional<String> part = symbol.part();
+    boolean chosen = part.isPresent() && text.chosen().contains(part.get());
+    SymbolShapes.Strokes strokes = shapes(symbol.type(), text.zigzag());
+    if (isTerminal(symbol.type())) {
+      // The wire ends at the middle; an open terminal shows no wire inside.
+      g.setPaint(look.paper());
+      strokes.lines().forEach(s -> g.fill(place.createTransformedShape(s)));
+    }
+    g.setPaint(chosen ? look.accent() : look.ink());
+    g.setStroke(ValveShapes.stroke(false));
+    for (Shape line : strokes.lines()) {
+      g.draw(place.createTransformedShape(line));
+    }
+    for (Shape solid : strokes.solids()) {
+      g.fill(place.createTransformedShape(solid));
+    }
+    g.setStroke(ValveShapes.stroke(true));
+    for (Shape heavy : strokes.heavy()) {
+      g.draw(place.createTransformedShape(heavy));
+    }
+  }
+
+  private static boolean isTerminal(Drawing.SymbolType type) {
+    return type == Drawing.SymbolType.INPUT || type == Drawing.SymbolType.OUTPUT;
+  }
+
+  private static SymbolShapes.Strokes shapes(Drawing.SymbolType type, boolean zigzag) {
+    return switch (type) {
+      case RESISTOR -> SymbolShapes.resistor(zigzag);
+      case CAPACITOR -> SymbolShapes.capacitor();
+      case ELECTROLYTIC -> SymbolShapes.electrolytic();
+      case INDUCTOR -> SymbolShapes.inductor();
+      case TRANSFORMER -> TransformerShapes.plain();
+      case CENTRE_TAPPED_TRANSFORMER -> TransformerShapes.centreTapped();
+      case DIODE -> SymbolShapes.diode(false, false);
+      case ZENER -> SymbolShapes.diode(true, false);
+      case LED -> SymbolShapes.diode(false, true);
+      case CURRENT_SOURCE -> SymbolShapes.currentSource();
+      case TRIODE -> ValveShapes.triode(false);
+      case DIRECTLY_HEATED_TRIODE -> ValveShapes.triode(true);
+      case PENTODE -> ValveShapes.pentode(false);
+      case BEAM_TETRODE -> ValveShapes.pentode(true);
+      case GROUND -> SymbolShapes.ground();
+      case SUPPLY, BIAS -> SymbolShapes.supply();
+      case INPUT, OUTPUT -> SymbolShapes.terminal();
+      case DOT -> SymbolShapes.dot();
+    };
+  }
+}

@@ -1,0 +1,99 @@
+package perveance.architecture;
+
+import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.tngtech.archunit.core.domain.Dependency;
+import com.tngtech.archunit.core.domain.JavaClass;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.DynamicTest;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestFactory;
+
+/** Every package uses only what its allow-list names; no exemptions. */
+class LayersTest {
+  /** Fewer classes than this means that the import found the wrong place. */
+  private static final int CLASSES_AT_LEAST = 40;
+
+  @Test
+  void theWholeProgramWasImported() {
+    assertTrue(
+        Program.CLASSES.size() >= CLASSES_AT_LEAST,
+        () -> "only " + Program.CLASSES.size() + " classes were found");
+  }
+
+  @Test
+  void everyClassBelongsToANamedLayer() {
+    List<String> strays =
+        Program.CLASSES.stream()
+            .filter(type -> Layers.of(type.getPackageName()).isEmpty())
+            .map(type -> type.getFullName() + " is in no layer; place its package in Layers")
+            .toList();
+    assertEquals(List.of(), strays);
+  }
+
+  @Test
+  void theAllowListsThemselvesPointOnlyInwards() {
+    Set<String> inner = new HashSet<>();
+    for (Layer layer : Layers.ALL) {
+      assertTrue(inner.containsAll(layer.layers()), () -> layer.name() + " points outwards");
+      assertTrue(inner.add(layer.name()), () -> layer.name() + " is listed twice");
+    }
+  }
+
+  @TestFactory
+  Stream<DynamicTest> everyLayerUsesOnlyWhatItIsPermitted() {
+    return Layers.ALL.stream()
+        .map(
+            layer ->
+                DynamicTest.dynamicTest(
+                    layer.name(), () -> assertEquals("", String.join("\n", breaches(layer)))));
+  }
+
+  @Test
+  void theTopPackagesAreFreeOfCycles() {
+    slices().matching("perveance.(*)..").should().beFreeOfCycles().check(Program.CLASSES);
+  }
+
+  @Test
+  void theEnginesPackagesAreFreeOfCycles() {
+    slices().matching("perveance.engine.(*)..").should().beFreeOfCycles().check(Program.CLASSES);
+  }
+
+  @Test
+  void allPackagesAreFreeOfCyclesAtAnyDepth() {
+    slices().matching("perveance.(**)").should().beFreeOfCycles().check(Program.CLASSES);
+  }
+
+  private static List<String> breaches(Layer layer) {
+    List<String> breaches = new ArrayList<>();
+    for (JavaClass type : Program.CLASSES) {
+      if (!Layers.of(type.getPackageName()).filter(layer::equals).isPresent()) {
+        continue;
+      }
+      for (Dependency dependency : type.getDirectDependenciesFromSelf()) {
+        if (!permitted(layer, dependency.getTargetClass().getBaseComponentType())) {
+          breaches.add(layer.name() + " may not use this: " + dependency.getDescription());
+        }
+      }
+    }
+    return breaches;
+  }
+
+  private static boolean permitted(Layer layer, JavaClass target) {
+    if (target.isPrimitive()) {
+      return true;
+    }
+    if (!target.getPackageName().startsWith(Layer.ROOT)) {
+      return layer.permitsOutside(target);
+    }
+    return Layers.of(target.getPackageName())
+        .filter(other -> other.equals(layer) || layer.layers().contains(other.name()))
+        .isPresent();
+  }
+}

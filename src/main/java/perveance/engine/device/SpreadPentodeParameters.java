@@ -1,0 +1,139 @@
+package perveance.engine.device;
+
+import java.util.List;
+import java.util.Map;
+
+/**
+ * The constants of a {@link SpreadPentodeLaw}.
+ *
+ * @param perveance G, above 0 [A V^-1.5]
+ * @param contactPotential Vc, added to the grid voltage [V]
+ * @param penetration D0, mean penetration factor of the screen through the grid, above 0 [1]
+ * @param spread s, half width of the spread of D0 relative to it, 0 to 1 [1]
+ * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
+ * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
+ * @param shareFall x0, anode to screen voltage ratio over which the share falls, above 0 [1]
+ * @param beamWidth r0, drive ratio at which the beams fill the screen's gaps; 0 where not aligned
+ *     [1]
+ * @param knee c, knee voltage as a part of the voltage that draws the current at no bias, above 0
+ *     [1]
+ * @param kneeSharpness n, 1 for a rounded knee, up to 2 for a sharp one [1]
+ * @param gridPerveance Gg, above 0 [A V^-1.5]
+ * @param gridOnset grid voltage at which 0.3 uA flows into the grid [V]
+ * @param thermalVoltage VT of the cathode, above 0 [V]
+ */
+public record SpreadPentodeParameters(
+    double perveance,
+    double contactPotential,
+    double penetration,
+    double spread,
+    double anodeInfluence,
+    double screenShare,
+    double shareFall,
+    double beamWidth,
+    double knee,
+    double kneeSharpness,
+    double gridPerveance,
+    double gridOnset,
+    double thermalVoltage) {
+  /** Refuses what has no meaning. */
+  public SpreadPentodeParameters {
+    positive("perveance", perveance);
+    finite("contactPotential", contactPotential);
+    positive("penetration", penetration);
+    within("spread", spread, 0, 1);
+    within("anodeInfluence", anodeInfluence, 0, 1);
+    positive("screenShare", screenShare);
+    positive("shareFall", shareFall);
+    within("beamWidth", beamWidth, 0, 10);
+    positive("knee", knee);
+    within("kneeSharpness", kneeSharpness, 1, 2);
+    positive("gridPerveance", gridPerveance);
+    finite("gridOnset", gridOnset);
+    positive("thermalVoltage", thermalVoltage);
+  }
+
+  /** Keys in the order of {@link #list}. */
+  static final List<String> KEYS =
+      List.of(
+          "perveance",
+          "contact_potential",
+          "penetration",
+          "spread",
+          "anode_influence",
+          "screen_share",
+          "share_fall",
+          "beam_width",
+          "knee",
+          "knee_sharpness",
+          "grid_perveance",
+          "grid_onset",
+          "thermal_voltage");
+
+  /**
+   * Reads the constants by the keys of a device file.
+   *
+   * @param values value by key, in SI units; further keys are not looked at
+   * @return the constants
+   * @throws IllegalArgumentException when a key is missing or a value is out of range
+   */
+  public static SpreadPentodeParameters of(Map<String, Double> values) {
+    double[] v = new double[KEYS.size()];
+    for (int i = 0; i < v.length; i++) {
+      Double value = values.get(KEYS.get(i));
+      if (value == null) {
+        throw new IllegalArgumentException("parameter is missing: " + KEYS.get(i));
+      }
+      v[i] = value;
+    }
+    return new SpreadPentodeParameters(
+        v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12]);
+  }
+
+  /**
+   * The constants with keys, units and meaning.
+   *
+   * @return in the order of the record
+   */
+  public List<LawParameter> list() {
+    return List.of(
+        parameter(0, perveance, "A V^-1.5", "perveance of the cathode"),
+        parameter(1, contactPotential, "V", "contact potential, added to the grid voltage"),
+        parameter(2, penetration, "1", "mean penetration factor of the screen through the grid"),
+        parameter(3, spread, "1", "half width of the spread of the penetration factor"),
+        parameter(
+            4, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
+        parameter(5, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
+        parameter(6, shareFall, "1", "Va/Vg2 over which the screen's share falls"),
+        parameter(
+            7, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
+        parameter(8, knee, "1", "knee over the voltage that draws the current at no bias"),
+        parameter(9, kneeSharpness, "1", "1 for a rounded knee, up to 2 for a sharp one"),
+        parameter(10, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(11, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(12, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+  }
+
+  private static LawParameter parameter(int index, double value, String unit, String meaning) {
+    return new LawParameter(KEYS.get(index), value, unit, meaning);
+  }
+
+  private static void positive(String name, double value) {
+    if (!(value > 0) || value == Double.POSITIVE_INFINITY) {
+      throw new IllegalArgumentException(name + " must be above 0, found " + value);
+    }
+  }
+
+  private static void within(String name, double value, double lowest, double highest) {
+    if (!(value >= lowest && value <= highest)) {
+      throw new IllegalArgumentException(
+          name + " must be from " + lowest + " to " + highest + ", found " + value);
+    }
+  }
+
+  private static void finite(String name, double value) {
+    if (!Double.isFinite(value)) {
+      throw new IllegalArgumentException(name + " must be finite, found " + value);
+    }
+  }
+}

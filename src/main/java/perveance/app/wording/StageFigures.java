@@ -1,0 +1,162 @@
+package perveance.app.wording;
+
+import java.util.ArrayList;
+import java.util.List;
+import perveance.engine.analysis.CleanSwing;
+import perveance.engine.analysis.DevicePoint;
+import perveance.engine.analysis.DrivenAnswer;
+import perveance.engine.analysis.SmallSignalAnswer;
+import perveance.engine.analysis.StageAnswer;
+import perveance.engine.base.Unit;
+
+/** What a stage should do, row by row. */
+public final class StageFigures {
+  private StageFigures() {}
+
+  /**
+   * The operating point of one valve section.
+   *
+   * @param point operating point
+   * @return rows
+   */
+  public static List<FigureRow> point(DevicePoint point) {
+    List<FigureRow> rows = new ArrayList<>();
+    rows.add(banded(point, "anode", point.anodeChassis(), Unit.VOLT, "anodeChassis"));
+    rows.add(banded(point, "cathode", point.cathodeChassis(), Unit.VOLT, "cathodeChassis"));
+    rows.add(new FigureRow("grid to cathode", Figures.reading(point.grid(), Unit.VOLT), "", ""));
+    point
+        .screenChassis()
+        .ifPresent(v -> rows.add(banded(point, "screen", v, Unit.VOLT, "screenChassis")));
+    rows.add(banded(point, "anode current", point.anodeCurrent(), Unit.AMPERE, "anodeCurrent"));
+    point
+        .screenCurrent()
+        .ifPresent(i -> rows.add(banded(point, "screen current", i, Unit.AMPERE, "screenCurrent")));
+    rows.add(
+        new FigureRow(
+            "mutual conductance",
+            Figures.reading(point.mutualConductance() * 1e3, Unit.RATIO) + " mA/V",
+            "",
+            "mu "
+                + Figures.reading(point.amplificationFactor(), Unit.RATIO)
+                + ", ra "
+                + Figures.reading(point.anodeResistance(), Unit.OHM)));
+    rows.add(
+        new FigureRow(
+            "anode dissipation", Figures.reading(point.anodeDissipation(), Unit.WATT), "", ""));
+    point
+        .screenDissipation()
+        .ifPresent(
+            w ->
+                rows.add(
+                    new FigureRow("screen dissipation", Figures.reading(w, Unit.WATT), "", "")));
+    return rows;
+  }
+
+  private static FigureRow banded(
+      DevicePoint point, String label, double value, Unit unit, String name) {
+    return new FigureRow(
+        label,
+        Figures.value(value, unit, point.bands(), name),
+        Figures.band(point.bands(), name, unit),
+        "");
+  }
+
+  /**
+   * Signal behaviour.
+   *
+   * @param answer the stage's answer
+   * @return rows
+   */
+  public static List<FigureRow> signal(StageAnswer answer) {
+    List<FigureRow> rows = new ArrayList<>();
+    smallSignal(answer.smallSignal(), rows);
+    clean(answer.clean(), rows);
+    answer.driven().ifPresent(d -> driven(d, rows));
+    SmallSignalAnswer small = answer.smallSignal();
+    rows.add(
+        new FigureRow(
+            "noise at the grid",
+            Figures.reading(small.noiseInput(), Unit.VOLT, 2) + " rms",
+            "",
+            "20 Hz to 20 kHz"));
+    return rows;
+  }
+
+  private static void smallSignal(SmallSignalAnswer small, List<FigureRow> rows) {
+    rows.add(
+        new FigureRow(
+            "gain",
+            Figures.value(small.gain(), Unit.RATIO, small.bands(), "gain"),
+            Figures.band(small.bands(), "gain", Unit.RATIO),
+            Figures.decibels(small.gain())));
+    small
+        .secondGain()
+        .ifPresent(
+            g ->
+                rows.add(
+                    new FigureRow(
+                        "gain to the second output", Figures.reading(g, Unit.RATIO), "", "")));
+    rows.add(
+        new FigureRow(
+            "output resistance",
+            Figures.value(small.outputResistance(), Unit.OHM, small.bands(), "outputResistance"),
+            Figures.band(small.bands(), "outputResistance", Unit.OHM),
+            ""));
+    rows.add(
+        new FigureRow(
+            "input capacitance",
+            Figures.reading(small.inputCapacitance(), Unit.FARAD, 2),
+            "",
+            "with Miller effect"));
+    rows.add(
+        new FigureRow(
+            "\u22123 dB",
+            Figures.frequency(small.lowCorner(), "dc")
+                + " to "
+                + Figures.frequency(small.highCorner(), "no limit found"),
+            "",
+            small
+                .shelf()
+                .map(
+                    s ->
+                        "bypass shelf "
+                            + Figures.reading(s.zero(), Unit.HERTZ, 2)
+                            + " to "
+                            + Figures.reading(s.pole(), Unit.HERTZ, 2))
+                .orElse("")));
+  }
+
+  private static void clean(CleanSwing clean, List<FigureRow> rows) {
+    rows.add(
+        new FigureRow(
+            "clean input",
+            Figures.value(clean.inputPeak(), Unit.VOLT, clean.bands(), "inputPeak") + " peak",
+            Figures.band(clean.bands(), "inputPeak", Unit.VOLT),
+            "ended by " + clean.limitedBy().word().replace('-', ' ')));
+    rows.add(
+        new FigureRow(
+            "clean output",
+            Figures.value(clean.outputPeak(), Unit.VOLT, clean.bands(), "outputPeak") + " peak",
+            Figures.band(clean.bands(), "outputPeak", Unit.VOLT),
+            clean.headroom().stream()
+                .mapToObj(
+                    h -> "headroom " + perveance.engine.base.QuantityFormat.TYPESET.level(h, 1))
+                .findFirst()
+                .orElse("")));
+  }
+
+  private static void driven(DrivenAnswer driven, List<FigureRow> rows) {
+    String at = "at " + Figures.reading(driven.inputPeak(), Unit.VOLT) + " peak in";
+    rows.add(new FigureRow("output", Figures.reading(driven.output(), Unit.VOLT) + " rms", "", at));
+    driven
+        .power()
+        .ifPresent(w -> rows.add(new FigureRow("power", Figures.reading(w, Unit.WATT), "", at)));
+    String second =
+        driven.harmonics().isEmpty() ? "" : "second " + Figures.percent(driven.harmonics().get(0));
+    String third =
+        driven.harmonics().size() < 2
+            ? ""
+            : ", third " + Figures.percent(driven.harmonics().get(1));
+    rows.add(new FigureRow("distortion", Figures.percent(driven.distortion()), "", second + third));
+  }
+}

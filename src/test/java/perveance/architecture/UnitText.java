@@ -41,8 +41,9 @@ final class UnitText {
     if (text.matches(".*\\b\\w*[Uu]nits?\\b.*")) {
       return true;
     }
-    // factors are joined by a space, a star or a slash; each may have a power
+    // factors are joined by a space, a star or a slash, and may have a power; a mixed array
+    // lists its units
     String factors = POWER.matcher(text).replaceAll("");
-    return Arrays.stream(factors.split("[ /*]+")).allMatch(UNITS::contains);
+    return Arrays.stream(factors.split("[ /*,]+")).allMatch(UNITS::contains);
   }
 }

@@ -53,7 +53,7 @@ public record SpreadTriodeParameters(
   /**
    * Reads the constants by the keys of a device file.
    *
-   * @param values value by key, in SI units; further keys are not looked at
+   * @param values value by key [SI unit of the key]; further keys are not looked at
    * @return the constants
    * @throws IllegalArgumentException when a key is missing or a value is out of range
    */

@@ -1,5 +1,7 @@
 package perveance.files.toml;
 
+import java.util.Locale;
+
 /**
  * A place in the text that moves on while it is read. Counts lines.
  *
@@ -149,7 +151,8 @@ final class Cursor {
   /** Control characters other than tab have no place in the text, not even in comments. */
   void requirePrintable(int c) throws TomlFault {
     if (!isPlain((char) c)) {
-      throw new TomlFault(line, String.format("control character U+%04X", c), "printable text");
+      throw new TomlFault(
+          line, String.format(Locale.ROOT, "control character U+%04X", c), "printable text");
     }
   }
 

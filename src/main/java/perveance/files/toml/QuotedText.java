@@ -1,5 +1,7 @@
 package perveance.files.toml;
 
+import java.util.Locale;
+
 /** Reads the four quoted forms of TOML and writes the one that is needed. */
 final class QuotedText {
   private static final String BASIC = "\"\"\"";
@@ -153,7 +155,7 @@ final class QuotedText {
         case '\t' -> out.append("\\t");
         default -> {
           if (c < ' ' || c == 0x7F) {
-            out.append(String.format("\\u%04X", (int) c));
+            out.append(String.format(Locale.ROOT, "\\u%04X", (int) c));
           } else {
             out.append(c);
           }

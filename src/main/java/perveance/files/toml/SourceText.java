@@ -11,6 +11,7 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalInt;
 import perveance.engine.base.BadInputException;
@@ -96,7 +97,8 @@ public record SourceText(String file, String text, boolean marked) {
     CharBuffer out = CharBuffer.allocate(bytes.length);
     CoderResult result = decoder.decode(in, out, true);
     if (result.isError()) {
-      String found = String.format("byte 0x%02X, which is not UTF-8", bytes[in.position()]);
+      String found =
+          String.format(Locale.ROOT, "byte 0x%02X, which is not UTF-8", bytes[in.position()]);
       throw refused(
           file, lineOf(bytes, in.position()), found, "UTF-8 text (save it as UTF-8 in the editor)");
     }

@@ -82,19 +82,9 @@ public abstract class DeviceLawContractTest {
     return Math.abs(anode);
   }
 
-  /** A state of the three voltages. */
-  private record Point(double anode, double grid, double screen) {
-    Point moved(int electrode, double by) {
-      return new Point(
-          anode + (electrode == ANODE ? by : 0),
-          grid + (electrode == GRID ? by : 0),
-          screen + (electrode == SCREEN ? by : 0));
-    }
-  }
-
-  private ElectrodeCurrents at(Point p) {
+  private ElectrodeCurrents at(ElectrodeVoltages p) {
     ElectrodeCurrents out = new ElectrodeCurrents();
-    law().evaluate(p.anode, p.grid, p.screen, out);
+    law().evaluate(p.anode(), p.grid(), p.screen(), out);
     return out;
   }
 
@@ -107,15 +97,15 @@ public abstract class DeviceLawContractTest {
   }
 
   /** A regular grid over the working range and seeded random points a little beyond it. */
-  private void everywhere(BiConsumer<Point, ElectrodeCurrents> check) {
+  private void everywhere(BiConsumer<ElectrodeVoltages, ElectrodeCurrents> check) {
     int steps = electrodes() == 3 ? 9 : 24;
     double low = lowestGridVoltage();
     double span = highestGridVoltage() - low;
     for (int i = 0; i <= steps; i++) {
       for (int j = 0; j <= (electrodes() > 1 ? steps : 0); j++) {
         for (int k = 0; k <= (electrodes() > 2 ? steps : 0); k++) {
-          Point p =
-              new Point(
+          ElectrodeVoltages p =
+              new ElectrodeVoltages(
                   highestAnodeVoltage() * (i - 1) / (steps - 1),
                   low + span * j / steps,
                   highestScreenVoltage() * k / steps);
@@ -125,8 +115,8 @@ public abstract class DeviceLawContractTest {
     }
     Random random = new Random(20110919);
     for (int i = 0; i < RANDOM_POINTS; i++) {
-      Point p =
-          new Point(
+      ElectrodeVoltages p =
+          new ElectrodeVoltages(
               highestAnodeVoltage() * (1.3 * random.nextDouble() - 0.1),
               low + span * (1.2 * random.nextDouble() - 0.1),
               highestScreenVoltage() * (1.3 * random.nextDouble() - 0.1));
@@ -153,7 +143,7 @@ public abstract class DeviceLawContractTest {
     everywhere(
         (p, out) -> {
           double step = 2e-5;
-          if (distanceToJoint(p.anode, p.grid, p.screen) < 4 * step) {
+          if (distanceToJoint(p.anode(), p.grid(), p.screen()) < 4 * step) {
             return;
           }
           for (int v = 0; v < electrodes(); v++) {
@@ -224,15 +214,15 @@ public abstract class DeviceLawContractTest {
   @Test
   void nothingFlowsBeyondCutOff() {
     double va = highestAnodeVoltage();
-    Point cutOff =
+    ElectrodeVoltages cutOff =
         electrodes() == 1
-            ? new Point(-va, 0, 0)
-            : new Point(va, 2 * lowestGridVoltage(), highestScreenVoltage());
+            ? new ElectrodeVoltages(-va, 0, 0)
+            : new ElectrodeVoltages(va, 2 * lowestGridVoltage(), highestScreenVoltage());
     ElectrodeCurrents out = at(cutOff);
     for (int e = 0; e < 3; e++) {
       assertEquals(0, out.current(e), negligibleCurrent(), NAMES[e] + " at " + cutOff);
     }
-    Point reversed = new Point(-va, 0, highestScreenVoltage());
+    ElectrodeVoltages reversed = new ElectrodeVoltages(-va, 0, highestScreenVoltage());
     assertEquals(0, at(reversed).current(ANODE), negligibleCurrent(), "anode at " + reversed);
   }
 
@@ -264,7 +254,7 @@ public abstract class DeviceLawContractTest {
     for (double a : values) {
       for (double g : values) {
         for (double s : values) {
-          ElectrodeCurrents out = at(new Point(a, g, s));
+          ElectrodeCurrents out = at(new ElectrodeVoltages(a, g, s));
           for (int e = 0; e < 3; e++) {
             assertTrue(Double.isFinite(out.current(e)), NAMES[e] + " at " + a + " " + g + " " + s);
             for (int v = 0; v < 3; v++) {
@@ -297,22 +287,20 @@ public abstract class DeviceLawContractTest {
   @Test
   void currentsAreContinuous() {
     Random random = new Random(1923);
-    double low = lowestGridVoltage();
-    double span = highestGridVoltage() - low;
     for (int line = 0; line < 60; line++) {
-      Point from = randomPoint(random, low, span);
-      Point to = randomPoint(random, low, span);
+      ElectrodeVoltages from = randomPoint(random);
+      ElectrodeVoltages to = randomPoint(random);
       int steps = 4000;
       ElectrodeCurrents before = at(from);
       for (int i = 1; i <= steps; i++) {
         double t = (double) i / steps;
-        Point p = between(from, to, t);
+        ElectrodeVoltages p = from.towards(to, t);
         ElectrodeCurrents now = at(p);
         for (int e = 0; e < 3; e++) {
           double rise = 0;
           double change = 0;
           for (int v = 0; v < 3; v++) {
-            double dv = component(to, v) - component(from, v);
+            double dv = to.component(v) - from.component(v);
             rise +=
                 Math.max(Math.abs(now.slope(e, v)), Math.abs(before.slope(e, v)))
                     * Math.abs(dv)
@@ -329,22 +317,11 @@ public abstract class DeviceLawContractTest {
     }
   }
 
-  private Point randomPoint(Random random, double low, double span) {
-    return new Point(
+  private ElectrodeVoltages randomPoint(Random random) {
+    return new ElectrodeVoltages(
         highestAnodeVoltage() * (1.2 * random.nextDouble() - 0.1),
-        low + span * random.nextDouble(),
+        lowestGridVoltage() + (highestGridVoltage() - lowestGridVoltage()) * random.nextDouble(),
         highestScreenVoltage() * random.nextDouble());
-  }
-
-  private static Point between(Point a, Point b, double t) {
-    return new Point(
-        a.anode + t * (b.anode - a.anode),
-        a.grid + t * (b.grid - a.grid),
-        a.screen + t * (b.screen - a.screen));
-  }
-
-  private static double component(Point p, int electrode) {
-    return electrode == ANODE ? p.anode : electrode == GRID ? p.grid : p.screen;
   }
 
   /** A specimen with twice the conduction draws twice the current at every point. */
@@ -354,7 +331,7 @@ public abstract class DeviceLawContractTest {
     ElectrodeCurrents other = new ElectrodeCurrents();
     everywhere(
         (p, out) -> {
-          twice.evaluate(p.anode, p.grid, p.screen, other);
+          twice.evaluate(p.anode(), p.grid(), p.screen(), other);
           assertEquals(
               2 * out.current(ANODE),
               other.current(ANODE),
@@ -375,7 +352,7 @@ public abstract class DeviceLawContractTest {
           if (electrodes() == 1) {
             return;
           }
-          shifted.evaluate(p.anode, p.grid - shift, p.screen, other);
+          shifted.evaluate(p.anode(), p.grid() - shift, p.screen(), other);
           assertEquals(
               out.current(ANODE),
               other.current(ANODE),
@@ -399,7 +376,8 @@ public abstract class DeviceLawContractTest {
     if (electrodes() == 1 || Double.isInfinite(onset)) {
       return;
     }
-    Point p = new Point(highestAnodeVoltage(), onset, highestScreenVoltage());
+    ElectrodeVoltages p =
+        new ElectrodeVoltages(highestAnodeVoltage(), onset, highestScreenVoltage());
     // 5 %: a small part of the electrons refused by the anode may add to it
     assertEquals(0.3e-6, at(p).current(GRID), 0.015e-6);
     assertTrue(at(p.moved(GRID, -0.2)).current(GRID) < 0.15e-6);

@@ -108,6 +108,10 @@ public final class StageFigures {
             Figures.reading(small.inputCapacitance(), Unit.FARAD, 2),
             "",
             "with Miller effect"));
+    response(small, rows);
+  }
+
+  private static void response(SmallSignalAnswer small, List<FigureRow> rows) {
     rows.add(
         new FigureRow(
             "\u22123 dB",

@@ -73,7 +73,7 @@ public record SpreadPentodeParameters(
   /**
    * Reads the constants by the keys of a device file.
    *
-   * @param values value by key, in SI units; further keys are not looked at
+   * @param values value by key [SI unit of the key]; further keys are not looked at
    * @return the constants
    * @throws IllegalArgumentException when a key is missing or a value is out of range
    */

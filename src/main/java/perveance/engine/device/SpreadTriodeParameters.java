@@ -39,7 +39,7 @@ public record SpreadTriodeParameters(
   }
 
   /** Keys in the order of {@link #list}. */
-  static final List<String> KEYS =
+  public static final List<String> KEYS =
       List.of(
           "perveance",
           "contact_potential",

@@ -1,0 +1,148 @@
+package perveance.files.device;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import perveance.engine.base.BadInputException;
+import perveance.engine.device.Capacitances;
+import perveance.engine.device.Device;
+import perveance.engine.device.DeviceLaw;
+import perveance.engine.device.Evidence;
+import perveance.engine.device.FitSummary;
+import perveance.engine.device.Heater;
+import perveance.engine.device.Ratings;
+import perveance.engine.device.Validity;
+import perveance.files.toml.Problems;
+import perveance.files.toml.SourceText;
+import perveance.files.toml.StrictTable;
+import perveance.files.toml.TomlParser;
+
+/** Reads device files. */
+public final class DeviceReader {
+  /** The version of the file's form that is read and written. */
+  static final int VERSION = 1;
+
+  private static final List<String> KINDS = List.of("triode", "pentode", "beam", "rectifier");
+
+  private final Problems problems;
+  private final StrictTable root;
+
+  private DeviceReader(SourceText source) {
+    this.problems = new Problems(source.file());
+    this.root = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
+  }
+
+  /**
+   * Reads a device with its law.
+   *
+   * @param source text of the file
+   * @return the device
+   * @throws BadInputException with everything that is wrong with the file
+   */
+  public static Device read(SourceText source) throws BadInputException {
+    DeviceReader reader = new DeviceReader(source);
+    DeviceSheet sheet = reader.sheet();
+    boolean hasGrid = !sheet.kind().equals("rectifier");
+    Optional<DeviceLaw> law = reader.part("law").flatMap(LawReader::law);
+    Optional<FitSummary> fit = reader.part("fit").map(LawReader::fit);
+    Optional<Validity> validity =
+        reader.part("validity").map(table -> LawReader.validity(table, hasGrid));
+    reader.root.refuseOthers();
+    reader.problems.refuse();
+    return sheet.with(law.orElseThrow(), fit.orElseThrow(), validity.orElseThrow());
+  }
+
+  /**
+   * Reads what is published, as a fit needs it; a law in the file is not looked at.
+   *
+   * @param source text of the file
+   * @return the sheet
+   * @throws BadInputException with everything that is wrong with the file
+   */
+  public static DeviceSheet readSheet(SourceText source) throws BadInputException {
+    DeviceReader reader = new DeviceReader(source);
+    DeviceSheet sheet = reader.sheet();
+    for (String key : List.of("law", "fit", "validity")) {
+      reader.root.table(key);
+    }
+    reader.root.refuseOthers();
+    reader.problems.refuse();
+    return sheet;
+  }
+
+  private DeviceSheet sheet() {
+    root.require("perveance_device", "the version of the file's form, " + VERSION);
+    root.whole("perveance_device", VERSION, VERSION);
+    String type = root.requiredText("type", "12AX7");
+    List<String> aliases = root.texts("aliases");
+    root.require("kind", "one of " + String.join(", ", KINDS));
+    String kind = root.word("kind", KINDS).orElse("triode");
+    int sections = root.whole("sections", 1, 4).orElse(1);
+    String base = root.text("base").orElse("");
+    root.text("basing");
+    return new DeviceSheet(
+        type,
+        aliases,
+        kind,
+        sections,
+        base,
+        pins(),
+        heaters(),
+        ratings(type),
+        root.table("capacitance").map(RatingsReader::capacitances).orElse(Capacitances.NONE),
+        evidence(usualConnection(kind)),
+        root.texts("notes"));
+  }
+
+  private Optional<StrictTable> part(String key) {
+    root.require(key, "a table [" + key + "], written by a fit");
+    return root.table(key);
+  }
+
+  private static String usualConnection(String kind) {
+    return switch (kind) {
+      case "triode" -> "triode";
+      case "rectifier" -> "diode";
+      default -> "pentode";
+    };
+  }
+
+  private Map<String, String> pins() {
+    Map<String, String> pins = new LinkedHashMap<>();
+    for (String text : root.texts("pins")) {
+      int space = text.indexOf(' ');
+      if (space < 1 || text.substring(space).isBlank()) {
+        root.complain("pins", '"' + text + '"', "a pin and its electrode, such as \"1 a2\"");
+      } else if (pins.put(text.substring(0, space), text.substring(space).strip()) != null) {
+        root.complain("pins", "pin " + text.substring(0, space) + " a second time", "it once only");
+      }
+    }
+    return pins;
+  }
+
+  private List<Heater> heaters() {
+    List<Heater> heaters = new ArrayList<>();
+    for (StrictTable table : root.tables("heater")) {
+      heaters.add(RatingsReader.heater(table));
+    }
+    return heaters;
+  }
+
+  private List<Ratings> ratings(String type) {
+    List<Ratings> ratings = new ArrayList<>();
+    for (StrictTable table : root.tables("rating")) {
+      ratings.add(RatingsReader.rating(table, type));
+    }
+    return ratings;
+  }
+
+  private List<Evidence> evidence(String usualConnection) {
+    List<Evidence> evidence = new ArrayList<>();
+    for (StrictTable table : root.tables("evidence")) {
+      evidence.add(EvidenceReader.read(table, usualConnection));
+    }
+    return evidence;
+  }
+}

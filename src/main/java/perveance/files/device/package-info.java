@@ -1,0 +1,5 @@
+/** Device files: read, written, found by any of their names. */
+@NullMarked
+package perveance.files.device;
+
+import org.jspecify.annotations.NullMarked;

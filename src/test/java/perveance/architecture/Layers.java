@@ -65,7 +65,8 @@ final class Layers {
           new Layer(
               "files",
               with(ENGINE, "app"),
-              with(FILE_JDK, "org.tomlj..", "com.fasterxml.jackson.core..")),
+              // the program's own device files are listed out of its jar
+              with(FILE_JDK, "java.util.jar", "java.util.zip", "com.fasterxml.jackson.core..")),
           new Layer(
               "plot",
               with(ENGINE, "app"),

@@ -2,6 +2,7 @@ package perveance.engine.base;
 
 import java.math.BigDecimal;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -17,16 +18,21 @@ public final class QuantityParser {
   private static final int LONGEST_TEXT = 60;
   private static final int MOST_EXPONENT_DIGITS = 4;
 
-  private static final Pattern PLAIN =
-      Pattern.compile("([+-]?)(\\d+(?:[.,]\\d*)?|[.,]\\d+)(?:[eE]([+-]?\\d+))?(\\D.*)?");
-
-  /** Digits, a letter in place of the decimal sign, digits, and perhaps a unit. */
-  private static final Pattern LETTER_CODE =
-      Pattern.compile("([+-]?)(\\d*)(\\p{L})(\\d+)(?:(?=\\D)(.*))?");
-
-  private static final Pattern THOUSANDS = Pattern.compile("[1-9]\\d{0,2},\\d{3}");
-
   private QuantityParser() {}
+
+  /** Built on the first text that needs them, which in most runs never comes. */
+  private static final class Forms {
+    static final Pattern PLAIN =
+        Pattern.compile("([+-]?)(\\d+(?:[.,]\\d*)?|[.,]\\d+)(?:[eE]([+-]?\\d+))?(\\D.*)?");
+
+    /** Digits, a letter in place of the decimal sign, digits, and perhaps a unit. */
+    static final Pattern LETTER_CODE =
+        Pattern.compile("([+-]?)(\\d*)(\\p{L})(\\d+)(?:(?=\\D)(.*))?");
+
+    static final Pattern THOUSANDS = Pattern.compile("[1-9]\\d{0,2},\\d{3}");
+
+    private Forms() {}
+  }
 
   /**
    * Reads a quantity of the unit expected.
@@ -37,6 +43,13 @@ public final class QuantityParser {
    * @throws QuantityException if the text is anything else, saying what was found and expected
    */
   public static Quantity parse(String text, Unit expected) throws QuantityException {
+    OptionalDouble usual = UsualQuantity.read(text, expected);
+    return usual.isPresent()
+        ? new Quantity(usual.getAsDouble(), expected)
+        : parseInFull(text, expected);
+  }
+
+  static Quantity parseInFull(String text, Unit expected) throws QuantityException {
     String shown = quoted(text);
     String tidy = tidy(text);
     if (tidy.isEmpty()) {
@@ -53,7 +66,7 @@ public final class QuantityParser {
   }
 
   private static Optional<BigDecimal> readLetterCode(String tidy, Unit expected) {
-    Matcher code = LETTER_CODE.matcher(tidy);
+    Matcher code = Forms.LETTER_CODE.matcher(tidy);
     if (!code.matches() || "eE".contains(code.group(3))) {
       return Optional.empty();
     }
@@ -73,11 +86,11 @@ public final class QuantityParser {
 
   private static BigDecimal readPlain(String tidy, String shown, Unit expected)
       throws QuantityException {
-    Matcher plain = PLAIN.matcher(tidy);
+    Matcher plain = Forms.PLAIN.matcher(tidy);
     if (!plain.matches()) {
       throw refusal(shown, expected);
     }
-    if (THOUSANDS.matcher(plain.group(2)).matches()) {
+    if (Forms.THOUSANDS.matcher(plain.group(2)).matches()) {
       throw refusal(shown + ", which can mean two things by its comma", expected);
     }
     BigDecimal number = decimal(plain, shown, expected);
@@ -95,7 +108,7 @@ public final class QuantityParser {
 
   /** The unit that stands there instead of the one expected, "4k7 ohm" where volts belong too. */
   private static Optional<Unit> otherUnit(String tidy, String suffix) {
-    Matcher code = LETTER_CODE.matcher(tidy);
+    Matcher code = Forms.LETTER_CODE.matcher(tidy);
     String letters = code.matches() && code.group(5) != null ? code.group(5).strip() : suffix;
     return UnitSpelling.readAny(letters)
         .or(() -> code.matches() ? UnitSpelling.readAny(code.group(3)) : Optional.empty())

@@ -19,7 +19,10 @@ import perveance.files.toml.SourceText;
 import perveance.files.toml.StrictTable;
 import perveance.files.toml.TomlParser;
 
-/** Reads device files. */
+/**
+ * Reads device files. Written without lambdas: a device is the first thing that a short command
+ * reads, and linking a lambda costs it a millisecond or two each.
+ */
 public final class DeviceReader {
   /** The version of the file's form that is read and written. */
   static final int VERSION = 1;
@@ -44,11 +47,10 @@ public final class DeviceReader {
   public static Device read(SourceText source) throws BadInputException {
     DeviceReader reader = new DeviceReader(source);
     DeviceSheet sheet = reader.sheet();
-    boolean hasGrid = !sheet.kind().equals("rectifier");
-    Optional<DeviceLaw> law = reader.part("law").flatMap(LawReader::law);
-    Optional<FitSummary> fit = reader.part("fit").map(LawReader::fit);
-    Optional<Validity> validity =
-        reader.part("validity").map(table -> LawReader.validity(table, hasGrid));
+    Optional<StrictTable> lawTable = reader.part("law");
+    Optional<DeviceLaw> law = lawTable.isEmpty() ? Optional.empty() : LawReader.law(lawTable.get());
+    Optional<FitSummary> fit = reader.fit();
+    Optional<Validity> validity = reader.validity(!sheet.kind().equals("rectifier"));
     reader.root.refuseOthers();
     reader.problems.refuse();
     return sheet.with(law.orElseThrow(), fit.orElseThrow(), validity.orElseThrow());
@@ -91,7 +93,7 @@ public final class DeviceReader {
         pins(),
         heaters(),
         ratings(type),
-        root.table("capacitance").map(RatingsReader::capacitances).orElse(Capacitances.NONE),
+        capacitances(),
         evidence(usualConnection(kind)),
         root.texts("notes"));
   }
@@ -99,6 +101,23 @@ public final class DeviceReader {
   private Optional<StrictTable> part(String key) {
     root.require(key, "a table [" + key + "], written by a fit");
     return root.table(key);
+  }
+
+  private Optional<FitSummary> fit() {
+    Optional<StrictTable> table = part("fit");
+    return table.isEmpty() ? Optional.empty() : Optional.of(LawReader.fit(table.get()));
+  }
+
+  private Optional<Validity> validity(boolean hasGrid) {
+    Optional<StrictTable> table = part("validity");
+    return table.isEmpty()
+        ? Optional.empty()
+        : Optional.of(LawReader.validity(table.get(), hasGrid));
+  }
+
+  private Capacitances capacitances() {
+    Optional<StrictTable> table = root.table("capacitance");
+    return table.isEmpty() ? Capacitances.NONE : RatingsReader.capacitances(table.get());
   }
 
   private static String usualConnection(String kind) {

@@ -17,7 +17,7 @@ final class LawReader {
 
   static Optional<DeviceLaw> law(StrictTable table) {
     table.require("name", "one of " + String.join(", ", LawForm.words()));
-    Optional<LawForm> form = table.word("name", LawForm.words()).flatMap(LawForm::named);
+    Optional<LawForm> form = LawForm.named(table.word("name", LawForm.words()).orElse(""));
     if (form.isEmpty()) {
       return Optional.empty();
     }

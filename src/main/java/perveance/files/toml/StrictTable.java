@@ -65,6 +65,17 @@ public final class StrictTable {
   }
 
   /**
+   * The line on which a key stands.
+   *
+   * @param key the key
+   * @return its line; the table's where the key is absent
+   */
+  public int lineOf(String key) {
+    Optional<TomlEntry> entry = table.find(key);
+    return entry.isPresent() ? entry.get().line() : line();
+  }
+
+  /**
    * Whether a key stands there, readable or not.
    *
    * @param key the key
@@ -290,12 +301,15 @@ public final class StrictTable {
   public void refuseOthers() {
     for (TomlEntry entry : table.entries()) {
       if (!known.contains(entry.key())) {
+        Optional<String> suggestion = NearMiss.suggest(entry.key(), known);
         complaints.add(
             entry.keySpan(),
             entry.key(),
             "an unknown key",
-            "one of " + String.join(", ", known),
-            NearMiss.suggest(entry.key(), known));
+            suggestion.isPresent()
+                ? "a key that belongs here"
+                : "one of " + String.join(", ", known),
+            suggestion);
       }
     }
   }

@@ -30,8 +30,7 @@ final class PicturePair implements Block {
     for (int i = 0; i < pictures.size(); i++) {
       double w = room * shares[i];
       ink.box(left, y, w, tall, 0.6, Ink.RULE);
-      ink.artwork(
-          pictures.get(i), left + INSET, y + INSET, w - 2 * INSET, tall - 2 * INSET);
+      ink.artwork(pictures.get(i), left + INSET, y + INSET, w - 2 * INSET, tall - 2 * INSET);
       left += w + GUTTER;
     }
   }

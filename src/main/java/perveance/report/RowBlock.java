@@ -71,8 +71,7 @@ final class RowBlock implements Block {
     }
   }
 
-  private void words(
-      Ink ink, int column, double left, double y, double width, double height) {
+  private void words(Ink ink, int column, double left, double y, double width, double height) {
     List<String> lines = lines(column, width);
     double baseline = y + (height - lines.size() * size * LEADING) / 2 + size;
     Cell cell = cells.get(column);

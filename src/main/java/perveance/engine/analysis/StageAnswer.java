@@ -3,6 +3,7 @@ package perveance.engine.analysis;
 import java.util.List;
 import java.util.Optional;
 import perveance.engine.base.Finding;
+import perveance.engine.stage.Drawing;
 import perveance.engine.stage.StageCircuit;
 
 /**
@@ -11,6 +12,7 @@ import perveance.engine.stage.StageCircuit;
  * @param ref reference
  * @param kind name of the kind
  * @param circuit what is where
+ * @param drawing the schematic
  * @param points operating point of each valve section
  * @param limits use of every published limit
  * @param smallSignal small-signal figures
@@ -28,6 +30,7 @@ public record StageAnswer(
     String ref,
     String kind,
     StageCircuit circuit,
+    Drawing drawing,
     List<DevicePoint> points,
     List<LimitUse> limits,
     SmallSignalAnswer smallSignal,

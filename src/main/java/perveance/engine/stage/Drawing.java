@@ -25,14 +25,16 @@ public record Drawing(
   /**
    * A symbol; two-terminal symbols span four grid units centred at (x, y); a valve's envelope has a
    * radius of three units, with anode at (x, y-4), grid at (x-4, y), cathode at (x, y+4), screen at
-   * (x+4, y).
+   * (x+4, y). {@link SymbolShape} gives the terminals, the room and the room for text of each.
    *
    * @param type what is drawn
    * @param x centre
    * @param y centre
    * @param turned true when a two-terminal symbol lies along x instead of along y
    * @param mirrored true when a valve's grid is on the right
-   * @param part element name of the part it shows, {@code ref.key}; empty for ground and dots
+   * @param part name of the circuit element it shows: a part or a valve of the stage, {@code
+   *     ref.source} at the input terminal, {@code ref.grid_bias} at a bias, {@code supply.A} at a
+   *     rail; empty for ground, outputs and dots
    * @param label side on which its text stands
    * @param text fixed text, for example the name of a supply node; may be empty
    */

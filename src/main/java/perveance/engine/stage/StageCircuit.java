@@ -16,6 +16,7 @@ import perveance.engine.device.Device;
  * @param parts parts to buy, in reading order
  * @param testPoints points to measure, in measuring order
  * @param loadLine the device and the view shown as load line, empty when the kind has none
+ * @param assumptions what the circuit takes for granted where the stage is silent, in sentences
  */
 public record StageCircuit(
     String ref,
@@ -25,13 +26,15 @@ public record StageCircuit(
     List<StageDevice> devices,
     List<Part> parts,
     List<TestPoint> testPoints,
-    Optional<LoadLineSpec> loadLine) {
+    Optional<LoadLineSpec> loadLine,
+    List<String> assumptions) {
   /** Copies the lists. */
   public StageCircuit {
     outputs = List.copyOf(outputs);
     devices = List.copyOf(devices);
     parts = List.copyOf(parts);
     testPoints = List.copyOf(testPoints);
+    assumptions = List.copyOf(assumptions);
   }
 
   /**

@@ -10,11 +10,32 @@ import perveance.engine.device.Device;
  *
  * @param entry the stage as entered
  * @param devices devices by key ({@code device}, {@code device2})
+ * @param around what stands around the stage in its chassis
  */
-public record StageValues(StageEntry entry, Map<String, Device> devices) {
+public record StageValues(StageEntry entry, Map<String, Device> devices, Surroundings around) {
   /** Copies the map. */
   public StageValues {
     devices = Map.copyOf(devices);
+  }
+
+  /**
+   * A stage by itself.
+   *
+   * @param entry the stage as entered
+   * @param devices devices by key ({@code device}, {@code device2})
+   */
+  public StageValues(StageEntry entry, Map<String, Device> devices) {
+    this(entry, devices, Surroundings.NONE);
+  }
+
+  /**
+   * The same stage in other surroundings.
+   *
+   * @param surroundings what stands around it
+   * @return the stage there
+   */
+  public StageValues in(Surroundings surroundings) {
+    return new StageValues(entry, devices, surroundings);
   }
 
   /**

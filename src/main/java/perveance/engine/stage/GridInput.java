@@ -1,0 +1,168 @@
+package perveance.engine.stage;
+
+import static perveance.engine.stage.StageKeys.GRID_BIAS;
+import static perveance.engine.stage.StageKeys.GRID_LEAK;
+import static perveance.engine.stage.StageKeys.GRID_STOPPER;
+import static perveance.engine.stage.StageKeys.INPUT_COUPLING;
+import static perveance.engine.stage.StageKeys.SOURCE;
+
+import java.util.List;
+import java.util.Optional;
+import perveance.engine.stage.Drawing.Side;
+import perveance.engine.stage.Drawing.SymbolType;
+
+/**
+ * What leads to a grid: a source behind its resistance and a capacitor, or the wire from the stage
+ * before; then the leak to its foot and a stopper.
+ */
+final class GridInput {
+  /** Keys, in the order of the signal. */
+  static final List<KeySpec> KEYS = List.of(SOURCE, INPUT_COUPLING, GRID_LEAK, GRID_STOPPER);
+
+  /** Grid leak where none is stated; usual practice for receiving valves [ohm]. */
+  private static final double USUAL_LEAK = 1e6;
+
+  /** Stands for a source without resistance, small against any other part [ohm]. */
+  private static final double NO_SOURCE_RESISTANCE = 1;
+
+  private GridInput() {}
+
+  /** Whether the stage before is wired straight to the grid. */
+  static boolean direct(StageValues values) {
+    return values.around().directInput().isPresent();
+  }
+
+  /** Whether a leak belongs to the circuit: always, but where the stage before holds the grid. */
+  static boolean hasLeak(StageValues values) {
+    return values.has(GRID_LEAK.key()) || !direct(values);
+  }
+
+  /** The node that a grid leak returns to: a stated bias, or chassis. */
+  static int biasFoot(StageWiring wiring) {
+    if (!wiring.values().has(GRID_BIAS.key())) {
+      return 0;
+    }
+    int foot = wiring.node("bias");
+    wiring.voltageSource(GRID_BIAS.key(), foot, 0, wiring.values().number(GRID_BIAS.key()));
+    return foot;
+  }
+
+  /** Wires the input up to the node before the stopper. */
+  static int wire(StageWiring wiring, int foot) {
+    StageValues values = wiring.values();
+    int joint = entry(wiring);
+    if (hasLeak(values)) {
+      double leak = values.number(GRID_LEAK.key(), USUAL_LEAK);
+      if (!values.has(GRID_LEAK.key())) {
+        wiring.assume("The grid leak is not stated; taken as 1 Mohm.");
+      }
+      wiring.resistor(GRID_LEAK.key(), GRID_LEAK, leak, joint, foot, "grid leak");
+    }
+    return joint;
+  }
+
+  /** Wires the source, or takes the wire from the stage before. */
+  static int entry(StageWiring wiring) {
+    Optional<String> straight = wiring.values().around().directInput();
+    if (straight.isPresent()) {
+      int node = wiring.outerNode(straight.get());
+      wiring.input(Optional.empty(), node);
+      return node;
+    }
+    int source = wiring.node("input");
+    int entry = wiring.node("entry");
+    int joint = wiring.node("grid_in");
+    wiring.voltageSource("input", source, 0, 0);
+    wiring.outerResistor(SOURCE.key(), source, entry, sourceResistance(wiring));
+    coupling(wiring, INPUT_COUPLING.key(), entry, joint);
+    wiring.input(Optional.of(wiring.name("input")), entry);
+    return joint;
+  }
+
+  static double sourceResistance(StageWiring wiring) {
+    StageValues values = wiring.values();
+    if (values.has(SOURCE.key())) {
+      return values.number(SOURCE.key());
+    }
+    if (values.around().sourceResistance().isEmpty()) {
+      wiring.assume("The source is not stated; taken as 1 ohm.");
+    }
+    return Math.max(
+        NO_SOURCE_RESISTANCE, values.around().sourceResistance().orElse(NO_SOURCE_RESISTANCE));
+  }
+
+  static void coupling(StageWiring wiring, String local, int entry, int joint) {
+    if (wiring.values().has(INPUT_COUPLING.key())) {
+      double capacitance = wiring.values().number(INPUT_COUPLING.key());
+      wiring.capacitor(local, INPUT_COUPLING, capacitance, entry, joint, "input coupling");
+    } else {
+      wiring.idealCapacitor(local, entry, joint);
+      wiring.assume("The capacitor before the grid is not stated; it sets no corner here.");
+    }
+  }
+
+  /** Wires a stopper, if there is one, and gives the grid's node. */
+  static int stopper(StageWiring wiring, int joint, String suffix) {
+    if (!wiring.values().has(GRID_STOPPER.key())) {
+      return joint;
+    }
+    int grid = wiring.node("grid" + suffix);
+    double resistance = wiring.values().number(GRID_STOPPER.key());
+    String local = GRID_STOPPER.key() + suffix;
+    wiring.resistor(local, GRID_STOPPER, resistance, joint, grid, "grid stopper");
+    return grid;
+  }
+
+  /**
+   * Draws the input, from the terminal on the left to a joint twelve units left of the valve, and
+   * the leak below the joint.
+   *
+   * @param joint where the leak hangs
+   * @param y height of the grid
+   */
+  static void sketch(Sketch sketch, int joint, int y) {
+    terminal(sketch, joint, y);
+    if (hasLeak(sketch.values())) {
+      sketch.wire(joint, y, joint, y + 2);
+      sketch.upright(SymbolType.RESISTOR, joint, y + 4, GRID_LEAK.key(), Side.LEFT);
+      foot(sketch, joint, y + 6);
+    }
+  }
+
+  static void terminal(Sketch sketch, int joint, int y) {
+    StageValues values = sketch.values();
+    if (direct(values)) {
+      sketch.input(joint - 6, y, Optional.empty(), "from " + values.around().directInput().get());
+      sketch.wire(joint - 6, y, joint, y);
+    } else if (values.has(INPUT_COUPLING.key())) {
+      sketch.input(joint - 12, y, Optional.of(SOURCE), "in");
+      sketch.wire(joint - 12, y, joint - 6, y);
+      sketch.lying(SymbolType.CAPACITOR, joint - 4, y, INPUT_COUPLING.key(), Side.ABOVE);
+      sketch.wire(joint - 2, y, joint, y);
+    } else {
+      sketch.input(joint - 6, y, Optional.of(SOURCE), "in");
+      sketch.wire(joint - 6, y, joint, y);
+    }
+  }
+
+  /** Draws the foot of the grid leak: a bias or chassis. */
+  static void foot(Sketch sketch, int x, int y) {
+    if (sketch.values().has(GRID_BIAS.key())) {
+      sketch.symbol(SymbolType.BIAS, x, y, GRID_BIAS.key(), Side.BELOW, "bias");
+    } else {
+      sketch.ground(x, y);
+    }
+  }
+
+  /** Draws from the joint to a grid terminal, with the stopper if there is one. */
+  static void sketchStopper(Sketch sketch, int joint, int grid, int y, String suffix) {
+    if (sketch.values().has(GRID_STOPPER.key())) {
+      int centre = grid - 4;
+      sketch.wire(joint, y, centre - 2, y);
+      sketch.lying(SymbolType.RESISTOR, centre, y, GRID_STOPPER.key() + suffix, Side.ABOVE);
+      sketch.wire(centre + 2, y, grid, y);
+    } else {
+      sketch.wire(joint, y, grid, y);
+    }
+  }
+}

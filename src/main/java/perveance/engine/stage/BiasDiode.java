@@ -78,30 +78,32 @@ enum BiasDiode {
    * @return the law
    */
   JunctionLaw law(double voltage, double current) {
+    double junctions = Math.max(1, Math.rint(voltage / SILICON_DROP));
     return switch (this) {
-      case SILICON -> {
-        long junctions = Math.max(1, Math.round(voltage / SILICON_DROP));
-        yield forward(voltage, current, junctions * SILICON_COEFFICIENT * THERMAL);
-      }
-      case LED -> forward(voltage, current, LED_COEFFICIENT * THERMAL);
-      case ZENER -> breakdown(voltage, current);
+      case SILICON -> forward(voltage, current, junctions * SILICON_COEFFICIENT, junctions * 0.5);
+      case LED -> forward(voltage, current, LED_COEFFICIENT, 2);
+      case ZENER ->
+          new JunctionLaw(
+              word, 1e-14, SILICON_COEFFICIENT * THERMAL, 1, voltage, slope(voltage), current);
     };
   }
 
-  private JunctionLaw forward(double voltage, double current, double emission) {
-    double saturation = current / Math.expm1(voltage / emission);
-    return new JunctionLaw(word, saturation, emission, 0, Double.POSITIVE_INFINITY, emission);
+  /** A forward law with a bulk resistance of an order usual for small diodes [ohm]. */
+  private JunctionLaw forward(
+      double voltage, double current, double coefficient, double resistance) {
+    double emission = coefficient * THERMAL;
+    double junction = Math.max(0.5 * voltage, voltage - current * resistance);
+    double series = (voltage - junction) / current;
+    double saturation = Math.max(Double.MIN_NORMAL, current / Math.expm1(junction / emission));
+    return new JunctionLaw(
+        word, saturation, emission, series, Double.POSITIVE_INFINITY, emission, current);
   }
 
   /**
    * Slope voltage (resistance times current) in the order of small zeners' data sheets: 0.4 V for
    * the soft ones below 5.1 V, 60 mV near 6 V, 0.6 % of the voltage higher up.
    */
-  private JunctionLaw breakdown(double voltage, double current) {
-    double slope = voltage < SOFT_BELOW ? 0.4 : Math.max(0.06, 0.006 * voltage);
-    double emission = SILICON_COEFFICIENT * THERMAL;
-    double saturation = 1e-14;
-    double knee = voltage - slope * Math.log(current / saturation);
-    return new JunctionLaw(word, saturation, emission, 0, Math.max(0.01, knee), slope);
+  private static double slope(double voltage) {
+    return voltage < SOFT_BELOW ? 0.4 : Math.max(0.06, 0.006 * voltage);
   }
 }

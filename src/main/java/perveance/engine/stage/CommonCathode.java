@@ -22,9 +22,10 @@ final class CommonCathode implements StageKind {
 
   private static final List<KeySpec> KEYS =
       KeyList.of(
-          GroundedCathode.FIRST_KEYS,
-          List.of(ANODE_LOAD, ANODE_CURRENT, CURRENT_SOURCE_RESISTANCE),
-          GroundedCathode.LAST_KEYS);
+          List.of(
+              GroundedCathode.FIRST_KEYS,
+              List.of(ANODE_LOAD, ANODE_CURRENT, CURRENT_SOURCE_RESISTANCE),
+              GroundedCathode.LAST_KEYS));
 
   @Override
   public String name() {

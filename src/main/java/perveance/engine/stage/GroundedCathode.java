@@ -22,21 +22,22 @@ final class GroundedCathode {
   /** Keys after those of the load. */
   static final List<KeySpec> LAST_KEYS =
       KeyList.of(
-          CathodeBias.KEYS,
-          List.of(GRID_BIAS),
-          ScreenFeed.KEYS,
-          GridInput.KEYS,
-          OutputCoupling.KEYS,
-          CommonKeys.LIST);
+          List.of(
+              CathodeBias.KEYS,
+              List.of(GRID_BIAS),
+              ScreenFeed.KEYS,
+              GridInput.KEYS,
+              OutputCoupling.KEYS,
+              CommonKeys.LIST));
 
   /** Where the valve stands. */
   static final int X = 20;
 
   /** Height of the centre of what feeds the anode. */
-  static final int LOAD = 6;
+  static final int LOAD = 5;
 
-  private static final int RAIL = 3;
-  private static final int ANODE = 10;
+  private static final int RAIL = 2;
+  private static final int ANODE = 9;
   private static final int GRID = 16;
   private static final int JOINT = 8;
 
@@ -118,7 +119,7 @@ final class GroundedCathode {
     if (ScreenFeed.tied(values)) {
       sketch.wire(X + 4, GRID, X + 5, GRID, X + 5, ANODE + 1, X, ANODE + 1);
     }
-    int from = fed ? X + 12 : last;
+    int from = fed ? X + 16 : last;
     sketch.wire(X, ANODE, from, ANODE);
     OutputCoupling.sketch(sketch, from, ANODE);
   }

@@ -1,7 +1,6 @@
 package perveance.engine.stage;
 
 import java.util.List;
-import java.util.stream.Stream;
 
 /**
  * Puts the keys of the parts of a stage into one list, each key once, in the order of the parts.
@@ -9,8 +8,7 @@ import java.util.stream.Stream;
 final class KeyList {
   private KeyList() {}
 
-  @SafeVarargs
-  static List<KeySpec> of(List<KeySpec>... groups) {
-    return Stream.of(groups).flatMap(List::stream).distinct().toList();
+  static List<KeySpec> of(List<List<KeySpec>> groups) {
+    return groups.stream().flatMap(List::stream).distinct().toList();
   }
 }

@@ -99,10 +99,10 @@ final class OutputCoupling {
     StageValues values = sketch.values();
     int at = x + 8;
     if (values.has(COUPLING.key())) {
-      sketch.wire(x, y, x + 6, y);
-      sketch.lying(SymbolType.CAPACITOR, x + 8, y, COUPLING.key() + suffix, Side.ABOVE);
-      at = x + 16;
-      sketch.wire(x + 10, y, at, y);
+      sketch.wire(x, y, x + 8, y);
+      sketch.lying(SymbolType.CAPACITOR, x + 10, y, COUPLING.key() + suffix, Side.ABOVE);
+      at = x + 18;
+      sketch.wire(x + 12, y, at, y);
     } else {
       sketch.wire(x, y, at, y);
     }

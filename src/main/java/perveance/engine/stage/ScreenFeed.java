@@ -67,7 +67,8 @@ final class ScreenFeed {
 
   private static void noScreen(StageValues values, List<Complaint> complaints) {
     for (KeySpec key : KEYS) {
-      boolean harmless = key == CONNECTION && values.word(key.key()).orElse("").equals("triode");
+      boolean harmless =
+          key.equals(CONNECTION) && values.word(key.key()).orElse("").equals("triode");
       if (values.has(key.key()) && !harmless) {
         complaints.add(
             new Complaint(
@@ -128,7 +129,7 @@ final class ScreenFeed {
     StageValues values = sketch.values();
     int x = valve + 14;
     sketch.wire(valve + 4, y, x, y);
-    int top = y - 10;
+    int top = y - 11;
     if (values.has(SCREEN_RESISTOR.key())) {
       sketch.wire(x, top + 2, x, y);
       sketch.upright(SymbolType.RESISTOR, x, top, SCREEN_RESISTOR.key(), Side.RIGHT);

@@ -77,8 +77,8 @@ public final class SymbolShape {
               new Point(x - 2, y - 4),
               new Point(x - 2, y + 4),
               new Point(x - 2, y),
-              new Point(x + 2, y - 4),
-              new Point(x + 2, y + 4));
+              new Point(x + 2, y - 2),
+              new Point(x + 2, y + 2));
       case CENTRE_TAPPED_TRANSFORMER ->
           List.of(
               new Point(x - 2, y - 8),
@@ -86,8 +86,8 @@ public final class SymbolShape {
               new Point(x - 2, y + 8),
               new Point(x - 2, y - 4),
               new Point(x - 2, y + 4),
-              new Point(x + 2, y - 4),
-              new Point(x + 2, y + 4));
+              new Point(x + 2, y - 2),
+              new Point(x + 2, y + 2));
       case GROUND, SUPPLY, BIAS, INPUT, OUTPUT, DOT -> List.of(new Point(x, y));
     };
   }

@@ -116,7 +116,8 @@ public final class SeededNormal {
       return fromCentre * polynomial(CENTRE_TOP, r) / polynomial(CENTRE_BOTTOM, r);
     }
     double tail = fromCentre < 0 ? probability : 1 - probability;
-    double r = Math.sqrt(-Math.log(tail));
+    // the strict logarithm, because the fast one may differ in the last place between machines
+    double r = Math.sqrt(-StrictMath.log(tail));
     double size =
         r <= 5
             ? polynomial(SHOULDER_TOP, r - 1.6) / polynomial(SHOULDER_BOTTOM, r - 1.6)

@@ -158,7 +158,7 @@ public final class DcSolver {
    * read with {@link #voltage} and {@link #valve} until the next solve.
    *
    * @param point where to start, all zeros when nothing is known; overwritten with the point found,
-   *     left with the last point tried on failure [V, A]
+   *     left with the last point tried on failure; node voltages [V], then branch currents [A]
    * @return whether a point was found
    */
   public boolean solveInto(double[] point) {
@@ -218,5 +218,13 @@ public final class DcSolver {
    */
   public double residual() {
     return newton.kirchhoffResidual();
+  }
+
+  NodalSystem system() {
+    return equations.system;
+  }
+
+  ElementValues values() {
+    return values;
   }
 }

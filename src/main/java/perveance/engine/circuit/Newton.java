@@ -24,7 +24,7 @@ final class Newton {
   private static final double SHORTEST = 1.0 / 1024;
 
   /** A leak in the matrix alone: it lets a node whose valves are all cut off be solved [S]. */
-  private static final double LEAK = 1e-13;
+  static final double LEAK = 1e-13;
 
   private final NodalSystem system;
   private final DenseLu lu;

@@ -1,6 +1,7 @@
 package perveance.engine.circuit;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import perveance.engine.circuit.Element.VoltageSource;
 
@@ -81,5 +82,26 @@ final class Topology {
         voltage[source.minus()] = voltage[source.plus()] - across;
       }
     }
+  }
+
+  /**
+   * Writes the volts on each known node for one volt of one source, all others being shorts.
+   *
+   * @return whether the source fixes a node
+   */
+  boolean writeUnit(int element, double[] voltage) {
+    boolean fixes = false;
+    Arrays.fill(voltage, 0);
+    for (int i = 0; i < fixingSources.length; i++) {
+      VoltageSource source = (VoltageSource) circuit.elements().get(fixingSources[i]);
+      double across = fixingSources[i] == element ? 1 : 0;
+      fixes |= fixingSources[i] == element;
+      if (fixedNodes[i] == source.plus()) {
+        voltage[source.plus()] = voltage[source.minus()] + across;
+      } else {
+        voltage[source.minus()] = voltage[source.plus()] - across;
+      }
+    }
+    return fixes;
   }
 }

@@ -56,6 +56,14 @@ final class ValveBank {
     }
   }
 
+  int active(int v) {
+    return active[v];
+  }
+
+  int electrode(int v, int electrode) {
+    return node[ELECTRODES * v + electrode];
+  }
+
   int anode(int v) {
     return node[ELECTRODES * v];
   }

@@ -1,0 +1,233 @@
+package perveance.engine.circuit;
+
+import java.util.Optional;
+
+/**
+ * Small signals about a dc point: every valve and junction replaced by its slopes, every capacitor
+ * and inductor by its complex admittance. Mid-band figures take holding capacitors as shorts,
+ * strays as open, inductors and magnetising currents as open.
+ *
+ * <p>Predicts voltages in proportion to one source while all others stay still. Valid for signals
+ * so small that the slopes do not change.
+ *
+ * <p>Not for use by two threads at once.
+ */
+public final class SmallSignal {
+  private static final double REFERENCE_FREQUENCY = 1000;
+
+  private final Topology topology;
+  private final LinearStamper full;
+  private final LinearStamper held;
+  private final FrameSolver atFrequency;
+  private final FrameSolver atMidband;
+  private double factoredFrequency = -1;
+  private boolean midbandFactored;
+
+  private SmallSignal(Circuit circuit) {
+    this.topology = new Topology(circuit);
+    this.full = new LinearStamper(topology, false);
+    this.held = new LinearStamper(topology, true);
+    this.atFrequency = new FrameSolver(topology, full);
+    this.atMidband = new FrameSolver(topology, held);
+  }
+
+  /**
+   * Small signals about a dc point.
+   *
+   * @param point dc point
+   */
+  public SmallSignal(DcSolution point) {
+    this(point.circuit());
+    ElementValues values = new ElementValues(point.circuit());
+    ValveBank valves = new ValveBank(point.circuit(), topology);
+    JunctionBank junctions = new JunctionBank(point.circuit(), topology);
+    double[] voltage = new double[topology.nodeCount];
+    for (int node = 0; node < voltage.length; node++) {
+      voltage[node] = point.voltage(node);
+    }
+    valves.take(values);
+    valves.evaluate(voltage);
+    junctions.evaluate(voltage);
+    stamp(values, valves, junctions);
+  }
+
+  /**
+   * Small signals about the last point of a solver, for repeated use with {@link #take}.
+   *
+   * @param solver solver whose last solve found a point
+   */
+  public SmallSignal(DcSolver solver) {
+    this(solver.circuit());
+    take(solver);
+  }
+
+  /**
+   * Takes the last point and the present values of the solver it was made for. Allocates nothing.
+   *
+   * @param solver solver whose last solve found a point
+   * @throws IllegalArgumentException when the solver belongs to another circuit
+   */
+  public void take(DcSolver solver) {
+    if (!solver.circuit().equals(topology.circuit)) {
+      throw new IllegalArgumentException("solver belongs to another circuit");
+    }
+    NodalSystem system = solver.system();
+    stamp(solver.values(), system.valves, system.junctions);
+  }
+
+  private void stamp(ElementValues values, ValveBank valves, JunctionBank junctions) {
+    full.stamp(values, valves, junctions);
+    held.stamp(values, valves, junctions);
+    factoredFrequency = -1;
+    midbandFactored = false;
+  }
+
+  /**
+   * Why nothing can be computed here, for example two windings without resistance that are both
+   * held by capacitors.
+   *
+   * @return reason, empty in the usual case
+   */
+  public Optional<String> refusal() {
+    if (!factorMidband()) {
+      return Optional.of("the mid-band equations have no single answer");
+    }
+    return factor(REFERENCE_FREQUENCY)
+        ? Optional.empty()
+        : Optional.of("the equations at 1 kHz have no single answer");
+  }
+
+  /**
+   * Voltage between two nodes for one unit of a source.
+   *
+   * @param source element index of a voltage or current source
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @param frequency above zero [Hz]
+   * @return transfer, without unit for a voltage source, in ohm for a current source
+   */
+  public Complex transfer(int source, int plus, int minus, double frequency) {
+    require(factor(frequency));
+    atFrequency.respondTo(source);
+    return between(plus, minus);
+  }
+
+  /**
+   * Impedance that a source sees.
+   *
+   * @param source element index of a voltage source
+   * @param frequency above zero [Hz]
+   * @return impedance [ohm]
+   */
+  public Complex inputImpedance(int source, double frequency) {
+    return inputAdmittance(source, frequency).reciprocal();
+  }
+
+  /**
+   * Admittance that a source sees.
+   *
+   * @param source element index of a voltage source
+   * @param frequency above zero [Hz]
+   * @return admittance [S]
+   */
+  public Complex inputAdmittance(int source, double frequency) {
+    require(factor(frequency));
+    atFrequency.respondTo(source);
+    return atFrequency.delivered(source);
+  }
+
+  /**
+   * Impedance between two nodes, all sources dead.
+   *
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @param frequency above zero [Hz]
+   * @return impedance [ohm]
+   */
+  public Complex outputImpedance(int plus, int minus, double frequency) {
+    require(factor(frequency));
+    atFrequency.respondToCurrent(minus, plus);
+    return between(plus, minus);
+  }
+
+  /**
+   * Voltage between two nodes for one unit of a source at mid-band, with its sign.
+   *
+   * @param source element index of a voltage or current source
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @return gain [1], or [ohm] for a current source
+   */
+  public double midbandGain(int source, int plus, int minus) {
+    require(factorMidband());
+    atMidband.respondTo(source);
+    return atMidband.re(plus) - atMidband.re(minus);
+  }
+
+  /**
+   * Resistance that a source sees at mid-band.
+   *
+   * @param source element index of a voltage source
+   * @return resistance [ohm]
+   */
+  public double midbandInputResistance(int source) {
+    require(factorMidband());
+    atMidband.respondTo(source);
+    return 1 / atMidband.delivered(source).re();
+  }
+
+  /**
+   * Resistance between two nodes at mid-band, all sources dead.
+   *
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @return resistance [ohm]
+   */
+  public double midbandOutputResistance(int plus, int minus) {
+    require(factorMidband());
+    atMidband.respondToCurrent(minus, plus);
+    return atMidband.re(plus) - atMidband.re(minus);
+  }
+
+  /**
+   * Frequencies at which the gain has fallen by 3 dB from its mid-band value.
+   *
+   * @param source element index of a voltage or current source
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @return corners either side of the flattest part
+   */
+  public Corners corners(int source, int plus, int minus) {
+    double reference = Math.abs(midbandGain(source, plus, minus));
+    return Corners.search(
+        frequency -> transfer(source, plus, minus, frequency).magnitude(), reference);
+  }
+
+  private Complex between(int plus, int minus) {
+    return new Complex(
+        atFrequency.re(plus) - atFrequency.re(minus), atFrequency.im(plus) - atFrequency.im(minus));
+  }
+
+  private boolean factorMidband() {
+    if (!midbandFactored) {
+      midbandFactored = atMidband.factor(0);
+    }
+    return midbandFactored;
+  }
+
+  private boolean factor(double frequency) {
+    ElementChecks.positive("frequency", frequency);
+    if (frequency != factoredFrequency) {
+      boolean done = atFrequency.factor(2 * Math.PI * frequency);
+      factoredFrequency = done ? frequency : -1;
+      return done;
+    }
+    return true;
+  }
+
+  private static void require(boolean factored) {
+    if (!factored) {
+      throw new IllegalStateException("no single answer; ask refusal() first");
+    }
+  }
+}

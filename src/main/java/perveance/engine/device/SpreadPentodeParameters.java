@@ -54,7 +54,7 @@ public record SpreadPentodeParameters(
   }
 
   /** Keys in the order of {@link #list}. */
-  static final List<String> KEYS =
+  public static final List<String> KEYS =
       List.of(
           "perveance",
           "contact_potential",

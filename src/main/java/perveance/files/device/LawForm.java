@@ -5,6 +5,9 @@ import java.util.Map;
 import java.util.Optional;
 import perveance.engine.device.DeviceLaw;
 import perveance.engine.device.LawParameter;
+import perveance.engine.device.SpaceChargeDiodeLaw;
+import perveance.engine.device.SpreadPentodeLaw;
+import perveance.engine.device.SpreadPentodeParameters;
 import perveance.engine.device.SpreadTriodeLaw;
 import perveance.engine.device.SpreadTriodeParameters;
 
@@ -19,6 +22,30 @@ enum LawForm {
     @Override
     boolean makes(DeviceLaw law) {
       return law instanceof SpreadTriodeLaw;
+    }
+  },
+  SPREAD_PENTODE(SpreadPentodeLaw.NAME, SpreadPentodeParameters.KEYS) {
+    @Override
+    DeviceLaw make(Map<String, Double> values) {
+      return new SpreadPentodeLaw(SpreadPentodeParameters.of(values));
+    }
+
+    @Override
+    boolean makes(DeviceLaw law) {
+      return law instanceof SpreadPentodeLaw;
+    }
+  },
+  SPACE_CHARGE_DIODE(
+      SpaceChargeDiodeLaw.NAME, List.of("perveance", "contact_potential", "thermal_voltage")) {
+    @Override
+    DeviceLaw make(Map<String, Double> values) {
+      double[] v = keys().stream().mapToDouble(values::get).toArray();
+      return new SpaceChargeDiodeLaw(v[0], v[1], v[2]);
+    }
+
+    @Override
+    boolean makes(DeviceLaw law) {
+      return law instanceof SpaceChargeDiodeLaw;
     }
   };
 
@@ -46,7 +73,7 @@ enum LawForm {
   }
 
   static List<String> words() {
-    return List.of(SPREAD_TRIODE.word);
+    return List.of(SPREAD_TRIODE.word, SPREAD_PENTODE.word, SPACE_CHARGE_DIODE.word);
   }
 
   static Optional<LawForm> named(String word) {

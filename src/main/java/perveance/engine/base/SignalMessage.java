@@ -24,4 +24,9 @@ public enum SignalMessage implements MessageCode {
   public String template() {
     return template;
   }
+
+  @Override
+  public boolean lowerIsWorse() {
+    return this == LITTLE_HEADROOM || this == NO_HEADROOM || this == HIGH_CORNER_LOW;
+  }
 }

@@ -1,0 +1,86 @@
+package perveance.plot;
+
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.stream.Stream;
+import perveance.engine.analysis.DevicePoint;
+import perveance.engine.analysis.LoadLineView;
+import perveance.engine.analysis.StageAnswer;
+import perveance.engine.device.CurveFamily;
+import perveance.engine.device.Device;
+import perveance.engine.device.Ratings;
+import perveance.engine.stage.StageCircuit;
+
+/** The plots of one stage, described from its answer. */
+public final class StagePlots {
+  private StagePlots() {}
+
+  /**
+   * Characteristics with load lines, operating point and swing.
+   *
+   * @param answer the stage's answer
+   * @return description, empty when the kind has no load line
+   */
+  public static Optional<PlotDescription> characteristics(StageAnswer answer) {
+    return answer
+        .loadLine()
+        .flatMap(
+            view ->
+                section(answer, view.ref()).map(section -> characteristics(answer, view, section)));
+  }
+
+  private static PlotDescription characteristics(
+      StageAnswer answer, LoadLineView view, StageCircuit.StageDevice section) {
+    Device device = section.device();
+    double volts = Math.max(highest(view, true), view.anode() * 1.3);
+    double amperes = Math.max(highest(view, false), view.current() * 1.8);
+    CurveFamily family =
+        CurveFamily.of(
+            device, screen(answer, section), roundUp(volts * 1.05), roundUp(amperes * 1.08));
+    OptionalDouble watts =
+        device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
+    return CharacteristicsPlot.of(family, watts, view);
+  }
+
+  private static double screen(StageAnswer answer, StageCircuit.StageDevice section) {
+    if (section.connection().equals("triode")) {
+      return CurveFamily.SCREEN_TIED;
+    }
+    return answer.points().stream()
+        .filter(p -> p.ref().equals(section.ref()))
+        .map(DevicePoint::screen)
+        .flatMap(s -> s.stream().boxed())
+        .findFirst()
+        .orElse(0.0);
+  }
+
+  /**
+   * The section of a stage with a reference.
+   *
+   * @param answer the stage's answer
+   * @param ref reference
+   * @return the section, or empty
+   */
+  public static Optional<StageCircuit.StageDevice> section(StageAnswer answer, String ref) {
+    return answer.circuit().devices().stream().filter(d -> d.ref().equals(ref)).findFirst();
+  }
+
+  private static double highest(LoadLineView view, boolean voltage) {
+    return Stream.of(view.dc(), view.ac(), view.excursion())
+        .flatMap(java.util.List::stream)
+        .mapToDouble(p -> voltage ? p.voltage() : p.current())
+        .max()
+        .orElse(0);
+  }
+
+  /**
+   * Next round end of an axis.
+   *
+   * @param value above zero [1]
+   * @return the value or a little more, with five or so even steps to it [1]
+   */
+  static double roundUp(double value) {
+    double step = ChartFactory.roundStep(value / 6);
+    return step * Math.ceil(value / step - 1e-9);
+  }
+}

@@ -1,0 +1,81 @@
+package perveance.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import perveance.app.wording.Figures;
+import perveance.engine.analysis.PartDuty;
+import perveance.engine.analysis.StageAnswer;
+import perveance.engine.base.Unit;
+import perveance.engine.device.Device;
+import perveance.engine.stage.StageCircuit;
+
+/** The parts list: value, rating to buy, what it stands. */
+final class PartRows {
+  private static final double[] SHARES = {0.1, 0.16, 0.34, 0.4};
+
+  private PartRows() {}
+
+  static Block of(Typeface faces, SheetOptions options, PartDuty duty) {
+    Unit unit =
+        switch (duty.part().type()) {
+          case RESISTOR, TRANSFORMER -> Unit.OHM;
+          case CAPACITOR, ELECTROLYTIC -> Unit.FARAD;
+          case INDUCTOR -> Unit.HENRY;
+          case JUNCTION -> Unit.VOLT;
+        };
+    return row(
+        faces,
+        duty.designator(),
+        Figures.part(duty.part().value(), unit),
+        options.vocabulary().say(duty.buy().orElse(duty.part().role())),
+        options.vocabulary().say(stands(duty)));
+  }
+
+  private static String stands(PartDuty duty) {
+    return switch (duty.part().type()) {
+      case RESISTOR ->
+          Figures.reading(duty.idlePower(), Unit.WATT, 2)
+              + (duty.worstPower() > 1.5 * duty.idlePower()
+                  ? "; " + Figures.reading(duty.worstPower(), Unit.WATT, 2) + " " + duty.worstCase()
+                  : "");
+      case CAPACITOR, ELECTROLYTIC ->
+          duty.coldVoltage() > 1.1 * Math.abs(duty.idleVoltage())
+              ? "sees " + Figures.reading(duty.coldVoltage(), Unit.VOLT) + " cold"
+              : Figures.reading(Math.abs(duty.idleVoltage()), Unit.VOLT);
+      default -> duty.part().role();
+    };
+  }
+
+  /** One row per envelope type: base and heater. */
+  static List<Block> valves(Typeface faces, SheetOptions options, StageAnswer stage) {
+    List<Block> rows = new ArrayList<>();
+    for (StageCircuit.StageDevice section : stage.circuit().devices()) {
+      Device device = section.device();
+      String heater =
+          device.heaters().isEmpty()
+              ? "heater not known"
+              : (device.heaters().get(0).directlyHeated() ? "filament " : "heater ")
+                  + Figures.reading(device.heaters().get(0).voltage(), Unit.VOLT)
+                  + " "
+                  + Figures.reading(device.heaters().get(0).current(), Unit.AMPERE);
+      rows.add(
+          row(
+              faces,
+              section.ref(),
+              device.type(),
+              device.base(),
+              options.vocabulary().say(heater)));
+    }
+    return rows;
+  }
+
+  private static Block row(Typeface faces, String name, String value, String buy, String stands) {
+    return new RowBlock(
+        faces,
+        SHARES,
+        List.of(Cell.bold(name), Cell.bold(value), Cell.plain(buy), Cell.soft(stands)),
+        8.5,
+        13,
+        0);
+  }
+}

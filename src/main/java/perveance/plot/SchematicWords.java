@@ -54,8 +54,8 @@ public final class SchematicWords {
   }
 
   private SchematicText.PartText part(PartDuty duty) {
-    Unit unit = unit(duty.part().type());
-    String value = duty.designator() + " " + Figures.part(duty.part().value(), unit);
+    String value =
+        duty.designator() + " " + Figures.part(duty.part().value(), duty.part().type().unit());
     String under =
         switch (duty.part().type()) {
           case RESISTOR ->
@@ -125,14 +125,5 @@ public final class SchematicWords {
               : new SchematicText.NodeText(value, band));
     }
     return nodes;
-  }
-
-  private static Unit unit(StageCircuit.PartType type) {
-    return switch (type) {
-      case RESISTOR, TRANSFORMER -> Unit.OHM;
-      case CAPACITOR, ELECTROLYTIC -> Unit.FARAD;
-      case INDUCTOR -> Unit.HENRY;
-      case JUNCTION -> Unit.VOLT;
-    };
   }
 }

@@ -16,17 +16,10 @@ final class PartRows {
   private PartRows() {}
 
   static Block of(Typeface faces, SheetOptions options, PartDuty duty) {
-    Unit unit =
-        switch (duty.part().type()) {
-          case RESISTOR, TRANSFORMER -> Unit.OHM;
-          case CAPACITOR, ELECTROLYTIC -> Unit.FARAD;
-          case INDUCTOR -> Unit.HENRY;
-          case JUNCTION -> Unit.VOLT;
-        };
     return row(
         faces,
         duty.designator(),
-        Figures.part(duty.part().value(), unit),
+        Figures.part(duty.part().value(), duty.part().type().unit()),
         options.vocabulary().say(duty.buy().orElse(duty.part().role())),
         options.vocabulary().say(stands(duty)));
   }

@@ -2,6 +2,7 @@ package perveance.engine.stage;
 
 import java.util.List;
 import java.util.Optional;
+import perveance.engine.base.Unit;
 import perveance.engine.device.Device;
 
 /**
@@ -73,17 +74,32 @@ public record StageCircuit(
   /** What a part is. */
   public enum PartType {
     /** Resistor [ohm]. */
-    RESISTOR,
+    RESISTOR(Unit.OHM),
     /** Film capacitor [F]. */
-    CAPACITOR,
+    CAPACITOR(Unit.FARAD),
     /** Electrolytic capacitor [F]. */
-    ELECTROLYTIC,
+    ELECTROLYTIC(Unit.FARAD),
     /** Inductor [H]. */
-    INDUCTOR,
+    INDUCTOR(Unit.HENRY),
     /** Transformer; the value is its primary load [ohm]. */
-    TRANSFORMER,
+    TRANSFORMER(Unit.OHM),
     /** Diode, zener, LED; the value is its voltage [V]. */
-    JUNCTION
+    JUNCTION(Unit.VOLT);
+
+    private final Unit unit;
+
+    PartType(Unit unit) {
+      this.unit = unit;
+    }
+
+    /**
+     * Unit of the part's value.
+     *
+     * @return unit
+     */
+    public Unit unit() {
+      return unit;
+    }
   }
 
   /**

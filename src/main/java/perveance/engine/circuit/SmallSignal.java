@@ -203,6 +203,18 @@ public final class SmallSignal {
         frequency -> transfer(source, plus, minus, frequency).magnitude(), reference);
   }
 
+  /** Effect of every node current and branch voltage on an output, at a frequency. */
+  FrameSolver effects(int plus, int minus, double frequency) {
+    require(factor(frequency));
+    atFrequency.effectsOn(plus, minus);
+    return atFrequency;
+  }
+
+  /** Place of an element's first branch among the answers of {@link #effects}. */
+  int place(int element) {
+    return full.place(element);
+  }
+
   private Complex between(int plus, int minus) {
     return new Complex(
         atFrequency.re(plus) - atFrequency.re(minus), atFrequency.im(plus) - atFrequency.im(minus));

@@ -2,6 +2,7 @@ package perveance.engine.device.geometry;
 
 import java.util.function.DoubleUnaryOperator;
 import perveance.engine.base.PhysicalConstants;
+import perveance.engine.numeric.Quadrature;
 
 /**
  * Langmuir's functions for a plane gap whose electrons leave the cathode with thermal speeds (I.
@@ -21,7 +22,7 @@ import perveance.engine.base.PhysicalConstants;
  * Simpson's rule with an error below 1e-8.
  */
 public final class InitialVelocities {
-  private static final double STEP = 0.01;
+  private static final Quadrature RULE = Quadrature.gaussLegendre(20);
   private static final double HIGHEST_ETA = 1e5;
   private static final double CATHODE_SIDE_END = 80;
   private static final double SMALL = 1e-3;
@@ -92,16 +93,11 @@ public final class InitialVelocities {
   }
 
   private static double integral(DoubleUnaryOperator integrand, double end) {
-    int panels = (int) Math.ceil(end / (2 * STEP));
-    if (panels == 0) {
-      return 0;
+    double sum = 0;
+    for (double from = 0; from < end; from++) {
+      sum += RULE.integrate(integrand, from, Math.min(from + 1, end));
     }
-    double h = end / (2 * panels);
-    double sum = integrand.applyAsDouble(0) - integrand.applyAsDouble(end);
-    for (int i = 1; i <= panels; i++) {
-      sum += 4 * integrand.applyAsDouble((2 * i - 1) * h) + 2 * integrand.applyAsDouble(2 * i * h);
-    }
-    return sum * h / 3;
+    return sum;
   }
 
   /** exp(x^2) erfc(x) for x of zero or more: series near zero, continued fraction beyond. */

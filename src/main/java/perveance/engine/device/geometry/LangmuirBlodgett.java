@@ -1,5 +1,8 @@
 package perveance.engine.device.geometry;
 
+import perveance.engine.numeric.DifferentialOutcome;
+import perveance.engine.numeric.OrdinaryDifferentialEquation;
+
 /**
  * The function of Langmuir and Blodgett for space charge between coaxial cylinders (I. Langmuir and
  * K. B. Blodgett, Phys. Rev. 22, 347, 1923).
@@ -9,16 +12,14 @@ package perveance.engine.device.geometry;
  * <pre>{@code 3 b b'' + b'^2 + 4 b b' + b^2 = 1,  b ~ g near the cathode}</pre>
  *
  * <p>and the current is {@code I = 2 pi P0 (l / r) V^(3/2) / b^2}. The equation is singular at the
- * cathode, so the integration starts a little way off on the paper's own power series and goes on
- * with fourth-order Runge-Kutta steps. Range: radius ratios from 1 to 1e6 either way; outside, an
- * exception.
+ * cathode, so the integration starts a little way off on the paper's own power series and is then
+ * followed numerically. Range: radius ratios from 1 to 1e6 either way; outside, an exception.
  *
  * @param beta b at the collector [1]
  * @param slope db/dg there [1]
  */
 record LangmuirBlodgett(double beta, double slope) {
   private static final double SERIES_REACH = 0.1;
-  private static final double LARGEST_STEP = 0.004;
   private static final double LARGEST_RATIO = 1e6;
 
   /** Coefficients of g, g^2 ... g^10 as quoted from the paper of 1923. */
@@ -34,6 +35,9 @@ record LangmuirBlodgett(double beta, double slope) {
     5.46192e-8,
     -2.94843e-9
   };
+
+  private static final OrdinaryDifferentialEquation EQUATION =
+      new OrdinaryDifferentialEquation(LangmuirBlodgett::fillSlopes, 2, 1e-12);
 
   /**
    * Integrates from the cathode to the collector.
@@ -51,13 +55,14 @@ record LangmuirBlodgett(double beta, double slope) {
       return series(end);
     }
     double start = Math.copySign(SERIES_REACH, end);
-    LangmuirBlodgett state = series(start);
-    int steps = (int) Math.ceil(Math.abs(end - start) / LARGEST_STEP);
-    double step = (end - start) / steps;
-    for (int i = 0; i < steps; i++) {
-      state = state.advanced(step);
+    LangmuirBlodgett first = series(start);
+    DifferentialOutcome outcome =
+        EQUATION.follow(new double[] {start, end}, new double[] {first.beta, first.slope});
+    if (outcome instanceof DifferentialOutcome.Reached reached) {
+      double[] last = reached.last();
+      return new LangmuirBlodgett(last[0], last[1]);
     }
-    return state;
+    throw new IllegalStateException("not integrated for radiusRatio " + radiusRatio);
   }
 
   /** b squared, the factor of the current law [1]. */
@@ -75,27 +80,10 @@ record LangmuirBlodgett(double beta, double slope) {
     return new LangmuirBlodgett(value, slope);
   }
 
-  private double curvature() {
-    return (1 - slope * slope - 4 * beta * slope - beta * beta) / (3 * beta);
-  }
-
-  private LangmuirBlodgett moved(double step, LangmuirBlodgett along) {
-    return new LangmuirBlodgett(beta + step * along.slope, slope + step * along.curvature());
-  }
-
-  private LangmuirBlodgett advanced(double step) {
-    LangmuirBlodgett second = moved(step / 2, this);
-    LangmuirBlodgett third = moved(step / 2, second);
-    LangmuirBlodgett fourth = moved(step, third);
-    double newBeta = beta + step / 6 * (slope + 2 * second.slope + 2 * third.slope + fourth.slope);
-    double newSlope =
-        slope
-            + step
-                / 6
-                * (curvature()
-                    + 2 * second.curvature()
-                    + 2 * third.curvature()
-                    + fourth.curvature());
-    return new LangmuirBlodgett(newBeta, newSlope);
+  private static void fillSlopes(double g, double[] state, double[] slopes) {
+    double beta = state[0];
+    double slope = state[1];
+    slopes[0] = slope;
+    slopes[1] = (1 - slope * slope - 4 * beta * slope - beta * beta) / (3 * beta);
   }
 }

@@ -9,19 +9,20 @@ package perveance.engine.device;
  *
  * <pre>{@code
  * f  = h / (1 + q)
- * h  = 1 - exp(-(Va/Vk)^n),  Vk = c u/D0 + V0          the knee
- * q  = k B A                                           Ig2/Ia above the knee
- * A  = (1 + x0) / (Va/Vg2 + x0)                        share falls as the anode is raised
- * B  = 1 - exp(-(u/(D0 Vg2) / r0)^2),  1 for r0 = 0    beams narrow as the grid goes negative
+ * h  = z / (1 + z^n)^(1/n),  z = Va/Vk,  Vk = c u/D0 + V0   the knee
+ * q  = k B A                                               Ig2/Ia above the knee
+ * A  = ((1 + x0) / (Va/Vg2 + x0))^b                        falls as the anode is raised
+ * B  = 1 - exp(-(u/(D0 Vg2) / r0)^2), 1 for r0 = 0         beams narrow at low current
  * }</pre>
  *
  * <p>The knee moves with current because the anode must clear the space charge that a given current
  * leaves between screen and anode: u/D0 is the voltage that draws the current at zero bias, so Vk
  * is a fixed part c of it (two-thirds power of the current, Fay, Samuel and Shockley, Bell System
- * Technical Journal 17, 49, 1938). V0 is the small voltage that initial velocities give. A weak
+ * Technical Journal 17, 49, 1938). A small n rounds the knee as a suppressor grid does, a larger
+ * one sharpens it as beam forming does. V0 is the small voltage that initial velocities give. The
  * fall of q with anode voltage is Tank's division of current (Jahrb. drahtl. Telegraphie 20, 82,
- * 1922) softened by a suppressor or by beam forming. B describes aligned grids: at low current the
- * sheets of electrons pass between the screen's wires, at high current they are wider.
+ * 1922) weakened by a suppressor. B describes aligned grids: at low current the sheets of electrons
+ * pass between the screen's wires, at high current they are wider.
  *
  * <p>Range: screen positive, anode from zero up. Outside: the share is 0 for a negative anode, and
  * the screen voltage is bent smoothly to a small positive value so that every figure stays finite.
@@ -39,14 +40,16 @@ final class ScreenDivision {
   private static final double TWO_THIRDS = 2.0 / 3.0;
 
   private final double share;
-  private final double fallConstant;
+  private final double fallPower;
+  private final double fallOffset;
   private final double inverseBeamWidth;
   private final double kneePerDrive;
   private final double sharpness;
 
   ScreenDivision(SpreadPentodeParameters p) {
     this.share = p.screenShare();
-    this.fallConstant = p.shareFall();
+    this.fallPower = p.shareFall();
+    this.fallOffset = p.shareOffset();
     this.inverseBeamWidth = p.beamWidth() > 0 ? 1 / (p.penetration() * p.beamWidth()) : 0;
     this.kneePerDrive = p.knee() / p.penetration();
     this.sharpness = p.kneeSharpness();
@@ -68,23 +71,23 @@ final class ScreenDivision {
     double g2 = 0.5 * (screen + root);
     double g2Slope = g2 / root;
 
-    double below = a + fallConstant * g2;
-    double fall = (1 + fallConstant) * g2 / below;
+    double below = a + fallOffset * g2;
+    double fall = fallen((1 + fallOffset) * g2 / below);
     double ratio = drive * inverseBeamWidth / g2;
     double tail = inverseBeamWidth > 0 ? Math.exp(-ratio * ratio) : 0;
     double beam = 1 - tail;
     double beamByLog = 2 * ratio * ratio * tail;
     double q = share * beam * fall;
     double qByLogDrive = share * fall * beamByLog;
-    double qByAnode = -q / below;
-    double qByScreen = (q * a / below - qByLogDrive) / g2;
+    double qByAnode = -fallPower * q / below;
+    double qByScreen = (fallPower * q * a / below - qByLogDrive) / g2;
 
     double knee = kneePerDrive * drive + KNEE_AT_NO_CURRENT;
     double z = a / knee;
-    double zPower = power(z);
-    double rest = Math.exp(-z * zPower);
-    double h = 1 - rest;
-    double hByAnode = rest * sharpness * zPower / knee;
+    double sum = 1 + power(z);
+    double slope = inverseRoot(sum);
+    double h = z * slope;
+    double hByAnode = slope / (sum * knee);
     double hByLogDrive = -hByAnode * z * kneePerDrive * drive;
 
     double part = 1 / (1 + q);
@@ -121,11 +124,24 @@ final class ScreenDivision {
         : anode - 0.5 * ANODE_ROUNDING;
   }
 
-  /** z to the power n - 1; the square root needs no general power. */
+  private double fallen(double ratio) {
+    return fallPower == 1 ? ratio : Math.pow(ratio, fallPower);
+  }
+
+  /** z^n; the usual powers without the general function, which is slow. */
   private double power(double z) {
-    if (sharpness == 1) {
-      return 1;
+    if (sharpness == 1.5) {
+      return z * Math.sqrt(z);
     }
-    return sharpness == 1.5 ? Math.sqrt(z) : Math.pow(z, sharpness - 1);
+    return sharpness == 3 ? z * z * z : Math.pow(z, sharpness);
+  }
+
+  /** sum^(-1/n). */
+  private double inverseRoot(double sum) {
+    if (sharpness == 1.5) {
+      double root = Math.cbrt(sum);
+      return 1 / (root * root);
+    }
+    return sharpness == 3 ? 1 / Math.cbrt(sum) : Math.pow(sum, -1 / sharpness);
   }
 }

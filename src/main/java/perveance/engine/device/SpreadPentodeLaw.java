@@ -105,6 +105,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
             v.anodeInfluence(),
             v.screenShare(),
             v.shareFall(),
+            v.shareOffset(),
             v.beamWidth(),
             v.knee(),
             v.kneeSharpness(),

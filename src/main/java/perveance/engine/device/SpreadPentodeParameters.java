@@ -12,12 +12,13 @@ import java.util.Map;
  * @param spread s, half width of the spread of D0 relative to it, 0 to 1 [1]
  * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
  * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
- * @param shareFall x0, anode to screen voltage ratio over which the share falls, above 0 [1]
+ * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
+ * @param shareOffset x0, anode to screen voltage ratio below which it falls no more, above 0 [1]
  * @param beamWidth r0, drive ratio at which the beams fill the screen's gaps; 0 where not aligned
  *     [1]
  * @param knee c, knee voltage as a part of the voltage that draws the current at no bias, above 0
  *     [1]
- * @param kneeSharpness n, 1 for a rounded knee, up to 2 for a sharp one [1]
+ * @param kneeSharpness n, 1 for a rounded knee, up to 8 for a sharp one [1]
  * @param gridPerveance Gg, above 0 [A V^-1.5]
  * @param gridOnset grid voltage at which 0.3 uA flows into the grid [V]
  * @param thermalVoltage VT of the cathode, above 0 [V]
@@ -30,6 +31,7 @@ public record SpreadPentodeParameters(
     double anodeInfluence,
     double screenShare,
     double shareFall,
+    double shareOffset,
     double beamWidth,
     double knee,
     double kneeSharpness,
@@ -44,10 +46,11 @@ public record SpreadPentodeParameters(
     within("spread", spread, 0, 1);
     within("anodeInfluence", anodeInfluence, 0, 1);
     positive("screenShare", screenShare);
-    positive("shareFall", shareFall);
+    within("shareFall", shareFall, 0, 3);
+    positive("shareOffset", shareOffset);
     within("beamWidth", beamWidth, 0, 10);
     positive("knee", knee);
-    within("kneeSharpness", kneeSharpness, 1, 2);
+    within("kneeSharpness", kneeSharpness, 1, 8);
     positive("gridPerveance", gridPerveance);
     finite("gridOnset", gridOnset);
     positive("thermalVoltage", thermalVoltage);
@@ -63,6 +66,7 @@ public record SpreadPentodeParameters(
           "anode_influence",
           "screen_share",
           "share_fall",
+          "share_offset",
           "beam_width",
           "knee",
           "knee_sharpness",
@@ -87,7 +91,7 @@ public record SpreadPentodeParameters(
       v[i] = value;
     }
     return new SpreadPentodeParameters(
-        v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12]);
+        v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12], v[13]);
   }
 
   /**
@@ -104,14 +108,15 @@ public record SpreadPentodeParameters(
         parameter(
             4, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
         parameter(5, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
-        parameter(6, shareFall, "1", "Va/Vg2 over which the screen's share falls"),
+        parameter(6, shareFall, "1", "power by which the screen's share falls with anode voltage"),
+        parameter(7, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
         parameter(
-            7, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
-        parameter(8, knee, "1", "knee over the voltage that draws the current at no bias"),
-        parameter(9, kneeSharpness, "1", "1 for a rounded knee, up to 2 for a sharp one"),
-        parameter(10, gridPerveance, "A V^-1.5", "perveance of the grid"),
-        parameter(11, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
-        parameter(12, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+            8, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
+        parameter(9, knee, "1", "knee over the voltage that draws the current at no bias"),
+        parameter(10, kneeSharpness, "1", "1 for a rounded knee, larger for a sharp one"),
+        parameter(11, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(12, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(13, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
   }
 
   private static LawParameter parameter(int index, double value, String unit, String meaning) {

@@ -1,6 +1,7 @@
 package perveance.engine.device;
 
 import java.util.List;
+import java.util.Map;
 
 /**
  * Vacuum diodes and rectifiers.
@@ -17,6 +18,10 @@ import java.util.List;
  * voltages beyond one megavolt are taken as one megavolt.
  */
 public final class SpaceChargeDiodeLaw implements DeviceLaw {
+  /** Keys of the law's constants in device files, in the order of {@link #parameters}. */
+  public static final List<String> KEYS =
+      List.of("perveance", "contact_potential", "thermal_voltage");
+
   private static final double FAR_BELOW = -200;
   private static final double FAR_ABOVE = 36;
   private static final double HIGHEST_VOLTAGE = 1e6;
@@ -50,6 +55,25 @@ public final class SpaceChargeDiodeLaw implements DeviceLaw {
     this.perveance = perveance;
     this.contactPotential = contactPotential;
     this.thermalVoltage = thermalVoltage;
+  }
+
+  /**
+   * Makes the law from the keys of a device file.
+   *
+   * @param values value by key, further keys are not looked at [SI unit of each]
+   * @return the law
+   * @throws IllegalArgumentException when a key is missing or a value is out of range
+   */
+  public static SpaceChargeDiodeLaw of(Map<String, Double> values) {
+    double[] v = new double[KEYS.size()];
+    for (int i = 0; i < v.length; i++) {
+      Double value = values.get(KEYS.get(i));
+      if (value == null) {
+        throw new IllegalArgumentException("parameter is missing: " + KEYS.get(i));
+      }
+      v[i] = value;
+    }
+    return new SpaceChargeDiodeLaw(v[0], v[1], v[2]);
   }
 
   @Override
@@ -100,8 +124,8 @@ public final class SpaceChargeDiodeLaw implements DeviceLaw {
   @Override
   public List<LawParameter> parameters() {
     return List.of(
-        new LawParameter("perveance", perveance, "A V^-1.5", "perveance of one anode"),
-        new LawParameter("contact_potential", contactPotential, "V", "added to the anode voltage"),
-        new LawParameter("thermal_voltage", thermalVoltage, "V", "kT/e of the cathode"));
+        new LawParameter(KEYS.get(0), perveance, "A V^-1.5", "perveance of one anode"),
+        new LawParameter(KEYS.get(1), contactPotential, "V", "added to the anode voltage"),
+        new LawParameter(KEYS.get(2), thermalVoltage, "V", "kT/e of the cathode"));
   }
 }

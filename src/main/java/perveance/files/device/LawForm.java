@@ -35,12 +35,10 @@ enum LawForm {
       return law instanceof SpreadPentodeLaw;
     }
   },
-  SPACE_CHARGE_DIODE(
-      SpaceChargeDiodeLaw.NAME, List.of("perveance", "contact_potential", "thermal_voltage")) {
+  SPACE_CHARGE_DIODE(SpaceChargeDiodeLaw.NAME, SpaceChargeDiodeLaw.KEYS) {
     @Override
     DeviceLaw make(Map<String, Double> values) {
-      double[] v = keys().stream().mapToDouble(values::get).toArray();
-      return new SpaceChargeDiodeLaw(v[0], v[1], v[2]);
+      return SpaceChargeDiodeLaw.of(values);
     }
 
     @Override

@@ -43,7 +43,11 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     this.values = values;
     this.cathode =
         new SpreadCathode(
-            values.perveance(), values.contactPotential(), values.penetration(), values.spread());
+            values.perveance(),
+            values.contactPotential(),
+            values.penetration(),
+            values.spread(),
+            0);
     this.division = new ScreenDivision(values);
     this.gridCurrent =
         new GridCurrent(values.gridPerveance(), values.gridOnset(), values.thermalVoltage());

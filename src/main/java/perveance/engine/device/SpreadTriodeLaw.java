@@ -46,7 +46,8 @@ public final class SpreadTriodeLaw implements DeviceLaw {
             parameters.perveance(),
             parameters.contactPotential(),
             parameters.penetration(),
-            parameters.spread());
+            parameters.spread(),
+            parameters.cathodeSpread());
     this.gridCurrent =
         new GridCurrent(
             parameters.gridPerveance(), parameters.gridOnset(), parameters.thermalVoltage());
@@ -115,6 +116,7 @@ public final class SpreadTriodeLaw implements DeviceLaw {
             parameters.contactPotential() + contactShift,
             parameters.penetration(),
             parameters.spread(),
+            parameters.cathodeSpread(),
             parameters.turnBack(),
             parameters.gridPerveance() * conduction,
             parameters.gridOnset() - contactShift,

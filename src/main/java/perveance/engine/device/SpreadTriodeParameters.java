@@ -9,7 +9,9 @@ import java.util.Map;
  * @param perveance G of the cathode, above 0 [A V^-1.5]
  * @param contactPotential Vc, added to the grid voltage [V]
  * @param penetration mean penetration factor D0 = 1/mu0, above 0 [1]
- * @param spread half width of the spread of D relative to D0, 0 to 1 [1]
+ * @param spread s, sqrt 3 times the standard deviation of D over D0 (the half width, were the
+ *     spread even), 0 to 1 [1]
+ * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
  * @param turnBack anode voltage at which a quarter of the electrons turns back, above 0 [V]
  * @param gridPerveance Gg of the grid, above 0 [A V^-1.5]
  * @param gridOnset grid voltage at 0.3 uA of grid current [V]
@@ -20,6 +22,7 @@ public record SpreadTriodeParameters(
     double contactPotential,
     double penetration,
     double spread,
+    double cathodeSpread,
     double turnBack,
     double gridPerveance,
     double gridOnset,
@@ -32,10 +35,47 @@ public record SpreadTriodeParameters(
     if (!(spread >= 0 && spread <= 1)) {
       throw new IllegalArgumentException("spread is not between 0 and 1: " + spread);
     }
+    if (!(cathodeSpread >= 0) || Double.isInfinite(cathodeSpread)) {
+      throw new IllegalArgumentException(
+          "cathodeSpread is not 0 or above and finite: " + cathodeSpread);
+    }
     above0("turnBack", turnBack);
     above0("gridPerveance", gridPerveance);
     finite("gridOnset", gridOnset);
     above0("thermalVoltage", thermalVoltage);
+  }
+
+  /**
+   * Constants of a valve whose cathode is at one potential throughout.
+   *
+   * @param perveance G of the cathode, above 0 [A V^-1.5]
+   * @param contactPotential Vc, added to the grid voltage [V]
+   * @param penetration mean penetration factor, above 0 [1]
+   * @param spread of the penetration factor, 0 to 1 [1]
+   * @param turnBack anode voltage at which a quarter of the electrons turns back, above 0 [V]
+   * @param gridPerveance Gg of the grid, above 0 [A V^-1.5]
+   * @param gridOnset grid voltage at 0.3 uA of grid current [V]
+   * @param thermalVoltage k T / e of the cathode, above 0 [V]
+   */
+  public SpreadTriodeParameters(
+      double perveance,
+      double contactPotential,
+      double penetration,
+      double spread,
+      double turnBack,
+      double gridPerveance,
+      double gridOnset,
+      double thermalVoltage) {
+    this(
+        perveance,
+        contactPotential,
+        penetration,
+        spread,
+        0,
+        turnBack,
+        gridPerveance,
+        gridOnset,
+        thermalVoltage);
   }
 
   /** Keys in the order of {@link #list}. */
@@ -45,6 +85,7 @@ public record SpreadTriodeParameters(
           "contact_potential",
           "penetration",
           "spread",
+          "cathode_spread",
           "turn_back",
           "grid_perveance",
           "grid_onset",
@@ -66,7 +107,7 @@ public record SpreadTriodeParameters(
       }
       v[i] = value;
     }
-    return new SpreadTriodeParameters(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7]);
+    return new SpreadTriodeParameters(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8]);
   }
 
   /**
@@ -79,11 +120,12 @@ public record SpreadTriodeParameters(
         parameter(0, perveance, "A V^-1.5", "perveance of the cathode"),
         parameter(1, contactPotential, "V", "contact potential, added to the grid voltage"),
         parameter(2, penetration, "1", "mean penetration factor of the grid, 1/mu"),
-        parameter(3, spread, "1", "half width of the spread of the penetration factor"),
-        parameter(4, turnBack, "V", "anode voltage at which a quarter of the electrons turns back"),
-        parameter(5, gridPerveance, "A V^-1.5", "perveance of the grid"),
-        parameter(6, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
-        parameter(7, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+        parameter(3, spread, "1", "spread of the penetration factor, relative"),
+        parameter(4, cathodeSpread, "V", "spread of the cathode's potential"),
+        parameter(5, turnBack, "V", "anode voltage at which a quarter of the electrons turns back"),
+        parameter(6, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(7, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(8, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
   }
 
   private static LawParameter parameter(int index, double value, String unit, String meaning) {

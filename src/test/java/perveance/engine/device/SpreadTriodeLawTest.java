@@ -4,7 +4,7 @@ package perveance.engine.device;
 class SpreadTriodeLawTest extends DeviceLawContractTest {
   private final DeviceLaw law =
       new SpreadTriodeLaw(
-          new SpreadTriodeParameters(1.16e-3, 0.62, 1 / 107.5, 0.41, 5, 4e-4, -0.6, 0.0862));
+          new SpreadTriodeParameters(1.16e-3, 0.62, 1 / 107.5, 0.41, 0.3, 3, 4e-4, -0.6, 0.0862));
 
   @Override
   protected DeviceLaw law() {

@@ -56,6 +56,7 @@ class DeviceReaderTest {
       penetration = 0.01
       spread = 0.4
       turn_back = 4
+      cathode_spread = 0.3
       grid_perveance = 4e-4
       grid_onset = -0.6
       thermal_voltage = 0.09
@@ -124,7 +125,7 @@ class DeviceReaderTest {
             + " expected values with a meaning",
         "turn_back = 4 | turn_bak = 4 | 29: law turn_back: found nothing, expected a number in SI"
             + " units",
-        "[\"100 V\", \"250 V\"] | [\"250 V\", \"100 V\"] | 45: validity anode_voltage: found 2"
+        "[\"100 V\", \"250 V\"] | [\"250 V\", \"100 V\"] | 46: validity anode_voltage: found 2"
             + " values, or falling ones, expected the lowest and the highest value in a list",
         "perveance_device = 1 | perveance_device = 2 | 1: perveance_device: found 2, expected a"
             + " whole number from 1 to 1",
@@ -151,7 +152,7 @@ class DeviceReaderTest {
     assertTrue(told.get(1).startsWith("t1.toml:2: found T1, expected text"), told.get(1));
     assertTrue(told.get(2).startsWith("t1.toml:5: sections: found \"two\""), told.get(2));
     assertTrue(told.get(3).startsWith("t1.toml:23: evidence anode_voltage:"), told.get(3));
-    assertTrue(told.get(4).startsWith("t1.toml:39: fitt: found an unknown key"), told.get(4));
+    assertTrue(told.get(4).startsWith("t1.toml:40: fitt: found an unknown key"), told.get(4));
   }
 
   @Test

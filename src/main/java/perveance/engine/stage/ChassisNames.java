@@ -2,7 +2,21 @@ package perveance.engine.stage;
 
 /** How nodes and elements of a chassis are named. */
 public final class ChassisNames {
+  /** What a name may be, in words. */
+  static final String FORM = "letters, digits, - and _, at most 24 of them";
+
+  private static final int LONGEST = 24;
+
   private ChassisNames() {}
+
+  /** Whether a name can stand in front of the names of nodes and elements. */
+  static boolean wellFormed(String name) {
+    return !name.isEmpty()
+        && name.length() <= LONGEST
+        && name.chars().allMatch(c -> Character.isLetterOrDigit(c) || c == '-' || c == '_')
+        && !name.equals("chassis")
+        && !name.equals("supply");
+  }
 
   /**
    * Name of a supply's node, and of the source or dropper that feeds it.

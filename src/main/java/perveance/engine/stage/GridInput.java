@@ -132,7 +132,7 @@ final class GridInput {
   static void terminal(Sketch sketch, int joint, int y) {
     StageValues values = sketch.values();
     if (direct(values)) {
-      sketch.input(joint - 6, y, Optional.empty(), "from " + values.around().directInput().get());
+      sketch.input(joint - 6, y, Optional.empty(), "from " + driver(values));
       sketch.wire(joint - 6, y, joint, y);
     } else if (values.has(INPUT_COUPLING.key())) {
       sketch.input(joint - 12, y, Optional.of(SOURCE), "in");
@@ -143,6 +143,13 @@ final class GridInput {
       sketch.input(joint - 6, y, Optional.of(SOURCE), "in");
       sketch.wire(joint - 6, y, joint, y);
     }
+  }
+
+  /** The stage whose output is wired to the grid. */
+  private static String driver(StageValues values) {
+    String node = values.around().directInput().orElse("");
+    int end = node.indexOf('.');
+    return end < 0 ? node : node.substring(0, end);
   }
 
   /** Draws the foot of the grid leak: a bias or chassis. */

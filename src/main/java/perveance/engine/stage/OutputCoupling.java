@@ -62,7 +62,8 @@ final class OutputCoupling {
     if (taker.isEmpty() && values.around().next().isEmpty()) {
       wiring.outerResistor("open" + suffix, out, 0, OPEN);
     }
-    wiring.output(name, out, 0, taker);
+    boolean straight = suffix.isEmpty() && values.around().directOutput().isPresent();
+    wiring.output(name, straight ? from : out, 0, taker);
   }
 
   private static void capacitor(StageWiring wiring, int from, int out, String suffix) {

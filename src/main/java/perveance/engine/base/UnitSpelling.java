@@ -1,6 +1,5 @@
 package perveance.engine.base;
 
-import java.math.BigDecimal;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -8,99 +7,86 @@ import java.util.Optional;
 
 /** Reads what stands behind a number: a prefix, a unit, both or neither. */
 final class UnitSpelling {
-  private static final BigDecimal CELSIUS_ZERO = new BigDecimal("273.15");
-
-  /** Symbols, read exactly as written because case tells them apart. */
-  private static final Map<Unit, List<String>> SYMBOLS =
-      Map.ofEntries(
-          Map.entry(Unit.VOLT, List.of("V", "v")),
-          Map.entry(Unit.AMPERE, List.of("A", "a")),
-          // Greek capital omega U+03A9, ohm sign U+2126, and R as printed on parts
-          Map.entry(Unit.OHM, List.of("\u03a9", "\u2126", "R")),
-          Map.entry(Unit.FARAD, List.of("F", "f")),
-          Map.entry(Unit.HENRY, List.of("H", "h")),
-          Map.entry(Unit.WATT, List.of("W", "w")),
-          Map.entry(Unit.HERTZ, List.of("Hz", "hz", "HZ", "c/s")),
-          Map.entry(Unit.SIEMENS, List.of("S", "A/V", "\u2127")),
-          Map.entry(Unit.SECOND, List.of("s")),
-          Map.entry(Unit.JOULE, List.of("J")),
-          Map.entry(Unit.KELVIN, List.of("K")),
-          Map.entry(Unit.METRE, List.of("m")),
-          Map.entry(Unit.RATIO, List.of()),
-          Map.entry(Unit.DECIBEL, List.of("dB", "db", "DB")),
-          Map.entry(Unit.PERVEANCE, List.of("A/V^1.5", "A/V^(3/2)", "A/V^3/2")));
-
-  /** Words, read in any case. */
-  private static final Map<Unit, List<String>> WORDS =
-      Map.ofEntries(
-          Map.entry(Unit.VOLT, List.of("volt", "volts")),
-          Map.entry(Unit.AMPERE, List.of("amp", "amps", "ampere", "amperes")),
-          Map.entry(Unit.OHM, List.of("ohm", "ohms")),
-          Map.entry(Unit.FARAD, List.of("farad", "farads")),
-          Map.entry(Unit.HENRY, List.of("henry", "henries", "henrys")),
-          Map.entry(Unit.WATT, List.of("watt", "watts")),
-          Map.entry(Unit.HERTZ, List.of("hertz", "cps")),
-          Map.entry(Unit.SIEMENS, List.of("siemens", "mho", "mhos")),
-          Map.entry(Unit.SECOND, List.of("sec", "second", "seconds")),
-          Map.entry(Unit.JOULE, List.of("joule", "joules")),
-          Map.entry(Unit.KELVIN, List.of("kelvin", "kelvins")),
-          Map.entry(Unit.METRE, List.of("metre", "metres", "meter", "meters")),
-          Map.entry(Unit.DECIBEL, List.of("decibel", "decibels")));
-
   /** Spellings with a factor of their own. */
-  private static final Map<String, Meaning> SPECIAL =
+  private static final Map<String, UnitMeaning> SPECIAL =
       Map.ofEntries(
-          Map.entry("%", Meaning.scaled(Unit.RATIO, "0.01")),
-          Map.entry("percent", Meaning.scaled(Unit.RATIO, "0.01")),
+          Map.entry("%", UnitMeaning.tenTo(Unit.RATIO, -2)),
+          Map.entry("percent", UnitMeaning.tenTo(Unit.RATIO, -2)),
           // as printed on American parts and drawings: microfarad and micro-microfarad
-          Map.entry("mfd", Meaning.scaled(Unit.FARAD, "1e-6")),
-          Map.entry("MFD", Meaning.scaled(Unit.FARAD, "1e-6")),
-          Map.entry("mmfd", Meaning.scaled(Unit.FARAD, "1e-12")),
-          Map.entry("MMFD", Meaning.scaled(Unit.FARAD, "1e-12")),
-          Map.entry("uuF", Meaning.scaled(Unit.FARAD, "1e-12")),
-          Map.entry("\u00b5\u00b5F", Meaning.scaled(Unit.FARAD, "1e-12")),
-          Map.entry("megohm", Meaning.scaled(Unit.OHM, "1e6")),
-          Map.entry("megohms", Meaning.scaled(Unit.OHM, "1e6")),
-          Map.entry("kilohm", Meaning.scaled(Unit.OHM, "1e3")),
-          Map.entry("kilohms", Meaning.scaled(Unit.OHM, "1e3")),
-          Map.entry("min", Meaning.scaled(Unit.SECOND, "60")),
-          Map.entry("in", Meaning.scaled(Unit.METRE, "0.0254")),
-          Map.entry("inch", Meaning.scaled(Unit.METRE, "0.0254")),
-          Map.entry("thou", Meaning.scaled(Unit.METRE, "0.0000254")),
-          Map.entry("\u00b0C", new Meaning(Unit.KELVIN, BigDecimal.ONE, CELSIUS_ZERO)),
-          Map.entry("degC", new Meaning(Unit.KELVIN, BigDecimal.ONE, CELSIUS_ZERO)));
+          Map.entry("mfd", UnitMeaning.tenTo(Unit.FARAD, -6)),
+          Map.entry("MFD", UnitMeaning.tenTo(Unit.FARAD, -6)),
+          Map.entry("mmfd", UnitMeaning.tenTo(Unit.FARAD, -12)),
+          Map.entry("MMFD", UnitMeaning.tenTo(Unit.FARAD, -12)),
+          Map.entry("uuF", UnitMeaning.tenTo(Unit.FARAD, -12)),
+          Map.entry("\u00b5\u00b5F", UnitMeaning.tenTo(Unit.FARAD, -12)),
+          Map.entry("megohm", UnitMeaning.tenTo(Unit.OHM, 6)),
+          Map.entry("megohms", UnitMeaning.tenTo(Unit.OHM, 6)),
+          Map.entry("kilohm", UnitMeaning.tenTo(Unit.OHM, 3)),
+          Map.entry("kilohms", UnitMeaning.tenTo(Unit.OHM, 3)),
+          Map.entry("min", UnitMeaning.times(Unit.SECOND, "60")),
+          Map.entry("in", UnitMeaning.times(Unit.METRE, "0.0254")),
+          Map.entry("inch", UnitMeaning.times(Unit.METRE, "0.0254")),
+          Map.entry("thou", UnitMeaning.times(Unit.METRE, "0.0000254")),
+          Map.entry("\u00b0C", UnitMeaning.plus(Unit.KELVIN, "273.15")),
+          Map.entry("degC", UnitMeaning.plus(Unit.KELVIN, "273.15")));
 
   private UnitSpelling() {}
 
-  /** A unit and what makes the written number into one without prefix: n * factor + offset. */
-  record Meaning(Unit unit, BigDecimal factor, BigDecimal offset) {
-    static Meaning scaled(Unit unit, String factor) {
-      return new Meaning(unit, new BigDecimal(factor), BigDecimal.ZERO);
-    }
+  /** Symbols, the usual one first, read exactly as written because case tells them apart. */
+  private static List<String> symbols(Unit unit) {
+    return switch (unit) {
+      case VOLT -> List.of("V", "v");
+      case AMPERE -> List.of("A", "a");
+      // R as printed on parts, Greek capital omega U+03A9, ohm sign U+2126
+      case OHM -> List.of("R", "\u03a9", "\u2126");
+      case FARAD -> List.of("F", "f");
+      case HENRY -> List.of("H", "h");
+      case WATT -> List.of("W", "w");
+      case HERTZ -> List.of("Hz", "hz", "HZ", "c/s");
+      case SIEMENS -> List.of("A/V", "S", "\u2127");
+      case SECOND -> List.of("s");
+      case JOULE -> List.of("J");
+      case KELVIN -> List.of("K");
+      case METRE -> List.of("m");
+      case RATIO -> List.of();
+      case DECIBEL -> List.of("dB", "db", "DB");
+      case PERVEANCE -> List.of("A/V^1.5", "A/V^(3/2)", "A/V^3/2");
+    };
+  }
 
-    static Meaning prefixed(Unit unit, SiPrefix prefix) {
-      return new Meaning(
-          unit, BigDecimal.ONE.scaleByPowerOfTen(prefix.exponent()), BigDecimal.ZERO);
-    }
-
-    BigDecimal apply(BigDecimal number) {
-      return number.multiply(factor).add(offset);
-    }
+  /** Words in lower case, read in any case. */
+  private static List<String> words(Unit unit) {
+    return switch (unit) {
+      case VOLT -> List.of("volt", "volts");
+      case AMPERE -> List.of("amp", "amps", "ampere", "amperes");
+      case OHM -> List.of("ohm", "ohms");
+      case FARAD -> List.of("farad", "farads");
+      case HENRY -> List.of("henry", "henries", "henrys");
+      case WATT -> List.of("watt", "watts");
+      case HERTZ -> List.of("hertz", "cps");
+      case SIEMENS -> List.of("siemens", "mho", "mhos");
+      case SECOND -> List.of("sec", "second", "seconds");
+      case JOULE -> List.of("joule", "joules");
+      case KELVIN -> List.of("kelvin", "kelvins");
+      case METRE -> List.of("metre", "metres", "meter", "meters");
+      case DECIBEL -> List.of("decibel", "decibels");
+      case RATIO, PERVEANCE -> List.of();
+    };
   }
 
   /** Reads a suffix as meaning the given unit; nothing at all means the unit itself. */
-  static Optional<Meaning> read(String suffix, Unit unit) {
+  static Optional<UnitMeaning> read(String suffix, Unit unit) {
     if (suffix.isEmpty()) {
-      return Optional.of(Meaning.prefixed(unit, SiPrefix.NONE));
+      return Optional.of(UnitMeaning.tenTo(unit, 0));
     }
-    Optional<Meaning> named = readNamed(suffix, unit);
-    return named.isPresent() ? named : readBarePrefix(suffix, unit);
+    Optional<UnitMeaning> named = readNamed(suffix, unit);
+    return named.isPresent() ? named : readPrefix(suffix, unit);
   }
 
   /** Reads a suffix as naming any unit, for telling what stands there instead. */
-  static Optional<Meaning> readAny(String suffix) {
+  static Optional<UnitMeaning> readAny(String suffix) {
     for (Unit unit : Unit.values()) {
-      Optional<Meaning> named = readNamed(suffix, unit);
+      Optional<UnitMeaning> named = readNamed(suffix, unit);
       if (named.isPresent()) {
         return named;
       }
@@ -110,31 +96,39 @@ final class UnitSpelling {
 
   /** Whether the spelling names the unit itself, without any prefix. */
   static boolean names(String spelling, Unit unit) {
-    return SYMBOLS.getOrDefault(unit, List.of()).contains(spelling)
-        || WORDS.getOrDefault(unit, List.of()).contains(spelling.toLowerCase(Locale.ROOT));
+    return symbols(unit).contains(spelling)
+        || words(unit).contains(spelling.toLowerCase(Locale.ROOT));
   }
 
-  private static Optional<Meaning> readNamed(String suffix, Unit unit) {
-    Meaning special = SPECIAL.get(suffix);
-    if (special != null && special.unit() == unit) {
-      return Optional.of(special);
-    }
-    for (SiPrefix prefix : SiPrefix.values()) {
-      for (String spelling : prefix.spellings()) {
-        if (prefix.suits(unit)
-            && suffix.startsWith(spelling)
-            && names(suffix.substring(spelling.length()), unit)) {
-          return Optional.of(Meaning.prefixed(unit, prefix));
+  private static Optional<UnitMeaning> readNamed(String suffix, Unit unit) {
+    for (String symbol : symbols(unit)) {
+      if (suffix.endsWith(symbol)) {
+        Optional<UnitMeaning> meaning = readBefore(suffix, symbol, unit);
+        if (meaning.isPresent()) {
+          return meaning;
         }
       }
     }
-    return Optional.empty();
+    for (String word : words(unit)) {
+      int start = suffix.length() - word.length();
+      if (start >= 0 && suffix.regionMatches(true, start, word, 0, word.length())) {
+        Optional<UnitMeaning> meaning = readBefore(suffix, word, unit);
+        if (meaning.isPresent()) {
+          return meaning;
+        }
+      }
+    }
+    return Optional.ofNullable(SPECIAL.get(suffix)).filter(special -> special.unit() == unit);
   }
 
-  private static Optional<Meaning> readBarePrefix(String suffix, Unit unit) {
+  private static Optional<UnitMeaning> readBefore(String suffix, String name, Unit unit) {
+    return readPrefix(suffix.substring(0, suffix.length() - name.length()), unit);
+  }
+
+  private static Optional<UnitMeaning> readPrefix(String spelling, Unit unit) {
     for (SiPrefix prefix : SiPrefix.values()) {
-      if (prefix.suits(unit) && prefix.spellings().contains(suffix)) {
-        return Optional.of(Meaning.prefixed(unit, prefix));
+      if (prefix.suits(unit) && prefix.spellings().contains(spelling)) {
+        return Optional.of(UnitMeaning.tenTo(unit, prefix.exponent()));
       }
     }
     return Optional.empty();

@@ -5,7 +5,9 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.math.BigDecimal;
 import java.util.Locale;
+import java.util.Random;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -241,6 +243,24 @@ class QuantityParserTest {
     String text = "1".repeat(1_000_000);
     QuantityException refusal = refusal(text, Unit.OHM);
     assertTrue(refusal.message().length() < 200, refusal.message());
+  }
+
+  /** Property: a prefix moves the decimal sign; it never multiplies a number already rounded. */
+  @Test
+  void readsToTheNearestNumber() throws QuantityException {
+    Random random = new Random(42);
+    for (int round = 0; round < 5000; round++) {
+      String number = random.nextInt(100_000) + "." + random.nextInt(1_000_000);
+      assertEquals(
+          new BigDecimal(number).movePointLeft(3).doubleValue(),
+          QuantityParser.parse(number + " mA", Unit.AMPERE).value());
+      assertEquals(
+          new BigDecimal(number).movePointRight(3).negate().doubleValue(),
+          QuantityParser.parse("-" + number + "k", Unit.OHM).value());
+      assertEquals(
+          new BigDecimal(number).multiply(new BigDecimal("0.0254")).doubleValue(),
+          QuantityParser.parse(number + " in", Unit.METRE).value());
+    }
   }
 
   @Test

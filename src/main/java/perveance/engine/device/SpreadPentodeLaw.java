@@ -9,7 +9,7 @@ import java.util.List;
  * spread three-halves law ({@link SpreadCathode}) of the control grid and the pull of the screen
  * with a small part of the anode voltage,
  *
- * <pre>{@code Ik = G mean((Vg + Vc + D (Vg2 + L Va))^(3/2)),  D spread over D0 (1 -+ s)}</pre>
+ * <pre>{@code Ik = G mean((Vg + Vc + D (Vg2 + L Va))^(3/2)),  D spread about D0}</pre>
  *
  * <p>and divides between anode and screen by a knee that moves with current ({@link
  * ScreenDivision}). Screen and anode tied give the triode connection, a screen on a tap of the
@@ -47,7 +47,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
             values.contactPotential(),
             values.penetration(),
             values.spread(),
-            0);
+            values.cathodeSpread());
     this.division = new ScreenDivision(values);
     this.gridCurrent =
         new GridCurrent(values.gridPerveance(), values.gridOnset(), values.thermalVoltage());
@@ -106,6 +106,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
             v.contactPotential() + contactShift,
             v.penetration(),
             v.spread(),
+            v.cathodeSpread(),
             v.anodeInfluence(),
             v.screenShare(),
             v.shareFall(),

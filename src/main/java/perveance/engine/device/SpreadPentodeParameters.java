@@ -9,7 +9,8 @@ import java.util.Map;
  * @param perveance G, above 0 [A V^-1.5]
  * @param contactPotential Vc, added to the grid voltage [V]
  * @param penetration D0, mean penetration factor of the screen through the grid, above 0 [1]
- * @param spread s, half width of the spread of D0 relative to it, 0 to 1 [1]
+ * @param spread s, sqrt 3 times the standard deviation of D over D0, 0 to 1 [1]
+ * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
  * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
  * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
  * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
@@ -28,6 +29,7 @@ public record SpreadPentodeParameters(
     double contactPotential,
     double penetration,
     double spread,
+    double cathodeSpread,
     double anodeInfluence,
     double screenShare,
     double shareFall,
@@ -44,6 +46,7 @@ public record SpreadPentodeParameters(
     finite("contactPotential", contactPotential);
     positive("penetration", penetration);
     within("spread", spread, 0, 1);
+    within("cathodeSpread", cathodeSpread, 0, 100);
     within("anodeInfluence", anodeInfluence, 0, 1);
     positive("screenShare", screenShare);
     within("shareFall", shareFall, 0, 3);
@@ -63,6 +66,7 @@ public record SpreadPentodeParameters(
           "contact_potential",
           "penetration",
           "spread",
+          "cathode_spread",
           "anode_influence",
           "screen_share",
           "share_fall",
@@ -91,7 +95,8 @@ public record SpreadPentodeParameters(
       v[i] = value;
     }
     return new SpreadPentodeParameters(
-        v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12], v[13]);
+        v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12], v[13],
+        v[14]);
   }
 
   /**
@@ -104,19 +109,20 @@ public record SpreadPentodeParameters(
         parameter(0, perveance, "A V^-1.5", "perveance of the cathode"),
         parameter(1, contactPotential, "V", "contact potential, added to the grid voltage"),
         parameter(2, penetration, "1", "mean penetration factor of the screen through the grid"),
-        parameter(3, spread, "1", "half width of the spread of the penetration factor"),
+        parameter(3, spread, "1", "spread of the penetration factor, relative"),
+        parameter(4, cathodeSpread, "V", "spread of the cathode's potential"),
         parameter(
-            4, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
-        parameter(5, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
-        parameter(6, shareFall, "1", "power by which the screen's share falls with anode voltage"),
-        parameter(7, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
+            5, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
+        parameter(6, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
+        parameter(7, shareFall, "1", "power by which the screen's share falls with anode voltage"),
+        parameter(8, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
         parameter(
-            8, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
-        parameter(9, knee, "1", "knee over the voltage that draws the current at no bias"),
-        parameter(10, kneeSharpness, "1", "1 for a rounded knee, larger for a sharp one"),
-        parameter(11, gridPerveance, "A V^-1.5", "perveance of the grid"),
-        parameter(12, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
-        parameter(13, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+            9, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
+        parameter(10, knee, "1", "knee over the voltage that draws the current at no bias"),
+        parameter(11, kneeSharpness, "1", "1 for a rounded knee, larger for a sharp one"),
+        parameter(12, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(13, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(14, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
   }
 
   private static LawParameter parameter(int index, double value, String unit, String meaning) {

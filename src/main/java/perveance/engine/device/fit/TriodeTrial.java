@@ -1,0 +1,193 @@
+package perveance.engine.device.fit;
+
+import java.util.ArrayList;
+import java.util.List;
+import perveance.engine.base.PhysicalConstants;
+import perveance.engine.device.Evidence;
+import perveance.engine.device.SpreadTriodeLaw;
+import perveance.engine.device.SpreadTriodeParameters;
+import perveance.engine.numeric.FitOutcome;
+import perveance.engine.numeric.FitParameter;
+import perveance.engine.numeric.LeastSquares;
+import perveance.engine.numeric.ParameterDomain;
+
+/** One fit of a triode from one start. */
+final class TriodeTrial {
+  /**
+   * Spread of an indirectly heated cathode's potential, sqrt 3 times its standard deviation: 2 k T
+   * / e at 1000 K, the order of initial velocities and of patches on an oxide cathode. The static
+   * evidence of the types with most of it allows 0.15 V to 0.35 V.
+   */
+  private static final double CATHODE_SPREAD = 0.3;
+
+  /** Common temperature of an oxide cathode [K]. */
+  private static final double CATHODE_TEMPERATURE = 1000;
+
+  /** Grid perveance over cathode perveance, the middle of three measured 12AX7 (DAFx-11). */
+  private static final double GRID_SHARE = 0.35;
+
+  /** Part of the cut-off voltage by which contact potentials differ besides. */
+  private static final double CONTACT_SHARE = 0.04;
+
+  private static final List<String> FITTED =
+      List.of("perveance", "contact_potential", "penetration", "spread");
+
+  private final List<Evidence> used;
+  private final List<Observation> observations;
+  private final FitConditions conditions;
+  private final GridClass gridClass;
+  private final FitOutcome outcome;
+
+  TriodeTrial(
+      List<Evidence> used,
+      List<Observation> observations,
+      FitConditions conditions,
+      GridClass gridClass,
+      double mu,
+      double spread) {
+    this.used = used;
+    this.observations = observations;
+    this.conditions = conditions;
+    this.gridClass = gridClass;
+    int count = observations.size();
+    double[] observed = new double[count + 2];
+    double[] deviation = new double[count + 2];
+    for (int i = 0; i < count; i++) {
+      observed[i] = observations.get(i).target();
+      deviation[i] = observations.get(i).deviation();
+    }
+    observed[count] = gridClass.spread();
+    deviation[count] = gridClass.spreadDeviation();
+    observed[count + 1] = gridClass.contactPotential();
+    deviation[count + 1] =
+        Math.hypot(gridClass.contactDeviation(), CONTACT_SHARE * highestVoltage() / mu);
+    List<FitParameter> start = start(mu, spread);
+    this.outcome =
+        conditions.robust()
+            ? LeastSquares.fitRobustly(this::predict, start, observed, deviation)
+            : LeastSquares.fit(this::predict, start, observed, deviation);
+  }
+
+  private double highestVoltage() {
+    return used.stream().mapToDouble(Evidence::anodeVoltage).max().orElse(0);
+  }
+
+  /** The perveance that gives the highest current at the assumed mu and spread. */
+  private List<FitParameter> start(double mu, double spread) {
+    double contact = gridClass == GridClass.FILAMENT ? 2 : gridClass.contactPotential();
+    double penetration = 1.03 / mu;
+    double perveance = 1e-3;
+    double highest = 0;
+    for (Evidence entry : used) {
+      double current = entry.anodeCurrent().orElse(0);
+      if (current > highest && !entry.kind().equals("cut-off")) {
+        highest = current;
+        LawReadings unit = new LawReadings(law(new double[] {1, contact, penetration, spread}));
+        double perUnit = unit.predict(entry, Figure.CURRENT);
+        perveance = perUnit > 0 ? current / perUnit : perveance;
+      }
+    }
+    return List.of(
+        new FitParameter("perveance", perveance, new ParameterDomain.Positive()),
+        new FitParameter("contact potential", contact, new ParameterDomain.Free(0.1)),
+        new FitParameter("penetration", penetration, new ParameterDomain.Positive()),
+        new FitParameter("spread", spread, new ParameterDomain.Between(0, 1)));
+  }
+
+  private SpreadTriodeLaw law(double[] p) {
+    double cathodeSpread =
+        CATHODE_SPREAD + conditions.filament().map(Filament::cathodeSpread).orElse(0.0);
+    return new SpreadTriodeLaw(
+        new SpreadTriodeParameters(
+            p[0],
+            p[1],
+            p[2],
+            p[3],
+            cathodeSpread,
+            gridClass.turnBack(),
+            GRID_SHARE * p[0],
+            conditions.gridOnset().orElse(gridClass.gridOnset()),
+            PhysicalConstants.thermalVoltage(CATHODE_TEMPERATURE)));
+  }
+
+  private void predict(double[] parameters, double[] predicted) {
+    LawReadings readings = new LawReadings(law(parameters));
+    int count = observations.size();
+    for (int i = 0; i < count; i++) {
+      predicted[i] = observations.get(i).predicted(readings);
+    }
+    predicted[count] = parameters[3];
+    predicted[count + 1] = parameters[1];
+  }
+
+  FitOutcome outcome() {
+    return outcome;
+  }
+
+  double rms() {
+    return fitted().rms();
+  }
+
+  private FitOutcome.Fitted fitted() {
+    if (outcome instanceof FitOutcome.Fitted fitted) {
+      return fitted;
+    }
+    throw new IllegalStateException("not fitted");
+  }
+
+  LawFit result() {
+    FitOutcome.Fitted fitted = fitted();
+    SpreadTriodeLaw law = law(fitted.parameters());
+    List<Residual> residuals = new LawReadings(law).compare(used);
+    List<Evidence> distrusted =
+        fitted.distrusted().stream()
+            .filter(place -> place < observations.size())
+            .map(place -> observations.get(place).evidence())
+            .distinct()
+            .toList();
+    return new LawFit(
+        law,
+        FitReport.summary(observations, residuals, fitted, assumptions(fitted)),
+        EvidenceRange.of(used),
+        residuals,
+        FITTED,
+        fitted.covariance(),
+        distrusted);
+  }
+
+  private List<String> assumptions(FitOutcome.Fitted fitted) {
+    List<String> assumptions = new ArrayList<>();
+    double left = fitted.standardDeviation(3) / gridClass.spreadDeviation();
+    if (left > 0.7) {
+      assumptions.add(
+          FitReport.text(
+              "the evidence does not fix the spread; the usual value of its class (%s) was taken,"
+                  + " %.2f +- %.2f",
+              gridClass.words(), gridClass.spread(), gridClass.spreadDeviation()));
+    }
+    assumptions.add(
+        conditions
+            .filament()
+            .map(
+                filament ->
+                    FitReport.text(
+                        "voltages refer to the filament's middle (%s); cathode spread half of"
+                            + " %.1f V and %.1f V",
+                        filament.heating() == Heating.ALTERNATING
+                            ? "heated with alternating current"
+                            : "evidence taken to the negative end of a filament heated with"
+                                + " direct current",
+                        filament.voltage(),
+                        CATHODE_SPREAD))
+            .orElse(
+                FitReport.text("cathode spread %.1f V: common to oxide cathodes", CATHODE_SPREAD)));
+    if (conditions.gridOnset().isEmpty()) {
+      assumptions.add(
+          FitReport.text(
+              "onset of grid current at %.1f V: value of its class, not published",
+              gridClass.gridOnset()));
+    }
+    assumptions.add("grid perveance 0.35 of the cathode's, cathode at 1000 K: common values");
+    return assumptions;
+  }
+}

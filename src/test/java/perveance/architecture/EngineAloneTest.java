@@ -4,7 +4,6 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 
 import java.io.IOException;
-import java.net.URISyntaxException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
@@ -25,7 +24,7 @@ import org.junit.jupiter.api.io.TempDir;
  */
 class EngineAloneTest {
   @Test
-  void theEngineCompilesAlone(@TempDir Path out) throws IOException, URISyntaxException {
+  void theEngineCompilesAlone(@TempDir Path out) throws IOException {
     List<Path> sources = Sources.under(Path.of("src", "main", "java", "perveance", "engine"));
     assertFalse(sources.isEmpty());
     List<String> options =
@@ -37,7 +36,7 @@ class EngineAloneTest {
             "-sourcepath",
             "",
             "-classpath",
-            jarOf(FastMath.class) + System.getProperty("path.separator") + jarOf(NullMarked.class),
+            Program.classPath(FastMath.class, NullMarked.class),
             "-d",
             out.toString());
     assertEquals("", String.join("\n", errors(sources, options)));
@@ -58,9 +57,5 @@ class EngineAloneTest {
       assertEquals(errors.isEmpty(), compiled, "the compiler failed without saying why");
       return errors;
     }
-  }
-
-  private static Path jarOf(Class<?> type) throws URISyntaxException {
-    return Path.of(type.getProtectionDomain().getCodeSource().getLocation().toURI());
   }
 }

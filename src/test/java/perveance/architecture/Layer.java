@@ -1,6 +1,7 @@
 package perveance.architecture;
 
 import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.domain.JavaClasses;
 import java.util.List;
 
 /**
@@ -24,7 +25,7 @@ record Layer(String name, List<String> layers, List<String> outside) {
     return packageName.equals(ROOT + name) || packageName.startsWith(ROOT + name + ".");
   }
 
-  boolean permitsOutside(JavaClass target) {
+  private boolean permitsOutside(JavaClass target) {
     String packageName = target.getPackageName();
     return outside.stream()
         .anyMatch(
@@ -32,5 +33,32 @@ record Layer(String name, List<String> layers, List<String> outside) {
                 permitted.endsWith("..")
                     ? (packageName + ".").startsWith(permitted.substring(0, permitted.length() - 1))
                     : packageName.equals(permitted) || target.getFullName().equals(permitted));
+  }
+
+  /**
+   * Looks for what the layer uses without permission.
+   *
+   * @param program classes to look at; those of other layers are passed over
+   * @return one line for each use, with its place
+   */
+  List<String> breaches(JavaClasses program) {
+    return program.stream()
+        .filter(type -> Layers.of(type.getPackageName()).filter(this::equals).isPresent())
+        .flatMap(type -> type.getDirectDependenciesFromSelf().stream())
+        .filter(dependency -> !permits(dependency.getTargetClass().getBaseComponentType()))
+        .map(dependency -> name + " may not use this: " + dependency.getDescription())
+        .toList();
+  }
+
+  private boolean permits(JavaClass target) {
+    if (target.isPrimitive()) {
+      return true;
+    }
+    if (!target.getPackageName().startsWith(ROOT)) {
+      return permitsOutside(target);
+    }
+    return Layers.of(target.getPackageName())
+        .filter(other -> other.equals(this) || layers.contains(other.name()))
+        .isPresent();
   }
 }

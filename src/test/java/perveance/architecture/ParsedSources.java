@@ -7,14 +7,12 @@ import com.sun.source.util.DocTrees;
 import com.sun.source.util.JavacTask;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.net.URI;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import javax.tools.JavaFileObject;
-import javax.tools.SimpleJavaFileObject;
 import javax.tools.StandardJavaFileManager;
 import javax.tools.ToolProvider;
 
@@ -74,16 +72,7 @@ final class ParsedSources {
    * @return its tree
    */
   static ParsedFile parse(String text) {
-    return parse(
-            List.of(
-                new SimpleJavaFileObject(
-                    URI.create("string:///Sample.java"), JavaFileObject.Kind.SOURCE) {
-                  @Override
-                  public CharSequence getCharContent(boolean ignoreEncodingErrors) {
-                    return text;
-                  }
-                }))
-        .get(0);
+    return parse(List.of(new TextSource("Sample.java", text))).get(0);
   }
 
   private static List<ParsedFile> parse(Iterable<? extends JavaFileObject> sources) {

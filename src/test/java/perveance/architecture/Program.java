@@ -2,9 +2,11 @@ package perveance.architecture;
 
 import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
+import java.io.File;
 import java.net.URL;
-import java.nio.file.Path;
 import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import perveance.launch.Main;
 
 /** The compiled classes of the program itself: no tests, no libraries. */
@@ -19,13 +21,14 @@ final class Program {
   }
 
   /**
-   * The place of a source folder; tests run in the project's folder.
+   * A class path for the compiler that holds chosen libraries and nothing else.
    *
-   * @param first first name of the path
-   * @param more further names
-   * @return the path
+   * @param types one class of each library
+   * @return their archives
    */
-  static Path folder(String first, String... more) {
-    return Path.of(first, more);
+  static String classPath(Class<?>... types) {
+    return Stream.of(types)
+        .map(type -> type.getProtectionDomain().getCodeSource().getLocation().getPath())
+        .collect(Collectors.joining(File.pathSeparator));
   }
 }

@@ -86,13 +86,13 @@ final class BareValue {
   /** The usual slip is a quantity without quotes, so say how to mend it. */
   private static TomlFault fault(Cursor cursor, int start) {
     String rest = cursor.shown(start);
-    if (rest.isEmpty()) {
+    if (rest.equals("nothing")) {
       return new TomlFault(cursor.line(), "nothing", "a value behind the equals sign");
     }
     if ("\u201C\u201D\u201E\u2018\u2019`".indexOf(rest.charAt(0)) >= 0) {
       String inner = rest.replaceAll("[\u201C\u201D\u201E\u2018\u2019`]", "");
       return new TomlFault(
-          cursor.line(), rest, "text in straight quotes", Optional.of(QuotedText.write(inner)));
+          cursor.line(), rest, "text in straight quotes", QuotedText.lackingQuotes(inner));
     }
     if (isPart(rest.charAt(0)) || Character.isLetterOrDigit(rest.charAt(0))) {
       String word = rest.replaceAll("[,\\]}\"'].*", "").strip();
@@ -100,7 +100,7 @@ final class BareValue {
           cursor.line(),
           Cursor.shorten(word),
           "text in quotes, a plain number, true or false",
-          Optional.of(QuotedText.write(word)));
+          QuotedText.lackingQuotes(word));
     }
     return new TomlFault(cursor.line(), rest, "a value: text in quotes, a number, true or false");
   }

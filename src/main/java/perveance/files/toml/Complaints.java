@@ -12,7 +12,8 @@ import java.util.Optional;
 record Complaints(String place, SourceText source, Problems problems) {
   /** How messages name a key of the table. */
   String within(String key) {
-    return place.isEmpty() ? key : place.concat(" ").concat(key);
+    String shown = key.isEmpty() ? key : Cursor.shorten(key);
+    return place.isEmpty() ? shown : place.concat(" ").concat(shown);
   }
 
   void add(Span span, String key, String found, String expected) {

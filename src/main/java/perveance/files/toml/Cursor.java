@@ -177,11 +177,15 @@ final class Cursor {
     return shorten(text.substring(start, end).strip());
   }
 
+  /** A text fit to be shown in a message. */
   static String shorten(String found) {
+    if (found.isBlank()) {
+      return "nothing";
+    }
     if (found.length() <= LONGEST_SHOWN) {
       return found;
     }
-    int end = Character.isHighSurrogate(found.charAt(LONGEST_SHOWN - 2)) ? 2 : 1;
-    return found.substring(0, LONGEST_SHOWN - end) + "\u2026";
+    int cut = Character.isHighSurrogate(found.charAt(LONGEST_SHOWN - 2)) ? 2 : 1;
+    return found.substring(0, LONGEST_SHOWN - cut) + "\u2026";
   }
 }

@@ -66,8 +66,7 @@ final class KeyValueReader {
             || value instanceof TomlValue.Table);
     String found = bare ? cursor.shown(value.span().start()) : cursor.restOfLine();
     throw bare
-        ? new TomlFault(
-            cursor.line(), found, "text in quotes", Optional.of(QuotedText.write(found)))
+        ? new TomlFault(cursor.line(), found, "text in quotes", QuotedText.lackingQuotes(found))
         : new TomlFault(cursor.line(), found, "the end of the line behind the value");
   }
 
@@ -94,7 +93,11 @@ final class KeyValueReader {
     Optional<TomlEntry> earlier = owner.find(entry.key());
     if (earlier.isPresent()) {
       TomlFault fault = Structure.repeated(entry.key(), earlier.get(), entry.line());
-      problems.add(entry.line(), fullName(owner, entry.key()), fault.found(), fault.expected());
+      problems.add(
+          entry.line(),
+          Cursor.shorten(fullName(owner, entry.key())),
+          fault.found(),
+          fault.expected());
     } else {
       owner.put(entry);
     }

@@ -13,6 +13,8 @@ public final class Problems {
   /** Nobody mends more than this in one go, and a damaged file could have one in every line. */
   static final int MOST = 100;
 
+  private static final int LONGEST_WORDS = 600;
+
   private final String file;
   private final List<Problem> problems = new ArrayList<>();
   private int unlisted;
@@ -49,7 +51,14 @@ public final class Problems {
    */
   public void add(
       int line, String key, String found, String expected, Optional<String> suggestion) {
-    add(new Problem(file, OptionalInt.of(line), key, found, expected, suggestion));
+    add(
+        new Problem(
+            file,
+            OptionalInt.of(line),
+            oneLine(key),
+            oneLine(found),
+            oneLine(expected),
+            suggestion));
   }
 
   /**
@@ -60,7 +69,14 @@ public final class Problems {
    * @param expected what should be
    */
   public void addWhole(String key, String found, String expected) {
-    add(new Problem(file, OptionalInt.empty(), key, found, expected, Optional.empty()));
+    add(
+        new Problem(
+            file,
+            OptionalInt.empty(),
+            oneLine(key),
+            oneLine(found),
+            oneLine(expected),
+            Optional.empty()));
   }
 
   /**
@@ -70,6 +86,19 @@ public final class Problems {
    */
   public void addAll(List<Problem> others) {
     others.forEach(this::add);
+  }
+
+  /** What a file holds may not garble the terminal it is told on, nor fill it. */
+  private static String oneLine(String words) {
+    String whole =
+        words.length() > LONGEST_WORDS ? words.substring(0, LONGEST_WORDS) + "\u2026" : words;
+    StringBuilder plain = new StringBuilder(whole);
+    for (int i = 0; i < plain.length(); i++) {
+      if (Character.isISOControl(plain.charAt(i))) {
+        plain.setCharAt(i, '?');
+      }
+    }
+    return plain.toString();
   }
 
   private void add(Problem problem) {
@@ -92,6 +121,15 @@ public final class Problems {
   }
 
   /**
+   * How much is wrong so far.
+   *
+   * @return number of problems
+   */
+  public int count() {
+    return problems.size() + unlisted;
+  }
+
+  /**
    * Whether nothing is wrong so far.
    *
    * @return true when there is no problem
@@ -101,13 +139,15 @@ public final class Problems {
   }
 
   /**
-   * The problems in the order of the file; those without a line last.
+   * The problems in the order of the file; those without a line, and those of other files, last.
    *
    * @return problems, at most a hundred and one that counts the rest
    */
   public List<Problem> list() {
     List<Problem> sorted = new ArrayList<>(problems);
-    sorted.sort(Comparator.comparingInt(p -> p.line().orElse(Integer.MAX_VALUE)));
+    sorted.sort(
+        Comparator.comparing((Problem p) -> !p.file().equals(file))
+            .thenComparingInt(p -> p.line().orElse(Integer.MAX_VALUE)));
     if (unlisted > 0) {
       sorted.add(
           new Problem(

@@ -1,6 +1,7 @@
 package perveance.files.toml;
 
 import java.util.Locale;
+import java.util.Optional;
 
 /** Reads the four quoted forms of TOML and writes the one that is needed. */
 final class QuotedText {
@@ -140,6 +141,13 @@ final class QuotedText {
       throw new TomlFault(cursor.line(), "an escape outside Unicode", "a Unicode character");
     }
     return value;
+  }
+
+  /** The text itself, where quotes around it are probably all that is missing. */
+  static Optional<String> lackingQuotes(String text) {
+    boolean plain =
+        text.chars().noneMatch(c -> Character.isISOControl(c) || "\"'=#\\\u2026".indexOf(c) >= 0);
+    return plain && !text.isBlank() ? Optional.of(text) : Optional.empty();
   }
 
   /** Puts a text into double quotes, escaping what needs it. */

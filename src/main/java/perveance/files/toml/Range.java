@@ -78,6 +78,9 @@ public record Range(Unit unit, double lowest, double highest) {
   }
 
   private String text(double value) {
+    if (unit == Unit.FARAD && value >= 1) {
+      return Math.round(value) + " F"; // parts that large are not written in microfarads
+    }
     return QuantityFormat.PLAIN.part(value, unit);
   }
 }

@@ -8,8 +8,6 @@ import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
 import perveance.engine.base.NearMiss;
-import perveance.engine.base.QuantityException;
-import perveance.engine.base.QuantityParser;
 
 /**
  * Reads a table strictly: every value must be of the form asked for and within its range, and what
@@ -83,6 +81,33 @@ public final class StrictTable {
    */
   public boolean has(String key) {
     return table.find(key).isPresent();
+  }
+
+  /**
+   * Whether a key stands there whose value could not be read, which is told already.
+   *
+   * @param key the key
+   * @return true when it does
+   */
+  public boolean unreadable(String key) {
+    Optional<TomlEntry> entry = table.find(key);
+    return entry.isPresent() && entry.get().value() instanceof TomlValue.Unreadable;
+  }
+
+  /**
+   * A value as text: without the quotes of a text, without the grouping or base of a number.
+   *
+   * @param key a key that stands there
+   * @return its text
+   */
+  public String written(String key) {
+    TomlValue value = table.find(key).orElseThrow().value();
+    if (value instanceof TomlValue.Text text) {
+      return text.text();
+    }
+    return value instanceof TomlValue.Whole whole
+        ? Long.toString(whole.number())
+        : complaints.source().slice(value.span()).replace("_", "");
   }
 
   /**
@@ -188,7 +213,9 @@ public final class StrictTable {
    */
   public OptionalDouble quantity(String key, Range range) {
     Optional<TomlEntry> entry = entry(key);
-    return entry.isEmpty() ? OptionalDouble.empty() : quantity(entry.get().value(), key, range);
+    return entry.isEmpty()
+        ? OptionalDouble.empty()
+        : QuantityValue.read(entry.get().value(), key, range, complaints);
   }
 
   /**
@@ -231,7 +258,7 @@ public final class StrictTable {
   public List<Double> quantities(String key, Range range) {
     List<Double> values = new ArrayList<>();
     for (TomlValue value : items(key)) {
-      OptionalDouble number = quantity(value, key, range);
+      OptionalDouble number = QuantityValue.read(value, key, range, complaints);
       if (number.isPresent()) {
         values.add(number.getAsDouble());
       }
@@ -355,32 +382,7 @@ public final class StrictTable {
   private Optional<TomlEntry> entry(String key) {
     known.add(key);
     Optional<TomlEntry> entry = table.find(key);
-    boolean readable = entry.isPresent() && !(entry.get().value() instanceof TomlValue.Unreadable);
-    return readable ? entry : Optional.empty();
-  }
-
-  private OptionalDouble quantity(TomlValue value, String key, Range range) {
-    double number;
-    if (value instanceof TomlValue.Text text) {
-      try {
-        number = QuantityParser.parse(text.text(), range.unit()).value();
-      } catch (QuantityException e) {
-        complaints.add(value.span(), key, e.found(), e.expected());
-        return OptionalDouble.empty();
-      }
-    } else if (value instanceof TomlValue.Whole whole) {
-      number = whole.number();
-    } else if (value instanceof TomlValue.Real real) {
-      number = real.number();
-    } else {
-      complaints.add(value.span(), key, complaints.shown(value), range.inWords());
-      return OptionalDouble.empty();
-    }
-    if (!range.holds(number)) {
-      complaints.add(value.span(), key, complaints.shown(value), range.inWords());
-      return OptionalDouble.empty();
-    }
-    return OptionalDouble.of(number);
+    return unreadable(key) ? Optional.empty() : entry;
   }
 
   private StrictTable below(TomlTable other, String otherPlace) {

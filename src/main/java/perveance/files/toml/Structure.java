@@ -26,7 +26,7 @@ final class Structure {
       found.table().open(header);
       return found.table();
     }
-    throw repeated(key, existing.get(), header.line());
+    throw repeated(String.join(".", parts), existing.get(), header.line());
   }
 
   /** One more table under a {@code [[header]]}. */
@@ -40,7 +40,7 @@ final class Structure {
     } else if (existing.get().value() instanceof TomlValue.Tables found) {
       found.tables().add(made);
     } else {
-      throw repeated(key, existing.get(), header.line());
+      throw repeated(String.join(".", parts), existing.get(), header.line());
     }
     return made;
   }

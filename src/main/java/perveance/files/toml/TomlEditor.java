@@ -66,6 +66,16 @@ public final class TomlEditor {
   }
 
   /**
+   * Gives a table another header.
+   *
+   * @param table a table with a header of its own
+   * @param header the header with its brackets
+   */
+  public void rename(TomlTable table, String header) {
+    edits.replace(table.span().start(), table.span().end(), header);
+  }
+
+  /**
    * Takes a key out, with the comment behind its value.
    *
    * @param table the table

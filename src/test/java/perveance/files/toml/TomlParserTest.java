@@ -99,10 +99,10 @@ class TomlParserTest {
         List.of(
             "amp.toml:1: found \"open, expected a closing \" on the same line",
             "amp.toml:2: found 100k, expected text in quotes, a plain number, true or false;"
-                + " did you mean \"\"100k\"\"?",
+                + " did you mean \"100k\"?",
             "amp.toml:3: found [supply.A, expected a closing ]",
             "amp.toml:6: found \u201CV1a\u201D, expected text in straight quotes;"
-                + " did you mean \"\"V1a\"\"?",
+                + " did you mean \"V1a\"?",
             "amp.toml:7: found nothing, expected a value behind the equals sign",
             "amp.toml:8: stage.ref: found ref a second time,"
                 + " expected it once only; it stands in line 6 already",

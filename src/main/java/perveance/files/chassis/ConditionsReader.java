@@ -1,0 +1,31 @@
+package perveance.files.chassis;
+
+import perveance.engine.stage.Conditions;
+import perveance.files.toml.StrictTable;
+
+/** Reads the table of conditions. */
+final class ConditionsReader {
+  private ConditionsReader() {}
+
+  static Conditions read(StrictTable table) {
+    double mains = value(table, ConditionKey.MAINS);
+    Conditions conditions =
+        new Conditions(
+            mains,
+            table
+                .quantity(ConditionKey.MAINS_ACTUAL.key(), ConditionKey.MAINS_ACTUAL.range())
+                .orElse(mains),
+            value(table, ConditionKey.MAINS_FREQUENCY),
+            value(table, ConditionKey.METER),
+            value(table, ConditionKey.RESISTOR_TOLERANCE),
+            value(table, ConditionKey.CAPACITOR_TOLERANCE),
+            value(table, ConditionKey.SUPPLY_TOLERANCE),
+            value(table, ConditionKey.THRESHOLD));
+    table.refuseOthers();
+    return conditions;
+  }
+
+  private static double value(StrictTable table, ConditionKey key) {
+    return table.quantity(key.key(), key.range()).orElse(key.of(Conditions.USUAL));
+  }
+}

@@ -1,0 +1,68 @@
+package perveance.files.chassis;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import perveance.engine.base.Unit;
+import perveance.engine.stage.Supply;
+import perveance.engine.stage.SupplyFeed;
+import perveance.files.toml.Range;
+import perveance.files.toml.StrictTable;
+
+/** Reads one supply node. */
+final class SupplyReader {
+  /** The keys in their usual order. */
+  static final List<String> ORDER = List.of("voltage", "from", "dropper", "reservoir", "bleeder");
+
+  static final Range VOLTAGE = Range.within(Unit.VOLT, 10_000);
+  static final Range RESISTANCE = new Range(Unit.OHM, 0.01, 1e9);
+  static final Range CAPACITANCE = new Range(Unit.FARAD, 1e-12, 1);
+
+  private SupplyReader() {}
+
+  /** Reads the node; empty after a complaint about where its voltage comes from. */
+  static Optional<Supply> read(String name, StrictTable table) {
+    OptionalDouble voltage = table.quantity("voltage", VOLTAGE);
+    Optional<String> from = table.text("from");
+    OptionalDouble dropper = table.quantity("dropper", RESISTANCE);
+    OptionalDouble reservoir = table.quantity("reservoir", CAPACITANCE);
+    OptionalDouble bleeder = table.quantity("bleeder", RESISTANCE);
+    table.refuseOthers();
+    Optional<SupplyFeed> feed = feed(table, voltage, from, dropper);
+    return feed.isEmpty()
+        ? Optional.empty()
+        : Optional.of(new Supply(name, feed.get(), reservoir, bleeder));
+  }
+
+  private static Optional<SupplyFeed> feed(
+      StrictTable table, OptionalDouble voltage, Optional<String> from, OptionalDouble dropper) {
+    boolean stated = table.has("voltage");
+    boolean fed = table.has("from") || table.has("dropper");
+    if (stated && fed) {
+      table.complain("voltage", "a voltage as well as from and dropper", "one or the other");
+      return Optional.empty();
+    }
+    if (!stated && !fed) {
+      table.require("voltage", "a voltage, or from and dropper");
+      return Optional.empty();
+    }
+    if (stated) {
+      return stated(table, voltage);
+    }
+    table.require("from", "the supply node that feeds this one");
+    table.require("dropper", "the resistor from the node that feeds this one");
+    return from.isPresent() && dropper.isPresent()
+        ? Optional.of(new SupplyFeed.Dropped(from.get(), dropper.getAsDouble()))
+        : Optional.empty();
+  }
+
+  private static Optional<SupplyFeed> stated(StrictTable table, OptionalDouble voltage) {
+    if (voltage.isPresent() && voltage.getAsDouble() == 0) {
+      table.complain("voltage", "0 V", "a voltage above or below 0");
+      return Optional.empty();
+    }
+    return voltage.isPresent()
+        ? Optional.of(new SupplyFeed.Stated(voltage.getAsDouble()))
+        : Optional.empty();
+  }
+}

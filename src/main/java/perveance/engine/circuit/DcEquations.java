@@ -85,4 +85,10 @@ final class DcEquations {
       system.branch(firstBranch + w, winding.start(), winding.end(), winding.resistance(), 0);
     }
   }
+
+  /** Current of a branch of an element, zero for an open capacitor [A]. */
+  double branchCurrent(double[] unknowns, int element, int winding) {
+    int branch = branchOf[element];
+    return branch < 0 ? 0 : unknowns[system.branchRow(branch + winding)];
+  }
 }

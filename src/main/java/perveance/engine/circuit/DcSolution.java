@@ -8,16 +8,20 @@ public final class DcSolution {
   private final Circuit circuit;
   private final double[] voltage;
   private final double[] unknowns;
-  private final DcCurrents currents;
+  private final CurrentLedger currents;
   private final List<ValvePoint> valves;
 
   DcSolution(DcEquations equations, double[] unknowns) {
     this.circuit = equations.values.asCircuit();
     this.voltage = equations.system.voltage.clone();
     this.unknowns = unknowns.clone();
-    this.currents = new DcCurrents(equations, unknowns);
-    List<ValvePoint> points = new ArrayList<>();
     ValveBank bank = equations.system.valves;
+    this.currents = new CurrentLedger(equations.topology, bank, equations.system.junctions);
+    currents.fill(
+        equations.values,
+        voltage,
+        (element, winding) -> equations.branchCurrent(this.unknowns, element, winding));
+    List<ValvePoint> points = new ArrayList<>();
     for (int v = 0; v < bank.count; v++) {
       double cathode = voltage[bank.cathode(v)];
       double[] toCathode = {

@@ -103,11 +103,16 @@ final class NodalSystem {
     }
   }
 
-  /** Evaluates all devices at x and writes what is left of the equations. */
-  void residual(double[] x, double[] out) {
+  /** Evaluates all devices at x. */
+  void evaluate(double[] x) {
     spread(x);
     valves.evaluate(voltage);
     junctions.evaluate(voltage);
+  }
+
+  /** Evaluates all devices at x and writes what is left of the equations. */
+  void residual(double[] x, double[] out) {
+    evaluate(x);
     for (int i = 0; i < size; i++) {
       double sum = constant[i];
       int at = i * size;

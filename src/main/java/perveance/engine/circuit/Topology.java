@@ -70,6 +70,16 @@ final class Topology {
     this.unknownNodes = next;
   }
 
+  /** Whether a voltage source lies between unknown nodes, so that its current is an unknown. */
+  boolean floats(int element) {
+    for (int source : floatingSources) {
+      if (source == element) {
+        return true;
+      }
+    }
+    return false;
+  }
+
   /** Writes the known node voltages for the sources' present values, all of them scaled [V]. */
   void writeKnown(ElementValues values, double scale, double[] voltage) {
     voltage[0] = 0;

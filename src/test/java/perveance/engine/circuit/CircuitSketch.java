@@ -1,12 +1,16 @@
 package perveance.engine.circuit;
 
+import java.util.ArrayList;
+import java.util.List;
 import perveance.engine.circuit.Element.Capacitor;
 import perveance.engine.circuit.Element.CurrentSource;
 import perveance.engine.circuit.Element.Inductor;
 import perveance.engine.circuit.Element.Junction;
 import perveance.engine.circuit.Element.Resistor;
+import perveance.engine.circuit.Element.Transformer;
 import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.Element.VoltageSource;
+import perveance.engine.circuit.Element.Winding;
 import perveance.engine.device.DeviceLaw;
 
 /** Writes test circuits in a line an element, nodes by name; "0" is chassis. */
@@ -55,6 +59,18 @@ final class CircuitSketch {
   CircuitSketch triode(String name, DeviceLaw law, String anode, String grid, String cathode) {
     int k = node(cathode);
     builder.add(new Valve(name, law, node(anode), node(grid), k, k));
+    return this;
+  }
+
+  /** A winding between named nodes. */
+  record Coil(String start, String end, double turns, double ohm, double leakage) {}
+
+  CircuitSketch transformer(String name, double magnetising, Coil... coils) {
+    List<Winding> windings = new ArrayList<>();
+    for (Coil c : coils) {
+      windings.add(new Winding(node(c.start), node(c.end), c.turns, c.ohm, c.leakage));
+    }
+    builder.add(new Transformer(name, windings, magnetising));
     return this;
   }
 

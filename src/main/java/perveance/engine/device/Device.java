@@ -20,6 +20,7 @@ import java.util.Optional;
  * @param fit how good the fit is, in words and figures
  * @param validity region covered by evidence
  * @param notes published disagreements, assumptions
+ * @param rectifier what is published of a rectifier beside its law; empty for other kinds
  */
 public record Device(
     String type,
@@ -34,7 +35,8 @@ public record Device(
     DeviceLaw law,
     FitSummary fit,
     Validity validity,
-    List<String> notes) {
+    List<String> notes,
+    Optional<RectifierRatings> rectifier) {
   /** Copies what could change. */
   public Device {
     aliases = List.copyOf(aliases);
@@ -43,6 +45,54 @@ public record Device(
     ratings = List.copyOf(ratings);
     evidence = List.copyOf(evidence);
     notes = List.copyOf(notes);
+  }
+
+  /**
+   * A device that is no rectifier.
+   *
+   * @param type type designation
+   * @param aliases other names of the same device
+   * @param sections how many equal systems one envelope holds
+   * @param base base
+   * @param pins pins by number and electrode
+   * @param heaters ways of wiring the heater
+   * @param ratings limits
+   * @param capacitances of one section
+   * @param evidence what the law answers to
+   * @param law fitted law of one section
+   * @param fit how good the fit is
+   * @param validity region covered by evidence
+   * @param notes published disagreements, assumptions
+   */
+  public Device(
+      String type,
+      List<String> aliases,
+      int sections,
+      String base,
+      Map<String, String> pins,
+      List<Heater> heaters,
+      List<Ratings> ratings,
+      Capacitances capacitances,
+      List<Evidence> evidence,
+      DeviceLaw law,
+      FitSummary fit,
+      Validity validity,
+      List<String> notes) {
+    this(
+        type,
+        aliases,
+        sections,
+        base,
+        pins,
+        heaters,
+        ratings,
+        capacitances,
+        evidence,
+        law,
+        fit,
+        validity,
+        notes,
+        Optional.empty());
   }
 
   /**

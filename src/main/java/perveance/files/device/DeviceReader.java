@@ -13,6 +13,7 @@ import perveance.engine.device.Evidence;
 import perveance.engine.device.FitSummary;
 import perveance.engine.device.Heater;
 import perveance.engine.device.Ratings;
+import perveance.engine.device.RectifierRatings;
 import perveance.engine.device.Validity;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
@@ -95,7 +96,8 @@ public final class DeviceReader {
         ratings(type),
         capacitances(),
         evidence(usualConnection(kind)),
-        root.texts("notes"));
+        root.texts("notes"),
+        rectifier(type));
   }
 
   private Optional<StrictTable> part(String key) {
@@ -118,6 +120,13 @@ public final class DeviceReader {
   private Capacitances capacitances() {
     Optional<StrictTable> table = root.table("capacitance");
     return table.isEmpty() ? Capacitances.NONE : RatingsReader.capacitances(table.get());
+  }
+
+  private Optional<RectifierRatings> rectifier(String type) {
+    Optional<StrictTable> table = root.table("rectifier");
+    return table.isEmpty()
+        ? Optional.empty()
+        : Optional.of(RectifierReader.read(table.get(), type));
   }
 
   private static String usualConnection(String kind) {

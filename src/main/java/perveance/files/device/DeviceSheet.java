@@ -4,6 +4,7 @@ import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import perveance.engine.device.Capacitances;
 import perveance.engine.device.Device;
 import perveance.engine.device.DeviceLaw;
@@ -11,6 +12,7 @@ import perveance.engine.device.Evidence;
 import perveance.engine.device.FitSummary;
 import perveance.engine.device.Heater;
 import perveance.engine.device.Ratings;
+import perveance.engine.device.RectifierRatings;
 import perveance.engine.device.Validity;
 
 /**
@@ -27,6 +29,7 @@ import perveance.engine.device.Validity;
  * @param capacitances of one section
  * @param evidence what a law must answer to
  * @param notes published disagreements
+ * @param rectifier what is published of a rectifier beside its law
  */
 public record DeviceSheet(
     String type,
@@ -39,7 +42,8 @@ public record DeviceSheet(
     List<Ratings> ratings,
     Capacitances capacitances,
     List<Evidence> evidence,
-    List<String> notes) {
+    List<String> notes,
+    Optional<RectifierRatings> rectifier) {
   /** Copies what could change. */
   public DeviceSheet {
     aliases = List.copyOf(aliases);
@@ -72,6 +76,7 @@ public record DeviceSheet(
         law,
         fit,
         validity,
-        notes);
+        notes,
+        rectifier);
   }
 }

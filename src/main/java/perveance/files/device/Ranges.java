@@ -15,6 +15,7 @@ final class Ranges {
   static final Range CONDUCTANCE = Range.above0(Unit.SIEMENS, 10);
   static final Range FACTOR = Range.above0(Unit.RATIO, 100_000);
   static final Range CAPACITANCE = Range.from0(Unit.FARAD, 1e-8);
+  static final Range RESERVOIR = Range.above0(Unit.FARAD, 0.1);
   static final Range ERROR = Range.from0(Unit.RATIO, 1000);
   static final Range NUMBER = Range.within(Unit.RATIO, 1e12);
 

@@ -44,7 +44,7 @@ final class RatingsReader {
     return ratings;
   }
 
-  private static RatingSystem system(StrictTable table) {
+  static RatingSystem system(StrictTable table) {
     String word = table.word("system", SYSTEMS).orElse("unstated");
     for (RatingSystem system : RatingSystem.values()) {
       if (system.word().equals(word)) {

@@ -66,7 +66,12 @@ final class Layers {
               "files",
               with(ENGINE, "app"),
               // the program's own device files are listed out of its jar
-              with(FILE_JDK, "java.util.jar", "java.util.zip", "com.fasterxml.jackson.core..")),
+              with(
+                  FILE_JDK,
+                  "java.nio.channels",
+                  "java.util.jar",
+                  "java.util.zip",
+                  "com.fasterxml.jackson.core..")),
           new Layer(
               "plot",
               with(ENGINE, "app"),

@@ -11,7 +11,7 @@ import perveance.engine.device.Evidence;
  * <p>Deviations, the same for every type: tabulated current, mu, ra and gm 3 % (printed to two
  * figures and rounded against each other; 3.7 % each where all three slopes of a point are given,
  * because mu = gm ra makes one of them no news), with a floor for small currents of 0.2 % of the
- * highest; chart readings 0.6 % of the chart's highest current and 1 %; cut-off points 6 % of the
+ * highest; chart readings 0.6 % of the chart's highest current and 1 %; cut-off points 4 % of the
  * grid voltage ("approximate" on the sheets). Figures marked low do not count.
  */
 final class Observations {
@@ -20,7 +20,7 @@ final class Observations {
   private static final double TABLE_FLOOR = 0.002;
   private static final double CHART_FLOOR = 0.006;
   private static final double CHART = 0.01;
-  private static final double CUT_OFF = 0.06;
+  private static final double CUT_OFF = 0.04;
 
   private Observations() {}
 

@@ -65,10 +65,16 @@ class SingleEndedTriodesTest {
       List<Double> power, List<Double> power300b, List<Double> second, List<Double> third) {}
 
   static Errors errors() {
+    return errors("");
+  }
+
+  /** Errors of one type, or of all. */
+  static Errors errors(String type) {
     Errors errors =
         new Errors(new ArrayList<>(), new ArrayList<>(), new ArrayList<>(), new ArrayList<>());
     for (ReferenceTable.Row row : ReferenceTable.read("single-ended-triodes.tsv")) {
-      if (row.maybe("drive_V_peak").isEmpty()) {
+      boolean wanted = type.isEmpty() || row.text("type").equals(type);
+      if (!wanted || row.maybe("drive_V_peak").isEmpty()) {
         continue;
       }
       TestStage.Driven driven = stage(row).driven(row.number("drive_V_peak"));

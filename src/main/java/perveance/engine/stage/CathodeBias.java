@@ -58,6 +58,21 @@ final class CathodeBias {
     return complaints;
   }
 
+  /** Checks the cathode, and that something makes a bias for a grid that is not held by a stage. */
+  static List<Complaint> checkBias(StageValues values) {
+    List<Complaint> complaints = new ArrayList<>(check(values));
+    boolean biased = raised(values) || values.has(StageKeys.GRID_BIAS.key());
+    if (!biased && !values.has(StageKeys.GRID_LEAK.key()) && !GridInput.direct(values)) {
+      complaints.add(
+          new Complaint(
+              StageKeys.GRID_LEAK.key(),
+              "nothing that makes the bias",
+              "a cathode_resistor, a cathode_voltage, a grid_bias, or a grid_leak for grid-leak"
+                  + " bias"));
+    }
+    return complaints;
+  }
+
   /**
    * Wires the cathode.
    *
@@ -104,15 +119,20 @@ final class CathodeBias {
 
   /** Draws everything below a cathode terminal. */
   static void sketch(Sketch sketch, int x, int y) {
+    sketch(sketch, x, y, "");
+  }
+
+  /** Draws what one of two valves has below its cathode. */
+  static void sketch(Sketch sketch, int x, int y, String suffix) {
     StageValues values = sketch.values();
     if (!raised(values)) {
       sketch.ground(x, y);
       return;
     }
     sketch.wire(x, y, x, y + 3);
-    sketch.mark(x, y + 2, "cathode", Side.LEFT);
+    sketch.mark(x, y + 2, "cathode" + suffix, Side.LEFT);
     if (values.has(CATHODE_RESISTOR.key())) {
-      sketch.upright(SymbolType.RESISTOR, x, y + 5, CATHODE_RESISTOR.key(), Side.LEFT);
+      sketch.upright(SymbolType.RESISTOR, x, y + 5, CATHODE_RESISTOR.key() + suffix, Side.LEFT);
     } else {
       Optional<String> word = values.word(CATHODE_DIODE.key());
       BiasDiode diode = BiasDiode.choose(values.number(CATHODE_VOLTAGE.key()), word);
@@ -120,10 +140,9 @@ final class CathodeBias {
     }
     sketch.ground(x, y + 7);
     if (values.has(CATHODE_BYPASS.key())) {
-      boolean electrolytic = StageWiring.electrolytic(values.number(CATHODE_BYPASS.key()));
-      SymbolType type = electrolytic ? SymbolType.ELECTROLYTIC : SymbolType.CAPACITOR;
+      SymbolType type = StageWiring.capacitorSymbol(values, CATHODE_BYPASS);
       sketch.wire(x, y + 2, x + BYPASS, y + 2, x + BYPASS, y + 3);
-      sketch.upright(type, x + BYPASS, y + 5, CATHODE_BYPASS.key(), Side.RIGHT);
+      sketch.upright(type, x + BYPASS, y + 5, CATHODE_BYPASS.key() + suffix, Side.RIGHT);
       sketch.ground(x + BYPASS, y + 7);
     }
   }

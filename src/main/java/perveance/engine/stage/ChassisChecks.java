@@ -2,13 +2,14 @@ package perveance.engine.stage;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.stream.Collectors;
 import perveance.engine.base.NearMiss;
+import perveance.engine.circuit.Circuit;
 import perveance.engine.device.Device;
 import perveance.engine.device.DeviceLibrary;
 import perveance.engine.device.LawKind;
@@ -22,6 +23,7 @@ public final class ChassisChecks {
   private final Chassis chassis;
   private final DeviceLibrary library;
   private final List<ChassisComplaint> complaints = new ArrayList<>();
+  private final Map<Integer, Set<String>> valves = new HashMap<>();
 
   private ChassisChecks(Chassis chassis, DeviceLibrary library) {
     this.chassis = chassis;
@@ -38,10 +40,10 @@ public final class ChassisChecks {
   public static List<ChassisComplaint> beyondKeys(Chassis chassis, DeviceLibrary library) {
     ChassisChecks checks = new ChassisChecks(chassis, library);
     checks.complaints.addAll(SupplyChecks.complaints(chassis));
-    checks.references();
     for (int i = 0; i < chassis.stages().size(); i++) {
       checks.stage(i, chassis.stages().get(i));
     }
+    checks.references();
     checks.complaints.addAll(DriveChecks.complaints(chassis));
     return List.copyOf(checks.complaints);
   }
@@ -72,27 +74,22 @@ public final class ChassisChecks {
       if (!ChassisNames.wellFormed(entry.ref())) {
         add(i, "ref", "\"" + entry.ref() + "\"", ChassisNames.FORM);
       }
-      Set<String> names = new TreeSet<>(Set.of(entry.ref()));
-      names.addAll(valves(entry));
+      Set<String> names = new TreeSet<>(valves.getOrDefault(i, Set.of()));
+      names.add(entry.ref());
       for (String name : names) {
         String owner = owners.putIfAbsent(name, entry.ref());
         if (owner != null) {
-          String key = name.equals(entry.ref()) ? "ref" : StageKeys.REF2.key();
-          add(i, key, "\"" + name + "\", which " + owner + " has", "a name of its own");
+          add(i, "ref", "\"" + name + "\", which " + owner + " has", "a name of its own");
         }
       }
     }
   }
 
-  /** Names of the valves that a stage brings besides its own reference. */
-  private static Set<String> valves(StageEntry entry) {
-    Set<String> names = new HashSet<>();
-    StageValues values = new StageValues(entry, Map.of());
-    values.word(StageKeys.REF2.key()).ifPresent(names::add);
-    for (int i = 0; i < Sections.count(values) && Sections.count(values) > 1; i++) {
-      names.add(Sections.ref(values, i));
-    }
-    return names;
+  /** Names of the valves that a stage brings, found by building it alone. */
+  private static Set<String> valves(StageKind kind, StageValues values) {
+    return kind.build(values, new Circuit.Builder()).devices().stream()
+        .map(StageCircuit.StageDevice::ref)
+        .collect(Collectors.toSet());
   }
 
   private void stage(int index, StageEntry entry) {
@@ -109,8 +106,10 @@ public final class ChassisChecks {
         && KeyChecks.complaints(index, entry, kind.get()).isEmpty()) {
       Surroundings around = ChassisWiring.roughly(chassis, entry);
       StageValues values = new StageValues(entry, devices, around);
-      for (StageKind.Complaint c : kind.get().check(values)) {
-        add(index, c.key(), c.found(), c.expected());
+      List<StageKind.Complaint> contradictions = kind.get().check(values);
+      contradictions.forEach(c -> add(index, c.key(), c.found(), c.expected()));
+      if (contradictions.isEmpty()) {
+        valves.put(index, valves(kind.get(), values));
       }
     }
   }

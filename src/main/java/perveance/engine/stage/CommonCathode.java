@@ -8,7 +8,6 @@ import static perveance.engine.stage.StageKeys.SUPPLY;
 import java.util.ArrayList;
 import java.util.List;
 import perveance.engine.circuit.Circuit;
-import perveance.engine.circuit.Element;
 import perveance.engine.stage.Drawing.Side;
 import perveance.engine.stage.Drawing.SymbolType;
 
@@ -17,9 +16,6 @@ import perveance.engine.stage.Drawing.SymbolType;
  * by whatever stands in the cathode or at the foot of the grid leak.
  */
 final class CommonCathode implements StageKind {
-  /** Resistance of a current source where none is stated; a cascoded one has more [ohm]. */
-  private static final double USUAL_SOURCE_RESISTANCE = 10e6;
-
   private static final List<KeySpec> KEYS =
       KeyList.of(
           List.of(
@@ -69,12 +65,9 @@ final class CommonCathode implements StageKind {
       wiring.resistor(ANODE_LOAD, supply, anode, "anode load");
       return GroundedCathode.wire(wiring, anode, values.number(ANODE_LOAD.key()));
     }
-    double current = values.number(ANODE_CURRENT.key());
-    String name = wiring.name(ANODE_CURRENT.key());
-    wiring.element(new Element.CurrentSource(name, supply, anode, current));
-    double resistance = values.number(CURRENT_SOURCE_RESISTANCE.key(), USUAL_SOURCE_RESISTANCE);
-    wiring.outerResistor(CURRENT_SOURCE_RESISTANCE.key(), supply, anode, resistance);
-    wiring.assume("The current source works at any voltage across it.");
+    wiring.currentSource(ANODE_CURRENT, supply, anode);
+    double resistance =
+        values.number(CURRENT_SOURCE_RESISTANCE.key(), StageWiring.USUAL_SOURCE_RESISTANCE);
     return GroundedCathode.wire(wiring, anode, resistance);
   }
 
@@ -84,10 +77,10 @@ final class CommonCathode implements StageKind {
     int x = GroundedCathode.X;
     boolean resistor = values.has(ANODE_LOAD.key());
     if (resistor) {
-      sketch.upright(SymbolType.RESISTOR, x, GroundedCathode.LOAD, ANODE_LOAD.key(), Side.RIGHT);
+      sketch.upright(SymbolType.RESISTOR, x, AnodeLoad.LOAD, ANODE_LOAD.key(), Side.RIGHT);
     } else {
       String local = ANODE_CURRENT.key();
-      sketch.upright(SymbolType.CURRENT_SOURCE, x, GroundedCathode.LOAD, local, Side.RIGHT);
+      sketch.upright(SymbolType.CURRENT_SOURCE, x, AnodeLoad.LOAD, local, Side.RIGHT);
     }
     GroundedCathode.sketch(sketch);
     return sketch.finish();

@@ -31,10 +31,11 @@ public record Drawing(
    * @param x centre
    * @param y centre
    * @param turned true when a two-terminal symbol lies along x instead of along y
-   * @param mirrored true when a valve's grid is on the right
-   * @param part name of the circuit element it shows: a part or a valve of the stage, {@code
-   *     ref.source} at the input terminal, {@code ref.grid_bias} at a bias, {@code supply.A} at a
-   *     rail; empty for ground, outputs and dots
+   * @param mirrored true when a valve's grid is on the right, or a terminal is on the other side of
+   *     its wire than usual (input left, output right)
+   * @param part name of the circuit element it shows: a part or a valve of the stage, a capacitor
+   *     that must be there but is not stated, {@code ref.source} at the input terminal, {@code
+   *     ref.grid_bias} at a bias, {@code supply.A} at a rail; empty for ground, outputs and dots
    * @param label side on which its text stands
    * @param text fixed text, for example the name of a supply node; may be empty
    */

@@ -48,6 +48,13 @@ final class DriveChecks {
     if (before != null) {
       String found = driven + ", which " + before + " drives already";
       add(index, found, "one driver for a stage", Optional.empty());
+    } else if (ChassisWiring.direct(entry) && loaded(entry)) {
+      String ref = entry.ref();
+      String key = StageKeys.LOAD.key();
+      String found = "a load beside the wire to " + driven;
+      String expected = "a coupling to " + driven + ", or no load";
+      complaints.add(
+          new ChassisComplaint(Place.STAGE, index, ref, key, found, expected, Optional.empty()));
     } else if (inCircle(entry)) {
       add(
           index,
@@ -55,6 +62,10 @@ final class DriveChecks {
           "a chain with an end",
           Optional.empty());
     }
+  }
+
+  private static boolean loaded(StageEntry entry) {
+    return entry.settings().containsKey(StageKeys.LOAD.key());
   }
 
   private boolean inCircle(StageEntry start) {

@@ -49,20 +49,29 @@ final class GridInput {
 
   /** Wires the input up to the node before the stopper. */
   static int wire(StageWiring wiring, int foot) {
-    StageValues values = wiring.values();
-    int joint = entry(wiring);
-    if (hasLeak(values)) {
-      double leak = values.number(GRID_LEAK.key(), USUAL_LEAK);
-      if (!values.has(GRID_LEAK.key())) {
-        wiring.assume("The grid leak is not stated; taken as 1 Mohm.");
-      }
-      wiring.resistor(GRID_LEAK.key(), GRID_LEAK, leak, joint, foot, "grid leak");
+    int joint = entry(wiring, "grid_in");
+    if (hasLeak(wiring.values())) {
+      leak(wiring, joint, foot, "");
     }
     return joint;
   }
 
-  /** Wires the source, or takes the wire from the stage before. */
-  static int entry(StageWiring wiring) {
+  /** Wires a grid leak. */
+  static void leak(StageWiring wiring, int joint, int foot, String suffix) {
+    double leak = wiring.values().number(GRID_LEAK.key(), USUAL_LEAK);
+    if (!wiring.values().has(GRID_LEAK.key())) {
+      wiring.assume("The grid leak is not stated; taken as 1 Mohm.");
+    }
+    wiring.resistor(GRID_LEAK.key() + suffix, GRID_LEAK, leak, joint, foot, "grid leak");
+  }
+
+  /**
+   * Wires the source, or takes the wire from the stage before.
+   *
+   * @param local name of the node that the signal is for
+   * @return that node
+   */
+  static int entry(StageWiring wiring, String local) {
     Optional<String> straight = wiring.values().around().directInput();
     if (straight.isPresent()) {
       int node = wiring.outerNode(straight.get());
@@ -71,7 +80,7 @@ final class GridInput {
     }
     int source = wiring.node("input");
     int entry = wiring.node("entry");
-    int joint = wiring.node("grid_in");
+    int joint = wiring.node(local);
     wiring.voltageSource("input", source, 0, 0);
     wiring.outerResistor(SOURCE.key(), source, entry, sourceResistance(wiring));
     coupling(wiring, INPUT_COUPLING.key(), entry, joint);
@@ -123,10 +132,23 @@ final class GridInput {
   static void sketch(Sketch sketch, int joint, int y) {
     terminal(sketch, joint, y);
     if (hasLeak(sketch.values())) {
-      sketch.wire(joint, y, joint, y + 2);
-      sketch.upright(SymbolType.RESISTOR, joint, y + 4, GRID_LEAK.key(), Side.LEFT);
+      sketchLeak(sketch, joint, y, "");
       foot(sketch, joint, y + 6);
     }
+  }
+
+  /** Draws an input whose leak, if there is one, returns to the point given. */
+  static void sketchTo(Sketch sketch, int joint, int y, int footX, int footY) {
+    terminal(sketch, joint, y);
+    if (hasLeak(sketch.values())) {
+      sketchLeak(sketch, joint, y, "");
+      sketch.wire(joint, y + 6, joint, footY, footX, footY);
+    }
+  }
+
+  static void sketchLeak(Sketch sketch, int joint, int y, String suffix) {
+    sketch.wire(joint, y, joint, y + 2);
+    sketch.upright(SymbolType.RESISTOR, joint, y + 4, GRID_LEAK.key() + suffix, Side.LEFT);
   }
 
   static void terminal(Sketch sketch, int joint, int y) {

@@ -1,7 +1,6 @@
 package perveance.engine.stage;
 
 import static perveance.engine.stage.StageKeys.GRID_BIAS;
-import static perveance.engine.stage.StageKeys.GRID_LEAK;
 import static perveance.engine.stage.StageKeys.SECTIONS;
 import static perveance.engine.stage.StageKeys.SUPPLY;
 
@@ -33,32 +32,15 @@ final class GroundedCathode {
   /** Where the valve stands. */
   static final int X = 20;
 
-  /** Height of the centre of what feeds the anode. */
-  static final int LOAD = 5;
-
-  private static final int RAIL = 2;
-  private static final int ANODE = 9;
   private static final int GRID = 16;
   private static final int JOINT = 8;
-
-  /** Taken where a stage stands without a supply, to choose a diode's working current [V]. */
-  private static final double USUAL_SUPPLY = 250;
 
   private GroundedCathode() {}
 
   static List<Complaint> check(StageValues values) {
-    List<Complaint> complaints = new ArrayList<>(CathodeBias.check(values));
+    List<Complaint> complaints = new ArrayList<>(CathodeBias.checkBias(values));
     complaints.addAll(ScreenFeed.check(values));
     complaints.addAll(Sections.check(values));
-    boolean biased = CathodeBias.raised(values) || values.has(GRID_BIAS.key());
-    if (!biased && !values.has(GRID_LEAK.key()) && !GridInput.direct(values)) {
-      complaints.add(
-          new Complaint(
-              GRID_LEAK.key(),
-              "nothing that makes the bias",
-              "a cathode_resistor, a cathode_voltage, a grid_bias, or a grid_leak for grid-leak"
-                  + " bias"));
-    }
     return complaints;
   }
 
@@ -91,7 +73,7 @@ final class GroundedCathode {
   }
 
   private static double restingCurrent(StageValues values, double loadResistance) {
-    double supply = values.around().supplyVoltage().orElse(USUAL_SUPPLY);
+    double supply = values.around().supplyVoltage().orElse(StageWiring.USUAL_SUPPLY);
     double cathode = values.number(StageKeys.CATHODE_VOLTAGE.key(), 0);
     double grid = values.number(GRID_BIAS.key(), 0) - cathode;
     double screen = values.number(StageKeys.SCREEN_VOLTAGE.key(), 0.5 * supply);
@@ -99,28 +81,28 @@ final class GroundedCathode {
     double each =
         RestingCurrent.onLine(
             values.device().law(), supply - cathode, loadResistance * sections, grid, screen);
-    return Math.max(1e-6, sections * each);
+    return Math.max(StageWiring.LEAST_CURRENT, sections * each);
   }
 
   /** Draws all but the load itself. */
   static void sketch(Sketch sketch) {
     StageValues values = sketch.values();
     boolean fed = ScreenFeed.fed(values);
-    sketch.supply(X, RAIL, SUPPLY, Side.ABOVE);
-    sketch.wire(X, RAIL, X, LOAD - 2);
-    sketch.wire(X, LOAD + 2, X, ANODE);
-    sketch.mark(X, ANODE, "anode", Side.LEFT);
+    sketch.supply(X, AnodeLoad.RAIL, SUPPLY, Side.ABOVE);
+    sketch.wire(X, AnodeLoad.RAIL, X, AnodeLoad.LOAD - 2);
+    sketch.wire(X, AnodeLoad.LOAD + 2, X, AnodeLoad.ANODE);
+    sketch.mark(X, AnodeLoad.ANODE, "anode", Side.LEFT);
     GridInput.sketch(sketch, JOINT, GRID);
-    int last = Sections.sketch(sketch, X, GRID, JOINT, ANODE);
+    int last = Sections.sketch(sketch, X, GRID, JOINT, AnodeLoad.ANODE);
     CathodeBias.sketch(sketch, X, GRID + 4);
     if (fed) {
-      ScreenFeed.sketch(sketch, X, GRID, RAIL);
+      ScreenFeed.sketch(sketch, X, GRID, AnodeLoad.RAIL);
     }
     if (ScreenFeed.tied(values)) {
-      sketch.wire(X + 4, GRID, X + 5, GRID, X + 5, ANODE + 1, X, ANODE + 1);
+      sketch.wire(X + 4, GRID, X + 5, GRID, X + 5, AnodeLoad.ANODE + 1, X, AnodeLoad.ANODE + 1);
     }
     int from = fed ? X + 16 : last;
-    sketch.wire(X, ANODE, from, ANODE);
-    OutputCoupling.sketch(sketch, from, ANODE);
+    sketch.wire(X, AnodeLoad.ANODE, from, AnodeLoad.ANODE);
+    OutputCoupling.sketch(sketch, from, AnodeLoad.ANODE);
   }
 }

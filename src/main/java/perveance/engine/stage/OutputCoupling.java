@@ -3,6 +3,7 @@ package perveance.engine.stage;
 import static perveance.engine.stage.StageKeys.COUPLING;
 import static perveance.engine.stage.StageKeys.DRIVES;
 import static perveance.engine.stage.StageKeys.LOAD;
+import static perveance.engine.stage.StageKeys.LOAD2;
 import static perveance.engine.stage.StageKeys.LOAD_CAPACITANCE;
 
 import java.util.List;
@@ -16,17 +17,25 @@ final class OutputCoupling {
   /** Keys. */
   static final List<KeySpec> KEYS = List.of(COUPLING, LOAD, LOAD_CAPACITANCE, DRIVES);
 
+  /** Keys of a stage with two outputs. */
+  static final List<KeySpec> KEYS_OF_TWO = List.of(COUPLING, LOAD, LOAD2, LOAD_CAPACITANCE, DRIVES);
+
   /** Keeps the free end of a coupling capacitor at chassis when nothing is stated there [ohm]. */
-  private static final double OPEN = 1e9;
+  private static final double OPEN = 1e12;
 
   private OutputCoupling() {}
 
   /** Whether anything stands behind a capacitor at the output. */
   static boolean coupled(StageValues values, KeySpec load) {
     return values.has(COUPLING.key())
-        || values.has(load.key())
+        || loaded(values, load)
         || values.has(LOAD_CAPACITANCE.key())
         || values.around().next().isPresent();
+  }
+
+  /** Whether an output has a load of its own; what is stated for the first holds for both. */
+  static boolean loaded(StageValues values, KeySpec load) {
+    return values.has(load.key()) || values.has(LOAD.key());
   }
 
   /** Wires the main output from the node that makes it. */
@@ -46,12 +55,19 @@ final class OutputCoupling {
       wiring.output(name, from, 0, Optional.empty());
       return;
     }
+    wireAlways(wiring, name, from, load, suffix);
+  }
+
+  /** Wires an output behind its capacitor, even when nothing hangs on it; gives its node. */
+  static int wireAlways(StageWiring wiring, String name, int from, KeySpec load, String suffix) {
+    StageValues values = wiring.values();
     int out = wiring.node("output" + suffix);
     capacitor(wiring, from, out, suffix);
     Optional<String> taker = Optional.empty();
-    if (values.has(load.key())) {
+    if (loaded(values, load)) {
       String local = LOAD.key() + suffix;
-      wiring.resistor(local, load, values.number(load.key()), out, 0, "load");
+      double resistance = values.number(load.key(), values.number(LOAD.key(), OPEN));
+      wiring.resistor(local, load, resistance, out, 0, "load");
       taker = Optional.of(wiring.name(local));
     }
     if (values.has(LOAD_CAPACITANCE.key())) {
@@ -64,6 +80,7 @@ final class OutputCoupling {
     }
     boolean straight = suffix.isEmpty() && values.around().directOutput().isPresent();
     wiring.output(name, straight ? from : out, 0, taker);
+    return out;
   }
 
   private static void capacitor(StageWiring wiring, int from, int out, String suffix) {
@@ -95,24 +112,35 @@ final class OutputCoupling {
     sketch(sketch, x, y, LOAD, "");
   }
 
-  /** Draws an output to the right of a point; needs ten units below it and two above. */
+  /** Draws an output to the right of a point; needs ten units below it and three above. */
   static void sketch(Sketch sketch, int x, int y, KeySpec load, String suffix) {
+    sketch(sketch, x, y, 1, load, suffix);
+  }
+
+  /** Draws an output to the left of a point. */
+  static void sketchLeft(Sketch sketch, int x, int y, KeySpec load, String suffix) {
+    sketch(sketch, x, y, -1, load, suffix);
+  }
+
+  private static void sketch(Sketch sketch, int x, int y, int way, KeySpec load, String suffix) {
     StageValues values = sketch.values();
-    int at = x + 8;
-    if (values.has(COUPLING.key())) {
-      sketch.wire(x, y, x + 8, y);
-      sketch.lying(SymbolType.CAPACITOR, x + 10, y, COUPLING.key() + suffix, Side.ABOVE);
-      at = x + 18;
-      sketch.wire(x + 12, y, at, y);
+    int at = x + 8 * way;
+    if (coupled(values, load)) {
+      sketch.wire(x, y, x + 8 * way, y);
+      sketch.lying(SymbolType.CAPACITOR, x + 10 * way, y, COUPLING.key() + suffix, Side.ABOVE);
+      at = x + 18 * way;
+      sketch.wire(x + 12 * way, y, at, y);
     } else {
       sketch.wire(x, y, at, y);
     }
-    if (values.has(load.key())) {
+    if (loaded(values, load)) {
+      Side side = way > 0 ? Side.RIGHT : Side.LEFT;
       sketch.wire(at, y, at, y + 2);
-      sketch.upright(SymbolType.RESISTOR, at, y + 4, LOAD.key() + suffix, Side.RIGHT);
+      sketch.upright(SymbolType.RESISTOR, at, y + 4, LOAD.key() + suffix, side);
       sketch.ground(at, y + 6);
     }
-    sketch.wire(at, y, at + 4, y);
-    sketch.output(at + 4, y, values.word(DRIVES.key()).map(ref -> "to " + ref).orElse("out"));
+    sketch.wire(at, y, at + 4 * way, y);
+    String text = values.word(DRIVES.key()).map(ref -> "to " + ref).orElse("out");
+    sketch.output(at + 4 * way, y, way < 0, text);
   }
 }

@@ -148,8 +148,7 @@ final class ScreenFeed {
       sketch.mark(x, y, "screen", Side.RIGHT);
     }
     if (values.has(SCREEN_BYPASS.key())) {
-      boolean electrolytic = StageWiring.electrolytic(values.number(SCREEN_BYPASS.key()));
-      SymbolType type = electrolytic ? SymbolType.ELECTROLYTIC : SymbolType.CAPACITOR;
+      SymbolType type = StageWiring.capacitorSymbol(values, SCREEN_BYPASS);
       sketch.wire(x, y, x, y + 2);
       sketch.upright(type, x, y + 4, SCREEN_BYPASS.key(), Side.RIGHT);
       sketch.ground(x, y + 6);

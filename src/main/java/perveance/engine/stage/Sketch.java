@@ -68,8 +68,16 @@ final class Sketch {
     add(SymbolType.INPUT, x, y, false, false, part, Side.ABOVE, text);
   }
 
-  void output(int x, int y, String text) {
-    add(SymbolType.OUTPUT, x, y, false, false, Optional.empty(), Side.ABOVE, text);
+  /** An output terminal; to the left of what drives it when mirrored. */
+  void output(int x, int y, boolean mirrored, String text) {
+    add(SymbolType.OUTPUT, x, y, false, mirrored, Optional.empty(), Side.ABOVE, text);
+  }
+
+  /** The rail of a negative supply, below what hangs on it. */
+  void negativeSupply(int x, int y, KeySpec key) {
+    String supply = values.word(key.key()).orElse("");
+    Optional<String> part = Optional.of(ChassisNames.supply(supply));
+    add(SymbolType.BIAS, x, y, false, false, part, Side.BELOW, supply);
   }
 
   /** A wire through the given points, x and y in turn. */

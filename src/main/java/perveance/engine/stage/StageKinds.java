@@ -6,7 +6,19 @@ import perveance.engine.base.NearMiss;
 
 /** All kinds of stage there are; a new kind is named here and nowhere else. */
 public final class StageKinds {
-  private static final List<StageKind> ALL = List.of(new CommonCathode());
+  private static final List<StageKind> ALL =
+      List.of(
+          new CommonCathode(),
+          new CathodeFollower(),
+          new LongTailedPair(),
+          new Concertina(),
+          new GroundedGrid(),
+          new Cascode(),
+          new TotemPole(),
+          new MuFollower(),
+          new WhiteFollower(),
+          new ChokeLoad(),
+          new Paraphase());
 
   private StageKinds() {}
 

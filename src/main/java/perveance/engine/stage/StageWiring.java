@@ -6,6 +6,7 @@ import java.util.Optional;
 import perveance.engine.circuit.CapacitorRole;
 import perveance.engine.circuit.Circuit;
 import perveance.engine.circuit.Element;
+import perveance.engine.stage.Drawing.SymbolType;
 import perveance.engine.stage.StageCircuit.LoadLineSpec;
 import perveance.engine.stage.StageCircuit.Output;
 import perveance.engine.stage.StageCircuit.Part;
@@ -22,6 +23,15 @@ final class StageWiring {
    * Capacitance that stands for a coupling which sets no corner: with 10 kohm it is below 16 uHz.
    */
   static final double WITHOUT_CORNER = 1.0;
+
+  /** Resistance of a current source where none is stated; a cascoded one has more [ohm]. */
+  static final double USUAL_SOURCE_RESISTANCE = 10e6;
+
+  /** Taken where a stage stands without a supply, to choose a diode's working current [V]. */
+  static final double USUAL_SUPPLY = 250;
+
+  /** Least current at which a bias diode is taken to have its stated voltage [A]. */
+  static final double LEAST_CURRENT = 1e-6;
 
   private final StageValues values;
   private final Circuit.Builder circuit;
@@ -109,6 +119,26 @@ final class StageWiring {
   void stray(String local, int a, int b, double capacitance) {
     if (capacitance > 0 && a != b) {
       circuit.add(new Element.Capacitor(name(local), a, b, capacitance, CapacitorRole.STRAY));
+    }
+  }
+
+  /** The symbol of a capacitor; one that is not stated is drawn without a value. */
+  static SymbolType capacitorSymbol(StageValues values, KeySpec key) {
+    return electrolytic(values.number(key.key(), 0))
+        ? SymbolType.ELECTROLYTIC
+        : SymbolType.CAPACITOR;
+  }
+
+  /** A stated current source with its resistance for signals. */
+  void currentSource(KeySpec key, int from, int to) {
+    double current = values.number(key.key());
+    circuit.add(new Element.CurrentSource(name(key.key()), from, to, current));
+    KeySpec resistanceKey = StageKeys.CURRENT_SOURCE_RESISTANCE;
+    double resistance = values.number(resistanceKey.key(), USUAL_SOURCE_RESISTANCE);
+    outerResistor(resistanceKey.key(), from, to, resistance);
+    assume("The current source works at any voltage across it.");
+    if (!values.has(resistanceKey.key())) {
+      assume("The resistance of the current source is not stated; taken as 10 Mohm.");
     }
   }
 

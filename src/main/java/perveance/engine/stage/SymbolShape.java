@@ -117,8 +117,8 @@ public final class SymbolShape {
       case GROUND -> new Box(x - 1, y, x + 1, y + 1);
       case SUPPLY -> new Box(x - 2, y - 1, x + 2, y);
       case BIAS -> new Box(x - 2, y, x + 2, y + 1);
-      case INPUT -> new Box(x - 1, y - 1, x, y + 1);
-      case OUTPUT -> new Box(x, y - 1, x + 1, y + 1);
+      case INPUT -> terminal(x, y, !symbol.mirrored());
+      case OUTPUT -> terminal(x, y, symbol.mirrored());
       case DOT -> new Box(x, y, x, y);
     };
   }
@@ -161,6 +161,11 @@ public final class SymbolShape {
       case ABOVE -> box(x, box.top() - LABEL_HEIGHT, LABEL_WIDTH, LABEL_HEIGHT);
       case BELOW -> box(x, box.bottom(), LABEL_WIDTH, LABEL_HEIGHT);
     };
+  }
+
+  /** An open terminal on the left or the right of its wire's end. */
+  private static Box terminal(int x, int y, boolean left) {
+    return left ? new Box(x - 1, y - 1, x, y + 1) : new Box(x, y - 1, x + 1, y + 1);
   }
 
   private static Box box(int left, int top, int width, int height) {

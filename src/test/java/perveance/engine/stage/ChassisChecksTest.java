@@ -90,6 +90,27 @@ class ChassisChecksTest {
   }
 
   @Test
+  void valvesOfAPairHaveNamesOfTheirOwn() {
+    ChassisBench bench =
+        bench()
+            .stage(
+                "V1",
+                "long-tailed-pair",
+                "device",
+                "12AX7",
+                "supply",
+                "A",
+                "anode_load",
+                100e3,
+                "tail_resistor",
+                10e3);
+    stage(bench, "V1b");
+    assertEquals(
+        List.of("stage V1b ref: found \"V1b\", which V1 has, expected a name of its own"),
+        bench.complaints());
+  }
+
+  @Test
   void suppliesMustLeadToAVoltage() {
     ChassisBench bench =
         bench().dropped("B", "C", 10e3).dropped("C", "B", 10e3).dropped("D", "E", 0.001);

@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
+import perveance.engine.circuit.Element;
 import perveance.engine.stage.Drawing.Symbol;
 import perveance.engine.stage.Drawing.SymbolType;
 import perveance.engine.stage.Drawing.Wire;
@@ -44,9 +45,18 @@ final class DrawingChecks {
         drawing.symbols().stream()
             .filter(s -> !isTerminal(s.type()) && s.part().isPresent())
             .map(s -> s.part().get())
+            .filter(part -> !unstatedCapacitor(part))
             .sorted()
             .toList();
     assertEquals(List.copyOf(expected), drawn, name);
+  }
+
+  /** A capacitor that must be there but is not stated is drawn, yet it is no part to buy. */
+  private boolean unstatedCapacitor(String part) {
+    return built.stage().parts().stream().noneMatch(p -> p.element().equals(part))
+        && built.circuit().elements().get(built.circuit().element(part))
+            instanceof Element.Capacitor c
+        && c.capacitance() == StageWiring.WITHOUT_CORNER;
   }
 
   private static boolean isTerminal(SymbolType type) {

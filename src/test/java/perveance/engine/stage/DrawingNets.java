@@ -63,17 +63,19 @@ final class DrawingNets {
     parent.put(root(a), root(b));
   }
 
-  /** A capacitor that is no part is drawn as a wire. */
+  /** The capacitor before an input belongs to the stage before and is drawn as a wire. */
   private void joinIdealCapacitors() {
-    Set<String> parts =
-        built.stage().parts().stream().map(StageCircuit.Part::element).collect(Collectors.toSet());
+    Set<String> drawn =
+        built.drawing().symbols().stream()
+            .flatMap(s -> s.part().stream())
+            .collect(Collectors.toSet());
     for (int i = 0; i < merged.length; i++) {
       merged[i] = i;
     }
     for (Element e : circuit.elements()) {
       if (e instanceof Element.Capacitor c
           && c.role() == CapacitorRole.HOLDS
-          && !parts.contains(c.name())) {
+          && !drawn.contains(c.name())) {
         int from = merged[Math.max(c.a(), c.b())];
         int to = merged[Math.min(c.a(), c.b())];
         for (int i = 0; i < merged.length; i++) {
@@ -101,7 +103,7 @@ final class DrawingNets {
         (net, node) -> nets.computeIfAbsent(node, n -> new TreeSet<>()).add(net.toString()));
     for (Map.Entry<Integer, Set<String>> e : nets.entrySet()) {
       String node = circuit.nodes().get(e.getKey());
-      boolean rail = node.equals("chassis") || node.startsWith("supply.");
+      boolean rail = node.equals("chassis") || node.startsWith("supply.") || node.endsWith(".bias");
       assertTrue(
           rail || e.getValue().size() == 1, () -> name + ": " + node + " is in pieces: " + e);
     }

@@ -7,34 +7,51 @@ import perveance.engine.device.LawKind;
 import perveance.engine.device.LawParameter;
 
 /**
- * The linear valve of the hand formulas, with a screen if it has one: Ia = I0 + gm Vg + gs Vs + Va
- * / ra, Is = share of it by gs, without cut-off and grid current.
+ * The linear valve of the hand formulas: Ia = I0 + gm (Vg + Vs / mus) + Va / ra and, where there is
+ * a screen, Is = (Vs + mus Vg) / rs. It has neither cut-off nor grid current.
  *
  * @param kind with or without a screen
  * @param gm mutual conductance [S]
  * @param ra anode resistance [ohm]
- * @param screenGm conductance from the screen to the anode, zero for a triode [S]
- * @param screenSlope conductance of the screen itself, zero for a triode [S]
+ * @param screenMu amplification factor from grid to screen mus, infinite for a triode [1]
+ * @param screenResistance resistance of the screen rs, infinite for a triode [ohm]
  * @param rest anode current at zero volts [A]
  */
 record LinearValve(
-    LawKind kind, double gm, double ra, double screenGm, double screenSlope, double rest)
+    LawKind kind, double gm, double ra, double screenMu, double screenResistance, double rest)
     implements DeviceLaw {
   static LinearValve triode(double mu, double ra) {
-    return new LinearValve(LawKind.TRIODE, mu / ra, ra, 0, 0, 0);
+    double none = Double.POSITIVE_INFINITY;
+    return new LinearValve(LawKind.TRIODE, mu / ra, ra, none, none, 0);
+  }
+
+  static LinearValve pentode(double gm, double ra, double screenMu, double screenResistance) {
+    return new LinearValve(LawKind.PENTODE, gm, ra, screenMu, screenResistance, 0);
   }
 
   @Override
   public void evaluate(double anode, double grid, double screen, ElectrodeCurrents out) {
     out.clear();
-    double current = rest + gm * grid + anode / ra + screenGm * screen;
-    out.set(ElectrodeCurrents.ANODE, current, 1 / ra, gm, screenGm);
-    out.set(ElectrodeCurrents.SCREEN, screenSlope * screen, 0, 0, screenSlope);
+    boolean screened = kind == LawKind.PENTODE;
+    double byScreen = screened ? gm / screenMu : 0;
+    double current = rest + gm * grid + anode / ra + byScreen * screen;
+    out.set(ElectrodeCurrents.ANODE, current, 1 / ra, gm, byScreen);
+    if (screened) {
+      double slope = 1 / screenResistance;
+      double taken = slope * (screen + screenMu * grid);
+      out.set(ElectrodeCurrents.SCREEN, taken, 0, slope * screenMu, slope);
+    }
   }
 
   @Override
   public DeviceLaw specimen(double conduction, double contactShift) {
-    return new LinearValve(kind, gm * conduction, ra / conduction, screenGm, screenSlope, rest);
+    return new LinearValve(
+        kind,
+        gm * conduction,
+        ra / conduction,
+        screenMu,
+        screenResistance / conduction,
+        rest * conduction);
   }
 
   @Override

@@ -27,6 +27,17 @@ final class StageBench {
     settings.put("supply", new Setting.Word("A"));
   }
 
+  private StageBench(StageBench other) {
+    this.kind = other.kind;
+    this.settings.putAll(other.settings);
+    this.devices.putAll(other.devices);
+    this.around = other.around;
+  }
+
+  StageBench copy() {
+    return new StageBench(this);
+  }
+
   static Device device(String type, DeviceLaw law, Capacitances capacitances) {
     return new Device(
         type,

@@ -2,19 +2,19 @@ package perveance.engine.stage;
 
 import java.util.LinkedHashMap;
 import java.util.Map;
-import perveance.engine.device.LawKind;
 
 /** Stages of every kind in their variants, for the checks that all kinds must pass. */
 final class StageSamples {
   static final LinearValve TRIODE = LinearValve.triode(100, 62.5e3);
-  static final LinearValve PENTODE =
-      new LinearValve(LawKind.PENTODE, 2e-3, 1e6, 0.05e-3, 0.02e-3, 0);
+  static final LinearValve PENTODE = LinearValve.pentode(2e-3, 1e6, 40, 50e3);
 
   private StageSamples() {}
 
   static Map<String, StageBench> all() {
     Map<String, StageBench> all = new LinkedHashMap<>();
     commonCathode(all);
+    followers(all);
+    TwoValveSamples.add(all);
     return all;
   }
 
@@ -79,5 +79,80 @@ final class StageSamples {
             .with("grid_leak", 1e6)
             .with("coupling", 22e-9)
             .with("load", 470e3));
+  }
+
+  private static void followers(Map<String, StageBench> all) {
+    StageBench follower = new StageBench("cathode-follower", TRIODE).with("grid_leak", 1e6);
+    all.put("follower on chassis", follower.copy().with("cathode_resistor", 22e3));
+    all.put(
+        "follower, self bias",
+        follower
+            .copy()
+            .with("cathode_resistor", 1e3)
+            .with("cathode_bypass", 22e-6)
+            .with("cathode_load", 47e3)
+            .with("grid_stopper", 1e3)
+            .with("coupling", 1e-6)
+            .with("load", 100e3));
+    all.put(
+        "follower, fixed bias",
+        follower
+            .copy()
+            .with("cathode_resistor", 1e3)
+            .with("cathode_load", 47e3)
+            .with("anode_load", 1e3)
+            .with("grid_bias", 100));
+    all.put(
+        "follower, direct",
+        follower
+            .copy()
+            .without("grid_leak")
+            .with("cathode_load", 100e3)
+            .with("load", 100e3)
+            .in(StageBench.drivenFrom("V0.anode")));
+    all.put(
+        "follower on a current source",
+        follower
+            .copy()
+            .with("cathode_resistor", 1e3)
+            .with("cathode_current", 2e-3)
+            .with("coupling", 1e-6));
+    all.put(
+        "follower, pentode",
+        new StageBench("cathode-follower", PENTODE)
+            .with("connection", "triode")
+            .with("cathode_load", 10e3)
+            .with("grid_bias", 60));
+    StageBench grounded =
+        new StageBench("grounded-grid", TRIODE)
+            .with("anode_load", 22e3)
+            .with("cathode_resistor", 1e3);
+    all.put(
+        "grounded grid",
+        grounded.copy().with("input_coupling", 1e-6).with("coupling", 1e-7).with("load", 1e6));
+    all.put("grounded grid, fixed bias", grounded.copy().with("grid_bias", 10));
+    all.put(
+        "grounded grid, direct",
+        grounded.copy().without("cathode_resistor").in(StageBench.drivenFrom("V0.cathode")));
+    StageBench concertina =
+        new StageBench("concertina", TRIODE).with("anode_load", 22e3).with("cathode_load", 22e3);
+    all.put(
+        "concertina, direct",
+        concertina
+            .copy()
+            .with("grid_stopper", 10e3)
+            .with("coupling", 1e-7)
+            .with("load", 220e3)
+            .in(StageBench.drivenFrom("V0.anode")));
+    all.put(
+        "concertina, self bias",
+        concertina
+            .copy()
+            .with("cathode_resistor", 1e3)
+            .with("cathode_bypass", 22e-6)
+            .with("coupling", 1e-7)
+            .with("load", 220e3)
+            .with("load2", 100e3));
+    all.put("concertina, fixed bias", concertina.copy().with("grid_bias", 85));
   }
 }

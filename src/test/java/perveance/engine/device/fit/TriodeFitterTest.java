@@ -258,7 +258,11 @@ class TriodeFitterTest {
     assertTrue(one.summary().worstError() < 0.03);
   }
 
-  /** A chart's low readings are told against a tenth of its highest current, not against zero. */
+  /**
+   * Derived. A chart's low readings are told against a tenth of its highest current, not against
+   * zero. 6 %: the resolution that charts are weighed with, 0.6 % of the highest current, told
+   * against that tenth.
+   */
   @Test
   void chartReadingsNearZeroDoNotBlowUpTheError() {
     DeviceLaw law = law(1e-3, 0.5, 20, 0.3, 0.3);
@@ -273,7 +277,7 @@ class TriodeFitterTest {
     }
     chart.add(reading("curve", 100, -20, 0));
     LawFit fit = fitted(chart, FitConditions.USUAL);
-    assertTrue(fit.summary().worstError() < 0.02, "" + fit.summary().worstError());
+    assertTrue(fit.summary().worstError() < 0.06, "" + fit.summary().worstError());
     assertTrue(fit.summary().method().contains("chart readings"), fit.summary().method());
   }
 }

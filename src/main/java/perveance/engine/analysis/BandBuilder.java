@@ -1,0 +1,74 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import perveance.engine.analysis.Band.Share;
+import perveance.engine.numeric.Statistics;
+
+/**
+ * Makes bands of the figures of many specimens: the 2.5 % and 97.5 % quantiles, and the share of
+ * each cause as the squared correlation of the figure with the cause's deviates, over the same
+ * samples. The causes are independent, so that the squared correlations are the shares of a linear
+ * figure's variance; they are scaled to a sum of 1. Causes of the same name are added.
+ */
+final class BandBuilder {
+  /** Shares below this are noise of the sampling and are left out. */
+  private static final double LEAST_SHARE = 0.01;
+
+  private final SampleDraws draws;
+  private final List<String> causes;
+
+  BandBuilder(SampleDraws draws, List<String> causes) {
+    this.draws = draws;
+    this.causes = List.copyOf(causes);
+  }
+
+  /**
+   * Makes the band of one figure.
+   *
+   * @param figure value in each sample; not-a-number where that sample has no answer [any]
+   * @return the band
+   */
+  Band band(double[] figure) {
+    double[] sorted = Arrays.stream(figure).filter(Double::isFinite).sorted().toArray();
+    if (sorted.length < figure.length / 2) {
+      throw new IllegalArgumentException("figure has " + sorted.length + " answers");
+    }
+    return new Band(
+        Statistics.percentileOfSorted(sorted, 0.025),
+        Statistics.percentileOfSorted(sorted, 0.975),
+        shares(figure));
+  }
+
+  private List<Share> shares(double[] figure) {
+    double mean = Arrays.stream(figure).filter(Double::isFinite).average().orElse(0);
+    Map<String, Double> squares = new LinkedHashMap<>();
+    for (int cause = 0; cause < causes.size(); cause++) {
+      double product = 0;
+      for (int s = 0; s < figure.length; s++) {
+        if (Double.isFinite(figure[s])) {
+          product += (figure[s] - mean) * draws.of(cause, s);
+        }
+      }
+      squares.merge(causes.get(cause), product * product, Double::sum);
+    }
+    return scaled(squares);
+  }
+
+  private static List<Share> scaled(Map<String, Double> squares) {
+    double sum = squares.values().stream().mapToDouble(Double::doubleValue).sum();
+    List<Share> shares = new ArrayList<>();
+    squares.forEach(
+        (cause, square) -> {
+          if (square > LEAST_SHARE * sum) {
+            shares.add(new Share(cause, square / sum));
+          }
+        });
+    shares.sort(Comparator.comparingDouble(Share::fraction).reversed());
+    return shares;
+  }
+}

@@ -1,0 +1,52 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import perveance.engine.circuit.Circuit;
+import perveance.engine.circuit.DcOutcome;
+import perveance.engine.circuit.DcSolver;
+import perveance.engine.circuit.Element;
+import perveance.engine.circuit.Element.CurrentSource;
+import perveance.engine.circuit.Element.Valve;
+import perveance.engine.circuit.Element.VoltageSource;
+
+/** The dc resistance in a valve's grid circuit, which makers limit. */
+final class GridCircuit {
+  /** The grid current that is sent through it, about what a gassy valve draws [A]. */
+  private static final double TEST_CURRENT = 1e-6;
+
+  private GridCircuit() {}
+
+  /**
+   * Resistance from grid to chassis with the valves taken as cold and all sources dead.
+   *
+   * @param circuit whole circuit
+   * @param ref valve
+   * @return resistance; empty where no dc path leads from the grid [ohm]
+   */
+  static OptionalDouble resistance(Circuit circuit, String ref) {
+    Valve valve = (Valve) circuit.elements().get(circuit.element(ref));
+    List<Element> elements = new ArrayList<>();
+    for (Element element : circuit.elements()) {
+      elements.add(quiet(element));
+    }
+    elements.add(new CurrentSource(ref + ".grid_test", 0, valve.grid(), TEST_CURRENT));
+    return new DcSolver(new Circuit(circuit.nodes(), elements)).solve()
+            instanceof DcOutcome.Converged solved
+        ? OptionalDouble.of(solved.solution().voltage(valve.grid()) / TEST_CURRENT)
+        : OptionalDouble.empty();
+  }
+
+  private static Element quiet(Element element) {
+    if (element instanceof Valve v) {
+      return new Valve(
+          v.name(), new ColdLaw(v.law().kind()), v.anode(), v.grid(), v.screen(), v.cathode());
+    } else if (element instanceof VoltageSource s) {
+      return new VoltageSource(s.name(), s.plus(), s.minus(), 0);
+    } else if (element instanceof CurrentSource s) {
+      return new CurrentSource(s.name(), s.from(), s.to(), 0);
+    }
+    return element;
+  }
+}

@@ -90,7 +90,7 @@ final class Causes {
     List<String> names = new ArrayList<>();
     for (int i = 0; i < elements.size(); i++) {
       String element = elements.get(i);
-      boolean second = placeOf.get(element) < i;
+      boolean second = place(element) < i;
       boolean first = i + 1 < elements.size() && elements.get(i + 1).equals(element);
       String what = second ? " contact potential" : first ? " conduction" : "";
       names.add(element + what);

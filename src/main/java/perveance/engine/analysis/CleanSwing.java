@@ -37,6 +37,28 @@ public record CleanSwing(
     bands = Map.copyOf(bands);
   }
 
+  /**
+   * The same with other bands.
+   *
+   * @param newBands bands by component name
+   * @return the changed answer
+   */
+  public CleanSwing withBands(Map<String, Band> newBands) {
+    return new CleanSwing(
+        inputPeak,
+        outputPeak,
+        limitedBy,
+        positivePeak,
+        positiveLimit,
+        negativePeak,
+        negativeLimit,
+        outputDown,
+        outputUp,
+        toZeroBias,
+        headroom,
+        newBands);
+  }
+
   /** What ends a swing. */
   public enum Limit {
     /** Grid current begins. */

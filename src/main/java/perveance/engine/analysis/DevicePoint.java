@@ -51,4 +51,33 @@ public record DevicePoint(
   public DevicePoint {
     bands = Map.copyOf(bands);
   }
+
+  /**
+   * The same with other bands.
+   *
+   * @param newBands bands by component name
+   * @return the changed answer
+   */
+  public DevicePoint withBands(Map<String, Band> newBands) {
+    return new DevicePoint(
+        ref,
+        type,
+        anode,
+        grid,
+        screen,
+        anodeChassis,
+        cathodeChassis,
+        gridChassis,
+        screenChassis,
+        anodeCurrent,
+        screenCurrent,
+        gridCurrent,
+        mutualConductance,
+        anodeResistance,
+        amplificationFactor,
+        anodeDissipation,
+        screenDissipation,
+        newBands,
+        outsideEvidence);
+  }
 }

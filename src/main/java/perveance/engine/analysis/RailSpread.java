@@ -2,7 +2,7 @@ package perveance.engine.analysis;
 
 import java.util.Arrays;
 import java.util.HashMap;
-import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -19,7 +19,7 @@ import perveance.engine.circuit.Element.VoltageSource;
  */
 final class RailSpread {
   private final Map<String, double[]> samples = new HashMap<>();
-  private final Set<String> computed = new HashSet<>();
+  private final Set<String> computed = new LinkedHashSet<>();
   private final SampleDraws draws;
   private final Causes causes;
 
@@ -71,13 +71,14 @@ final class RailSpread {
     double[] nominal = new double[solver.pointLength()];
     solver.solveInto(nominal);
     double[] point = new double[nominal.length];
+    int[] nodes = computed.stream().mapToInt(solver.circuit()::node).toArray();
+    List<double[]> voltages = computed.stream().map(this::samplesOf).toList();
     for (int s = 0; s < draws.samples(); s++) {
       specimen.take(s);
       System.arraycopy(nominal, 0, point, 0, point.length);
       boolean found = solver.solveInto(point);
-      for (String rail : computed) {
-        double voltage = found ? solver.voltage(solver.circuit().node(rail)) : Double.NaN;
-        samples.get(rail)[s] = voltage;
+      for (int rail = 0; rail < nodes.length; rail++) {
+        voltages.get(rail)[s] = found ? solver.voltage(nodes[rail]) : Double.NaN;
       }
     }
   }
@@ -98,10 +99,14 @@ final class RailSpread {
 
   /** Voltages of a rail over the samples; not-a-number where a sample has no answer [V]. */
   double[] of(String rail) {
+    return samplesOf(rail).clone();
+  }
+
+  private double[] samplesOf(String rail) {
     double[] found = samples.get(rail);
     if (found == null) {
       throw new IllegalArgumentException("no supply node named " + rail);
     }
-    return Arrays.copyOf(found, found.length);
+    return found;
   }
 }

@@ -43,6 +43,28 @@ public record SmallSignalAnswer(
   }
 
   /**
+   * The same with other bands.
+   *
+   * @param newBands bands by component name
+   * @return the changed answer
+   */
+  public SmallSignalAnswer withBands(Map<String, Band> newBands) {
+    return new SmallSignalAnswer(
+        gain,
+        secondGain,
+        outputResistance,
+        inputCapacitance,
+        lowCorner,
+        highCorner,
+        shelf,
+        couplingCorner,
+        noiseInput,
+        noiseShares,
+        newBands,
+        response);
+  }
+
+  /**
    * The shelf of a bypass capacitor.
    *
    * @param zero lower corner [Hz]

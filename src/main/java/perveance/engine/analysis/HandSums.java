@@ -1,0 +1,36 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** All hand sums of a stage. */
+final class HandSums {
+  private HandSums() {}
+
+  static List<HandSum> of(
+      StageModel model, List<DevicePoint> points, SmallSignalAnswer small, CleanSwing clean) {
+    List<HandSum> sums = new ArrayList<>(new PointSums(model).of(points));
+    Optional<SignalPath> path = SignalPath.of(model);
+    if (path.isPresent()) {
+      LoadSeen seen = new LoadSeen(model, points.get(0).ref());
+      Optional<Double> load = seen.acResistance();
+      if (load.isPresent()) {
+        sums.addAll(
+            new GainSums(path.get(), points.get(0), load.get()).all(anodeLoad(model, path.get())));
+        sums.addAll(
+            new FrequencySums(model, small)
+                .all(points.get(0), load.get() - path.get().cathodeResistance()));
+      }
+    }
+    sums.addAll(SwingSums.of(clean));
+    return sums;
+  }
+
+  /** The part from the electrode that gives the output to a supply or chassis. */
+  private static Optional<Double> anodeLoad(StageModel model, SignalPath path) {
+    int node =
+        path.way() == SignalPath.Way.FOLLOWER ? path.valve().cathode() : path.valve().anode();
+    return PartRoles.loadAt(model, node);
+  }
+}

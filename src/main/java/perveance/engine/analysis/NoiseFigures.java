@@ -1,0 +1,35 @@
+package perveance.engine.analysis;
+
+import java.util.List;
+import perveance.engine.analysis.Band.Share;
+import perveance.engine.circuit.Noise;
+import perveance.engine.circuit.NoiseAnswer;
+import perveance.engine.circuit.NoiseBand;
+
+/**
+ * Noise of a stage over the audio band, referred to its input. Flicker noise of the valves is not
+ * in it: it differs too much from one specimen to the next.
+ *
+ * @param input equivalent input noise, 20 Hz to 20 kHz, rms [V]
+ * @param shares share of the noise power by element, largest first
+ */
+record NoiseFigures(double input, List<Share> shares) {
+  private static final NoiseBand AUDIO = NoiseBand.of(20, 20e3);
+  private static final double LEAST_SHARE = 0.01;
+
+  NoiseFigures {
+    shares = List.copyOf(shares);
+  }
+
+  static NoiseFigures of(StageModel model) {
+    NoiseAnswer noise =
+        new Noise(model.dc())
+            .between(model.source(), model.mainOutput().plus(), model.mainOutput().minus(), AUDIO);
+    List<Share> shares =
+        noise.shares().stream()
+            .filter(s -> s.fraction() >= LEAST_SHARE)
+            .map(s -> new Share(s.element(), s.fraction()))
+            .toList();
+    return new NoiseFigures(noise.input() * model.inputShare(), shares);
+  }
+}

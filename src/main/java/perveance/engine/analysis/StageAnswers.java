@@ -1,0 +1,171 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import perveance.engine.analysis.LoadLineView.Point;
+import perveance.engine.circuit.DcSolution;
+import perveance.engine.circuit.MidbandSolution;
+import perveance.engine.device.LawKind;
+import perveance.engine.stage.ChassisNames;
+import perveance.engine.stage.StageCircuit.LoadLineSpec;
+import perveance.engine.stage.StageCircuit.StageDevice;
+import perveance.engine.stage.StageValues;
+
+/** Puts the answer of each stage of a solved chassis together. */
+final class StageAnswers {
+  private final ChassisModel chassis;
+  private final FaultCircuits faults;
+  private final Optional<DcSolution> cold;
+  private final Optional<ChassisSpread> spread;
+  private final AnalysisOptions options;
+  private final Designators designators = new Designators();
+  private final Optional<MeterFigures> meters;
+
+  StageAnswers(
+      ChassisModel chassis,
+      FaultCircuits faults,
+      Optional<DcSolution> cold,
+      Optional<ChassisSpread> spread,
+      AnalysisOptions options) {
+    this.chassis = chassis;
+    this.faults = faults;
+    this.cold = cold;
+    this.spread = spread;
+    this.options = options;
+    double meter = chassis.chassis().conditions().meter();
+    this.meters =
+        options.details() ? chassis.dc().map(dc -> new MeterFigures(dc, meter)) : Optional.empty();
+  }
+
+  StageAnswer answer(StageModel model) {
+    String ref = model.stage().ref();
+    StageValues values = chassis.circuits().values(ref);
+    Optional<StageSpread> bands = spread.flatMap(s -> s.stage(ref));
+    List<DevicePoint> points = withBands(OperatingPoints.of(model.stage(), model.dc()), bands);
+    HeldCharge dynamic = new HeldCharge(model);
+    boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
+    OptionalDouble drive = values.find("drive");
+    CleanSwing clean = CleanSwings.of(dynamic, composite, drive);
+    DrivenLevels levels = new DrivenLevels(model);
+    Optional<MidbandSolution> atDrive =
+        drive.isPresent() ? levels.cycle(drive.getAsDouble()) : Optional.empty();
+    Optional<DrivenAnswer> driven =
+        atDrive.map(c -> new DrivenFigures(model, c).answer(drive.getAsDouble()));
+    SmallSignalAnswer small =
+        withBands(new SmallSignalFigures(model).answer(options.details()), bands);
+    return new StageAnswer(
+        ref,
+        values.entry().kind(),
+        model.stage(),
+        chassis.circuits().drawing(ref),
+        points,
+        limits(model, points, values, driven),
+        small,
+        bands.map(b -> withBands(clean, b)).orElse(clean),
+        driven,
+        options.levels() ? levels.ladder(clean.inputPeak(), drive) : List.of(),
+        options.details() ? parts(model, atDrive) : List.of(),
+        readings(model, points, bands),
+        loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak()))),
+        options.details() ? HandSums.of(model, points, small, clean) : List.of(),
+        model.stage().assumptions(),
+        List.of());
+  }
+
+  private static List<DevicePoint> withBands(
+      List<DevicePoint> points, Optional<StageSpread> bands) {
+    List<DevicePoint> with = new ArrayList<>();
+    for (DevicePoint point : points) {
+      with.add(bands.map(b -> point.withBands(b.bands(point.ref()))).orElse(point));
+    }
+    return with;
+  }
+
+  private static SmallSignalAnswer withBands(
+      SmallSignalAnswer answer, Optional<StageSpread> bands) {
+    return bands.map(b -> answer.withBands(b.bands())).orElse(answer);
+  }
+
+  private static CleanSwing withBands(CleanSwing clean, StageSpread bands) {
+    return clean.withBands(bands.swingBands());
+  }
+
+  private List<LimitUse> limits(
+      StageModel model,
+      List<DevicePoint> points,
+      StageValues values,
+      Optional<DrivenAnswer> driven) {
+    List<LimitUse> uses = new ArrayList<>();
+    double heater = values.number("heater_elevation", 0);
+    for (int i = 0; i < points.size(); i++) {
+      DevicePoint point = points.get(i);
+      StageDevice device = model.device(point.ref());
+      LimitShares shares = new LimitShares(device, point, heater);
+      shares.addIdle(GridCircuit.resistance(chassis.whole().circuit(), point.ref()));
+      cold.ifPresent(dc -> addCold(shares, dc, point.ref()));
+      int section = i;
+      driven.ifPresent(d -> addDriven(shares, d, section, device));
+      uses.addAll(shares.uses());
+    }
+    return uses;
+  }
+
+  private static void addCold(LimitShares shares, DcSolution dc, String ref) {
+    double cathode = dc.valve(ref).cathodeVoltage();
+    shares.addCold(dc.valve(ref).voltage(0), cathode);
+  }
+
+  private static void addDriven(
+      LimitShares shares, DrivenAnswer driven, int section, StageDevice device) {
+    boolean screened = device.device().law().kind() == LawKind.PENTODE;
+    shares.addDriven(
+        driven.anodeDissipation().get(section),
+        screened && driven.screenDissipation().size() > section
+            ? OptionalDouble.of(driven.screenDissipation().get(section))
+            : OptionalDouble.empty(),
+        OptionalDouble.empty());
+  }
+
+  private List<PartDuty> parts(StageModel model, Optional<MidbandSolution> driven) {
+    Optional<DcSolution> idle = chassis.dc();
+    if (idle.isEmpty()) {
+      return List.of();
+    }
+    PartDuties duties = new PartDuties(model.stage(), idle.get(), faults, cold);
+    driven.ifPresent(cycle -> duties.addDriven(DrivenLevels.stress(model, cycle)));
+    return duties.all(designators);
+  }
+
+  private List<ExpectedReading> readings(
+      StageModel model, List<DevicePoint> points, Optional<StageSpread> bands) {
+    Map<String, Band> nodes = new HashMap<>(bands.map(StageSpread::nodeBands).orElse(Map.of()));
+    spread.ifPresent(
+        s ->
+            chassis
+                .chassis()
+                .supplies()
+                .forEach(
+                    supply -> {
+                      String name = ChassisNames.supply(supply.name());
+                      s.rails().band(name).ifPresent(b -> nodes.put(name, b));
+                    }));
+    return meters.map(m -> m.of(model, points, nodes)).orElse(List.of());
+  }
+
+  private static Optional<LoadLineView> loadLine(
+      StageModel model, Optional<MidbandSolution> cycle) {
+    return model
+        .stage()
+        .loadLine()
+        .map(LoadLineSpec::device)
+        .flatMap(
+            ref -> {
+              List<Point> path = cycle.map(c -> DrivenLevels.path(model, c, ref)).orElse(List.of());
+              return LoadLines.of(new LoadSeen(model, ref), ref, path);
+            });
+  }
+}

@@ -39,7 +39,7 @@ final class DcStepping {
     iterations = 0;
     method = Method.NEWTON;
     System.arraycopy(x, 0, start, 0, x.length);
-    Newton.End end = attempt(x, 1, 0);
+    Newton.End end = isZero(x) ? attemptCold(x) : attempt(x, 1, 0);
     if (end == Newton.End.CONVERGED) {
       return end;
     }
@@ -55,8 +55,26 @@ final class DcStepping {
     return attempt(x, 1, 0);
   }
 
+  private static boolean isZero(double[] x) {
+    for (double value : x) {
+      if (value != 0) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private Newton.End attemptCold(double[] x) {
+    equations.stamp(1, 0);
+    newton.prepare();
+    Newton.End end = newton.solveCold(x);
+    iterations += newton.iterations();
+    return end;
+  }
+
   private Newton.End attempt(double[] x, double sourceScale, double leak) {
     equations.stamp(sourceScale, leak);
+    newton.prepare();
     Newton.End end = newton.solve(x);
     iterations += newton.iterations();
     return end;

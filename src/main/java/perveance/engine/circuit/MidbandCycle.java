@@ -29,6 +29,7 @@ final class MidbandCycle {
     this.equations = equations;
     this.waveform = waveform;
     this.newton = new Newton(equations.system);
+    newton.prepare();
     this.step = new double[size];
     this.before = new double[size];
     this.points = new double[waveform.distinct()][size];
@@ -106,8 +107,8 @@ final class MidbandCycle {
     }
     for (int by = 0; by < holds; by++) {
       Arrays.fill(step, 0);
-      equations.addHeld(by, -1, step);
-      newton.factors().solve(step);
+      equations.addHeld(by, 1, step);
+      newton.respond(step);
       for (int h = 0; h < holds; h++) {
         slope[h * holds + by] += weight * equations.imbalanceSlope(h, step, by);
       }

@@ -1,17 +1,22 @@
 package perveance.engine.circuit;
 
+import java.util.Arrays;
 import perveance.engine.numeric.DenseLu;
 
 /**
- * Damped Newton's method on nodal equations. A step is kept when the correction that the same
- * matrix would make afterwards is smaller than the step itself (natural monotonicity test: P.
- * Deuflhard, Newton Methods for Nonlinear Problems, Springer 2004, section 3.3); else it is
- * shortened. The test does not depend on how equations in amperes and in volts are scaled. Nothing
- * is allocated after construction.
+ * Damped Newton's method on nodal equations. Linear unknowns are condensed out once for a matrix
+ * ({@link #prepare}), so that an iteration deals with the nodes of devices alone. A step is kept
+ * when the correction that the same matrix would make afterwards is smaller than the step itself
+ * (natural monotonicity test: P. Deuflhard, Newton Methods for Nonlinear Problems, Springer 2004,
+ * section 3.3); else it is shortened. The test does not depend on how equations in amperes and in
+ * volts are scaled. Nothing is allocated after construction.
  */
 final class Newton {
   /** Kirchhoff's law must hold better than this at every node [A]. */
   static final double KIRCHHOFF = 1e-10;
+
+  /** A leak in the matrix alone: it lets a node whose valves are all cut off be solved [S]. */
+  static final double LEAK = 1e-13;
 
   /** What a solve came to. */
   enum End {
@@ -23,27 +28,51 @@ final class Newton {
   private static final int MOST_ITERATIONS = 60;
   private static final double SHORTEST = 1.0 / 1024;
 
-  /** A leak in the matrix alone: it lets a node whose valves are all cut off be solved [S]. */
-  static final double LEAK = 1e-13;
-
   private final NodalSystem system;
-  private final DenseLu lu;
-  private final double[] matrix;
-  private final double[] residual;
-  private final double[] step;
-  private final double[] trial;
-  private final double[] correction;
+  private final ColdStart coldStart;
+  private final Condensation condensation;
+  private final double[] left;
+  private DenseLu lu = new DenseLu(1);
+  private double[] linear = new double[0];
+  private double[] matrix = new double[0];
+  private double[] constant = new double[0];
+  private double[] unknowns = new double[0];
+  private double[] residual = new double[0];
+  private double[] step = new double[0];
+  private double[] trial = new double[0];
+  private double[] correction = new double[0];
+  private int size;
   private int iterations;
+  private double kirchhoff;
 
   Newton(NodalSystem system) {
-    int size = system.size;
     this.system = system;
-    this.lu = new DenseLu(Math.max(1, size));
-    this.matrix = new double[size * size];
-    this.residual = new double[size];
-    this.step = new double[size];
-    this.trial = new double[size];
-    this.correction = new double[size];
+    this.coldStart = new ColdStart(system);
+    this.condensation = new Condensation(system.size, system.topology.deviceNodes);
+    this.left = new double[system.size];
+  }
+
+  /** Takes the system's matrix as it now is; must be called whenever it has changed. */
+  void prepare() {
+    condensation.eliminate(system.linear);
+    resize(condensation.size());
+    condensation.remaining(linear);
+  }
+
+  /** Happens when pivots are chosen anew, which a change of values by many decades may ask for. */
+  private void resize(int needed) {
+    if (needed != size || linear.length != needed * needed) {
+      size = needed;
+      lu = new DenseLu(Math.max(1, needed));
+      linear = new double[needed * needed];
+      matrix = new double[needed * needed];
+      constant = new double[needed];
+      unknowns = new double[needed];
+      residual = new double[needed];
+      step = new double[needed];
+      trial = new double[needed];
+      correction = new double[needed];
+    }
   }
 
   /** Iterations of the last solve. */
@@ -53,97 +82,141 @@ final class Newton {
 
   /** Largest current that Kirchhoff's law leaves over at any node at the last point [A]. */
   double kirchhoffResidual() {
-    double largest = 0;
-    for (int i = 0; i < system.topology.unknownNodes; i++) {
-      largest = Math.max(largest, Math.abs(residual[i]));
-    }
-    return largest;
+    return kirchhoff;
   }
 
-  /** The factored matrix of the last step, for further right-hand sides. */
-  DenseLu factors() {
-    return lu;
-  }
-
-  /** Solves from x and leaves the answer, or the last point, in x. */
+  /** Solves from x for the system's present constants; leaves the answer, or last point, in x. */
   End solve(double[] x) {
-    system.residual(x, residual);
+    condensation.forward(system.constant, constant);
+    for (int i = 0; i < size; i++) {
+      unknowns[i] = x[condensation.column(i)];
+    }
+    return finish(x);
+  }
+
+  /** As {@link #solve}, from the tangents of all valves instead of a point. */
+  End solveCold(double[] x) {
+    condensation.forward(system.constant, constant);
+    System.arraycopy(linear, 0, matrix, 0, matrix.length);
+    coldStart.addSlopes(matrix, size);
+    addLeaks();
+    if (size > 0 && lu.factor(matrix)) {
+      System.arraycopy(constant, 0, residual, 0, size);
+      coldStart.addCurrents(residual);
+      solveFor(residual, unknowns);
+    } else {
+      Arrays.fill(unknowns, 0);
+    }
+    return finish(x);
+  }
+
+  private End finish(double[] x) {
+    End end = iterate();
+    condensation.backward(unknowns, x);
+    kirchhoff = system.kirchhoff(x, left);
+    return end == End.CONVERGED && !(kirchhoff <= KIRCHHOFF) ? End.STALLED : end;
+  }
+
+  private End iterate() {
+    evaluate(unknowns);
     double damping = 1;
     for (iterations = 1; iterations <= MOST_ITERATIONS; iterations++) {
       if (!factor()) {
         return End.SINGULAR;
       }
       solveFor(residual, step);
-      double length = norm(step, x);
+      double length = norm(step, unknowns);
       if (!(length < Double.MAX_VALUE)) {
         return End.SINGULAR;
       }
       if (length <= 1) {
-        if (finish(x)) {
-          return End.CONVERGED;
-        }
-        continue;
+        add(step);
+        return End.CONVERGED;
       }
-      damping = advance(x, length, damping);
+      damping = advance(length, damping);
       if (damping == 0) {
         return End.STALLED;
+      }
+      if (norm(correction, unknowns) <= 1) {
+        add(correction);
+        return End.CONVERGED;
       }
     }
     return End.STALLED;
   }
 
-  private boolean factor() {
-    system.jacobian(matrix);
-    for (int i = 0; i < system.topology.unknownNodes; i++) {
-      matrix[i * system.size + i] += LEAK;
+  private void add(double[] change) {
+    for (int i = 0; i < size; i++) {
+      unknowns[i] += change[i];
     }
-    return system.size == 0 || lu.factor(matrix);
   }
 
-  private void solveFor(double[] left, double[] out) {
-    for (int i = 0; i < left.length; i++) {
-      out[i] = -left[i];
+  private void evaluate(double[] at) {
+    system.evaluateDevices(at);
+    NodalSystem.multiply(linear, constant, at, residual, size);
+    system.valves.addCurrents(residual);
+    system.junctions.addCurrents(residual);
+  }
+
+  private boolean factor() {
+    System.arraycopy(linear, 0, matrix, 0, matrix.length);
+    system.valves.addSlopes(matrix, size);
+    system.junctions.addSlopes(matrix, size);
+    addLeaks();
+    return size == 0 || lu.factor(matrix);
+  }
+
+  private void addLeaks() {
+    for (int i = 0; i < system.topology.deviceNodes; i++) {
+      matrix[i * size + i] += LEAK;
     }
-    if (out.length > 0) {
+  }
+
+  private void solveFor(double[] leftOver, double[] out) {
+    for (int i = 0; i < size; i++) {
+      out[i] = -leftOver[i];
+    }
+    if (size > 0) {
       lu.solve(out);
     }
   }
 
-  /** Takes the last, small step and looks whether Kirchhoff's law holds. */
-  private boolean finish(double[] x) {
-    for (int i = 0; i < x.length; i++) {
-      x[i] += step[i];
-    }
-    system.residual(x, residual);
-    return kirchhoffResidual() <= KIRCHHOFF;
-  }
-
-  /** Moves x along the step as far as helps; returns the damping used, 0 when none helps. */
-  private double advance(double[] x, double length, double last) {
+  /** Moves along the step as far as helps; returns the damping used, 0 when none helps. */
+  private double advance(double length, double last) {
     double damping = Math.min(1, 2 * last);
     while (damping >= SHORTEST) {
-      for (int i = 0; i < x.length; i++) {
-        trial[i] = x[i] + damping * step[i];
+      for (int i = 0; i < size; i++) {
+        trial[i] = unknowns[i] + damping * step[i];
       }
-      system.residual(trial, residual);
+      evaluate(trial);
       solveFor(residual, correction);
-      double left = norm(correction, trial);
-      if (left <= (1 - damping / 4) * length) {
-        System.arraycopy(trial, 0, x, 0, x.length);
+      if (norm(correction, trial) <= (1 - damping / 4) * length) {
+        System.arraycopy(trial, 0, unknowns, 0, size);
         return damping;
       }
       damping /= 2;
     }
-    system.residual(x, residual);
     return 0;
   }
 
-  /** Largest change of a node voltage, 1 where it no longer matters. */
-  private double norm(double[] change, double[] x) {
+  /** Largest change of a device's node voltage, 1 where it no longer matters. */
+  private double norm(double[] change, double[] at) {
     double largest = 0;
-    for (int i = 0; i < system.topology.unknownNodes; i++) {
-      largest = Math.max(largest, Math.abs(change[i]) / (1e-7 + 1e-9 * Math.abs(x[i])));
+    for (int i = 0; i < system.topology.deviceNodes; i++) {
+      largest = Math.max(largest, Math.abs(change[i]) / (1e-7 + 1e-9 * Math.abs(at[i])));
     }
     return largest;
+  }
+
+  /** Change of the solution for changed constants, by the last factored matrix; in place. */
+  void respond(double[] constantChange) {
+    condensation.forward(constantChange, step);
+    for (int i = 0; i < size; i++) {
+      step[i] = -step[i];
+    }
+    if (size > 0) {
+      lu.solve(step);
+    }
+    condensation.backward(step, constantChange);
   }
 }

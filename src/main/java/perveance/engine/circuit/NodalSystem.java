@@ -20,6 +20,9 @@ final class NodalSystem {
   final ValveBank valves;
   final JunctionBank junctions;
 
+  /** Unknown nodes joined to devices, in the order of their rows, which are the first. */
+  private final int[] deviceNode;
+
   NodalSystem(Topology topology, int branches) {
     this.topology = topology;
     this.size = topology.unknownNodes + branches;
@@ -28,6 +31,12 @@ final class NodalSystem {
     this.voltage = new double[topology.nodeCount];
     this.valves = new ValveBank(topology.circuit, topology);
     this.junctions = new JunctionBank(topology.circuit, topology);
+    this.deviceNode = new int[topology.deviceNodes];
+    for (int node = 0; node < topology.nodeCount; node++) {
+      if (topology.row[node] >= 0 && topology.row[node] < deviceNode.length) {
+        deviceNode[topology.row[node]] = node;
+      }
+    }
   }
 
   void clear() {
@@ -103,32 +112,47 @@ final class NodalSystem {
     }
   }
 
-  /** Evaluates all devices at x. */
+  /** Spreads x and evaluates all devices. */
   void evaluate(double[] x) {
     spread(x);
     valves.evaluate(voltage);
     junctions.evaluate(voltage);
   }
 
-  /** Evaluates all devices at x and writes what is left of the equations. */
-  void residual(double[] x, double[] out) {
+  /** Evaluates all devices; the unknowns begin with the voltages of their nodes. */
+  void evaluateDevices(double[] unknowns) {
+    for (int i = 0; i < deviceNode.length; i++) {
+      voltage[deviceNode[i]] = unknowns[i];
+    }
+    valves.evaluate(voltage);
+    junctions.evaluate(voltage);
+  }
+
+  /**
+   * Spreads x into {@link #voltage}, evaluates all devices and sums the currents that leave every
+   * unknown node; returns the largest that is left over [A].
+   */
+  double kirchhoff(double[] x, double[] out) {
     evaluate(x);
+    multiply(linear, constant, x, out, size);
+    valves.addCurrents(out);
+    junctions.addCurrents(out);
+    double largest = 0;
+    for (int i = 0; i < topology.unknownNodes; i++) {
+      largest = Math.max(largest, Math.abs(out[i]));
+    }
+    return largest;
+  }
+
+  /** out = matrix x + constant, for the first {@code size} entries. */
+  static void multiply(double[] matrix, double[] constant, double[] x, double[] out, int size) {
     for (int i = 0; i < size; i++) {
       double sum = constant[i];
       int at = i * size;
       for (int j = 0; j < size; j++) {
-        sum += linear[at + j] * x[j];
+        sum += matrix[at + j] * x[j];
       }
       out[i] = sum;
     }
-    valves.addCurrents(out);
-    junctions.addCurrents(out);
-  }
-
-  /** Writes the matrix of derivatives at the point that was last evaluated. */
-  void jacobian(double[] out) {
-    System.arraycopy(linear, 0, out, 0, out.length);
-    valves.addSlopes(out, size);
-    junctions.addSlopes(out, size);
   }
 }

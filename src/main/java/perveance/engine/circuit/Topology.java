@@ -3,6 +3,8 @@ package perveance.engine.circuit;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import perveance.engine.circuit.Element.Junction;
+import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.Element.VoltageSource;
 
 /**
@@ -15,6 +17,9 @@ final class Topology {
 
   /** Row of each node's equation, -1 where the voltage is known. */
   final int[] row;
+
+  /** How many unknown nodes are joined to valves or junctions; their rows come first. */
+  final int deviceNodes;
 
   /** How many node voltages are unknown; rows of branch currents come after them. */
   final int unknownNodes;
@@ -63,11 +68,34 @@ final class Topology {
     this.fixedNodes = fixed.stream().mapToInt(Integer::intValue).toArray();
     this.floatingSources = waiting.stream().mapToInt(Integer::intValue).toArray();
     this.row = new int[nodeCount];
-    int next = 0;
-    for (int node = 0; node < nodeCount; node++) {
-      row[node] = known[node] ? -1 : next++;
+    boolean[] device = deviceNodes(circuit);
+    this.deviceNodes = number(known, device, true, 0);
+    this.unknownNodes = number(known, device, false, deviceNodes);
+  }
+
+  private static boolean[] deviceNodes(Circuit circuit) {
+    boolean[] device = new boolean[circuit.nodes().size()];
+    for (Element element : circuit.elements()) {
+      if (element instanceof Valve || element instanceof Junction) {
+        for (int node : Terminals.of(element)) {
+          device[node] = true;
+        }
+      }
     }
-    this.unknownNodes = next;
+    return device;
+  }
+
+  /** Numbers the unknown nodes of devices, or the others; returns the next number. */
+  private int number(boolean[] known, boolean[] device, boolean wanted, int first) {
+    int next = first;
+    for (int node = 0; node < nodeCount; node++) {
+      if (known[node]) {
+        row[node] = -1;
+      } else if (device[node] == wanted) {
+        row[node] = next++;
+      }
+    }
+    return next;
   }
 
   /** Whether a voltage source lies between unknown nodes, so that its current is an unknown. */

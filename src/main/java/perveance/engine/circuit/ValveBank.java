@@ -56,6 +56,10 @@ final class ValveBank {
     }
   }
 
+  DeviceLaw law(int v) {
+    return laws[v];
+  }
+
   int active(int v) {
     return active[v];
   }
@@ -95,36 +99,40 @@ final class ValveBank {
   /** Adds the currents that leave each node into the valves. */
   void addCurrents(double[] residual) {
     for (int v = 0; v < count; v++) {
-      int first = ELECTRODES * v;
-      double sum = 0;
       for (int e = 0; e < active[v]; e++) {
-        double current = point[v].current(e);
-        sum += current;
-        if (row[first + e] >= 0) {
-          residual[row[first + e]] += current;
-        }
+        addCurrent(residual, v, e, point[v].current(e));
       }
-      if (row[first + CATHODE] >= 0) {
-        residual[row[first + CATHODE]] -= sum;
-      }
+    }
+  }
+
+  /** Adds a current that enters an electrode and leaves by the cathode [A]. */
+  void addCurrent(double[] residual, int v, int electrode, double current) {
+    int into = row[ELECTRODES * v + electrode];
+    int from = row[ELECTRODES * v + CATHODE];
+    if (into >= 0) {
+      residual[into] += current;
+    }
+    if (from >= 0) {
+      residual[from] -= current;
     }
   }
 
   /** Adds the slopes to a matrix of the given width. */
   void addSlopes(double[] matrix, int size) {
     for (int v = 0; v < count; v++) {
-      addSlopes(matrix, size, v);
+      addSlopes(matrix, size, v, point[v]);
     }
   }
 
-  private void addSlopes(double[] matrix, int size, int v) {
+  /** Adds the slopes of one valve. */
+  void addSlopes(double[] matrix, int size, int v, ElectrodeCurrents slopes) {
     int first = ELECTRODES * v;
     int cathodeRow = row[first + CATHODE];
     for (int e = 0; e < active[v]; e++) {
       int at = row[first + e];
       double byCathode = 0;
       for (int by = 0; by < active[v]; by++) {
-        double slope = point[v].slope(e, by);
+        double slope = slopes.slope(e, by);
         int column = row[first + by];
         byCathode -= slope;
         if (column >= 0) {

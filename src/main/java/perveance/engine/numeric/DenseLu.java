@@ -19,6 +19,7 @@ public final class DenseLu {
   private final int size;
   private final int[] swaps;
   private final double[] rowScale;
+  private final double[] rowInverse;
   private final double[] columnScale;
   private double[] factors;
   private boolean factored;
@@ -35,6 +36,7 @@ public final class DenseLu {
     this.size = size;
     this.swaps = new int[size];
     this.rowScale = new double[size];
+    this.rowInverse = new double[size];
     this.columnScale = new double[size];
     this.factors = new double[0];
   }
@@ -85,28 +87,41 @@ public final class DenseLu {
         if (!(entry <= Double.MAX_VALUE)) {
           return false;
         }
-        largest = Math.max(largest, entry);
+        if (entry > largest) {
+          largest = entry;
+        }
       }
       if (largest == 0) {
         return false;
       }
       rowScale[i] = largest;
+      // the smallest numbers have no finite inverse
+      rowInverse[i] = Math.min(Double.MAX_VALUE, 1 / largest);
     }
-    for (int j = 0; j < size; j++) {
-      double largest = 0;
-      for (int i = 0; i < size; i++) {
-        largest = Math.max(largest, Math.abs(matrix[i * size + j]) / rowScale[i]);
-      }
-      columnScale[j] = largest;
-    }
+    scaleColumns(matrix);
     return true;
+  }
+
+  private void scaleColumns(double[] matrix) {
+    for (int j = 0; j < size; j++) {
+      columnScale[j] = 0;
+    }
+    for (int i = 0; i < size; i++) {
+      double inverse = rowInverse[i];
+      for (int j = 0; j < size; j++) {
+        double entry = Math.abs(matrix[i * size + j]) * inverse;
+        if (entry > columnScale[j]) {
+          columnScale[j] = entry;
+        }
+      }
+    }
   }
 
   private int pivotRow(double[] matrix, int k) {
     int best = k;
     double largest = -1;
     for (int i = k; i < size; i++) {
-      double scaled = Math.abs(matrix[i * size + k]) / rowScale[i];
+      double scaled = Math.abs(matrix[i * size + k]) * rowInverse[i];
       if (scaled > largest) {
         largest = scaled;
         best = i;
@@ -127,14 +142,17 @@ public final class DenseLu {
     double kept = rowScale[a];
     rowScale[a] = rowScale[b];
     rowScale[b] = kept;
+    kept = rowInverse[a];
+    rowInverse[a] = rowInverse[b];
+    rowInverse[b] = kept;
   }
 
   private void eliminate(double[] matrix, int k) {
-    double pivot = matrix[k * size + k];
+    double inverse = 1 / matrix[k * size + k];
     for (int i = k + 1; i < size; i++) {
       double below = matrix[i * size + k];
       if (below != 0) {
-        double factor = below / pivot;
+        double factor = below * inverse;
         matrix[i * size + k] = factor;
         for (int j = k + 1; j < size; j++) {
           matrix[i * size + j] -= factor * matrix[k * size + j];

@@ -12,7 +12,6 @@ final class MidbandCycle {
   private final MidbandEquations equations;
   private final Waveform waveform;
   private final Newton newton;
-  private final double[] step;
   private final double[] before;
 
   /** Unknowns at each sample that was solved. */
@@ -24,15 +23,18 @@ final class MidbandCycle {
   /** Its derivative by each held quantity, row by row. */
   final double[] slope;
 
+  /** Change of the unknowns at each sample by each held quantity. */
+  private final double[][][] byHold;
+
   MidbandCycle(MidbandEquations equations, Waveform waveform) {
     int size = equations.system.size;
     this.equations = equations;
     this.waveform = waveform;
     this.newton = new Newton(equations.system);
     newton.prepare();
-    this.step = new double[size];
     this.before = new double[size];
     this.points = new double[waveform.distinct()][size];
+    this.byHold = new double[points.length][equations.holds][size];
     this.mean = new double[equations.holds];
     this.slope = new double[equations.holds * equations.holds];
   }
@@ -57,6 +59,26 @@ final class MidbandCycle {
       accumulate(k, hold);
     }
     return true;
+  }
+
+  /** Moves all points along with a small change of the held quantities. */
+  void shift(double[] change, double factor) {
+    for (int k = 0; k < points.length; k++) {
+      for (int h = 0; h < change.length; h++) {
+        for (int i = 0; i < points[k].length; i++) {
+          points[k][i] += factor * change[h] * byHold[k][h][i];
+        }
+      }
+    }
+  }
+
+  /** Stretches all points away from the point of rest, for a start at another level. */
+  void stretch(double[] rest, double ratio) {
+    for (double[] point : points) {
+      for (int i = 0; i < point.length; i++) {
+        point[i] = rest[i] + ratio * (point[i] - rest[i]);
+      }
+    }
   }
 
   private boolean reachFromLast(int k, double level, double[] hold, double[] start) {
@@ -106,6 +128,7 @@ final class MidbandCycle {
       mean[h] += weight * equations.imbalance(h, points[k], hold);
     }
     for (int by = 0; by < holds; by++) {
+      double[] step = byHold[k][by];
       Arrays.fill(step, 0);
       equations.addHeld(by, 1, step);
       newton.respond(step);

@@ -17,6 +17,13 @@ import perveance.engine.numeric.DenseLu;
  */
 public final class MidbandSolver {
   private static final int MOST_PASSES = 40;
+
+  /** A change so small that its square no longer matters: the cycle moves along by its slopes. */
+  private static final double CLOSE = 1e3;
+
+  /** A change so small that the last cycle, moved along, is a good start for the next. */
+  private static final double NEAR = 3e7;
+
   private static final double SMALLEST_DAMPING = 1.0 / 64;
   private static final double SMALLEST_STRIDE = 1.0 / 256;
 
@@ -65,8 +72,11 @@ public final class MidbandSolver {
   public MidbandOutcome solve(double peak) {
     ElementChecks.notNegative("peak", peak);
     passes = 0;
-    if (warm && solvedPeak > 0 && near(peak / solvedPeak) && balance(peak, true)) {
-      return found(peak);
+    if (warm && solvedPeak > 0 && near(peak / solvedPeak)) {
+      cycle.stretch(restPoint, peak / solvedPeak);
+      if (balance(peak, true)) {
+        return found(peak);
+      }
     }
     if (balance(peak, false)) {
       return found(peak);
@@ -126,7 +136,9 @@ public final class MidbandSolver {
         }
         solveFor(step);
         double length = norm(step, hold);
-        if (length <= 1) {
+        if (length <= CLOSE) {
+          add(step, 1, hold);
+          cycle.shift(step, 1);
           return true;
         }
         if (!(length < Double.MAX_VALUE) || !advance(peak, length)) {
@@ -140,10 +152,12 @@ public final class MidbandSolver {
 
   private boolean advance(double peak, double length) {
     for (double damping = 1; damping >= SMALLEST_DAMPING; damping /= 2) {
-      for (int h = 0; h < hold.length; h++) {
-        trial[h] = hold[h] + damping * step[h];
+      System.arraycopy(hold, 0, trial, 0, hold.length);
+      add(step, damping, trial);
+      boolean close = damping == 1 && length < NEAR;
+      if (close) {
+        cycle.shift(step, 1);
       }
-      boolean close = length * damping < 1e6;
       if (pass(peak, trial, close)) {
         solveFor(correction);
         if (norm(correction, trial) <= (1 - damping / 4) * length) {
@@ -153,6 +167,12 @@ public final class MidbandSolver {
       }
     }
     return false;
+  }
+
+  private static void add(double[] change, double factor, double[] to) {
+    for (int h = 0; h < to.length; h++) {
+      to[h] += factor * change[h];
+    }
   }
 
   private boolean pass(double peak, double[] held, boolean startWarm) {

@@ -75,7 +75,9 @@ final class CurrentLedger {
   double residual() {
     double largest = 0;
     for (int node = 1; node < leaving.length; node++) {
-      largest = Math.max(largest, Math.abs(leaving[node]));
+      if (topology.row[node] >= 0) {
+        largest = Math.max(largest, Math.abs(leaving[node]));
+      }
     }
     return largest;
   }

@@ -16,17 +16,22 @@ import perveance.engine.circuit.Element.Winding;
 /**
  * Looks whether the wiring alone determines every dc voltage and current. A node needs a path to
  * chassis through resistors, windings and sources, or both a way in and a way out through valves
- * and junctions. Grids and screens are no paths: what they take depends on leakage.
+ * and junctions; current sources alone determine no voltage. Grids and screens are no paths: what
+ * they take depends on leakage.
  */
 final class DcPaths {
   private final Circuit circuit;
   private final NodeGroups joined;
   private final NodeGroups ideal;
 
+  /** Nodes joined by anything that lets a voltage set a current. */
+  private final NodeGroups related;
+
   private DcPaths(Circuit circuit) {
     this.circuit = circuit;
     this.joined = new NodeGroups(circuit.nodes().size());
     this.ideal = new NodeGroups(circuit.nodes().size());
+    this.related = new NodeGroups(circuit.nodes().size());
   }
 
   static Optional<NotConverged> refusal(Circuit circuit) {
@@ -39,9 +44,13 @@ final class DcPaths {
     for (Element element : circuit.elements()) {
       boolean closes = false;
       if (element instanceof Resistor e) {
-        joined.join(e.a(), e.b());
+        join(e.a(), e.b());
+      } else if (element instanceof Valve e) {
+        related.join(e.anode(), e.cathode());
+      } else if (element instanceof Junction e) {
+        related.join(e.anode(), e.cathode());
       } else if (element instanceof VoltageSource e) {
-        joined.join(e.plus(), e.minus());
+        join(e.plus(), e.minus());
         closes = !ideal.join(e.plus(), e.minus());
       } else if (element instanceof Inductor e) {
         closes = joinWinding(e.a(), e.b(), e.resistance());
@@ -61,8 +70,13 @@ final class DcPaths {
     return Optional.empty();
   }
 
-  private boolean joinWinding(int a, int b, double resistance) {
+  private void join(int a, int b) {
     joined.join(a, b);
+    related.join(a, b);
+  }
+
+  private boolean joinWinding(int a, int b, double resistance) {
+    join(a, b);
     return resistance == 0 && !ideal.join(a, b);
   }
 
@@ -70,7 +84,8 @@ final class DcPaths {
     boolean[] fed = reach(true);
     boolean[] drained = reach(false);
     for (int node = 0; node < fed.length; node++) {
-      if (!fed[node] || !drained[node]) {
+      boolean related = this.related.of(node) == this.related.of(0);
+      if (!related || !fed[node] || !drained[node]) {
         String name = circuit.nodes().get(node);
         return Optional.of(
             refused(Cause.FLOATING_NODE, "node " + name + " has no path for dc to chassis", name));

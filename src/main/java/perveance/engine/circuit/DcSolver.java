@@ -26,6 +26,9 @@ import perveance.engine.device.ElectrodeCurrents;
  * <p>Not for use by two threads at once.
  */
 public final class DcSolver {
+  /** What the sum of the currents at any node of an answer is below, element by element [A]. */
+  private static final double RESIDUAL = 1e-9;
+
   private final Circuit circuit;
   private final ElementValues values;
   private final DcEquations equations;
@@ -128,20 +131,28 @@ public final class DcSolver {
       return refusal.get();
     }
     Newton.End end = stepping.solve(point);
+    double left = newton.kirchhoffResidual();
     if (end == Newton.End.CONVERGED) {
       DcSolution solution = new DcSolution(equations, point);
-      return new Converged(solution, stepping.method(), stepping.iterations(), solution.residual());
+      left = solution.residual();
+      if (left < RESIDUAL) {
+        return new Converged(solution, stepping.method(), stepping.iterations(), left);
+      }
     }
+    return end == Newton.End.SINGULAR
+        ? failed(Cause.SINGULAR, "the wiring does not determine every voltage and current", left)
+        : failed(
+            Cause.NO_CONVERGENCE,
+            "no operating point was found at which the currents balance",
+            left);
+  }
+
+  private NotConverged failed(Cause cause, String reason, double left) {
     List<Double> last = new ArrayList<>();
     for (double v : equations.system.voltage) {
       last.add(v);
     }
-    Cause cause = end == Newton.End.SINGULAR ? Cause.SINGULAR : Cause.NO_CONVERGENCE;
-    String reason =
-        cause == Cause.SINGULAR
-            ? "the wiring does not determine every voltage and current"
-            : "no operating point was found at which the currents balance";
-    return new NotConverged(cause, reason, "", last, newton.kirchhoffResidual());
+    return new NotConverged(cause, reason, "", last, left);
   }
 
   /**

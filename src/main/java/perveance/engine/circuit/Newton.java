@@ -13,7 +13,10 @@ import perveance.engine.numeric.DenseLu;
  */
 final class Newton {
   /** Kirchhoff's law must hold better than this at every node [A]. */
-  static final double KIRCHHOFF = 1e-10;
+  static final double KIRCHHOFF = 3e-10;
+
+  /** A balance that leakage across any socket upsets [A]. */
+  private static final double LEAKAGE = 1e-12;
 
   /** A leak in the matrix alone: it lets a node whose valves are all cut off be solved [S]. */
   static final double LEAK = 1e-13;
@@ -25,6 +28,7 @@ final class Newton {
     STALLED
   }
 
+  private static final int REFINEMENTS = 3;
   private static final int MOST_ITERATIONS = 60;
   private static final double SHORTEST = 1.0 / 1024;
 
@@ -110,11 +114,33 @@ final class Newton {
     return finish(x);
   }
 
+  /**
+   * Iterates, completes the point and sums the currents of every node. Where the steps do not die
+   * out but the currents balance to a picoampere, the voltages that still move are those that only
+   * leakage would decide: the point is taken.
+   */
   private End finish(double[] x) {
     End end = iterate();
+    complete(x);
+    for (int i = 0; i < REFINEMENTS && end == End.CONVERGED && !(kirchhoff <= KIRCHHOFF); i++) {
+      evaluate(unknowns);
+      if (!factor()) {
+        return End.SINGULAR;
+      }
+      solveFor(residual, step);
+      add(step);
+      condensation.forward(system.constant, constant);
+      complete(x);
+    }
+    if (end == End.CONVERGED) {
+      return kirchhoff <= KIRCHHOFF ? end : End.STALLED;
+    }
+    return kirchhoff <= LEAKAGE ? End.CONVERGED : end;
+  }
+
+  private void complete(double[] x) {
     condensation.backward(unknowns, x);
     kirchhoff = system.kirchhoff(x, left);
-    return end == End.CONVERGED && !(kirchhoff <= KIRCHHOFF) ? End.STALLED : end;
   }
 
   private End iterate() {

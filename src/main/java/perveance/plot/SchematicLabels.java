@@ -48,7 +48,7 @@ final class SchematicLabels {
             symbol.x(),
             symbol.y() + dy,
             dx,
-            reach,
+            overReach(symbol),
             symbol.label(),
             words.value(),
             words.duty(),
@@ -181,6 +181,15 @@ final class SchematicLabels {
     double w = symbol.turned() ? half : thin;
     double h = symbol.turned() ? thin : half;
     return new Rectangle2D.Double(symbol.x() - w, symbol.y() - h, 2 * w, 2 * h);
+  }
+
+  /** How far a symbol reaches above and below its centre, where text stands there. */
+  private static double overReach(Drawing.Symbol symbol) {
+    return switch (symbol.type()) {
+      case TRANSFORMER -> 4.2;
+      case CENTRE_TAPPED_TRANSFORMER -> 8.2;
+      default -> reach(symbol);
+    };
   }
 
   private static double reach(Drawing.Symbol symbol) {

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import perveance.engine.stage.Drawing;
+import perveance.engine.stage.SymbolShape;
 
 /**
  * Draws a schematic in grid units. The caller scales the graphics; the same painter serves page,
@@ -43,6 +44,7 @@ public final class SchematicPainter {
       g.draw(SymbolShapes.line(wire.x1(), wire.y1(), wire.x2(), wire.y2()));
     }
     for (Drawing.Symbol symbol : drawing.symbols()) {
+      paintTaps(g, drawing, symbol);
       paintSymbol(g, symbol, text);
       labels.symbol(g, symbol, text).ifPresent(spots::add);
     }
@@ -51,6 +53,21 @@ public final class SchematicPainter {
       labels.node(g, mark, text).ifPresent(spots::add);
     }
     return List.copyOf(spots);
+  }
+
+  /** Takes a wire that ends at a tap on to the winding. */
+  private static void paintTaps(Graphics2D g, Drawing drawing, Drawing.Symbol symbol) {
+    for (SymbolShape.Point tap : SymbolShape.taps(symbol)) {
+      boolean wired =
+          drawing.wires().stream()
+              .anyMatch(
+                  w ->
+                      (w.x1() == tap.x() && w.y1() == tap.y())
+                          || (w.x2() == tap.x() && w.y2() == tap.y()));
+      if (wired) {
+        g.draw(SymbolShapes.line(tap.x(), tap.y(), tap.x() + 0.6, tap.y()));
+      }
+    }
   }
 
   private void paintDot(Graphics2D g, double x, double y) {

@@ -8,6 +8,8 @@ import static perveance.engine.stage.StageKeys.SOURCE;
 
 import java.util.List;
 import java.util.Optional;
+import perveance.engine.base.QuantityFormat;
+import perveance.engine.base.Unit;
 import perveance.engine.stage.Drawing.Side;
 import perveance.engine.stage.Drawing.SymbolType;
 
@@ -58,9 +60,15 @@ final class GridInput {
 
   /** Wires a grid leak. */
   static void leak(StageWiring wiring, int joint, int foot, String suffix) {
-    double leak = wiring.values().number(GRID_LEAK.key(), USUAL_LEAK);
+    leak(wiring, joint, foot, suffix, USUAL_LEAK);
+  }
+
+  /** Wires a grid leak that has the usual value where none is stated. */
+  static void leak(StageWiring wiring, int joint, int foot, String suffix, double usual) {
+    double leak = wiring.values().number(GRID_LEAK.key(), usual);
     if (!wiring.values().has(GRID_LEAK.key())) {
-      wiring.assume("The grid leak is not stated; taken as 1 Mohm.");
+      String taken = QuantityFormat.PLAIN.part(usual, Unit.OHM);
+      wiring.assume("The grid leak is not stated; taken as " + taken + ".");
     }
     wiring.resistor(GRID_LEAK.key() + suffix, GRID_LEAK, leak, joint, foot, "grid leak");
   }

@@ -14,10 +14,18 @@ final class Sections {
   /** Distance between the valves of parallel sections; leaves room for a stopper and texts. */
   private static final int STEP = 24;
 
+  /** The same where the screens have leads of their own. */
+  private static final int SCREENED_STEP = 34;
+
   private Sections() {}
 
   static int count(StageValues values) {
     return (int) values.number(SECTIONS.key(), 1);
+  }
+
+  /** Distance between the valves in a drawing. */
+  static int step(StageValues values) {
+    return values.device().law().kind() == LawKind.PENTODE ? SCREENED_STEP : STEP;
   }
 
   /** Reference of a section: the stage's own where there is only one. */
@@ -30,13 +38,18 @@ final class Sections {
     return index == 0 ? "" : Integer.toString(index + 1);
   }
 
-  static List<Complaint> check(StageValues values) {
-    List<Complaint> complaints = new ArrayList<>();
+  /** The number must be whole. */
+  static List<Complaint> checkCount(StageValues values) {
     double sections = values.number(SECTIONS.key(), 1);
-    if (sections != Math.rint(sections)) {
-      complaints.add(
-          new Complaint(SECTIONS.key(), Double.toString(sections), "a whole number of sections"));
-    }
+    return sections == Math.rint(sections)
+        ? List.of()
+        : List.of(
+            new Complaint(SECTIONS.key(), Double.toString(sections), "a whole number of sections"));
+  }
+
+  static List<Complaint> check(StageValues values) {
+    List<Complaint> complaints = new ArrayList<>(checkCount(values));
+    double sections = values.number(SECTIONS.key(), 1);
     if (sections > 1 && values.device().law().kind() == LawKind.PENTODE) {
       complaints.add(
           new Complaint(
@@ -55,7 +68,7 @@ final class Sections {
     SymbolType type = ValveWiring.symbol(values.device());
     int count = count(values);
     for (int i = 0; i < count; i++) {
-      int at = x + i * STEP;
+      int at = x + i * step(values);
       sketch.valve(type, at, y, false, ref(values, i), Side.RIGHT);
       sketch.wire(at, anode, at, y - 4);
       if (i == 0) {
@@ -67,7 +80,7 @@ final class Sections {
         cathode(sketch, at, y + 4);
       }
     }
-    int last = x + (count - 1) * STEP;
+    int last = x + (count - 1) * step(values);
     if (count > 1) {
       sketch.wire(joint, y, joint, y - 5);
       sketch.wire(joint, y - 5, last - 12, y - 5);
@@ -81,9 +94,10 @@ final class Sections {
       sketch.ground(x, y);
       return;
     }
-    boolean first = x == GroundedCathode.X + STEP;
+    int step = step(sketch.values());
+    boolean first = x == GroundedCathode.X + step;
     boolean bypassed = sketch.values().has(StageKeys.CATHODE_BYPASS.key());
     int from = first && bypassed ? CathodeBias.BYPASS : 0;
-    sketch.wire(x, y, x, y + 2, x - STEP + from, y + 2);
+    sketch.wire(x, y, x, y + 2, x - step + from, y + 2);
   }
 }

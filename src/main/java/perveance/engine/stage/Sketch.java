@@ -68,6 +68,11 @@ final class Sketch {
     add(SymbolType.INPUT, x, y, false, false, part, Side.ABOVE, text);
   }
 
+  /** An input terminal for an element of its own name. */
+  void input(int x, int y, String local, String text) {
+    add(SymbolType.INPUT, x, y, false, false, name(local), Side.ABOVE, text);
+  }
+
   /** An output terminal; to the left of what drives it when mirrored. */
   void output(int x, int y, boolean mirrored, String text) {
     add(SymbolType.OUTPUT, x, y, false, mirrored, Optional.empty(), Side.ABOVE, text);

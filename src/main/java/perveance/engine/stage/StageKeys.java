@@ -192,7 +192,7 @@ final class StageKeys {
   }
 
   private static KeySpec share(String key, String meaning) {
-    return quantity(key, Unit.RATIO, 0.01, 1, meaning);
+    return quantity(key, Unit.RATIO, 0.01, 0.99, meaning);
   }
 
   private static KeySpec word(String key, String meaning) {

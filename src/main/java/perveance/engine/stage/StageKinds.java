@@ -10,6 +10,8 @@ public final class StageKinds {
       List.of(
           new CommonCathode(),
           new CathodeFollower(),
+          new PushPullOutput(),
+          new SingleEndedOutput(),
           new LongTailedPair(),
           new Concertina(),
           new GroundedGrid(),

@@ -92,6 +92,20 @@ public final class SymbolShape {
     };
   }
 
+  /**
+   * The terminals that are taps of a winding.
+   *
+   * @param symbol the symbol
+   * @return taps for a screen, empty for all but transformers
+   */
+  public static List<Point> taps(Symbol symbol) {
+    return switch (symbol.type()) {
+      case TRANSFORMER -> terminals(symbol).subList(2, 3);
+      case CENTRE_TAPPED_TRANSFORMER -> terminals(symbol).subList(3, 5);
+      default -> List.of();
+    };
+  }
+
   private static int grid(Symbol symbol) {
     return symbol.mirrored() ? symbol.x() + 4 : symbol.x() - 4;
   }

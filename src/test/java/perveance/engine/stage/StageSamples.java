@@ -15,6 +15,7 @@ final class StageSamples {
     commonCathode(all);
     followers(all);
     TwoValveSamples.add(all);
+    OutputSamples.add(all);
     return all;
   }
 

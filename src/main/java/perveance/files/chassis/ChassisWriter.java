@@ -7,6 +7,7 @@ import perveance.engine.stage.Conditions;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.TomlEditor;
 import perveance.files.toml.TomlTable;
+import perveance.files.toml.TomlText;
 
 /**
  * Writes a chassis into the text it came from: what has not changed stays as the person wrote it,
@@ -41,7 +42,7 @@ public final class ChassisWriter {
   public static String update(SourceText source, Chassis before, Chassis after) {
     TomlEditor editor = new TomlEditor(source);
     if (!before.title().equals(after.title())) {
-      editor.set(editor.root(), "title", TomlEditor.text(after.title()), ORDER);
+      editor.set(editor.root(), "title", TomlText.text(after.title()), ORDER);
     }
     writeConditions(editor, before.conditions(), after.conditions());
     SuppliesWriter.write(editor, before.supplies(), after.supplies());

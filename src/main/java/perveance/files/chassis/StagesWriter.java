@@ -12,6 +12,7 @@ import perveance.engine.stage.StageKinds;
 import perveance.files.toml.BlockWanted;
 import perveance.files.toml.TomlEditor;
 import perveance.files.toml.TomlTable;
+import perveance.files.toml.TomlText;
 
 /** Writes the changes of stages. */
 final class StagesWriter {
@@ -39,8 +40,8 @@ final class StagesWriter {
 
   private static Map<String, String> values(StageEntry stage) {
     Map<String, String> values = new LinkedHashMap<>();
-    values.put("ref", TomlEditor.text(stage.ref()));
-    values.put("kind", TomlEditor.text(stage.kind()));
+    values.put("ref", TomlText.text(stage.ref()));
+    values.put("kind", TomlText.text(stage.kind()));
     stage.settings().forEach((key, setting) -> values.put(key, text(setting)));
     return values;
   }
@@ -48,10 +49,10 @@ final class StagesWriter {
   private static void change(TomlEditor editor, TomlTable table, StageEntry old, StageEntry now) {
     List<String> order = order(now.kind());
     if (!old.ref().equals(now.ref())) {
-      editor.set(table, "ref", TomlEditor.text(now.ref()), order);
+      editor.set(table, "ref", TomlText.text(now.ref()), order);
     }
     if (!old.kind().equals(now.kind())) {
-      editor.set(table, "kind", TomlEditor.text(now.kind()), order);
+      editor.set(table, "kind", TomlText.text(now.kind()), order);
     }
     // in the usual order, so that several new keys that share a neighbour come out in it
     List<String> keys = new ArrayList<>(now.settings().keySet());
@@ -78,6 +79,6 @@ final class StagesWriter {
   }
 
   private static String text(Setting setting) {
-    return setting instanceof Setting.Flag flag ? flag.text() : TomlEditor.text(setting.text());
+    return setting instanceof Setting.Flag flag ? flag.text() : TomlText.text(setting.text());
   }
 }

@@ -8,7 +8,7 @@ import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Unit;
 import perveance.engine.stage.Supply;
 import perveance.engine.stage.SupplyFeed;
-import perveance.files.toml.TomlEditor;
+import perveance.files.toml.TomlText;
 
 /** The values of a supply node as they stand in a file. */
 final class SupplyText {
@@ -19,7 +19,7 @@ final class SupplyText {
     if (supply.feed() instanceof SupplyFeed.Stated stated) {
       values.put("voltage", quantity(stated.voltage(), Unit.VOLT));
     } else if (supply.feed() instanceof SupplyFeed.Dropped dropped) {
-      values.put("from", TomlEditor.text(dropped.from()));
+      values.put("from", TomlText.text(dropped.from()));
       values.put("dropper", quantity(dropped.dropper(), Unit.OHM));
     }
     put(values, "reservoir", supply.reservoir(), Unit.FARAD);
@@ -28,7 +28,7 @@ final class SupplyText {
   }
 
   static String header(String name) {
-    return "[supply." + TomlEditor.key(name) + "]";
+    return "[supply." + TomlText.key(name) + "]";
   }
 
   static String braces(Supply supply) {
@@ -44,6 +44,6 @@ final class SupplyText {
   }
 
   static String quantity(double value, Unit unit) {
-    return TomlEditor.text(QuantityFormat.PLAIN.part(value, unit));
+    return TomlText.text(QuantityFormat.PLAIN.part(value, unit));
   }
 }

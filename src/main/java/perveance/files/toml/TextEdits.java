@@ -25,11 +25,15 @@ final class TextEdits {
     edits.add(new Edit(at, at, inserted));
   }
 
-  /** A part of the text with the edits that fall into it, those at its very ends included. */
+  /**
+   * A part of the text with the edits that fall into it. An insertion between two parts belongs to
+   * the first of them.
+   */
   String apply(int from, int to) {
     List<Edit> here = new ArrayList<>();
     for (Edit edit : edits) {
-      if (edit.start() >= from && edit.end() <= to) {
+      boolean ofPartAbove = edit.end() == from && from > 0;
+      if (edit.start() >= from && edit.end() <= to && !ofPartAbove) {
         here.add(edit);
       }
     }

@@ -50,7 +50,7 @@ public final class TomlEditor {
    *
    * @param table the table
    * @param key the key; it must not name a table
-   * @param value the value as it stands in a file, see {@link #text}
+   * @param value the value as it stands in a file, see {@link TomlText}
    * @param order the usual order of keys in such a table, for a key that is new
    */
   public void set(TomlTable table, String key, String value, List<String> order) {
@@ -206,31 +206,7 @@ public final class TomlEditor {
    * @return whole lines
    */
   public String block(String header, Map<String, String> values) {
-    StringBuilder out = new StringBuilder(header).append(lines.separator());
-    values.forEach(
-        (key, value) ->
-            out.append(KeyReader.write(key)).append(" = ").append(value).append(lines.separator()));
-    return out.toString();
-  }
-
-  /**
-   * A text as it stands in a file, in quotes.
-   *
-   * @param text the text
-   * @return the text quoted and escaped
-   */
-  public static String text(String text) {
-    return QuotedText.write(text);
-  }
-
-  /**
-   * A key as it stands in a file, quoted where it must be.
-   *
-   * @param key the key
-   * @return the key
-   */
-  public static String key(String key) {
-    return KeyReader.write(key);
+    return TomlText.block(header, values, lines.separator());
   }
 
   /**

@@ -260,6 +260,18 @@ class TomlEditorTest {
   }
 
   @Test
+  void blocksWithoutBlankLinesBetweenKeepTheirKeysApart() {
+    String text = "x = 1\n[a]\nb = 1\n[c]\nd = 1\n[[e]]\n[f]\n";
+    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text));
+    other.set(other.root(), "y", "2", List.of());
+    other.set(other.root().table("a").orElseThrow(), "n", "2", List.of());
+    other.set(other.root().tables("e").get(0), "n", "3", List.of());
+    other.rename(other.root().table("c").orElseThrow(), "[cc]");
+    assertEquals(
+        "x = 1\ny = 2\n[a]\nb = 1\nn = 2\n[cc]\nd = 1\n[[e]]\nn = 3\n[f]\n", other.result());
+  }
+
+  @Test
   void aFaultyTextIsNotEdited() {
     SourceText faulty = SourceText.of("a.toml", "a = ");
     assertThrows(IllegalArgumentException.class, () -> new TomlEditor(faulty));

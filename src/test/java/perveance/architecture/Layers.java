@@ -65,11 +65,11 @@ final class Layers {
           new Layer(
               "files",
               with(ENGINE, "app"),
-              // the program's own device files are listed out of its jar
+              // the program's own device files are listed out of its jar, wherever that lies
               with(
                   FILE_JDK,
                   "java.nio.channels",
-                  "java.util.jar",
+                  "java.security",
                   "java.util.zip",
                   "com.fasterxml.jackson.core..")),
           new Layer(

@@ -19,8 +19,7 @@ import perveance.files.toml.SourceText;
  * read when it is asked for, so a command that needs one does not wait for all.
  */
 public final class DeviceFiles implements DeviceLibrary {
-  private final List<Shelf> shelves = new ArrayList<>();
-  private final Map<Shelf, DeviceNames> namesOf = new HashMap<>();
+  private final List<ShelfIndex> shelves = new ArrayList<>();
   private final Map<String, Device> byName = new HashMap<>();
   private final Map<String, Device> byFile = new HashMap<>();
 
@@ -32,9 +31,9 @@ public final class DeviceFiles implements DeviceLibrary {
    */
   public DeviceFiles(List<Path> folders) {
     for (Path folder : folders) {
-      shelves.add(new FolderShelf(folder));
+      shelves.add(new ShelfIndex(new FolderShelf(folder, folder.toString()), false));
     }
-    shelves.add(new PackagedShelf());
+    shelves.add(new ShelfIndex(PackagedShelf.find(), true));
   }
 
   /**
@@ -72,34 +71,13 @@ public final class DeviceFiles implements DeviceLibrary {
    * @throws BadInputException when the file cannot be read
    */
   public synchronized Optional<SourceText> source(String name) throws BadInputException {
-    for (Shelf shelf : shelves) {
-      Optional<SourceText> source = source(shelf, name);
+    for (ShelfIndex shelf : shelves) {
+      Optional<SourceText> source = shelf.source(name);
       if (source.isPresent()) {
         return source;
       }
     }
     return Optional.empty();
-  }
-
-  private Optional<SourceText> source(Shelf shelf, String name) throws BadInputException {
-    if (shelf instanceof PackagedShelf && !namesOf.containsKey(shelf)) {
-      // our own files are named after their type, which spares looking into all of them
-      Optional<SourceText> guessed = shelf.read(DeviceNames.fileFor(name));
-      if (guessed.isPresent()) {
-        return guessed;
-      }
-    }
-    Optional<String> file = names(shelf).fileOf(name);
-    return file.isEmpty() ? Optional.empty() : shelf.read(file.get());
-  }
-
-  private DeviceNames names(Shelf shelf) {
-    DeviceNames known = namesOf.get(shelf);
-    if (known == null) {
-      known = DeviceNames.of(shelf);
-      namesOf.put(shelf, known);
-    }
-    return known;
   }
 
   /**
@@ -120,8 +98,8 @@ public final class DeviceFiles implements DeviceLibrary {
   @Override
   public synchronized List<String> names() {
     Set<String> names = new LinkedHashSet<>();
-    for (Shelf shelf : shelves) {
-      names.addAll(names(shelf).names());
+    for (ShelfIndex shelf : shelves) {
+      names.addAll(shelf.names().names());
     }
     return List.copyOf(names);
   }
@@ -135,8 +113,8 @@ public final class DeviceFiles implements DeviceLibrary {
    */
   public synchronized List<Problem> problems() {
     List<Problem> problems = new ArrayList<>();
-    for (Shelf shelf : shelves) {
-      problems.addAll(names(shelf).problems());
+    for (ShelfIndex shelf : shelves) {
+      problems.addAll(shelf.names().problems());
     }
     return problems;
   }

@@ -18,6 +18,9 @@ import perveance.files.toml.TomlParser;
 final class DeviceNames {
   private record Claim(String file, String shownFile, int line) {}
 
+  /** Names stand at the top; a file whose aliases reach further is found by its type. */
+  private static final int HEAD_BYTES = 4096;
+
   private final Map<String, Claim> claims = new LinkedHashMap<>();
   private final List<String> names = new ArrayList<>();
   private final List<Problem> problems = new ArrayList<>();
@@ -36,17 +39,15 @@ final class DeviceNames {
 
   private void add(Shelf shelf, String file) {
     try {
-      Optional<SourceText> whole = shelf.read(file);
-      if (whole.isPresent()) {
-        add(file, head(whole.get()));
-      }
+      SourceText head = shelf.readHead(file, HEAD_BYTES);
+      add(file, SourceText.of(head.file(), namesAlone(head.text())));
     } catch (BadInputException e) {
       problems.addAll(e.problems());
     }
   }
 
   private void add(String file, SourceText head) {
-    // faults of the head are told when the device is read
+    // faults are told when the device is read
     Problems untold = new Problems(head.file());
     StrictTable table = new StrictTable(TomlParser.parse(head, untold), "", head, untold);
     Optional<String> type = table.text("type");
@@ -54,6 +55,27 @@ final class DeviceNames {
     for (String alias : table.texts("aliases")) {
       claim(file, head, table, "aliases", alias);
     }
+  }
+
+  /** The lines above the first header that tell names, the others blank, so that lines count. */
+  static String namesAlone(String text) {
+    StringBuilder names = new StringBuilder();
+    boolean within = false;
+    int at = 0;
+    while (at < text.length() && text.charAt(at) != '[') {
+      int end = text.indexOf('\n', at);
+      int next = end < 0 ? text.length() : end + 1;
+      if (within || text.startsWith("type", at) || text.startsWith("aliases", at)) {
+        within = within || text.startsWith("aliases", at);
+        names.append(text, at, next);
+        int close = text.indexOf(']', at);
+        within = within && (close < 0 || close >= next);
+      } else {
+        names.append('\n');
+      }
+      at = next;
+    }
+    return names.toString();
   }
 
   private void claim(String file, SourceText head, StrictTable table, String key, String name) {
@@ -72,12 +94,6 @@ final class DeviceNames {
                   + (earlier.shownFile() + " claims it in line " + earlier.line()),
               Optional.empty()));
     }
-  }
-
-  /** The part before the first header. */
-  private static SourceText head(SourceText whole) {
-    int end = whole.text().indexOf("\n[");
-    return end < 0 ? whole : SourceText.of(whole.file(), whole.text().substring(0, end + 1));
   }
 
   static String stem(String file) {

@@ -15,4 +15,7 @@ interface Shelf {
 
   /** The text of a file; empty when there is none of that name. */
   Optional<SourceText> read(String file) throws BadInputException;
+
+  /** The first bytes of a file that is there, as text that may break off. */
+  SourceText readHead(String file, int bytes) throws BadInputException;
 }

@@ -47,7 +47,18 @@ public record SourceText(String file, String text, boolean marked) {
    * @throws BadInputException when it cannot be read, is too large or is not UTF-8 text
    */
   public static SourceText read(Path path) throws BadInputException {
-    String file = path.toString();
+    return read(path, path.toString());
+  }
+
+  /**
+   * Reads and decodes a file.
+   *
+   * @param path the file
+   * @param file how messages name it
+   * @return its text
+   * @throws BadInputException when it cannot be read, is too large or is not UTF-8 text
+   */
+  public static SourceText read(Path path, String file) throws BadInputException {
     try {
       if (Files.isDirectory(path)) {
         throw refused(file, "a folder", "a file");

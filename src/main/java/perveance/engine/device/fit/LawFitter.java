@@ -4,7 +4,7 @@ import java.util.List;
 import perveance.engine.device.Evidence;
 
 /** Fits the law of one kind of device. */
-public sealed interface LawFitter permits TriodeFitter {
+public sealed interface LawFitter permits TriodeFitter, PentodeFitter, RectifierFitter {
   /**
    * Fits the law to the evidence that is meant for fitting.
    *

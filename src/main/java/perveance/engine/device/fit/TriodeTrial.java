@@ -18,13 +18,13 @@ final class TriodeTrial {
    * / e at 1000 K, the order of initial velocities and of patches on an oxide cathode. The static
    * evidence of the types with most of it allows 0.15 V to 0.35 V.
    */
-  private static final double CATHODE_SPREAD = 0.3;
+  static final double CATHODE_SPREAD = 0.3;
 
   /** Common temperature of an oxide cathode [K]. */
-  private static final double CATHODE_TEMPERATURE = 1000;
+  static final double CATHODE_TEMPERATURE = 1000;
 
   /** Grid perveance over cathode perveance, the middle of three measured 12AX7 (DAFx-11). */
-  private static final double GRID_SHARE = 0.35;
+  static final double GRID_SHARE = 0.35;
 
   /** Part of the cut-off voltage by which contact potentials differ besides. */
   private static final double CONTACT_SHARE = 0.04;

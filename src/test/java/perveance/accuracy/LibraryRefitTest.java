@@ -15,12 +15,17 @@ import org.junit.jupiter.params.provider.MethodSource;
 import perveance.engine.base.BadInputException;
 import perveance.engine.device.Device;
 import perveance.engine.device.LawParameter;
+import perveance.engine.device.SpaceChargeDiodeLaw;
+import perveance.engine.device.SpreadPentodeLaw;
 import perveance.engine.device.SpreadTriodeLaw;
 import perveance.engine.device.fit.Filament;
 import perveance.engine.device.fit.FitConditions;
 import perveance.engine.device.fit.FitResult;
 import perveance.engine.device.fit.Heating;
 import perveance.engine.device.fit.LawFit;
+import perveance.engine.device.fit.LawFitter;
+import perveance.engine.device.fit.PentodeFitter;
+import perveance.engine.device.fit.RectifierFitter;
 import perveance.engine.device.fit.TriodeFitter;
 import perveance.files.device.DeviceReader;
 import perveance.files.device.DeviceSheet;
@@ -36,22 +41,26 @@ class LibraryRefitTest {
   private static final Path FOLDER = Path.of("device-curves");
   private static final boolean WRITE = "write".equals(System.getProperty("perveance.refit"));
 
-  static List<Path> triodes() throws IOException {
+  static List<Path> all() throws IOException {
     try (Stream<Path> files = Files.list(FOLDER)) {
-      return files
-          .filter(file -> file.toString().endsWith(".toml"))
-          .filter(LibraryRefitTest::isTriode)
-          .sorted()
-          .toList();
+      return files.filter(file -> file.toString().endsWith(".toml")).sorted().toList();
     }
   }
 
-  private static boolean isTriode(Path file) {
-    try {
-      return Files.readString(file).contains("\nkind = \"triode\"\n");
-    } catch (IOException e) {
-      throw new java.io.UncheckedIOException(e);
-    }
+  private static LawFitter fitter(DeviceSheet sheet) {
+    return switch (sheet.kind()) {
+      case "triode" -> new TriodeFitter();
+      case "rectifier" -> new RectifierFitter();
+      default -> new PentodeFitter(sheet.kind().equals("beam"));
+    };
+  }
+
+  private static String lawName(DeviceSheet sheet) {
+    return switch (sheet.kind()) {
+      case "triode" -> SpreadTriodeLaw.NAME;
+      case "rectifier" -> SpaceChargeDiodeLaw.NAME;
+      default -> SpreadPentodeLaw.NAME;
+    };
   }
 
   /**
@@ -59,14 +68,14 @@ class LibraryRefitTest {
    * value (or of the unit for numbers near zero) leaves room for their rounding only.
    */
   @ParameterizedTest
-  @MethodSource("triodes")
+  @MethodSource("all")
   @Tag("pinned")
   void theLawIsWhatTheEvidenceGives(Path file) throws IOException, BadInputException {
     String text = Files.readString(file);
     DeviceSheet sheet = DeviceReader.readSheet(SourceText.of(file.toString(), text));
-    FitResult result = new TriodeFitter().fit(sheet.evidence(), conditions(sheet));
+    FitResult result = fitter(sheet).fit(sheet.evidence(), conditions(sheet));
     LawFit fit = assertInstanceOf(FitResult.Fitted.class, result, () -> file + ": " + result).fit();
-    String rewritten = FittedSections.replace(text, SpreadTriodeLaw.NAME, fit);
+    String rewritten = FittedSections.replace(text, lawName(sheet), fit);
     if (WRITE) {
       Files.writeString(file, rewritten);
       return;

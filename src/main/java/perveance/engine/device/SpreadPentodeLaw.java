@@ -11,7 +11,9 @@ import java.util.List;
  *
  * <pre>{@code Ik = G mean((Vg + Vc + D (Vg2 + L Va))^(3/2)),  D spread about D0}</pre>
  *
- * <p>and divides between anode and screen by a knee that moves with current ({@link
+ * <p>A remote cut-off grid is wound with wider turns on a part of its length: that part of the
+ * cathode follows the same law with a larger D and keeps conducting when the rest is cut off. The
+ * cathode current divides between anode and screen by a knee that moves with current ({@link
  * ScreenDivision}). Screen and anode tied give the triode connection, a screen on a tap of the
  * anode's winding the distributed screen: both are the same law with the screen voltage set by the
  * circuit. Grid current ({@link GridCurrent}) is added to the cathode's.
@@ -31,6 +33,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
 
   private final SpreadPentodeParameters values;
   private final SpreadCathode cathode;
+  private final SpreadCathode remote;
   private final ScreenDivision division;
   private final GridCurrent gridCurrent;
 
@@ -41,16 +44,20 @@ public final class SpreadPentodeLaw implements DeviceLaw {
    */
   public SpreadPentodeLaw(SpreadPentodeParameters values) {
     this.values = values;
-    this.cathode =
-        new SpreadCathode(
-            values.perveance(),
-            values.contactPotential(),
-            values.penetration(),
-            values.spread(),
-            values.cathodeSpread());
+    this.cathode = part(values, 1 - values.remoteShare(), 1);
+    this.remote = part(values, values.remoteShare(), values.remotePenetration());
     this.division = new ScreenDivision(values);
     this.gridCurrent =
         new GridCurrent(values.gridPerveance(), values.gridOnset(), values.thermalVoltage());
+  }
+
+  private static SpreadCathode part(SpreadPentodeParameters v, double share, double ratio) {
+    return new SpreadCathode(
+        share * v.perveance(),
+        v.contactPotential(),
+        ratio * v.penetration(),
+        v.spread(),
+        v.cathodeSpread());
   }
 
   /**
@@ -77,11 +84,18 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     double vg = bounded(grid);
     double vg2 = bounded(screen);
     double influence = values.anodeInfluence();
-    cathode.evaluate(vg, vg2 + influence * va, out);
+    double pull = vg2 + influence * va;
+    cathode.evaluate(vg, pull, out);
     double total = out.current(ElectrodeCurrents.ANODE);
+    double byPull = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
+    double byGrid = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
+    if (values.remoteShare() > 0) {
+      remote.evaluate(vg, pull, out);
+      total += out.current(ElectrodeCurrents.ANODE);
+      byPull += out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
+      byGrid += out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
+    }
     if (total > 0) {
-      double byPull = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
-      double byGrid = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
       out.set(ElectrodeCurrents.ANODE, total, influence * byPull, byGrid, byPull);
       double root = Math.cbrt(total / values.perveance());
       division.divide(root * root, va, vg2, out);
@@ -107,6 +121,8 @@ public final class SpreadPentodeLaw implements DeviceLaw {
             v.penetration(),
             v.spread(),
             v.cathodeSpread(),
+            v.remoteShare(),
+            v.remotePenetration(),
             v.anodeInfluence(),
             v.screenShare(),
             v.shareFall(),

@@ -11,6 +11,8 @@ import java.util.Map;
  * @param penetration D0, mean penetration factor of the screen through the grid, above 0 [1]
  * @param spread s, sqrt 3 times the standard deviation of D over D0, 0 to 1 [1]
  * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
+ * @param remoteShare part of the cathode behind the wide turns of a remote cut-off grid, 0 to 1 [1]
+ * @param remotePenetration penetration factor there over D0, 1 or above [1]
  * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
  * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
  * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
@@ -30,6 +32,8 @@ public record SpreadPentodeParameters(
     double penetration,
     double spread,
     double cathodeSpread,
+    double remoteShare,
+    double remotePenetration,
     double anodeInfluence,
     double screenShare,
     double shareFall,
@@ -47,6 +51,8 @@ public record SpreadPentodeParameters(
     positive("penetration", penetration);
     within("spread", spread, 0, 1);
     within("cathodeSpread", cathodeSpread, 0, 100);
+    within("remoteShare", remoteShare, 0, 1);
+    within("remotePenetration", remotePenetration, 1, 100);
     within("anodeInfluence", anodeInfluence, 0, 1);
     positive("screenShare", screenShare);
     within("shareFall", shareFall, 0, 3);
@@ -67,6 +73,8 @@ public record SpreadPentodeParameters(
           "penetration",
           "spread",
           "cathode_spread",
+          "remote_share",
+          "remote_penetration",
           "anode_influence",
           "screen_share",
           "share_fall",
@@ -96,7 +104,7 @@ public record SpreadPentodeParameters(
     }
     return new SpreadPentodeParameters(
         v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8], v[9], v[10], v[11], v[12], v[13],
-        v[14]);
+        v[14], v[15], v[16]);
   }
 
   /**
@@ -111,18 +119,20 @@ public record SpreadPentodeParameters(
         parameter(2, penetration, "1", "mean penetration factor of the screen through the grid"),
         parameter(3, spread, "1", "spread of the penetration factor, relative"),
         parameter(4, cathodeSpread, "V", "spread of the cathode's potential"),
+        parameter(5, remoteShare, "1", "part of the cathode behind wide turns (remote cut-off)"),
+        parameter(6, remotePenetration, "1", "penetration factor there over the mean"),
         parameter(
-            5, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
-        parameter(6, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
-        parameter(7, shareFall, "1", "power by which the screen's share falls with anode voltage"),
-        parameter(8, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
+            7, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
+        parameter(8, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
+        parameter(9, shareFall, "1", "power by which the screen's share falls with anode voltage"),
+        parameter(10, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
         parameter(
-            9, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
-        parameter(10, knee, "1", "knee over the voltage that draws the current at no bias"),
-        parameter(11, kneeSharpness, "1", "1 for a rounded knee, larger for a sharp one"),
-        parameter(12, gridPerveance, "A V^-1.5", "perveance of the grid"),
-        parameter(13, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
-        parameter(14, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
+            11, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
+        parameter(12, knee, "1", "knee over the voltage that draws the current at no bias"),
+        parameter(13, kneeSharpness, "1", "1 for a rounded knee, larger for a sharp one"),
+        parameter(14, gridPerveance, "A V^-1.5", "perveance of the grid"),
+        parameter(15, gridOnset, "V", "grid voltage at 0.3 uA of grid current"),
+        parameter(16, thermalVoltage, "V", "thermal voltage of the cathode, k T / e"));
   }
 
   private static LawParameter parameter(int index, double value, String unit, String meaning) {

@@ -7,12 +7,15 @@ package perveance.engine.device.fit;
  * <p>Knee and, for beam forming, the width of the beams were set once for each class on published
  * single-ended stages (power and mean screen current at full drive): EL84 at 250 V with 4.5k and
  * 5.2k for pentodes, the three rows of the 6V6GT for beam tetrodes. They are not fitted to any
- * single type. The spread of small pentodes comes from the types whose tables fix it (6AU6 0.7,
+ * single type. That of small pentodes is a little wider, as their published ra at 100 V shows
+ * (6AU6, 6SK7). The spread of small pentodes comes from the types whose tables fix it (6AU6 0.7,
  * 6SK7 0.7, EF80 0.45).
  */
 public enum PentodeClass {
   /** Suppressor grid, cathode current of 25 mA or less. */
-  SMALL("pentodes of small current", 0.5, 0.05, 0.003, 0.13, 0.1, 0, 0.065, 1.5),
+  SMALL("pentodes of small current", 0.5, 0.05, 0.003, 0.13, 0.1, 0, 0.08, 1.5),
+  /** The same with a grid of uneven pitch for remote cut-off. */
+  REMOTE("remote cut-off pentodes", 0.5, 0.05, 0.003, 0.13, 0.1, 0, 0.08, 1.5),
   /** Suppressor grid, larger currents. */
   POWER("output pentodes", 0.4, 0.15, 0.03, 0.13, 0.1, 0, 0.065, 1.5),
   /** Beam plates and aligned grids. */
@@ -55,12 +58,16 @@ public enum PentodeClass {
    * The class of a valve.
    *
    * @param beam true for beam plates, false for a suppressor grid
+   * @param remote true where a mutual conductance far beyond the usual cut-off is published
    * @param highestCurrent largest cathode current of its tables [A]
    * @return its class
    */
-  public static PentodeClass of(boolean beam, double highestCurrent) {
+  public static PentodeClass of(boolean beam, boolean remote, double highestCurrent) {
     if (beam) {
       return BEAM;
+    }
+    if (remote) {
+      return REMOTE;
     }
     return highestCurrent <= SMALL_CURRENT ? SMALL : POWER;
   }

@@ -10,7 +10,8 @@ import perveance.engine.numeric.Statistics;
 /**
  * Fits a {@link SpreadPentodeLaw}: perveance, contact potential, penetration factor and spread of
  * the grid, the anode's influence, the screen's share and how it falls as the anode is raised; of
- * beam tetrodes also the width of the beams.
+ * beam tetrodes also the width of the beams, of remote cut-off types (those with a mutual
+ * conductance published as cut-off) the part of the grid with wide turns.
  *
  * <p>Weighted least squares over the figures of the evidence ({@link PentodeObservations}); triode
  * connected points count too. What the evidence leaves open is held by the usual values of the
@@ -32,7 +33,7 @@ public record PentodeFitter(boolean beam) implements LawFitter {
               + " current, gm and ra; found "
               + observations.size());
     }
-    PentodeClass pentodeClass = PentodeClass.of(beam, highestCurrent(used));
+    PentodeClass pentodeClass = PentodeClass.of(beam, isRemote(used), highestCurrent(used));
     PentodeTrial best = null;
     String reason = "";
     for (double mu : starts(used)) {
@@ -44,6 +45,10 @@ public record PentodeFitter(boolean beam) implements LawFitter {
       }
     }
     return best == null ? new FitResult.NotFitted(reason) : new FitResult.Fitted(best.result());
+  }
+
+  private static boolean isRemote(List<Evidence> used) {
+    return used.stream().anyMatch(entry -> entry.kind().equals("cut-off"));
   }
 
   private static double highestCurrent(List<Evidence> used) {

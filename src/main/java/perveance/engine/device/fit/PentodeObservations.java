@@ -11,12 +11,13 @@ import perveance.engine.device.Evidence;
  * <p>Deviations, the same for every type: tabulated anode current and gm 2 %, mu of grid over
  * screen 4 % (printed to two figures), screen current 8 % (to half a milliampere), anode resistance
  * 10 % (rounded guesses, "greater than"); tied as a triode, current 4 %, gm 5 %, ra 6 %; chart
- * readings 6 %. Figures of medium confidence count with these over 0.6, those marked low not at
- * all.
+ * readings 6 %; the gm printed for a remote cut-off 30 %. Figures of medium confidence count with
+ * these over 0.6, those marked low not at all.
  */
 final class PentodeObservations {
   private static final double MEDIUM = 1 / 0.6;
   private static final double CHART = 0.06;
+  private static final double CUT_OFF_SLOPE = 0.3;
 
   private PentodeObservations() {}
 
@@ -28,11 +29,15 @@ final class PentodeObservations {
       boolean placed =
           entry.gridVoltage().isPresent()
               && (entry.screenVoltage().isPresent() || entry.connection().equals("triode"));
-      if (counts && placed && entry.anodeCurrent().isPresent()) {
+      if (counts && placed && (entry.anodeCurrent().isPresent() || isCutOff(entry))) {
         usable.add(entry);
       }
     }
     return usable;
+  }
+
+  private static boolean isCutOff(Evidence entry) {
+    return entry.kind().equals("cut-off") && entry.mutualConductance().isPresent();
   }
 
   static List<Observation> of(List<Evidence> used) {
@@ -62,7 +67,7 @@ final class PentodeObservations {
       case SCREEN_CURRENT -> 0.08;
       case AMPLIFICATION, CUT_OFF -> 0.04;
       case ANODE_RESISTANCE -> tied ? 0.06 : 0.1;
-      case MUTUAL_CONDUCTANCE -> tied ? 0.05 : 0.02;
+      case MUTUAL_CONDUCTANCE -> isCutOff(entry) ? CUT_OFF_SLOPE : tied ? 0.05 : 0.02;
     };
   }
 }

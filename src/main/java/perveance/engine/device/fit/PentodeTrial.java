@@ -1,6 +1,7 @@
 package perveance.engine.device.fit;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import perveance.engine.base.PhysicalConstants;
 import perveance.engine.device.Evidence;
@@ -17,7 +18,7 @@ final class PentodeTrial {
   private static final int SPREAD = 3;
   private static final int INFLUENCE = 4;
   private static final int FALL = 6;
-  private static final int WIDTH = 7;
+  private static final int EXTRA = 7;
 
   private static final double CONTACT_POTENTIAL = 0.6;
   private static final double CONTACT_DEVIATION = 0.3;
@@ -31,6 +32,14 @@ final class PentodeTrial {
   /** Relative deviation of the width of the beams, as a logarithm. */
   private static final double WIDTH_DEVIATION = 0.1;
 
+  /** Penetration factor of the wide turns of a remote cut-off grid over the mean, usual value. */
+  private static final double REMOTE_PENETRATION = 3;
+
+  private static final double REMOTE_SHARE = 0.05;
+
+  /** Relative deviation of the part with wide turns, as a logarithm. */
+  private static final double REMOTE_DEVIATION = 1.5;
+
   private static final double GRID_ONSET = -0.6;
 
   private final List<Evidence> used;
@@ -38,6 +47,7 @@ final class PentodeTrial {
   private final FitConditions conditions;
   private final PentodeClass pentodeClass;
   private final boolean beam;
+  private final boolean remote;
   private final FitOutcome outcome;
 
   PentodeTrial(
@@ -51,6 +61,7 @@ final class PentodeTrial {
     this.conditions = conditions;
     this.pentodeClass = pentodeClass;
     this.beam = pentodeClass == PentodeClass.BEAM;
+    this.remote = pentodeClass == PentodeClass.REMOTE;
     int count = observations.size();
     double[] usual = usual();
     double[] observed = new double[count + usual.length];
@@ -70,24 +81,30 @@ final class PentodeTrial {
 
   /** The usual values of the class, which take part as observations. */
   private double[] usual() {
-    double fall = Math.log(beam ? pentodeClass.shareOffset() : pentodeClass.shareFall());
-    double[] common = {
-      CONTACT_POTENTIAL, pentodeClass.spread(), Math.log(pentodeClass.anodeInfluence()), fall
+    double fall = beam ? pentodeClass.shareOffset() : pentodeClass.shareFall();
+    double[] usual = {
+      CONTACT_POTENTIAL,
+      pentodeClass.spread(),
+      Math.log(pentodeClass.anodeInfluence()),
+      Math.log(fall),
+      Math.log(beam ? pentodeClass.beamWidth() : REMOTE_SHARE)
     };
-    return beam
-        ? new double[] {
-          common[0], common[1], common[2], common[3], Math.log(pentodeClass.beamWidth())
-        }
-        : common;
+    return Arrays.copyOf(usual, usual.length - (hasExtra() ? 0 : 1));
   }
 
   private double[] usualDeviations() {
-    double spread = pentodeClass.spreadDeviation();
-    return beam
-        ? new double[] {
-          CONTACT_DEVIATION, spread, INFLUENCE_DEVIATION, FALL_DEVIATION, WIDTH_DEVIATION
-        }
-        : new double[] {CONTACT_DEVIATION, spread, INFLUENCE_DEVIATION, FALL_DEVIATION};
+    double[] deviations = {
+      CONTACT_DEVIATION,
+      pentodeClass.spreadDeviation(),
+      INFLUENCE_DEVIATION,
+      FALL_DEVIATION,
+      beam ? WIDTH_DEVIATION : REMOTE_DEVIATION
+    };
+    return Arrays.copyOf(deviations, deviations.length - (hasExtra() ? 0 : 1));
+  }
+
+  private boolean hasExtra() {
+    return beam || remote;
   }
 
   /** The perveance that gives the highest tabulated current at the assumed mu. */
@@ -101,7 +118,7 @@ final class PentodeTrial {
       pentodeClass.anodeInfluence(),
       0.12,
       fall,
-      pentodeClass.beamWidth()
+      beam ? pentodeClass.beamWidth() : REMOTE_SHARE
     };
     LawReadings unit = new LawReadings(law(values));
     double highest = 0;
@@ -125,6 +142,8 @@ final class PentodeTrial {
     start.add(FitParameter.between(beam ? "share offset" : "share fall", fall, 0, 10));
     if (beam) {
       start.add(FitParameter.positive("beam width", pentodeClass.beamWidth()));
+    } else if (remote) {
+      start.add(FitParameter.between("remote share", REMOTE_SHARE, 0, 1));
     }
     return start;
   }
@@ -137,11 +156,13 @@ final class PentodeTrial {
             p[2],
             p[SPREAD],
             TriodeTrial.CATHODE_SPREAD,
+            remote ? p[EXTRA] : 0,
+            remote ? REMOTE_PENETRATION : 1,
             p[INFLUENCE],
             p[5],
             beam ? pentodeClass.shareFall() : p[FALL],
             beam ? p[FALL] : pentodeClass.shareOffset(),
-            beam ? p[WIDTH] : 0,
+            beam ? p[EXTRA] : 0,
             pentodeClass.knee(),
             pentodeClass.kneeSharpness(),
             TriodeTrial.GRID_SHARE * p[0],
@@ -159,8 +180,8 @@ final class PentodeTrial {
     predicted[count + 1] = p[SPREAD];
     predicted[count + 2] = Math.log(p[INFLUENCE]);
     predicted[count + 3] = Math.log(p[FALL]);
-    if (beam) {
-      predicted[count + 4] = Math.log(p[WIDTH]);
+    if (hasExtra()) {
+      predicted[count + 4] = Math.log(p[EXTRA]);
     }
   }
 
@@ -206,8 +227,8 @@ final class PentodeTrial {
                 "anode_influence",
                 "screen_share",
                 beam ? "share_offset" : "share_fall"));
-    if (beam) {
-      keys.add("beam_width");
+    if (hasExtra()) {
+      keys.add(beam ? "beam_width" : "remote_share");
     }
     return keys;
   }
@@ -225,6 +246,12 @@ final class PentodeTrial {
           FitReport.text(
               "the evidence does not fix the contact potential; usual value %.1f V +- %.1f V",
               CONTACT_POTENTIAL, CONTACT_DEVIATION));
+    }
+    if (remote) {
+      assumptions.add(
+          FitReport.text(
+              "wide turns have %.0f times the mean penetration factor: usual value",
+              REMOTE_PENETRATION));
     }
     assumptions.add("knee: value of " + pentodeClass.words());
     assumptions.add(

@@ -103,6 +103,10 @@ final class DeviceNames {
   /** The file of a device, if one claims the name. */
   Optional<String> fileOf(String name) {
     Claim claim = claims.get(plain(name));
+    if (claim == null) {
+      // tables and sleeves print both names at once: EL84/6BQ5, 6C45P-E (6S45P)
+      claim = claims.get(plain(name.split("[/,(]", 2)[0]));
+    }
     return claim == null ? Optional.empty() : Optional.of(claim.file());
   }
 

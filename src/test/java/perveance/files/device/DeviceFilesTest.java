@@ -48,7 +48,7 @@ class DeviceFilesTest {
   void namesAreFoundWhateverTheirCaseSpacesAndHyphens() {
     DeviceFiles library = new DeviceFiles(List.of());
     Device expected = library.find("12AX7").orElseThrow();
-    for (String name : List.of("12ax7", " 12AX7 ", "12-AX-7", "ecc83", "ECC 83")) {
+    for (String name : List.of("12ax7", " 12AX7 ", "12-AX-7", "ecc83", "ECC 83", "12AX7/ECC83")) {
       assertSame(expected, library.find(name).orElseThrow(), name);
     }
     for (String name : List.of("", "12AX", "../12ax7", "no such valve", "/", "a\\b")) {

@@ -54,20 +54,27 @@ public record RectifierFitter() implements LawFitter {
             List.of(FitParameter.positive("perveance", START)),
             observed,
             deviation);
-    if (!(outcome instanceof FitOutcome.Fitted fitted)) {
-      return new FitResult.NotFitted(((FitOutcome.NotFitted) outcome).reason());
-    }
+    return outcome instanceof FitOutcome.Fitted fitted
+        ? new FitResult.Fitted(result(used, observations, fitted, contact, onlyLow))
+        : new FitResult.NotFitted(((FitOutcome.NotFitted) outcome).reason());
+  }
+
+  private static LawFit result(
+      List<Evidence> used,
+      List<Observation> observations,
+      FitOutcome.Fitted fitted,
+      double contact,
+      boolean onlyLow) {
     SpaceChargeDiodeLaw law = law(fitted.parameters()[0], contact);
     List<Residual> residuals = new LawReadings(law).compare(used);
-    return new FitResult.Fitted(
-        new LawFit(
-            law,
-            FitReport.summary(observations, residuals, fitted, assumptions(contact, onlyLow)),
-            range(used),
-            residuals,
-            List.of("perveance"),
-            fitted.covariance(),
-            List.of()));
+    return new LawFit(
+        law,
+        FitReport.summary(observations, residuals, fitted, assumptions(contact, onlyLow)),
+        range(used),
+        residuals,
+        List.of("perveance"),
+        fitted.covariance(),
+        List.of());
   }
 
   private static List<Evidence> usable(List<Evidence> evidence, boolean low) {

@@ -65,6 +65,63 @@ public record SpreadPentodeParameters(
     positive("thermalVoltage", thermalVoltage);
   }
 
+  /**
+   * Constants of a valve whose grid has one pitch.
+   *
+   * @param perveance G, above 0 [A V^-1.5]
+   * @param contactPotential Vc, added to the grid voltage [V]
+   * @param penetration D0, mean penetration factor of the screen through the grid, above 0 [1]
+   * @param spread s, sqrt 3 times the standard deviation of D over D0, 0 to 1 [1]
+   * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
+   * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
+   * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
+   * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
+   * @param shareOffset x0, anode to screen voltage ratio below which it falls no more, above 0 [1]
+   * @param beamWidth r0, drive ratio at which the beams fill the screen's gaps; 0 where not aligned
+   *     [1]
+   * @param knee c, knee voltage as a part of the voltage that draws the current at no bias, above 0
+   *     [1]
+   * @param kneeSharpness n, 1 for a rounded knee, up to 8 for a sharp one [1]
+   * @param gridPerveance Gg, above 0 [A V^-1.5]
+   * @param gridOnset grid voltage at which 0.3 uA flows into the grid [V]
+   * @param thermalVoltage VT of the cathode, above 0 [V]
+   */
+  public SpreadPentodeParameters(
+      double perveance,
+      double contactPotential,
+      double penetration,
+      double spread,
+      double cathodeSpread,
+      double anodeInfluence,
+      double screenShare,
+      double shareFall,
+      double shareOffset,
+      double beamWidth,
+      double knee,
+      double kneeSharpness,
+      double gridPerveance,
+      double gridOnset,
+      double thermalVoltage) {
+    this(
+        perveance,
+        contactPotential,
+        penetration,
+        spread,
+        cathodeSpread,
+        0,
+        1,
+        anodeInfluence,
+        screenShare,
+        shareFall,
+        shareOffset,
+        beamWidth,
+        knee,
+        kneeSharpness,
+        gridPerveance,
+        gridOnset,
+        thermalVoltage);
+  }
+
   /** Keys in the order of {@link #list}. */
   public static final List<String> KEYS =
       List.of(

@@ -12,8 +12,8 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
   private final DeviceLaw law =
       new SpreadPentodeLaw(
           new SpreadPentodeParameters(
-              3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0, 1, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3,
-              -0.7, 0.09));
+              3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3, -0.7,
+              0.09));
 
   @Override
   protected DeviceLaw law() {
@@ -76,8 +76,8 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
     DeviceLaw sharp =
         new SpreadPentodeLaw(
             new SpreadPentodeParameters(
-                3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0, 1, 0.04, 0.3, 1, 0.7, 0.5, 0.2, 2.2, 1e-3,
-                -0.7, 0.09));
+                3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0.04, 0.3, 1, 0.7, 0.5, 0.2, 2.2, 1e-3, -0.7,
+                0.09));
     ElectrodeCurrents other = new ElectrodeCurrents();
     for (double anode = -50; anode <= 400; anode += 25) {
       sharp.evaluate(anode, -6, 240, other);
@@ -103,7 +103,7 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
     DeviceLaw even =
         new SpreadPentodeLaw(
             new SpreadPentodeParameters(
-                3.6e-3, 0.5, 1 / 20.8, 0, 0, 0, 1, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3, -0.7,
+                3.6e-3, 0.5, 1 / 20.8, 0, 0, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3, -0.7,
                 0.09));
     ElectrodeCurrents out = new ElectrodeCurrents();
     even.evaluate(250, -9, 250, out);
@@ -124,7 +124,7 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
             IllegalArgumentException.class,
             () ->
                 new SpreadPentodeParameters(
-                    3.6e-3, 0.5, 1 / 20.8, 1.2, 0, 0, 1, 0.04, 0.1, 0.1, 0.1, 0, 0.1, 1, 1e-3, -0.7,
+                    3.6e-3, 0.5, 1 / 20.8, 1.2, 0, 0.04, 0.1, 0.1, 0.1, 0, 0.1, 1, 1e-3, -0.7,
                     0.09));
     assertEquals("spread must be from 0.0 to 1.0, found 1.2", refusal.getMessage());
   }

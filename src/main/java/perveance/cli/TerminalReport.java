@@ -4,13 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import perveance.app.wording.FigureRow;
 import perveance.app.wording.Figures;
+import perveance.app.wording.LimitRows;
 import perveance.app.wording.SafetyBox;
 import perveance.app.wording.StageFigures;
 import perveance.app.wording.Vocabulary;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.HandSum;
-import perveance.engine.analysis.LimitUse;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.analysis.SupplyAnswer;
@@ -105,26 +105,8 @@ final class TerminalReport {
   }
 
   private void limits(StageAnswer stage, TextTable table) {
-    for (LimitUse use : stage.limits()) {
-      if (use.when().equals("idle") && use.share() < 0.5 && !use.what().contains("dissipation")) {
-        continue;
-      }
-      table.row(
-          "of the limit",
-          Figures.percent(use.share()),
-          "",
-          say(
-              use.ref()
-                  + " "
-                  + use.what()
-                  + ", "
-                  + use.when()
-                  + ": "
-                  + Figures.reading(use.value(), use.unit())
-                  + " of "
-                  + Figures.reading(use.limit(), use.unit())
-                  + ", "
-                  + use.system().word()));
+    for (FigureRow row : LimitRows.of(stage)) {
+      table.row(say(row.label()), row.value(), row.band(), row.note());
     }
   }
 
@@ -142,6 +124,15 @@ final class TerminalReport {
           duty.buy().map(this::say).orElse(""));
     }
     lines.addAll(table.lines());
+  }
+
+  private static String idle(PartDuty duty) {
+    double volts = Math.abs(duty.idleVoltage());
+    if (volts < 1e-3) {
+      return "no dc";
+    }
+    return Figures.reading(volts, Unit.VOLT)
+        + (duty.idlePower() > 0 ? ", " + Figures.power(duty.idlePower()) : "");
   }
 
   private static String value(PartDuty duty) {

@@ -42,12 +42,13 @@ public interface Artwork {
    */
   static Artwork of(SchematicPainter painter, Drawing drawing, SchematicText text, double largest) {
     return (g, area) -> {
+      Rectangle2D extent = painter.extent(drawing, text);
       double scale =
           Math.min(
               largest,
-              Math.min(area.getWidth() / drawing.width(), area.getHeight() / drawing.height()));
-      double x = area.getX() + (area.getWidth() - scale * drawing.width()) / 2;
-      double y = area.getY() + (area.getHeight() - scale * drawing.height()) / 2;
+              Math.min(area.getWidth() / extent.getWidth(), area.getHeight() / extent.getHeight()));
+      double x = area.getCenterX() - scale * extent.getCenterX();
+      double y = area.getCenterY() - scale * extent.getCenterY();
       AffineTransform before = g.getTransform();
       g.translate(x, y);
       g.scale(scale, scale);

@@ -10,8 +10,8 @@ import perveance.engine.stage.Drawing;
 
 /** Text of a schematic: values beside parts, voltages beside nodes, pin numbers at valves. */
 final class SchematicLabels {
-  private static final double VALUE = 1.05;
-  private static final double DETAIL = 0.85;
+  private static final double VALUE = 1.15;
+  private static final double DETAIL = 0.95;
   private static final FontRenderContext CONTEXT = new FontRenderContext(null, true, true);
 
   private final Look look;
@@ -26,7 +26,7 @@ final class SchematicLabels {
 
   Optional<Hotspot> symbol(Graphics2D g, Drawing.Symbol symbol, SchematicText text) {
     if (!symbol.text().isEmpty()) {
-      fixedText(g, symbol);
+      fixedText(g, symbol, fixed(symbol, text));
     }
     if (symbol.part().isEmpty()) {
       return Optional.empty();
@@ -121,23 +121,36 @@ final class SchematicLabels {
     return box;
   }
 
-  private void fixedText(Graphics2D g, Drawing.Symbol symbol) {
-    double w = width(symbol.text(), value);
+  private void fixedText(Graphics2D g, Drawing.Symbol symbol, String words) {
+    Rectangle2D box = fixedBox(symbol, words);
+    g.setPaint(look.ink());
+    g.setFont(value);
+    g.drawString(words, (float) box.getX(), (float) (box.getY() + 0.8 * VALUE));
+  }
+
+  /** A rail's name with its voltage where it is known. */
+  static String fixed(Drawing.Symbol symbol, SchematicText text) {
+    SchematicText.NodeText known = text.nodes().get("supply." + symbol.text());
+    return isRail(symbol) && known != null ? symbol.text() + " " + known.value() : symbol.text();
+  }
+
+  /** Where a symbol's own text stands. */
+  Rectangle2D fixedBox(Drawing.Symbol symbol, String words) {
+    double w = width(words, value);
+    double rail = isRail(symbol) ? 1.6 : 0;
     double x =
         switch (symbol.label()) {
-          case LEFT -> symbol.x() - 0.7 - w - (isRail(symbol) ? 1.6 : 0);
-          case RIGHT -> symbol.x() + 0.7 + (isRail(symbol) ? 1.6 : 0);
+          case LEFT -> symbol.x() - 0.7 - w - rail;
+          case RIGHT -> symbol.x() + 0.7 + rail;
           case ABOVE, BELOW -> symbol.x() - w / 2;
         };
     double y =
         switch (symbol.label()) {
-          case LEFT, RIGHT -> symbol.y() + 0.38 * VALUE;
-          case ABOVE -> symbol.y() - 0.6;
-          case BELOW -> symbol.y() + 0.6 + VALUE;
+          case LEFT, RIGHT -> symbol.y() - 0.42 * VALUE;
+          case ABOVE -> symbol.y() - 0.6 - 0.8 * VALUE;
+          case BELOW -> symbol.y() + 0.6 + 0.2 * VALUE;
         };
-    g.setPaint(look.ink());
-    g.setFont(value);
-    g.drawString(symbol.text(), (float) x, (float) y);
+    return new Rectangle2D.Double(x, y, w, VALUE);
   }
 
   private void pins(Graphics2D g, Drawing.Symbol symbol, SchematicText.PinText pins) {
@@ -175,7 +188,8 @@ final class SchematicLabels {
     return text.isEmpty() ? 0 : font.getStringBounds(text, CONTEXT).getWidth();
   }
 
-  private static Rectangle2D body(Drawing.Symbol symbol) {
+  /** The rectangle a symbol's strokes fill. */
+  static Rectangle2D body(Drawing.Symbol symbol) {
     double half = isValve(symbol.type()) ? 3 : 2;
     double thin = isValve(symbol.type()) ? 3 : 0.9;
     double w = symbol.turned() ? half : thin;

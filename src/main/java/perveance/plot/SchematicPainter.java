@@ -3,6 +3,8 @@ package perveance.plot;
 import java.awt.Graphics2D;
 import java.awt.Shape;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Rectangle2D;
+import java.awt.image.BufferedImage;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -14,6 +16,8 @@ import perveance.engine.stage.SymbolShape;
  * picture and window.
  */
 public final class SchematicPainter {
+  private static final double MARGIN = 0.6;
+
   private final Look look;
   private final SchematicLabels labels;
 
@@ -68,6 +72,42 @@ public final class SchematicPainter {
         g.draw(SymbolShapes.line(tap.x(), tap.y(), tap.x() + 0.6, tap.y()));
       }
     }
+  }
+
+  /**
+   * What the drawing fills with its text, which is less than its grid.
+   *
+   * @param drawing geometry
+   * @param text words and figures
+   * @return rectangle in grid units, with a small margin
+   */
+  public Rectangle2D extent(Drawing drawing, SchematicText text) {
+    Graphics2D blind = new BufferedImage(1, 1, BufferedImage.TYPE_INT_RGB).createGraphics();
+    List<Rectangle2D> boxes = new ArrayList<>();
+    for (Hotspot s : paint(blind, drawing, text)) {
+      boxes.add(new Rectangle2D.Double(s.x(), s.y(), s.width(), s.height()));
+    }
+    blind.dispose();
+    for (Drawing.Wire w : drawing.wires()) {
+      Rectangle2D box = new Rectangle2D.Double(w.x1(), w.y1(), 0, 0);
+      box.add(w.x2(), w.y2());
+      boxes.add(box);
+    }
+    for (Drawing.Symbol symbol : drawing.symbols()) {
+      boxes.add(new Rectangle2D.Double(symbol.x() - 0.5, symbol.y() - 0.5, 1, 1));
+      if (symbol.part().isPresent()) {
+        boxes.add(SchematicLabels.body(symbol));
+      }
+      if (!symbol.text().isEmpty()) {
+        boxes.add(labels.fixedBox(symbol, SchematicLabels.fixed(symbol, text)));
+      }
+    }
+    Rectangle2D all = boxes.stream().reduce(Rectangle2D::createUnion).orElseThrow();
+    return new Rectangle2D.Double(
+        all.getX() - MARGIN,
+        all.getY() - MARGIN,
+        all.getWidth() + 2 * MARGIN,
+        all.getHeight() + 2 * MARGIN);
   }
 
   private void paintDot(Graphics2D g, double x, double y) {

@@ -1,16 +1,19 @@
 package perveance.plot;
 
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import perveance.app.wording.Figures;
 import perveance.app.wording.Pins;
+import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.ExpectedReading;
 import perveance.engine.analysis.LimitUse;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
+import perveance.engine.analysis.SupplyAnswer;
 import perveance.engine.base.Finding;
 import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Severity;
@@ -19,16 +22,19 @@ import perveance.engine.stage.StageCircuit;
 
 /** What stands beside the symbols of a stage's schematic. */
 public final class SchematicWords {
+  private final List<SupplyAnswer> supplies;
   private final StageAnswer answer;
   private final boolean sheet;
 
   /**
    * Words for one stage.
    *
+   * @param chassis the chassis' answer, for its supply nodes
    * @param answer the stage's answer
    * @param sheet true for paper: bands and test points; false for the window: value above its band
    */
-  public SchematicWords(StageAnswer answer, boolean sheet) {
+  public SchematicWords(ChassisAnswer chassis, StageAnswer answer, boolean sheet) {
+    this.supplies = chassis.supplies();
     this.answer = answer;
     this.sheet = sheet;
   }
@@ -59,7 +65,7 @@ public final class SchematicWords {
     String under =
         switch (duty.part().type()) {
           case RESISTOR ->
-              duty.idlePower() < 1e-6
+              duty.idlePower() < 1e-4
                   ? ""
                   : Figures.reading(duty.idleVoltage(), Unit.VOLT)
                       + ", "
@@ -114,15 +120,25 @@ public final class SchematicWords {
   private Map<String, SchematicText.NodeText> nodes() {
     Map<String, SchematicText.NodeText> nodes = new HashMap<>();
     for (ExpectedReading reading : answer.readings()) {
-      String band = QuantityFormat.TYPESET.range(reading.low(), reading.high(), Unit.VOLT);
+      String band = Figures.meterRange(reading.low(), reading.high());
       String value =
-          QuantityFormat.TYPESET.toBand(
-              reading.trueValue(), reading.low(), reading.high(), Unit.VOLT);
+          Math.abs(reading.trueValue()) < 1e-3
+              ? "0 V"
+              : QuantityFormat.TYPESET.toBand(
+                  reading.trueValue(), reading.low(), reading.high(), Unit.VOLT);
       nodes.put(
           reading.node(),
           sheet
               ? new SchematicText.NodeText(band, "test point " + reading.testPoint())
               : new SchematicText.NodeText(value, band));
+    }
+    for (SupplyAnswer supply : supplies) {
+      nodes.put(
+          "supply." + supply.name(),
+          new SchematicText.NodeText(
+              QuantityFormat.TYPESET.toBand(
+                  supply.voltage(), supply.low(), supply.high(), Unit.VOLT),
+              ""));
     }
     return nodes;
   }

@@ -8,13 +8,12 @@ import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.ExpectedReading;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
-import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Unit;
 
 /** Expected meter readings with boxes to write in, and the sums that check them. */
 final class ReadingRows {
   private static final double[] SHARES = {0.05, 0.21, 0.16, 0.11, 0.145, 0.145, 0.18};
-  private static final double ROW = 24.5;
+  private static final double ROW = 23.5;
 
   private final Typeface faces;
   private final SheetOptions options;
@@ -90,12 +89,17 @@ final class ReadingRows {
           row(
               Integer.toString(r.testPoint()),
               where,
-              QuantityFormat.TYPESET.range(r.low(), r.high(), Unit.VOLT),
+              Figures.meterRange(r.low(), r.high()),
               r.stop().isPresent()
                   ? "\u2265 " + Figures.reading(r.stop().getAsDouble(), Unit.VOLT)
                   : "record only"));
     }
+    rows.addAll(new OtherPoints(options, chassis, stage).rows().stream().map(this::row).toList());
     return rows;
+  }
+
+  private Block row(OtherPoints.Point point) {
+    return row("", point.where(), point.expected(), point.stop());
   }
 
   /** Rows without expectation for what else is measured. */

@@ -69,11 +69,11 @@ final class SheetHead {
                         "mains %s nominal, %s today, %s \u00b7 meter %s \u00b7 no signal \u00b7"
                             + " 20 min warm \u00b7 typical valve, %s resistors \u00b7 bands hold"
                             + " 95 %%",
-                        Figures.reading(c.mains(), Unit.VOLT),
-                        Figures.reading(c.mainsActual(), Unit.VOLT),
-                        Figures.reading(c.mainsFrequency(), Unit.HERTZ),
-                        Figures.reading(c.meter(), Unit.OHM),
-                        Figures.percent(c.resistorTolerance()))),
+                        Figures.part(c.mains(), Unit.VOLT),
+                        Figures.part(c.mainsActual(), Unit.VOLT),
+                        Figures.part(c.mainsFrequency(), Unit.HERTZ),
+                        Figures.part(c.meter(), Unit.OHM),
+                        Math.round(100 * c.resistorTolerance()) + " %")),
             9,
             Ink.BLACK));
     StringBuilder supply = new StringBuilder();

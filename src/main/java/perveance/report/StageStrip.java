@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
 import perveance.app.wording.FigureRow;
+import perveance.app.wording.LimitRows;
 import perveance.app.wording.StageFigures;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.PartDuty;
@@ -45,17 +46,14 @@ final class StageStrip {
         Artwork.of(
             new SchematicPainter(Look.PAPER, fonts),
             stage.drawing(),
-            new SchematicWords(stage, true).text(Set.of(), options.zigzag()),
-            8.2);
+            new SchematicWords(chassis, stage, true).text(Set.of(), options.zigzag()),
+            8.6);
     List<Artwork> pictures = new ArrayList<>(List.of(schematic));
     StagePlots.characteristics(stage)
         .ifPresent(
             plot -> pictures.add(Artwork.of(new ChartFactory(Look.PAPER, fonts, 8).chart(plot))));
-    double[] shares =
-        pictures.size() == 1
-            ? new double[] {1}
-            : stage.drawing().width() > 56 ? new double[] {0.58, 0.42} : new double[] {0.5, 0.5};
-    return new PicturePair(pictures, shares, 232);
+    double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.62, 0.38};
+    return new PicturePair(pictures, shares, 206);
   }
 
   /** Groups that are kept together on a page. */
@@ -66,6 +64,7 @@ final class StageStrip {
     readings.rows().forEach(r -> groups.add(List.of(r)));
     groups.add(readings.sums());
     groups.add(List.of(figuresAndParts()));
+    groups.add(limits());
     groups.addAll(findings());
     groups.add(assumptions());
     return groups;
@@ -81,7 +80,6 @@ final class StageStrip {
     for (FigureRow row : StageFigures.signal(stage)) {
       figures.add(figure(row));
     }
-    stage.points().forEach(p -> figures.addAll(PointRows.of(faces, options, stage, p)));
     List<Block> parts = new ArrayList<>();
     parts.add(headline("Parts to buy"));
     for (PartDuty duty : stage.parts()) {
@@ -100,6 +98,31 @@ final class StageStrip {
         List.of(Cell.soft(say(row.label())), Cell.bold(row.value() + band + say(note))),
         SIZE,
         13,
+        0);
+  }
+
+  /** Limits in two columns. */
+  private List<Block> limits() {
+    List<Block> rows = LimitRows.of(stage).stream().map(this::limit).toList();
+    int half = (rows.size() + 1) / 2;
+    return rows.isEmpty()
+        ? List.of(new TextBlock(faces, "Limits", "none known for this valve", SIZE, Ink.BLACK))
+        : List.of(
+            headline("Limits, the maker's"),
+            new Columns(
+                new double[] {0.5, 0.5},
+                List.of(rows.subList(0, half), rows.subList(half, rows.size()))));
+  }
+
+  private Block limit(FigureRow row) {
+    return new RowBlock(
+        faces,
+        new double[] {0.48, 0.52},
+        List.of(
+            Cell.soft(say(row.label())),
+            Cell.bold(row.value() + ", " + row.band() + " (" + row.note() + ")")),
+        8.5,
+        12,
         0);
   }
 

@@ -11,6 +11,9 @@ public final class Figures {
   private static final QuantityFormat FORMAT = QuantityFormat.TYPESET;
   private static final int DIGITS = 3;
 
+  /** A reading nearer to zero than this is zero on a bench meter, common practice [V]. */
+  private static final double METER_ZERO = 0.02;
+
   private Figures() {}
 
   /**
@@ -77,6 +80,29 @@ public final class Figures {
   }
 
   /**
+   * Power in a part; what warms nothing is not told to the last attowatt.
+   *
+   * @param watts power [W]
+   * @return for example {@code 0.11 W}
+   */
+  public static String power(double watts) {
+    return watts < 1e-3 ? "below 1 mW" : reading(watts, Unit.WATT, 2);
+  }
+
+  /**
+   * What a meter shows between two ends, no finer than a bench meter resolves around zero.
+   *
+   * @param low lower end [V]
+   * @param high upper end [V]
+   * @return for example {@code 187-206 V}
+   */
+  public static String meterRange(double low, double high) {
+    return Math.max(Math.abs(low), Math.abs(high)) < METER_ZERO
+        ? "\u22120.02 to 0.02 V"
+        : FORMAT.range(low, high, Unit.VOLT);
+  }
+
+  /**
    * A ratio in percent.
    *
    * @param ratio ratio [1]
@@ -93,7 +119,8 @@ public final class Figures {
    * @return for example {@code 34.8 dB}
    */
   public static String decibels(double ratio) {
-    return FORMAT.level(20 * Math.log10(Math.abs(ratio)), 1);
+    String level = FORMAT.level(20 * Math.log10(Math.abs(ratio)), 1);
+    return level.startsWith("+") ? level.substring(1) : level;
   }
 
   /**

@@ -49,7 +49,7 @@ public record SafetyBox(
         steps,
         "Local electrical codes and competent or licensed persons decide whether and how this is"
             + " done. Threshold "
-            + Figures.reading(threshold, Unit.VOLT)
+            + Figures.part(threshold, Unit.VOLT)
             + " dc: check your local rule.");
   }
 
@@ -88,7 +88,7 @@ public record SafetyBox(
         + " through "
         + d.drainedBy()
         + " to fall below "
-        + Figures.reading(d.threshold(), Unit.VOLT)
+        + Figures.part(d.threshold(), Unit.VOLT)
         + "; with that path broken it never gets there.";
   }
 

@@ -70,7 +70,7 @@ final class Discharges {
     boolean drained = resistance < LEAKAGE;
     double together = drained ? capacitanceAlong(capacitor) : capacitor.capacitance();
     return new Discharge(
-        capacitor.name(),
+        place(capacitor.name()),
         capacitor.capacitance(),
         voltage,
         0.5 * capacitor.capacitance() * voltage * voltage,
@@ -78,8 +78,15 @@ final class Discharges {
         threshold,
         drained ? resistance * together * Math.log(voltage / threshold) : Double.POSITIVE_INFINITY,
         drained
-            ? "resistors of " + QuantityFormat.TYPESET.reading(resistance, Unit.OHM, 2) + " in all"
+            ? "the " + QuantityFormat.TYPESET.reading(resistance, Unit.OHM, 2) + " across it"
             : "nothing");
+  }
+
+  /** A reservoir is told by its supply node, any other capacitor by its stage and key. */
+  private static String place(String element) {
+    return element.startsWith("supply.")
+        ? "supply " + element.split("\\.", -1)[1]
+        : element.replace('.', ' ').replace('_', ' ');
   }
 
   /** Resistance across a capacitor with the supply gone and the valves cold. */

@@ -117,10 +117,7 @@ final class TerminalReport {
           duty.designator(),
           duty.part().key().replace('_', ' '),
           value(duty),
-          Figures.reading(Math.abs(duty.idleVoltage()), Unit.VOLT)
-              + (duty.idlePower() > 0
-                  ? ", " + Figures.reading(duty.idlePower(), Unit.WATT, 2)
-                  : ""),
+          idle(duty),
           duty.buy().map(this::say).orElse(""));
     }
     lines.addAll(table.lines());

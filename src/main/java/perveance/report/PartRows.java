@@ -11,7 +11,7 @@ import perveance.engine.stage.StageCircuit;
 
 /** The parts list: value, rating to buy, what it stands. */
 final class PartRows {
-  private static final double[] SHARES = {0.1, 0.16, 0.34, 0.4};
+  private static final double[] SHARES = {0.09, 0.14, 0.33, 0.44};
 
   private PartRows() {}
 
@@ -26,17 +26,25 @@ final class PartRows {
 
   private static String stands(PartDuty duty) {
     return switch (duty.part().type()) {
-      case RESISTOR ->
-          Figures.reading(duty.idlePower(), Unit.WATT, 2)
-              + (duty.worstPower() > 1.5 * duty.idlePower()
-                  ? "; " + Figures.reading(duty.worstPower(), Unit.WATT, 2) + " " + duty.worstCase()
-                  : "");
+      case RESISTOR -> watts(duty);
       case CAPACITOR, ELECTROLYTIC ->
           duty.coldVoltage() > 1.1 * Math.abs(duty.idleVoltage())
               ? "sees " + Figures.reading(duty.coldVoltage(), Unit.VOLT) + " cold"
               : Figures.reading(Math.abs(duty.idleVoltage()), Unit.VOLT);
       default -> duty.part().role();
     };
+  }
+
+  /** Idle watts; the worst case too where it is worse by enough to matter. */
+  private static String watts(PartDuty duty) {
+    boolean worse = duty.worstPower() > Math.max(0.02, 1.5 * duty.idlePower());
+    return worse
+        ? Figures.power(duty.idlePower())
+            + ", "
+            + Figures.power(duty.worstPower())
+            + " with "
+            + duty.worstCase()
+        : Figures.power(Math.max(duty.idlePower(), duty.worstPower()));
   }
 
   /** One row per envelope type: base and heater. */

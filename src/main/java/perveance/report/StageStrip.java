@@ -52,7 +52,7 @@ final class StageStrip {
     StagePlots.characteristics(stage)
         .ifPresent(
             plot -> pictures.add(Artwork.of(new ChartFactory(Look.PAPER, fonts, 8).chart(plot))));
-    double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.62, 0.38};
+    double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.58, 0.42};
     return new PicturePair(pictures, shares, 206);
   }
 
@@ -86,7 +86,7 @@ final class StageStrip {
       parts.add(PartRows.of(faces, options, duty));
     }
     parts.addAll(PartRows.valves(faces, options, stage));
-    return new Columns(new double[] {0.5, 0.5}, List.of(figures, parts));
+    return new Columns(new double[] {0.47, 0.53}, List.of(figures, parts));
   }
 
   private Block figure(FigureRow row) {
@@ -117,7 +117,7 @@ final class StageStrip {
   private Block limit(FigureRow row) {
     return new RowBlock(
         faces,
-        new double[] {0.48, 0.52},
+        new double[] {0.4, 0.6},
         List.of(
             Cell.soft(say(row.label())),
             Cell.bold(row.value() + ", " + row.band() + " (" + row.note() + ")")),

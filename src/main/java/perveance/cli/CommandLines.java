@@ -1,5 +1,7 @@
 package perveance.cli;
 
+import java.nio.file.Path;
+import java.util.Optional;
 import perveance.engine.base.BadInputException;
 import perveance.engine.base.Problem;
 import picocli.CommandLine;
@@ -9,12 +11,30 @@ public final class CommandLines {
   private CommandLines() {}
 
   /**
-   * The command line with its error handling.
+   * Runs one command line.
    *
-   * @return ready to execute
+   * @param desktop opens the window
+   * @param args the command line
+   * @return exit status
    */
-  public static CommandLine create() {
-    CommandLine line = new CommandLine(new PerveanceCommand());
+  public static int run(Window desktop, String... args) {
+    return create(desktop).execute(args);
+  }
+
+  /** Opens the desktop program. */
+  @FunctionalInterface
+  public interface Window {
+    /**
+     * Opens the window and returns when it is closed.
+     *
+     * @param file chassis file to open, empty for the first example
+     */
+    void open(Optional<Path> file);
+  }
+
+  /** The command line with its error handling, ready to execute. */
+  static CommandLine create(Window desktop) {
+    CommandLine line = new CommandLine(new PerveanceCommand(desktop));
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setExecutionExceptionHandler(CommandLines::failed);
     line.setExitCodeExceptionMapper(e -> ExitCode.INTERNAL_ERROR.number());
@@ -23,7 +43,7 @@ public final class CommandLines {
 
   /** A command line that prints where another does. */
   static CommandLine create(PerveanceCommand like) {
-    return create().setOut(like.out()).setErr(like.err());
+    return create(like.window()).setOut(like.out()).setErr(like.err());
   }
 
   private static int failed(Exception exception, CommandLine line, CommandLine.ParseResult parsed) {

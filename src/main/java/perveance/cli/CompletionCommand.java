@@ -14,7 +14,7 @@ final class CompletionCommand implements Runnable {
 
   @Override
   public void run() {
-    parent.out().print(AutoComplete.bash("perveance", CommandLines.create()));
+    parent.out().print(AutoComplete.bash("perveance", CommandLines.create(parent.window())));
     parent.out().flush();
   }
 }

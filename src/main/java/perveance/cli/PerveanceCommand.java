@@ -28,6 +28,21 @@ import picocli.CommandLine.Spec;
       "competent or licensed persons decide whether and how work is done."
     })
 public final class PerveanceCommand {
+  private final CommandLines.Window window;
+
+  /** Makes a command without a window, for the parser. */
+  public PerveanceCommand() {
+    this(file -> {});
+  }
+
+  PerveanceCommand(CommandLines.Window window) {
+    this.window = window;
+  }
+
+  CommandLines.Window window() {
+    return window;
+  }
+
   @Spec private CommandSpec spec = CommandSpec.create();
 
   /** Where results go. */

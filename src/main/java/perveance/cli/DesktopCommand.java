@@ -1,0 +1,25 @@
+package perveance.cli;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.ParentCommand;
+
+/** {@code desktop}: opens the window. */
+@Command(
+    name = "desktop",
+    description = "Opens the desktop program, on a chassis file if one is given.",
+    footer = {"", "Example:", "  perveance desktop my-amplifier.toml"})
+final class DesktopCommand implements Runnable {
+  @ParentCommand private PerveanceCommand parent = new PerveanceCommand();
+
+  @Parameters(paramLabel = "FILE", arity = "0..1", description = "Chassis file (TOML).")
+  private @Nullable Path file;
+
+  @Override
+  public void run() {
+    parent.window().open(Optional.ofNullable(file));
+  }
+}

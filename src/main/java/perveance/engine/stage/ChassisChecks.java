@@ -49,6 +49,21 @@ public final class ChassisChecks {
   }
 
   /**
+   * Checks the keys of one stage against each other, with what drives it and what it drives.
+   *
+   * @param chassis the chassis; other stages of it need not be sound
+   * @param entry a stage of known kind whose single keys are sound
+   * @param devices its devices by key
+   * @return contradictions, empty when it can be built
+   */
+  public static List<StageKind.Complaint> contradictions(
+      Chassis chassis, StageEntry entry, Map<String, Device> devices) {
+    StageKind kind = StageKinds.find(entry.kind()).orElseThrow();
+    Surroundings around = ChassisWiring.roughly(chassis, entry);
+    return kind.check(new StageValues(entry, devices, around));
+  }
+
+  /**
    * Checks a chassis and every single key of it.
    *
    * @param chassis the chassis
@@ -104,8 +119,7 @@ public final class ChassisChecks {
     supplies(index, entry, kind.get());
     if (devices.containsKey(StageKeys.DEVICE.key())
         && KeyChecks.complaints(index, entry, kind.get()).isEmpty()) {
-      Surroundings around = ChassisWiring.roughly(chassis, entry);
-      StageValues values = new StageValues(entry, devices, around);
+      StageValues values = new StageValues(entry, devices, ChassisWiring.roughly(chassis, entry));
       List<StageKind.Complaint> contradictions = kind.get().check(values);
       contradictions.forEach(c -> add(index, c.key(), c.found(), c.expected()));
       if (contradictions.isEmpty()) {

@@ -3,17 +3,23 @@ package perveance.engine.stage;
 /** How nodes and elements of a chassis are named. */
 public final class ChassisNames {
   /** What a name may be, in words. */
-  static final String FORM = "letters, digits, - and _, at most 24 of them";
+  public static final String FORM = "a short name without a point, such as \"V1a\"";
 
-  private static final int LONGEST = 24;
+  private static final int LONGEST = 40;
 
   private ChassisNames() {}
 
-  /** Whether a name can stand in front of the names of nodes and elements. */
-  static boolean wellFormed(String name) {
+  /**
+   * Whether a name can stand in front of the names of nodes and elements.
+   *
+   * @param name reference of a stage or name of a supply
+   * @return false for names that are empty, long, padded, hold a point or are taken
+   */
+  public static boolean wellFormed(String name) {
     return !name.isEmpty()
         && name.length() <= LONGEST
-        && name.chars().allMatch(c -> Character.isLetterOrDigit(c) || c == '-' || c == '_')
+        && name.equals(name.strip())
+        && name.chars().noneMatch(c -> c == '.' || Character.isISOControl(c))
         && !name.equals("chassis")
         && !name.equals("supply");
   }

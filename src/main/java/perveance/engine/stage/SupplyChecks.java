@@ -12,9 +12,9 @@ import perveance.engine.stage.ChassisComplaint.Place;
 
 /** Checks the supply nodes of a chassis: names, feeds that lead somewhere, possible values. */
 final class SupplyChecks {
-  private static final double HIGHEST_VOLTAGE = 5000;
+  private static final double HIGHEST_VOLTAGE = 10e3;
   private static final double LEAST_RESISTANCE = 0.01;
-  private static final double GREATEST_RESISTANCE = 100e6;
+  private static final double GREATEST_RESISTANCE = 1e9;
   private static final double LEAST_CAPACITANCE = 1e-12;
   private static final double GREATEST_CAPACITANCE = 1;
 
@@ -111,8 +111,8 @@ final class SupplyChecks {
 
     private String expected() {
       return switch (unit) {
-        case VOLT -> "a voltage up to 5 kV, not zero";
-        case OHM -> "a resistance from 0R01 to 100M";
+        case VOLT -> "a voltage up to 10 kV, not zero";
+        case OHM -> "a resistance from 0R01 to 1G";
         default -> "a capacitance from 1p to 1 F";
       };
     }

@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import perveance.engine.base.BadInputException;
 import perveance.engine.stage.Chassis;
+import perveance.engine.stage.ChassisChecks;
+import perveance.engine.stage.ChassisComplaint;
 import perveance.engine.stage.Conditions;
 import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.Supply;
@@ -59,13 +61,22 @@ public final class ChassisReader {
     SuppliesReader supplies = new SuppliesReader(incomplete);
     Optional<StrictTable> supplyTables = root.table("supply");
     List<Supply> nodes = supplyTables.isPresent() ? supplies.read(supplyTables.get()) : List.of();
-    List<StageEntry> stages =
-        new StagesReader(library, problems, incomplete)
-            .read(root.tables("stage"), supplies.names());
+    StagesReader reader = new StagesReader(library, problems, incomplete);
+    List<StageEntry> stages = reader.read(root.tables("stage"), supplies.names());
     Conditions assumed =
         conditions.isPresent() ? ConditionsReader.read(conditions.get()) : Conditions.USUAL;
     root.refuseOthers();
     problems.refuse();
-    return new Chassis(title, assumed, nodes, stages);
+    Chassis chassis = new Chassis(title, assumed, nodes, stages);
+    // what only a sound chassis shows, such as two valves of one name
+    for (ChassisComplaint complaint : ChassisChecks.beyondKeys(chassis, library)) {
+      if (complaint.place() == ChassisComplaint.Place.SUPPLY) {
+        supplies.complain(complaint);
+      } else {
+        reader.complain(complaint);
+      }
+    }
+    problems.refuse();
+    return chassis;
   }
 }

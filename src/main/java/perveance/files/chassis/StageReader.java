@@ -8,11 +8,12 @@ import java.util.OptionalDouble;
 import perveance.engine.base.BadInputException;
 import perveance.engine.base.NearMiss;
 import perveance.engine.device.Device;
+import perveance.engine.stage.Chassis;
+import perveance.engine.stage.ChassisChecks;
 import perveance.engine.stage.KeySpec;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.StageKind;
-import perveance.engine.stage.StageValues;
 import perveance.files.device.DeviceFiles;
 import perveance.files.toml.Problems;
 import perveance.files.toml.Range;
@@ -48,12 +49,16 @@ final class StageReader {
       setting.ifPresent(value -> settings.put(spec.key(), value));
     }
     table.refuseOthers();
-    StageEntry entry = new StageEntry(ref, kind.name(), inOrderOfFile());
     sound &= problems.count() == before && !table.table().damaged();
+    return new StageEntry(ref, kind.name(), inOrderOfFile());
+  }
+
+  /** Checks the keys against each other once the other stages are known. */
+  void checkTogether(Chassis chassis, StageEntry entry) {
     if (sound) {
-      checkTogether(entry);
+      ChassisChecks.contradictions(chassis, entry, devices)
+          .forEach(c -> table.complain(c.key(), c.found(), c.expected()));
     }
-    return entry;
   }
 
   private Map<String, Setting> inOrderOfFile() {
@@ -127,11 +132,5 @@ final class StageReader {
       problems.addAll(e.problems());
     }
     return Optional.empty();
-  }
-
-  private void checkTogether(StageEntry entry) {
-    for (StageKind.Complaint complaint : kind.check(new StageValues(entry, devices))) {
-      table.complain(complaint.key(), complaint.found(), complaint.expected());
-    }
   }
 }

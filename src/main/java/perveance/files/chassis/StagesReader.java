@@ -7,6 +7,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import perveance.engine.base.NearMiss;
+import perveance.engine.stage.Chassis;
+import perveance.engine.stage.ChassisComplaint;
+import perveance.engine.stage.ChassisNames;
+import perveance.engine.stage.Conditions;
 import perveance.engine.stage.KeySpec;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageEntry;
@@ -18,13 +22,12 @@ import perveance.files.toml.StrictTable;
 
 /** Reads all stages and checks what they say of each other and of the supplies. */
 final class StagesReader {
-  private static final int LONGEST_REF = 40;
-
   private final DeviceFiles library;
   private final Problems problems;
   private final boolean incomplete;
   private final Map<String, StrictTable> tables = new LinkedHashMap<>();
   private final List<StageEntry> stages = new ArrayList<>();
+  private final List<StageReader> readers = new ArrayList<>();
 
   /**
    * Starts to read.
@@ -42,6 +45,10 @@ final class StagesReader {
 
   List<StageEntry> read(List<StrictTable> all, Set<String> supplies) {
     all.forEach(this::readOne);
+    Chassis chassis = new Chassis("", Conditions.USUAL, List.of(), stages);
+    for (int i = 0; i < stages.size(); i++) {
+      readers.get(i).checkTogether(chassis, stages.get(i));
+    }
     SignalOrder order = new SignalOrder(tables);
     for (StageEntry stage : stages) {
       for (KeySpec spec : kind(stage).keys()) {
@@ -52,6 +59,15 @@ final class StagesReader {
     return stages;
   }
 
+  /** Takes a complaint about the chassis as a whole to the stage that it names. */
+  void complain(ChassisComplaint complaint) {
+    StrictTable table = tables.get(complaint.name());
+    if (table != null) {
+      table.complain(
+          complaint.key(), complaint.found(), complaint.expected(), complaint.suggestion());
+    }
+  }
+
   private void readOne(StrictTable unnamed) {
     String ref = unnamed.requiredText("ref", "V1a");
     StrictTable table = unnamed.named(ref.isBlank() ? "stage" : "stage " + ref);
@@ -60,16 +76,19 @@ final class StagesReader {
     table.require("kind", "one of " + String.join(", ", names));
     Optional<StageKind> kind = table.word("kind", names).flatMap(StageKinds::find);
     // the keys of a stage of unknown kind cannot be judged
-    kind.ifPresent(k -> stages.add(new StageReader(k, table, library, problems).read(ref)));
+    if (kind.isPresent()) {
+      StageReader reader = new StageReader(kind.get(), table, library, problems);
+      readers.add(reader);
+      stages.add(reader.read(ref));
+    }
   }
 
   private void checkRef(String ref, StrictTable table) {
     if (ref.isBlank()) {
       return;
     }
-    boolean plain = ref.equals(ref.strip()) && ref.chars().noneMatch(Character::isISOControl);
-    if (!plain || ref.length() > LONGEST_REF || ref.indexOf('.') >= 0) {
-      table.complain("ref", "\"" + ref + "\"", "a short name without a point, such as \"V1a\"");
+    if (!ChassisNames.wellFormed(ref)) {
+      table.complain("ref", "\"" + ref + "\"", ChassisNames.FORM);
     }
     StrictTable earlier = tables.putIfAbsent(ref, table);
     if (earlier != null) {

@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import perveance.engine.base.NearMiss;
+import perveance.engine.stage.ChassisComplaint;
 import perveance.engine.stage.Supply;
 import perveance.engine.stage.SupplyFeed;
 import perveance.files.toml.StrictTable;
@@ -45,6 +46,15 @@ final class SuppliesReader {
   /** Names of the nodes that stand in the file, sound or not. */
   Set<String> names() {
     return tables.keySet();
+  }
+
+  /** Takes a complaint about the chassis as a whole to the supply that it names. */
+  void complain(ChassisComplaint complaint) {
+    StrictTable table = tables.get(complaint.name());
+    if (table != null) {
+      table.complain(
+          complaint.key(), complaint.found(), complaint.expected(), complaint.suggestion());
+    }
   }
 
   private void checkFeed(Supply supply) {

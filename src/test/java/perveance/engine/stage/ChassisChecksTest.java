@@ -76,14 +76,14 @@ class ChassisChecksTest {
 
   @Test
   void namesMustBeTheirOwnAndWellFormed() {
-    ChassisBench bench = bench().supply("A", 250).supply("bad name", 0);
+    ChassisBench bench = bench().supply("A", 250).supply("b.d", 0);
     stage(stage(bench, "V1"), "V1");
     stage(bench, "V.2", "sections", 2);
     assertEquals(
         List.of(
             "supply A: found a second supply of that name, expected a name of its own",
-            "supply bad name: found a supply named \"bad name\", expected " + ChassisNames.FORM,
-            "supply bad name voltage: found 0 V, expected a voltage up to 5 kV, not zero",
+            "supply b.d: found a supply named \"b.d\", expected " + ChassisNames.FORM,
+            "supply b.d voltage: found 0 V, expected a voltage up to 10 kV, not zero",
             "stage V1 ref: found \"V1\", which V1 has, expected a name of its own",
             "stage V.2 ref: found \"V.2\", expected " + ChassisNames.FORM),
         bench.complaints());
@@ -121,7 +121,7 @@ class ChassisChecksTest {
         List.of(
             "supply B from: " + circle,
             "supply C from: " + circle,
-            "supply D dropper: found 0R001, expected a resistance from 0R01 to 100M",
+            "supply D dropper: found 0R001, expected a resistance from 0R01 to 1G",
             "supply D from: found \"E\", which is no other supply, expected another supply of the"
                 + " chassis"),
         bench.complaints());

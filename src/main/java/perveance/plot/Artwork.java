@@ -4,17 +4,22 @@ import java.awt.Graphics2D;
 import java.awt.geom.AffineTransform;
 import java.awt.geom.Rectangle2D;
 import java.util.List;
+import org.jfree.chart.ChartRenderingInfo;
 import org.jfree.chart.JFreeChart;
 import perveance.engine.stage.Drawing;
 
 /** Something that draws itself into a rectangle: a chart or a schematic. */
 public interface Artwork {
+  /** Name of the one spot that a chart reports. */
+  String BETWEEN_AXES = "between the axes";
+
   /**
    * Draws, filling the rectangle as far as the proportions allow.
    *
    * @param g graphics, left as it was found
    * @param area where
-   * @return where parts and nodes were drawn, in the units of the area; empty for a chart
+   * @return where parts and nodes were drawn, in the units of the area; for a chart the area
+   *     between its axes, named {@link #BETWEEN_AXES}
    */
   List<Hotspot> draw(Graphics2D g, Rectangle2D area);
 
@@ -26,8 +31,12 @@ public interface Artwork {
    */
   static Artwork of(JFreeChart chart) {
     return (g, area) -> {
-      chart.draw(g, area);
-      return List.of();
+      ChartRenderingInfo info = new ChartRenderingInfo(null);
+      chart.draw(g, area, info);
+      Rectangle2D data = info.getPlotInfo().getDataArea();
+      return List.of(
+          new Hotspot(
+              BETWEEN_AXES, false, data.getX(), data.getY(), data.getWidth(), data.getHeight()));
     };
   }
 
@@ -41,8 +50,8 @@ public interface Artwork {
    * @return artwork
    */
   static Artwork of(SchematicPainter painter, Drawing drawing, SchematicText text, double largest) {
+    Rectangle2D extent = painter.extent(drawing, text);
     return (g, area) -> {
-      Rectangle2D extent = painter.extent(drawing, text);
       double scale =
           Math.min(
               largest,

@@ -64,6 +64,16 @@ public final class ChartFactory {
     return chart;
   }
 
+  /**
+   * The chart as something that draws itself.
+   *
+   * @param description what to draw
+   * @return artwork that reports the area between its axes
+   */
+  public Artwork artwork(PlotDescription description) {
+    return Artwork.of(chart(description));
+  }
+
   private static XYSeriesCollection dataset(PlotSeries series) {
     XYSeries points = new XYSeries(series.name(), false, true);
     for (PlotPoint p : series.points()) {
@@ -96,6 +106,7 @@ public final class ChartFactory {
   private static ValueAxis logarithmic(PlotAxis description) {
     LogAxis axis = new LogAxis(description.label());
     axis.setBase(10);
+    axis.setTickUnit(new NumberTickUnit(1));
     axis.setMinorTickMarksVisible(true);
     axis.setMinorTickCount(9);
     axis.setNumberFormatOverride(new DecadeFormat());

@@ -1,5 +1,7 @@
 package perveance.plot;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
@@ -8,11 +10,15 @@ import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.device.CurveFamily;
 import perveance.engine.device.Device;
+import perveance.engine.device.DeviceLaw;
+import perveance.engine.device.ElectrodeCurrents;
 import perveance.engine.device.Ratings;
 import perveance.engine.stage.StageCircuit;
 
 /** The plots of one stage, described from its answer. */
 public final class StagePlots {
+  private static final int EDGE_POINTS = 80;
+
   private StagePlots() {}
 
   /**
@@ -31,15 +37,68 @@ public final class StagePlots {
 
   private static PlotDescription characteristics(
       StageAnswer answer, LoadLineView view, StageCircuit.StageDevice section) {
-    Device device = section.device();
+    return CharacteristicsPlot.of(family(answer, view, section), limit(section.device()), view);
+  }
+
+  /**
+   * The characteristics alone, with room for the stage's load lines: what stands still while the
+   * lines move.
+   *
+   * @param answer the stage's answer
+   * @return description, empty when the kind has no load line
+   */
+  public static Optional<PlotDescription> frame(StageAnswer answer) {
+    return answer
+        .loadLine()
+        .flatMap(
+            view ->
+                section(answer, view.ref())
+                    .map(
+                        section ->
+                            CharacteristicsPlot.of(
+                                family(answer, view, section), limit(section.device()))));
+  }
+
+  /**
+   * The curve at which grid current begins, within the frame.
+   *
+   * @param answer the stage's answer
+   * @param frame characteristics of the stage
+   * @return points from low to high anode voltage, in axis units; empty where no grid current
+   *     begins within the picture
+   */
+  public static List<PlotPoint> gridCurrentEdge(StageAnswer answer, PlotDescription frame) {
+    Optional<StageCircuit.StageDevice> section =
+        answer.loadLine().flatMap(view -> section(answer, view.ref()));
+    if (section.isEmpty()) {
+      return List.of();
+    }
+    DeviceLaw law = section.get().device().law();
+    double onset = law.gridCurrentOnset();
+    if (!Double.isFinite(onset)) {
+      return List.of();
+    }
+    double screen = screen(answer, section.get());
+    ElectrodeCurrents out = new ElectrodeCurrents();
+    List<PlotPoint> points = new ArrayList<>();
+    for (int i = 0; i <= EDGE_POINTS; i++) {
+      double anode = frame.x().high() * i / EDGE_POINTS;
+      law.evaluate(anode, onset, screen < 0 ? anode : screen, out);
+      points.add(new PlotPoint(anode, 1e3 * Math.max(0, out.current(ElectrodeCurrents.ANODE))));
+    }
+    return points;
+  }
+
+  private static CurveFamily family(
+      StageAnswer answer, LoadLineView view, StageCircuit.StageDevice section) {
     double volts = Math.max(highest(view, true), view.anode() * 1.3);
     double amperes = Math.max(highest(view, false), view.current() * 1.8);
-    CurveFamily family =
-        CurveFamily.of(
-            device, screen(answer, section), roundUp(volts * 1.05), roundUp(amperes * 1.08));
-    OptionalDouble watts =
-        device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
-    return CharacteristicsPlot.of(family, watts, view);
+    return CurveFamily.of(
+        section.device(), screen(answer, section), roundUp(volts * 1.05), roundUp(amperes * 1.08));
+  }
+
+  private static OptionalDouble limit(Device device) {
+    return device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
   }
 
   private static double screen(StageAnswer answer, StageCircuit.StageDevice section) {
@@ -67,7 +126,7 @@ public final class StagePlots {
 
   private static double highest(LoadLineView view, boolean voltage) {
     return Stream.of(view.dc(), view.ac(), view.excursion())
-        .flatMap(java.util.List::stream)
+        .flatMap(List::stream)
         .mapToDouble(p -> voltage ? p.voltage() : p.current())
         .max()
         .orElse(0);

@@ -103,7 +103,13 @@ final class Layers {
           new Layer(
               "desktop.viewmodel",
               with(ENGINE, "app", "plot", "desktop.task"),
-              with(OUTER_JDK, "javafx.beans..", "javafx.collections..", "javafx.util..")),
+              with(
+                  OUTER_JDK,
+                  // as the use cases, it may name a place, not open anything
+                  "java.nio.file.Path",
+                  "javafx.beans..",
+                  "javafx.collections..",
+                  "javafx.util..")),
           new Layer(
               "desktop.view",
               with(ENGINE, "app", "plot", "desktop.task", "desktop.viewmodel"),

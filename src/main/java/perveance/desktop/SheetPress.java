@@ -1,0 +1,28 @@
+package perveance.desktop;
+
+import java.time.LocalDate;
+import java.util.Optional;
+import perveance.desktop.viewmodel.Press;
+import perveance.desktop.viewmodel.Settings;
+import perveance.engine.analysis.ChassisAnswer;
+import perveance.report.BuildSheet;
+import perveance.report.PaperSize;
+import perveance.report.SheetOptions;
+
+/** Prints the sheet by the same hand as the command line. */
+final class SheetPress implements Press {
+  @Override
+  public byte[] sheet(ChassisAnswer answer, Settings settings) {
+    String version =
+        Optional.ofNullable(SheetPress.class.getPackage().getImplementationVersion())
+            .orElse("development");
+    return new BuildSheet(
+            new SheetOptions(
+                settings.letter() ? PaperSize.LETTER : PaperSize.A4,
+                settings.vocabulary(),
+                settings.zigzag(),
+                LocalDate.now(java.time.ZoneId.systemDefault()),
+                version))
+        .render(answer);
+  }
+}

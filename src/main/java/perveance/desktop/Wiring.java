@@ -1,0 +1,39 @@
+package perveance.desktop;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import perveance.desktop.viewmodel.Asking;
+import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Document;
+import perveance.desktop.viewmodel.Documents;
+import perveance.desktop.viewmodel.Settings;
+import perveance.desktop.viewmodel.Starters;
+import perveance.desktop.viewmodel.Workbench;
+import perveance.engine.stage.Chassis;
+import perveance.files.device.DeviceFiles;
+
+/** Puts a desk together: the one place where ports meet their adapters. */
+final class Wiring {
+  private Wiring() {}
+
+  static Desk desk(
+      Path home, ObjectProperty<Settings> settings, Asking asking, Workbench.Desks desks) {
+    DeviceFiles devices = new DeviceFiles(List.of(home.resolve("devices")));
+    Chassis first = Starters.example(settings.get());
+    Workbench bench = new Workbench(first, new EngineRoom(devices), desks);
+    Documents documents = new FileDocuments(devices, home);
+    Documents.Opened opened = new Documents.Opened(Optional.empty(), "", false, first);
+    return new Desk(
+        bench, new Document(bench, documents, opened), settings, new SheetPress(), asking);
+  }
+
+  static ObjectProperty<Settings> settings(Path home) {
+    SettingsFile file = new SettingsFile(home);
+    ObjectProperty<Settings> settings = new SimpleObjectProperty<>(file.load());
+    settings.addListener((o, was, is) -> file.save(is));
+    return settings;
+  }
+}

@@ -1,0 +1,5 @@
+/** The desktop: the sheet, alive. */
+@NullMarked
+package perveance.desktop;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,140 @@
+package perveance.desktop.view;
+
+import java.util.List;
+import java.util.Optional;
+import javafx.geometry.Bounds;
+import javafx.scene.AccessibleRole;
+import javafx.scene.control.Label;
+import javafx.scene.layout.Pane;
+import javafx.scene.layout.StackPane;
+import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Workbench;
+import perveance.engine.analysis.LoadLineView;
+import perveance.engine.analysis.StageAnswer;
+import perveance.plot.ChartFactory;
+import perveance.plot.PlotDescription;
+import perveance.plot.PlotFonts;
+import perveance.plot.StagePlots;
+
+/**
+ * The anode characteristics in two layers: the family stands still and is drawn once; load lines,
+ * operating point and swing are drawn anew with each answer.
+ */
+final class CharacteristicsView extends StackPane {
+  private final Desk desk;
+  private final Workbench bench;
+  private final PlotFonts fonts;
+  private final ArtworkNode family = new ArtworkNode();
+  private final LoadLineLayer lines;
+  private final Pane words = new Pane();
+  private final Label readout = Bits.label("", "readout");
+  private Optional<PlotDescription> frame = Optional.empty();
+  private String drawnFor = "";
+  private boolean held;
+
+  CharacteristicsView(Desk desk, PlotFonts fonts) {
+    this.desk = desk;
+    this.bench = desk.bench();
+    this.fonts = fonts;
+    this.lines = new LoadLineLayer(desk);
+    words.setMouseTransparent(true);
+    readout.setVisible(false);
+    words.getChildren().add(readout);
+    getChildren().addAll(family, lines, words);
+    family.onDrawn(this::drawLines);
+    lines.setOnMouseMoved(e -> read(e.getX(), e.getY()));
+    lines.setOnMouseExited(e -> readout.setVisible(false));
+    setAccessibleRole(AccessibleRole.IMAGE_VIEW);
+    setId("characteristics");
+    new PointDragging(desk, this, lines);
+  }
+
+  /** While a hand drags, the axes stand still. */
+  void hold(boolean on) {
+    held = on;
+    if (!on) {
+      refresh();
+    }
+  }
+
+  Optional<PlotDescription> frame() {
+    return frame;
+  }
+
+  PlotScale scale() {
+    PlotDescription d = frame.orElseThrow();
+    Bounds data = family.data();
+    return new PlotScale(
+        data.getMinX(), data.getMinY(), data.getWidth(), data.getHeight(), d.x(), d.y());
+  }
+
+  /** Draws what has changed. */
+  void refresh() {
+    Optional<StageAnswer> answer = bench.stageAnswer();
+    if (!held || frame.isEmpty()) {
+      Optional<PlotDescription> next = answer.flatMap(StagePlots::frame);
+      String key = next.map(CharacteristicsView::key).orElse("") + desk.settings().get();
+      if (!key.equals(drawnFor)) {
+        drawnFor = key;
+        frame = next;
+        showFamily();
+        return;
+      }
+    }
+    drawLines();
+  }
+
+  /** Two frames with the same key look the same. */
+  private static String key(PlotDescription d) {
+    return d.title() + d.x() + d.y() + d.series().size() + d.series().get(0).points().hashCode();
+  }
+
+  private void showFamily() {
+    double size = 11 * desk.settings().get().textSize();
+    family.show(
+        frame
+            .map(d -> new ChartFactory(Skin.look(desk.settings().get()), fonts, size).artwork(d))
+            .orElse((g, area) -> List.of()));
+  }
+
+  private void drawLines() {
+    Optional<StageAnswer> answer = bench.stageAnswer();
+    Optional<LoadLineView> view = answer.flatMap(StageAnswer::loadLine);
+    if (frame.isEmpty() || view.isEmpty() || family.data().getWidth() < 10) {
+      lines.clear();
+      setAccessibleText(desk.say("No load line for this stage"));
+      return;
+    }
+    lines.draw(answer.get(), view.get(), frame.get(), scale());
+    setAccessibleText(
+        desk.say(
+            String.format(
+                java.util.Locale.ROOT,
+                "Anode characteristics, operating point %.0f V, %.2f mA",
+                view.get().anode(),
+                1e3 * view.get().current())));
+  }
+
+  private void read(double x, double y) {
+    if (frame.isEmpty()) {
+      return;
+    }
+    PlotScale s = scale();
+    boolean inside = s.contains(x, y);
+    readout.setVisible(inside);
+    if (inside) {
+      double volts = s.valueX(x);
+      double milliamperes = s.valueY(y);
+      readout.setText(
+          String.format(
+              java.util.Locale.ROOT,
+              "%.0f V  %.2f mA  %.2f W",
+              volts,
+              milliamperes,
+              volts * milliamperes / 1e3));
+      readout.autosize();
+      double w = readout.prefWidth(-1);
+      readout.relocate(Math.min(x + 14, getWidth() - w - 4), Math.max(2, y - 26));
+    }
+  }
+}

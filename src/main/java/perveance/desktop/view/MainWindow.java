@@ -1,0 +1,193 @@
+package perveance.desktop.view;
+
+import java.io.File;
+import java.nio.file.Path;
+import java.util.List;
+import javafx.scene.Scene;
+import javafx.scene.input.DragEvent;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCodeCombination;
+import javafx.scene.input.KeyCombination;
+import javafx.scene.input.TransferMode;
+import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.RowConstraints;
+import javafx.scene.layout.VBox;
+import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.StageList;
+import perveance.plot.PlotFonts;
+
+/** The window: the sheet, alive. */
+public final class MainWindow {
+  private final Desk desk;
+  private final PlotFonts fonts = new PlotFonts();
+  private final BorderPane root = new BorderPane();
+  private final Scene scene = new Scene(root, 1280, 800);
+  private final FileActions files;
+  private final StageList list;
+  private final TopBar top;
+  private final CautionBand caution;
+  private final ChassisList chassis;
+  private final SchematicCard schematic;
+  private final PlotCard plots;
+  private final FiguresRow figures;
+  private final FindingsPane findings;
+  private final FootBar foot;
+  private final Commands commands;
+
+  /**
+   * Builds the window.
+   *
+   * @param desk what it works with
+   */
+  public MainWindow(Desk desk) {
+    Skin.loadFonts();
+    this.desk = desk;
+    files = new FileActions(desk);
+    list = new StageList(desk.bench());
+    caution = new CautionBand(desk);
+    chassis = new ChassisList(desk, list);
+    Pickers pickers = new Pickers(desk, list, fonts);
+    schematic = new SchematicCard(desk, fonts, pickers::device);
+    plots = new PlotCard(desk, fonts);
+    figures = new FiguresRow(desk);
+    findings = new FindingsPane(desk);
+    foot = new FootBar(desk);
+    commands = new Commands(desk, files, list, schematic, plots, findings, pickers);
+    top = new TopBar(desk, files, new SearchField(commands::all, desk.settings()::get));
+    commands.menus().forEach(top::menu);
+    chassis.onAddStage(pickers::kind);
+    layOut();
+    listen();
+    refresh();
+  }
+
+  /**
+   * The scene.
+   *
+   * @return for a stage
+   */
+  public Scene scene() {
+    return scene;
+  }
+
+  /**
+   * Whether the window may be closed: nothing is unsaved, or the person has decided.
+   *
+   * @return true when it may
+   */
+  public boolean mayClose() {
+    return files.mayLeave();
+  }
+
+  /** Offers what a killed program has left. */
+  public void offerRecovery() {
+    files.offerRecovery();
+  }
+
+  /**
+   * Opens a file.
+   *
+   * @param file the file
+   */
+  public void open(Path file) {
+    files.open(file);
+  }
+
+  private void layOut() {
+    root.getStyleClass().add("window");
+    root.setTop(top);
+    root.setLeft(chassis);
+    GridPane middle = new GridPane();
+    middle.setHgap(10);
+    middle.setVgap(10);
+    middle.setPadding(new javafx.geometry.Insets(10));
+    for (double percent : new double[] {41, 36.5, 22.5}) {
+      ColumnConstraints column = new ColumnConstraints();
+      column.setPercentWidth(percent);
+      middle.getColumnConstraints().add(column);
+    }
+    RowConstraints high = new RowConstraints();
+    high.setVgrow(Priority.ALWAYS);
+    RowConstraints low = new RowConstraints();
+    low.setVgrow(Priority.NEVER);
+    middle.getRowConstraints().addAll(high, low);
+    middle.add(Bits.growing(schematic), 0, 0);
+    middle.add(Bits.growing(plots), 1, 0);
+    middle.add(figures, 0, 1, 2, 1);
+    middle.add(Bits.growing(findings), 2, 0, 1, 2);
+    schematic.setMinSize(0, 0);
+    plots.setMinSize(0, 0);
+    findings.setMinSize(0, 0);
+    VBox centre = new VBox(caution, Bits.growing(middle), foot);
+    centre.setMinSize(0, 0);
+    middle.setMinSize(0, 0);
+    root.setCenter(centre);
+  }
+
+  private void listen() {
+    desk.bench().answer().addListener((o, was, is) -> refresh());
+    desk.bench().history().addListener((o, was, is) -> followEdits());
+    desk.bench().settled().addListener((o, was, is) -> figures.refresh());
+    desk.bench()
+        .chosenStage()
+        .addListener(
+            (o, was, is) -> {
+              plots.refresh();
+              figures.refresh();
+              findings.refresh();
+              foot.refresh();
+            });
+    desk.settings().addListener((o, was, is) -> dress());
+    dress();
+    scene
+        .getAccelerators()
+        .put(
+            new KeyCodeCombination(KeyCode.K, KeyCombination.SHORTCUT_DOWN),
+            () -> top.search().requestFocus());
+    commands.accelerators(scene);
+    scene.addEventHandler(DragEvent.DRAG_OVER, this::over);
+    scene.addEventHandler(DragEvent.DRAG_DROPPED, this::dropped);
+  }
+
+  private void dress() {
+    Skin.dress(root, desk.settings().get());
+    refresh();
+  }
+
+  private void followEdits() {
+    chassis.refresh();
+    if (desk.bench().chassis().stages().isEmpty()) {
+      refresh();
+    }
+  }
+
+  private void refresh() {
+    top.refresh();
+    caution.refresh();
+    chassis.refresh();
+    schematic.refresh();
+    plots.refresh();
+    figures.refresh();
+    findings.refresh();
+    foot.refresh();
+  }
+
+  private void over(DragEvent event) {
+    if (event.getDragboard().hasFiles()) {
+      event.acceptTransferModes(TransferMode.COPY);
+    }
+    event.consume();
+  }
+
+  private void dropped(DragEvent event) {
+    List<File> dropped = event.getDragboard().getFiles();
+    event.setDropCompleted(!dropped.isEmpty());
+    event.consume();
+    if (!dropped.isEmpty()) {
+      files.open(dropped.get(0).toPath());
+    }
+  }
+}

@@ -1,0 +1,26 @@
+package perveance.desktop.view;
+
+import javafx.scene.AccessibleRole;
+import javafx.scene.control.Button;
+import perveance.plot.Hotspot;
+
+/** A part of the drawing as something that can be focused, pressed and read aloud. */
+final class PartHandle extends Button {
+  PartHandle(String name) {
+    getStyleClass().setAll("part-handle");
+    setId("part-" + name);
+    setAccessibleRole(AccessibleRole.BUTTON);
+    setAccessibleText(name);
+    setMinSize(8, 8);
+  }
+
+  void place(Hotspot spot) {
+    double edge = 3;
+    setLayoutX(Math.round(spot.x() - edge));
+    setLayoutY(Math.round(spot.y() - edge));
+    double width = Math.round(spot.width() + 2 * edge);
+    double height = Math.round(spot.height() + 2 * edge);
+    setPrefSize(width, height);
+    setMaxSize(width, height);
+  }
+}

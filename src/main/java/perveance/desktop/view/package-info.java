@@ -1,0 +1,5 @@
+/** How it is shown. */
+@NullMarked
+package perveance.desktop.view;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,393 @@
+package perveance.desktop.viewmodel;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.Executor;
+import java.util.function.BiFunction;
+import java.util.function.UnaryOperator;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
+import javafx.beans.property.ReadOnlyBooleanProperty;
+import javafx.beans.property.ReadOnlyBooleanWrapper;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import org.jspecify.annotations.Nullable;
+import perveance.app.Edit;
+import perveance.app.History;
+import perveance.desktop.task.LatestOnly;
+import perveance.engine.analysis.AnalysisOptions;
+import perveance.engine.analysis.ChassisAnswer;
+import perveance.engine.analysis.StageAnswer;
+import perveance.engine.base.Finding;
+import perveance.engine.base.Progress;
+import perveance.engine.base.Remedy;
+import perveance.engine.stage.Chassis;
+import perveance.engine.stage.StageEntry;
+
+/** The open chassis: its edits, what is chosen in it, and its answer. */
+public final class Workbench {
+  /** At once after an edit: everything but bands and levels. */
+  private static final AnalysisOptions QUICK = new AnalysisOptions(0, 1, false, true);
+
+  private final Engine engine;
+  private final ReadOnlyObjectWrapper<History> history;
+  private final ReadOnlyBooleanWrapper settled = new ReadOnlyBooleanWrapper();
+  private final ReadOnlyObjectWrapper<@Nullable ChassisAnswer> answer =
+      new ReadOnlyObjectWrapper<>();
+  private final ReadOnlyObjectWrapper<@Nullable Path> place = new ReadOnlyObjectWrapper<>();
+  private final ReadOnlyObjectWrapper<Chassis> saved;
+  private final ReadOnlyStringWrapper message = new ReadOnlyStringWrapper("");
+  private final StringProperty chosenStage = new SimpleStringProperty("");
+  private final StringProperty chosenPart = new SimpleStringProperty("");
+  private final LatestOnly<Chassis, ChassisAnswer> live;
+  private final LatestOnly<Chassis, ChassisAnswer> full;
+
+  /**
+   * A workbench.
+   *
+   * @param start first chassis
+   * @param engine what computes and checks
+   * @param desks where it computes and where answers arrive
+   */
+  public Workbench(Chassis start, Engine engine, Desks desks) {
+    this.engine = engine;
+    history = new ReadOnlyObjectWrapper<>(History.of(start));
+    saved = new ReadOnlyObjectWrapper<>(start);
+    live = question(QUICK, desks.quick(), desks.foreground());
+    full = question(AnalysisOptions.FULL, desks.thorough(), desks.foreground());
+    chooseFirst(start);
+    recompute();
+  }
+
+  /**
+   * Where things run.
+   *
+   * @param quick answers without bands
+   * @param thorough answers with bands
+   * @param foreground where answers arrive: the thread of the window
+   */
+  public record Desks(Executor quick, Executor thorough, Executor foreground) {}
+
+  private LatestOnly<Chassis, ChassisAnswer> question(
+      AnalysisOptions options, Executor background, Executor foreground) {
+    BiFunction<Chassis, Progress, ChassisAnswer> work =
+        (chassis, progress) -> engine.answer(chassis, options, progress);
+    return new LatestOnly<>(
+        background, foreground, work, a -> receive(a, options), this::notComputed);
+  }
+
+  /** A quick answer that comes after the thorough one of the same chassis brings nothing new. */
+  private void receive(ChassisAnswer received, AnalysisOptions options) {
+    boolean late = options.samples() == 0 && settled.get() && received.chassis().equals(chassis());
+    if (!late) {
+      settled.set(options.samples() > 0);
+      answer.set(received);
+    }
+  }
+
+  private void notComputed(RuntimeException e) {
+    message.set("This could not be computed: " + e.getMessage() + ". Undo the last change.");
+  }
+
+  /**
+   * What can be undone, the chassis, what can be redone.
+   *
+   * @return history
+   */
+  public ReadOnlyObjectProperty<History> history() {
+    return history.getReadOnlyProperty();
+  }
+
+  /**
+   * The newest answer; first without bands, soon with.
+   *
+   * @return answer, null until the first arrives
+   */
+  public ReadOnlyObjectProperty<@Nullable ChassisAnswer> answer() {
+    return answer.getReadOnlyProperty();
+  }
+
+  /**
+   * Whether the answer is thorough and of the present chassis; false while bands follow behind.
+   *
+   * @return true when nothing more is to come
+   */
+  public ReadOnlyBooleanProperty settled() {
+    return settled.getReadOnlyProperty();
+  }
+
+  /**
+   * What computes and checks.
+   *
+   * @return engine
+   */
+  public Engine engine() {
+    return engine;
+  }
+
+  /**
+   * File of the chassis.
+   *
+   * @return file, null when it has none yet
+   */
+  public ReadOnlyObjectProperty<@Nullable Path> place() {
+    return place.getReadOnlyProperty();
+  }
+
+  /**
+   * One line for the foot of the window.
+   *
+   * @return message, may be empty
+   */
+  public ReadOnlyStringProperty message() {
+    return message.getReadOnlyProperty();
+  }
+
+  /**
+   * Reference of the chosen stage.
+   *
+   * @return reference, empty when the chassis has no stage
+   */
+  public StringProperty chosenStage() {
+    return chosenStage;
+  }
+
+  /**
+   * Element name of the chosen part.
+   *
+   * @return name, empty when none
+   */
+  public StringProperty chosenPart() {
+    return chosenPart;
+  }
+
+  /**
+   * Whether there are changes that are not saved.
+   *
+   * @return true when the chassis differs from its file
+   */
+  public BooleanBinding modified() {
+    return Bindings.createBooleanBinding(
+        () -> !history.get().now().equals(saved.get()), history, saved);
+  }
+
+  /**
+   * The chassis as it is.
+   *
+   * @return chassis
+   */
+  public Chassis chassis() {
+    return history.get().now();
+  }
+
+  /**
+   * The chassis as last saved or opened.
+   *
+   * @return chassis
+   */
+  public Chassis savedChassis() {
+    return saved.get();
+  }
+
+  /**
+   * Does an edit and computes anew; an edit that cannot be is refused in words.
+   *
+   * @param edit the edit
+   * @return why it was refused, empty when it was done
+   */
+  public Optional<String> edit(Edit edit) {
+    return step(h -> h.after(edit));
+  }
+
+  /**
+   * Does an edit that belongs to the last one, while a hand drags.
+   *
+   * @param edit the edit
+   * @return why it was refused, empty when it was done
+   */
+  public Optional<String> drag(Edit edit) {
+    return step(h -> h.continued(edit));
+  }
+
+  /** Undoes the last edit. */
+  public void undo() {
+    take(history.get().undone());
+  }
+
+  /** Does the last undone edit again. */
+  public void redo() {
+    take(history.get().redone());
+  }
+
+  private Optional<String> step(UnaryOperator<History> change) {
+    History after;
+    try {
+      after = change.apply(history.get());
+    } catch (IllegalArgumentException e) {
+      return refuse(String.valueOf(e.getMessage()));
+    }
+    List<String> complaints = engine.complaints(after.now());
+    if (!complaints.isEmpty() && engine.complaints(chassis()).isEmpty()) {
+      return refuse(String.join("; ", complaints));
+    }
+    take(after);
+    return Optional.empty();
+  }
+
+  private Optional<String> refuse(String why) {
+    message.set(why);
+    return Optional.of(why);
+  }
+
+  private void take(History after) {
+    History before = history.get();
+    if (after.past().size() != before.past().size() || !after.now().equals(before.now())) {
+      history.set(after);
+      message.set("");
+      keepChoice();
+      recompute();
+    }
+  }
+
+  private void recompute() {
+    settled.set(false);
+    List<String> complaints = engine.complaints(chassis());
+    if (!complaints.isEmpty()) {
+      message.set(String.join("; ", complaints));
+      return;
+    }
+    live.ask(chassis());
+    full.ask(chassis());
+  }
+
+  private void keepChoice() {
+    if (chassis().stage(chosenStage.get()).isEmpty()) {
+      chooseFirst(chassis());
+    }
+  }
+
+  private void chooseFirst(Chassis chassis) {
+    chosenPart.set("");
+    chosenStage.set(chassis.stages().stream().findFirst().map(StageEntry::ref).orElse(""));
+  }
+
+  /**
+   * Takes another chassis in place of this one; its history starts anew.
+   *
+   * @param chassis the chassis
+   * @param file its file, null when it has none
+   */
+  public void replace(Chassis chassis, @Nullable Path file) {
+    history.set(History.of(chassis));
+    saved.set(chassis);
+    place.set(file);
+    chooseFirst(chassis);
+    recompute();
+  }
+
+  /**
+   * Puts a recovered chassis in place of the saved one, as an edit that can be undone.
+   *
+   * @param chassis as last edited before the program was ended
+   */
+  public void restore(Chassis chassis) {
+    History now = history.get();
+    List<History.Step> past = new ArrayList<>(now.past());
+    past.add(new History.Step("recover unsaved changes", now.now()));
+    take(new History(past, chassis, List.of()));
+  }
+
+  /** Notes that nothing of the chassis stands in a file. */
+  public void unsaved() {
+    saved.set(new Chassis("", chassis().conditions(), List.of(), List.of()));
+  }
+
+  /**
+   * Notes that the chassis has been saved.
+   *
+   * @param file where
+   */
+  public void saved(Path file) {
+    saved.set(chassis());
+    place.set(file);
+    message.set("Saved " + file);
+  }
+
+  /**
+   * Says something at the foot of the window.
+   *
+   * @param text what
+   */
+  public void say(String text) {
+    message.set(text);
+  }
+
+  /**
+   * Answer of the chosen stage.
+   *
+   * @return answer, empty until computed or where it could not be solved
+   */
+  public Optional<StageAnswer> stageAnswer() {
+    ChassisAnswer now = answer.get();
+    return now == null
+        ? Optional.empty()
+        : now.stages().stream().filter(s -> s.ref().equals(chosenStage.get())).findFirst();
+  }
+
+  /**
+   * Takes the remedy of a finding; undone in one step.
+   *
+   * @param finding a finding with a remedy
+   */
+  public void take(Finding finding) {
+    finding.remedy().ifPresent(remedy -> take(finding.where(), remedy));
+  }
+
+  private void take(String where, Remedy remedy) {
+    String ref = stageOf(where);
+    List<Edit> edits = new ArrayList<>();
+    for (Map.Entry<String, String> e : remedy.edits().entrySet()) {
+      KeyEditor.Outcome outcome = KeyEditor.parse(chassis(), ref, e.getKey(), e.getValue());
+      if (outcome instanceof KeyEditor.Outcome.Accepted accepted) {
+        edits.add(accepted.edit());
+      } else if (outcome instanceof KeyEditor.Outcome.Refused refused) {
+        message.set(refused.why());
+        return;
+      }
+    }
+    Optional<String> refused = edit(new Edit.Together("take the remedy for " + where, edits));
+    if (refused.isEmpty()) {
+      message.set(remedy.text());
+    }
+  }
+
+  /**
+   * The stage that a place belongs to.
+   *
+   * @param where a stage, a valve of it or a part of it
+   * @return reference of the stage, the place itself when none is found
+   */
+  public String stageOf(String where) {
+    if (chassis().stage(where).isPresent()) {
+      return where;
+    }
+    ChassisAnswer now = answer.get();
+    if (now != null) {
+      for (StageAnswer stage : now.stages()) {
+        boolean valve = stage.circuit().devices().stream().anyMatch(d -> d.ref().equals(where));
+        boolean part = stage.circuit().parts().stream().anyMatch(p -> p.element().equals(where));
+        if (valve || part) {
+          return stage.ref();
+        }
+      }
+    }
+    return where.split("[ .]", 2)[0];
+  }
+}

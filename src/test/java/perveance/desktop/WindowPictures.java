@@ -1,0 +1,111 @@
+package perveance.desktop;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Locale;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.image.WritableImage;
+import javafx.stage.Stage;
+import javax.imageio.ImageIO;
+import org.jspecify.annotations.Nullable;
+import perveance.desktop.view.MainWindow;
+import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Settings;
+import perveance.desktop.viewmodel.Workbench;
+
+/**
+ * Draws every view at two sizes, light and dark, into pictures for people to look at.
+ *
+ * <p>Arguments: a folder for the pictures, then any number of chassis files.
+ */
+public final class WindowPictures {
+  private static final List<String> VIEWS =
+      List.of("characteristics", "transfer", "waveform", "distortion", "response", "spread");
+
+  private final Path folder;
+
+  private WindowPictures(Path folder) {
+    this.folder = folder;
+  }
+
+  /**
+   * Draws.
+   *
+   * @param args folder, files
+   * @throws IOException when a picture cannot be written
+   */
+  public static void main(String[] args) throws IOException {
+    Toolkit.start();
+    WindowPictures pictures = new WindowPictures(Path.of(args[0]));
+    Files.createDirectories(pictures.folder);
+    for (boolean dark : new boolean[] {false, true}) {
+      for (int[] size : new int[][] {{1280, 800}, {1920, 1200}}) {
+        pictures.views("example", null, size, dark);
+        for (int i = 1; i < args.length; i++) {
+          Path file = Path.of(args[i]);
+          String name = String.valueOf(file.getFileName()).replaceFirst("\\.toml$", "");
+          pictures.first(name, file, size, dark);
+        }
+      }
+    }
+    javafx.application.Platform.exit();
+  }
+
+  private void views(String name, @Nullable Path file, int[] size, boolean dark) {
+    Stage stage = window(file, size, dark);
+    for (String view : VIEWS) {
+      Toolkit.run(() -> ((ToggleButton) stage.getScene().lookup("#tab-" + view)).fire());
+      save(stage, name + "-" + view, size, dark);
+    }
+    Toolkit.run(() -> ((ToggleButton) stage.getScene().lookup("#tab-values")).fire());
+    save(stage, name + "-values", size, dark);
+    Toolkit.run(stage::close);
+  }
+
+  private void first(String name, Path file, int[] size, boolean dark) {
+    Stage stage = window(file, size, dark);
+    save(stage, name, size, dark);
+    Toolkit.run(stage::close);
+  }
+
+  private Stage window(@Nullable Path file, int[] size, boolean dark) {
+    return Toolkit.on(
+        () -> {
+          ObjectProperty<Settings> settings =
+              new SimpleObjectProperty<>(Settings.USUAL.withDark(dark));
+          Workbench.Desks desks = new Workbench.Desks(Runnable::run, Runnable::run, Runnable::run);
+          Desk desk = Wiring.desk(folder.resolve("home"), settings, new Answers(), desks);
+          MainWindow window = new MainWindow(desk);
+          if (file != null) {
+            window.open(file);
+          }
+          Stage stage = new Stage();
+          stage.setScene(window.scene());
+          stage.setWidth(size[0]);
+          stage.setHeight(size[1]);
+          stage.show();
+          return stage;
+        });
+  }
+
+  private void save(Stage stage, String name, int[] size, boolean dark) {
+    Toolkit.run(() -> stage.getScene().getRoot().layout());
+    Toolkit.run(
+        () -> {
+          WritableImage image = stage.getScene().snapshot(null);
+          String file =
+              String.format(Locale.ROOT, "%s-%d-%s.png", name, size[0], dark ? "dark" : "light");
+          try {
+            ImageIO.write(
+                SwingFXUtils.fromFXImage(image, null), "png", folder.resolve(file).toFile());
+          } catch (IOException e) {
+            throw new java.io.UncheckedIOException(e);
+          }
+        });
+  }
+}

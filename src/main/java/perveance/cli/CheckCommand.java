@@ -19,6 +19,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code check}: computes a chassis file and reports. */
 @Command(
     name = "check",
+    mixinStandardHelpOptions = true,
     description = "Computes every stage of a chassis file and reports, worst findings first.",
     footer = {
       "",

@@ -37,7 +37,12 @@ public final class CommandLines {
     CommandLine line = new CommandLine(new PerveanceCommand(desktop));
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setExecutionExceptionHandler(CommandLines::failed);
-    line.setExitCodeExceptionMapper(e -> ExitCode.INTERNAL_ERROR.number());
+    line.setExitCodeExceptionMapper(
+        e ->
+            (e instanceof CommandLine.ParameterException
+                    ? ExitCode.BAD_INPUT
+                    : ExitCode.INTERNAL_ERROR)
+                .number());
     return line;
   }
 

@@ -7,6 +7,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code completion}: prints a completion script. */
 @Command(
     name = "completion",
+    mixinStandardHelpOptions = true,
     description = "Prints a completion script for bash and zsh.",
     footer = {"", "Example:", "  source <(perveance completion)"})
 final class CompletionCommand implements Runnable {

@@ -24,6 +24,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code curves}: anode characteristics of a device. */
 @Command(
     name = "curves",
+    mixinStandardHelpOptions = true,
     description = "Prints a device's anode characteristics as CSV, or draws them as SVG or PNG.",
     footer = {
       "",

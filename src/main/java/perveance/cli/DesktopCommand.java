@@ -10,6 +10,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code desktop}: opens the window. */
 @Command(
     name = "desktop",
+    mixinStandardHelpOptions = true,
     description = "Opens the desktop program, on a chassis file if one is given.",
     footer = {"", "Example:", "  perveance desktop my-amplifier.toml"})
 final class DesktopCommand implements Runnable {

@@ -15,6 +15,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code example}: the main job on a shipped example. */
 @Command(
     name = "example",
+    mixinStandardHelpOptions = true,
     description = "Reports on a shipped example and writes its build sheet.",
     footer = {"", "Example:", "  perveance example --to somewhere"})
 final class ExampleCommand implements Callable<Integer> {

@@ -23,6 +23,7 @@ import picocli.CommandLine.ParentCommand;
 /** {@code sheet}: writes the build sheet. */
 @Command(
     name = "sheet",
+    mixinStandardHelpOptions = true,
     description = "Writes the build sheet of a chassis file as a PDF and says where.",
     footer = {
       "",

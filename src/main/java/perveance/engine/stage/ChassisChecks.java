@@ -122,7 +122,8 @@ public final class ChassisChecks {
       StageValues values = new StageValues(entry, devices, ChassisWiring.roughly(chassis, entry));
       List<StageKind.Complaint> contradictions = kind.get().check(values);
       contradictions.forEach(c -> add(index, c.key(), c.found(), c.expected()));
-      if (contradictions.isEmpty()) {
+      // an ill-formed name is told below; no element can bear it
+      if (contradictions.isEmpty() && ChassisNames.wellFormed(entry.ref())) {
         valves.put(index, valves(kind.get(), values));
       }
     }

@@ -1,15 +1,10 @@
 package perveance.files.chassis;
 
 import java.nio.file.Path;
-import java.util.List;
 import java.util.Optional;
 import perveance.engine.base.BadInputException;
 import perveance.engine.stage.Chassis;
-import perveance.engine.stage.ChassisChecks;
-import perveance.engine.stage.ChassisComplaint;
 import perveance.engine.stage.Conditions;
-import perveance.engine.stage.StageEntry;
-import perveance.engine.stage.Supply;
 import perveance.files.device.DeviceFiles;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
@@ -53,30 +48,28 @@ public final class ChassisReader {
   public Chassis read(SourceText source) throws BadInputException {
     Problems problems = new Problems(source.file());
     StrictTable root = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
-    boolean incomplete = root.table().damaged();
     root.require("perveance", "the version of the file's form, " + VERSION);
     root.whole("perveance", VERSION, VERSION);
     String title = root.text("title").orElse("");
-    Optional<StrictTable> conditions = root.table("conditions");
-    SuppliesReader supplies = new SuppliesReader(incomplete);
+    Conditions conditions = conditions(root.table("conditions"));
+    SuppliesReader supplies = new SuppliesReader();
     Optional<StrictTable> supplyTables = root.table("supply");
-    List<Supply> nodes = supplyTables.isPresent() ? supplies.read(supplyTables.get()) : List.of();
-    StagesReader reader = new StagesReader(library, problems, incomplete);
-    List<StageEntry> stages = reader.read(root.tables("stage"), supplies.names());
-    Conditions assumed =
-        conditions.isPresent() ? ConditionsReader.read(conditions.get()) : Conditions.USUAL;
+    if (supplyTables.isPresent()) {
+      supplies.read(supplyTables.get(), problems);
+    }
+    StagesReader stages = new StagesReader(library, problems);
+    for (StrictTable table : root.tables("stage")) {
+      stages.read(table);
+    }
+    Chassis chassis = new Chassis(title, conditions, supplies.supplies(), stages.stages());
+    new CrossChecks(chassis, supplies.tables(), stages.tables(), root.table().damaged())
+        .complain(library);
     root.refuseOthers();
     problems.refuse();
-    Chassis chassis = new Chassis(title, assumed, nodes, stages);
-    // what only a sound chassis shows, such as two valves of one name
-    for (ChassisComplaint complaint : ChassisChecks.beyondKeys(chassis, library)) {
-      if (complaint.place() == ChassisComplaint.Place.SUPPLY) {
-        supplies.complain(complaint);
-      } else {
-        reader.complain(complaint);
-      }
-    }
-    problems.refuse();
     return chassis;
+  }
+
+  private static Conditions conditions(Optional<StrictTable> table) {
+    return table.isPresent() ? ConditionsReader.read(table.get()) : Conditions.USUAL;
   }
 }

@@ -1,15 +1,10 @@
 package perveance.files.chassis;
 
-import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.base.BadInputException;
-import perveance.engine.base.NearMiss;
-import perveance.engine.device.Device;
-import perveance.engine.stage.Chassis;
-import perveance.engine.stage.ChassisChecks;
 import perveance.engine.stage.KeySpec;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageEntry;
@@ -25,43 +20,44 @@ final class StageReader {
   private static final double LARGEST = 1e15;
 
   private final StageKind kind;
+  private final ReadTable read;
   private final StrictTable table;
   private final DeviceFiles library;
   private final Problems problems;
-  private final Map<String, Setting> settings = new HashMap<>();
-  private final Map<String, Device> devices = new HashMap<>();
-  private boolean sound = true;
 
-  StageReader(StageKind kind, StrictTable table, DeviceFiles library, Problems problems) {
+  StageReader(StageKind kind, ReadTable read, DeviceFiles library, Problems problems) {
     this.kind = kind;
-    this.table = table;
+    this.read = read;
+    this.table = read.table();
     this.library = library;
     this.problems = problems;
   }
 
   StageEntry read(String ref) {
     int before = problems.count();
+    Map<String, Setting> settings = new LinkedHashMap<>();
     for (KeySpec spec : kind.keys()) {
       if (spec.required()) {
         table.require(spec.key(), meaning(spec));
       }
-      Optional<Setting> setting = setting(spec);
-      setting.ifPresent(value -> settings.put(spec.key(), value));
+      table.allow(spec.key());
+      if (table.has(spec.key())) {
+        Optional<Setting> setting = setting(spec);
+        if (setting.isPresent()) {
+          settings.put(spec.key(), setting.get());
+        } else {
+          read.told(spec.key());
+        }
+      }
     }
     table.refuseOthers();
-    sound &= problems.count() == before && !table.table().damaged();
-    return new StageEntry(ref, kind.name(), inOrderOfFile());
-  }
-
-  /** Checks the keys against each other once the other stages are known. */
-  void checkTogether(Chassis chassis, StageEntry entry) {
-    if (sound) {
-      ChassisChecks.contradictions(chassis, entry, devices)
-          .forEach(c -> table.complain(c.key(), c.found(), c.expected()));
+    if (problems.count() > before || table.table().damaged()) {
+      read.unsound();
     }
+    return new StageEntry(ref, kind.name(), inOrderOfFile(settings));
   }
 
-  private Map<String, Setting> inOrderOfFile() {
+  private Map<String, Setting> inOrderOfFile(Map<String, Setting> settings) {
     Map<String, Setting> ordered = new LinkedHashMap<>();
     for (TomlEntry entry : table.table().entries()) {
       Setting setting = settings.get(entry.key());
@@ -73,9 +69,6 @@ final class StageReader {
   }
 
   private Optional<Setting> setting(KeySpec spec) {
-    if (table.has(spec.key()) && table.unreadable(spec.key())) {
-      sound = false;
-    }
     switch (spec.form()) {
       case QUANTITY:
         OptionalDouble value = table.quantity(spec.key(), range(spec));
@@ -84,12 +77,11 @@ final class StageReader {
             : Optional.of(new Setting.Number(table.written(spec.key()), value.getAsDouble()));
       case FLAG:
         return table.flag(spec.key()).map(Setting.Flag::new);
-      case WORD:
-        return word(spec).map(Setting.Word::new);
       case DEVICE:
-        return table.text(spec.key()).flatMap(name -> device(spec.key(), name));
+        readDevice(spec.key());
+        return word(spec);
       default:
-        return table.text(spec.key()).map(Setting.Word::new);
+        return word(spec);
     }
   }
 
@@ -105,32 +97,25 @@ final class StageReader {
         spec.unit(), Math.max(spec.lowest(), -LARGEST), Math.min(spec.highest(), LARGEST));
   }
 
-  private Optional<String> word(KeySpec spec) {
+  private Optional<Setting> word(KeySpec spec) {
     Optional<String> word =
         spec.choices().isEmpty() ? table.text(spec.key()) : table.word(spec.key(), spec.choices());
     if (word.isPresent() && word.get().isBlank()) {
       table.complain(spec.key(), "an empty text", spec.meaning());
       return Optional.empty();
     }
-    return word;
+    return word.map(Setting.Word::new);
   }
 
-  private Optional<Setting> device(String key, String name) {
+  /** A device file with faults is told here; that there is none is told with the other names. */
+  private void readDevice(String key) {
+    String name = table.text(key).orElse("");
     try {
-      Optional<Device> device = library.load(name);
-      if (device.isPresent()) {
-        devices.put(key, device.get());
-        return Optional.of(new Setting.Word(name));
-      }
-      table.complain(
-          key,
-          "\"" + name + "\"",
-          "a device of the library",
-          NearMiss.suggest(name, library.names()));
+      library.load(name);
     } catch (BadInputException e) {
       table.complain(key, "\"" + name + "\", whose device file has faults", "a sound device file");
       problems.addAll(e.problems());
+      read.told(key);
     }
-    return Optional.empty();
   }
 }

@@ -5,14 +5,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
-import perveance.engine.base.NearMiss;
-import perveance.engine.stage.Chassis;
-import perveance.engine.stage.ChassisComplaint;
-import perveance.engine.stage.ChassisNames;
-import perveance.engine.stage.Conditions;
-import perveance.engine.stage.KeySpec;
-import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.StageKind;
 import perveance.engine.stage.StageKinds;
@@ -20,110 +12,60 @@ import perveance.files.device.DeviceFiles;
 import perveance.files.toml.Problems;
 import perveance.files.toml.StrictTable;
 
-/** Reads all stages and checks what they say of each other and of the supplies. */
+/** Reads all stages, each by itself. */
 final class StagesReader {
   private final DeviceFiles library;
   private final Problems problems;
-  private final boolean incomplete;
-  private final Map<String, StrictTable> tables = new LinkedHashMap<>();
+  private final List<ReadTable> tables = new ArrayList<>();
   private final List<StageEntry> stages = new ArrayList<>();
-  private final List<StageReader> readers = new ArrayList<>();
+  private final Map<String, Integer> lineOfRef = new LinkedHashMap<>();
 
-  /**
-   * Starts to read.
-   *
-   * @param library the devices that may be named
-   * @param problems receives the complaints
-   * @param incomplete whether a header could not be read, so that a node or a stage may only seem
-   *     to be missing
-   */
-  StagesReader(DeviceFiles library, Problems problems, boolean incomplete) {
+  StagesReader(DeviceFiles library, Problems problems) {
     this.library = library;
     this.problems = problems;
-    this.incomplete = incomplete;
   }
 
-  List<StageEntry> read(List<StrictTable> all, Set<String> supplies) {
-    all.forEach(this::readOne);
-    Chassis chassis = new Chassis("", Conditions.USUAL, List.of(), stages);
-    for (int i = 0; i < stages.size(); i++) {
-      readers.get(i).checkTogether(chassis, stages.get(i));
-    }
-    SignalOrder order = new SignalOrder(tables);
-    for (StageEntry stage : stages) {
-      for (KeySpec spec : kind(stage).keys()) {
-        checkReference(stage, spec, supplies, order);
-      }
-    }
-    order.refuseRings();
-    return stages;
-  }
-
-  /** Takes a complaint about the chassis as a whole to the stage that it names. */
-  void complain(ChassisComplaint complaint) {
-    StrictTable table = tables.get(complaint.name());
-    if (table != null) {
-      table.complain(
-          complaint.key(), complaint.found(), complaint.expected(), complaint.suggestion());
-    }
-  }
-
-  private void readOne(StrictTable unnamed) {
+  void read(StrictTable unnamed) {
     String ref = unnamed.requiredText("ref", "V1a");
-    StrictTable table = unnamed.named(ref.isBlank() ? "stage" : "stage " + ref);
-    checkRef(ref, table);
-    List<String> names = StageKinds.all().stream().map(StageKind::name).toList();
-    table.require("kind", "one of " + String.join(", ", names));
-    Optional<StageKind> kind = table.word("kind", names).flatMap(StageKinds::find);
-    // the keys of a stage of unknown kind cannot be judged
-    if (kind.isPresent()) {
-      StageReader reader = new StageReader(kind.get(), table, library, problems);
-      readers.add(reader);
-      stages.add(reader.read(ref));
+    ReadTable read = new ReadTable(unnamed.named(ref.isBlank() ? "stage" : "stage " + ref));
+    checkRef(ref, read);
+    StrictTable table = read.table();
+    table.require("kind", "the kind of stage, such as \"" + StageKinds.all().get(0).name() + "\"");
+    String name = table.text("kind").orElse("");
+    if (name.isEmpty()) {
+      read.told("kind");
     }
+    Optional<StageKind> kind = StageKinds.find(name);
+    tables.add(read);
+    // the keys of a stage of unknown kind cannot be judged; its kind is told with the other names
+    stages.add(
+        kind.isPresent()
+            ? new StageReader(kind.get(), read, library, problems).read(ref)
+            : new StageEntry(ref, name, Map.of()));
   }
 
-  private void checkRef(String ref, StrictTable table) {
+  private void checkRef(String ref, ReadTable read) {
     if (ref.isBlank()) {
+      read.told("ref");
       return;
     }
-    if (!ChassisNames.wellFormed(ref)) {
-      table.complain("ref", "\"" + ref + "\"", ChassisNames.FORM);
-    }
-    StrictTable earlier = tables.putIfAbsent(ref, table);
+    int line = read.table().lineOf("ref");
+    Integer earlier = lineOfRef.putIfAbsent(ref, line);
     if (earlier != null) {
-      table.complain(
-          "ref",
-          "\"" + ref + "\" a second time",
-          "a name of its own; the stage in line " + earlier.line() + " has it already");
+      read.table()
+          .complain(
+              "ref",
+              "\"" + ref + "\" a second time",
+              "a name of its own; it stands in line " + earlier + " already");
+      read.told("ref");
     }
   }
 
-  private static StageKind kind(StageEntry stage) {
-    return StageKinds.find(stage.kind()).orElseThrow();
+  List<ReadTable> tables() {
+    return tables;
   }
 
-  private void checkReference(
-      StageEntry stage, KeySpec spec, Set<String> supplies, SignalOrder order) {
-    Setting setting = stage.settings().get(spec.key());
-    StrictTable table = tables.get(stage.ref());
-    if (setting == null || table == null) {
-      return;
-    }
-    String name = setting.text();
-    if (spec.form() == KeySpec.Form.SUPPLY) {
-      requireOne(table, spec.key(), name, supplies, "a supply node of this file");
-    } else if (spec.form() == KeySpec.Form.STAGE) {
-      requireOne(table, spec.key(), name, tables.keySet(), "the ref of a stage of this file");
-      order.add(stage.ref(), spec.key(), name);
-    }
-  }
-
-  private void requireOne(
-      StrictTable table, String key, String name, Set<String> known, String expected) {
-    if (!known.contains(name) && !incomplete) {
-      String which = known.isEmpty() ? "; there is none" : ": " + String.join(", ", known);
-      table.complain(key, "\"" + name + "\"", expected + which, NearMiss.suggest(name, known));
-    }
+  List<StageEntry> stages() {
+    return stages;
   }
 }

@@ -14,8 +14,8 @@ final class SupplyReader {
   /** The keys in their usual order. */
   static final List<String> ORDER = List.of("voltage", "from", "dropper", "reservoir", "bleeder");
 
-  static final Range VOLTAGE = Range.within(Unit.VOLT, 10_000);
-  static final Range RESISTANCE = new Range(Unit.OHM, 0.01, 1e9);
+  static final Range VOLTAGE = Range.within(Unit.VOLT, 5000);
+  static final Range RESISTANCE = new Range(Unit.OHM, 0.01, 100e6);
   static final Range CAPACITANCE = new Range(Unit.FARAD, 1e-12, 1);
 
   private SupplyReader() {}
@@ -47,22 +47,14 @@ final class SupplyReader {
       return Optional.empty();
     }
     if (stated) {
-      return stated(table, voltage);
+      return voltage.isPresent()
+          ? Optional.of(new SupplyFeed.Stated(voltage.getAsDouble()))
+          : Optional.empty();
     }
     table.require("from", "the supply node that feeds this one");
     table.require("dropper", "the resistor from the node that feeds this one");
     return from.isPresent() && dropper.isPresent()
         ? Optional.of(new SupplyFeed.Dropped(from.get(), dropper.getAsDouble()))
-        : Optional.empty();
-  }
-
-  private static Optional<SupplyFeed> stated(StrictTable table, OptionalDouble voltage) {
-    if (voltage.isPresent() && voltage.getAsDouble() == 0) {
-      table.complain("voltage", "0 V", "a voltage above or below 0");
-      return Optional.empty();
-    }
-    return voltage.isPresent()
-        ? Optional.of(new SupplyFeed.Stated(voltage.getAsDouble()))
         : Optional.empty();
   }
 }

@@ -12,7 +12,10 @@ import java.util.Optional;
 record Complaints(String place, SourceText source, Problems problems) {
   /** How messages name a key of the table. */
   String within(String key) {
-    String shown = key.isEmpty() ? key : Cursor.shorten(key);
+    if (key.isEmpty()) {
+      return place;
+    }
+    String shown = Cursor.shorten(key);
     return place.isEmpty() ? shown : place.concat(" ").concat(shown);
   }
 

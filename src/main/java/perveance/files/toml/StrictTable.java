@@ -44,20 +44,12 @@ public final class StrictTable {
     return renamed;
   }
 
-  /**
-   * The table that is read.
-   *
-   * @return the table
-   */
+  /** The table that is read. */
   public TomlTable table() {
     return table;
   }
 
-  /**
-   * The line on which the table is opened.
-   *
-   * @return line, counted from 1
-   */
+  /** The line on which the table is opened, counted from 1. */
   public int line() {
     return table.span().line();
   }
@@ -81,6 +73,11 @@ public final class StrictTable {
    */
   public boolean has(String key) {
     return table.find(key).isPresent();
+  }
+
+  /** Accepts a key without reading it yet. */
+  public void allow(String key) {
+    known.add(key);
   }
 
   /**

@@ -97,28 +97,32 @@ class ChassisReaderTest {
             + " resistance from 0R01 to 100M",
         "anode_load = \"100k\" | anode_load = [1] | 30: stage V1a anode_load: found [1], expected a"
             + " resistance from 0R01 to 100M",
-        "\"12AX7\" | \"12AX8\" | 28: stage V1a device: found \"12AX8\", expected a device of the"
-            + " library; did you mean \"12AX7\"?",
+        "\"12AX7\" | \"12AX8\" | 28: stage V1a device: found \"12AX8\", which no device file names,"
+            + " expected a known valve; did you mean \"12AX7\"?",
         "kind = \"common-cathode\" | kind = \"comon-cathode\" | 27: stage V1a kind: found"
             + " \"comon-cathode\", expected one of",
-        "supply = \"B\" | supply = \"b\" | 29: stage V1a supply: found \"b\", expected a supply"
-            + " node of this file: A, B; did you mean \"B\"?",
-        "drives = \"V2\" | drives = \"V3\" | 50: stage V1b drives: found \"V3\", expected the ref"
-            + " of a stage of this file: V1a, V1b, V2; did you mean",
-        "drives = \"V2\" | drives = \"V1a\" | 36: stage V1a drives: found \"V1b\", which leads back"
-            + " to this stage, expected a stage further down",
-        "drives = \"V2\" | drives = \"V1b\" | 50: stage V1b drives: found \"V1b\", which V1a drives"
-            + " already, expected a stage of its own",
+        "supply = \"B\" | supply = \"b\" | 29: stage V1a supply: found \"b\", which is no supply,"
+            + " expected one of A, B; did you mean \"B\"?",
+        "drives = \"V2\" | drives = \"V3\" | 50: stage V1b drives: found \"V3\", which is no other"
+            + " stage, expected the ref of another stage; did you mean",
+        "drives = \"V2\" | drives = \"V1a\" | 36: stage V1a drives: found stages that drive each"
+            + " other in a circle",
+        "drives = \"V2\" | drives = \"V1b\" | 50: stage V1b drives: found itself, expected the ref"
+            + " of another stage",
+        "drives = \"V1b\" | drives = \"V2\" | 50: stage V1b drives: found V2, which V1a drives"
+            + " already",
         "ref = \"V2\" | ref = \"V1a\" | 55: stage V1a ref: found \"V1a\" a second time, expected a"
-            + " name of its own; the stage in line 25 has it already",
-        "from = \"A\" | from = \"B\" | 17: supply B from: found \"B\", which is fed from this node,"
-            + " expected a node above",
-        "from = \"A\" | from = \"C\" | 17: supply B from: found \"C\", expected another supply"
-            + " node: A, B",
+            + " name of its own; it stands in line 26 already",
+        "ref = \"V2\" | ref = \"V 2\" | 55: stage V 2 ref: found \"V 2\", expected letters, digits",
+        "ref = \"V2\" | ref = \"\" | 55: stage ref: found an empty text, expected text",
+        "from = \"A\" | from = \"B\" | 17: supply B from: found \"B\", which is no other supply",
+        "from = \"A\" | from = \"C\" | 17: supply B from: found \"C\", which is no other supply",
         "from = \"A\" | voltage = 1 | 17: supply B voltage: found a voltage as well as from and"
             + " dropper, expected one or the other",
-        "voltage = \"300 V\" | voltage = 0 | 13: supply A voltage: found 0 V, expected a voltage"
-            + " above or below 0",
+        "voltage = \"300 V\" | voltage = 0 | 13: supply A voltage: found 0 V, expected a voltage up"
+            + " to 5 kV, not zero",
+        "[supply.A] | [supply.\"A B\"] | 12: supply A B: found a supply named \"A B\", expected"
+            + " letters, digits",
         "meter = \"10M\" | meter = \"10\" | 8: conditions meter: found \"10\", expected a"
             + " resistance from 1k to 1000M",
         "perveance = 1 | perveance = 2 | 2: perveance: found 2, expected a whole number from 1 to"
@@ -148,6 +152,25 @@ class ChassisReaderTest {
     List<String> told = problems(text);
     List<String> lines = told.stream().map(t -> t.split(":")[1]).toList();
     assertEquals(List.of("6", "19", "31", "43", "62"), lines, String.join("\n", told));
+  }
+
+  @Test
+  void nothingIsToldThatOnlyFollowsFromSomethingElse() {
+    // a load that cannot be read is not also missing, a refused node and stage are still there
+    for (String wrong :
+        List.of(
+            SOUND.replaceFirst("anode_load = \"100k\"", "anode_load = \"100 V\""),
+            SOUND.replaceFirst("anode_load = \"100k\"", "anode_load = 100k"),
+            SOUND.replaceFirst("anode_load = \"100k\"", "anode_load \"100k\""),
+            SOUND.replaceFirst("dropper = \"10k\"", "dropper = \"10 V\""),
+            SOUND.replaceFirst("kind = \"common-cathode\"", "kind = \"uncommon\""),
+            SOUND.replaceFirst("device = \"12AX7\"", "device = \"12AX8\""),
+            SOUND.replace("[supply.B]", "[supply.B"),
+            SOUND.replace("# output\n[[stage]]", "[[stage"))) {
+      List<String> told = problems(wrong);
+      // without a header the keys below it belong nowhere and say nothing
+      assertEquals(1, told.size(), String.join("\n", told));
+    }
   }
 
   @Test

@@ -76,9 +76,9 @@ class ChassisWriterTest {
   void aDuplicatedStageStandsBelowItsModel() throws BadInputException {
     Chassis chassis = Samples.read(TEXT);
     List<StageEntry> stages = new ArrayList<>(chassis.stages());
-    stages.add(new StageEntry("V2 copy", "common-cathode", stages.get(2).settings()));
+    stages.add(new StageEntry("V2-copy", "common-cathode", stages.get(2).settings()));
     String saved = saved(TEXT, withStages(chassis, stages));
-    assertTrue(saved.startsWith(TEXT + "\n[[stage]]\nref = \"V2 copy\"\n"), saved);
+    assertTrue(saved.startsWith(TEXT + "\n[[stage]]\nref = \"V2-copy\"\n"), saved);
   }
 
   @Test
@@ -115,10 +115,11 @@ class ChassisWriterTest {
             "voltage = \"250 V\"\n"),
         saved(TEXT, withSupplies(chassis, List.of(a, stated))));
     Supply c =
-        new Supply("C 1", new SupplyFeed.Dropped("B", 1e3), OptionalDouble.empty(), a.bleeder());
+        new Supply(
+            "\u00DC1", new SupplyFeed.Dropped("B", 1e3), OptionalDouble.empty(), a.bleeder());
     assertEquals(
         TEXT.replace(
-            "# stays in\n", "# stays in\n\n[supply.\"C 1\"]\nfrom = \"B\"\ndropper = \"1k\"\n"),
+            "# stays in\n", "# stays in\n\n[supply.\"\u00DC1\"]\nfrom = \"B\"\ndropper = \"1k\"\n"),
         saved(TEXT, withSupplies(chassis, List.of(a, b, c))));
     List<StageEntry> onX = new ArrayList<>();
     for (StageEntry stage : chassis.stages()) {

@@ -14,9 +14,12 @@ final class SupplyReader {
   /** The keys in their usual order. */
   static final List<String> ORDER = List.of("voltage", "from", "dropper", "reservoir", "bleeder");
 
-  static final Range VOLTAGE = Range.within(Unit.VOLT, 5000);
-  static final Range RESISTANCE = new Range(Unit.OHM, 0.01, 100e6);
-  static final Range CAPACITANCE = new Range(Unit.FARAD, 1e-12, 1);
+  /** Finite is all that is asked here; what is possible the engine's checks say. */
+  private static final double FINITE = 1e15;
+
+  private static final Range VOLTAGE = Range.within(Unit.VOLT, FINITE);
+  private static final Range RESISTANCE = Range.within(Unit.OHM, FINITE);
+  private static final Range CAPACITANCE = Range.within(Unit.FARAD, FINITE);
 
   private SupplyReader() {}
 

@@ -113,16 +113,15 @@ class ChassisReaderTest {
             + " already",
         "ref = \"V2\" | ref = \"V1a\" | 55: stage V1a ref: found \"V1a\" a second time, expected a"
             + " name of its own; it stands in line 26 already",
-        "ref = \"V2\" | ref = \"V 2\" | 55: stage V 2 ref: found \"V 2\", expected letters, digits",
+        "ref = \"V2\" | ref = \"V.2\" | 55: stage V.2 ref: found \"V.2\", expected",
         "ref = \"V2\" | ref = \"\" | 55: stage ref: found an empty text, expected text",
         "from = \"A\" | from = \"B\" | 17: supply B from: found \"B\", which is no other supply",
         "from = \"A\" | from = \"C\" | 17: supply B from: found \"C\", which is no other supply",
         "from = \"A\" | voltage = 1 | 17: supply B voltage: found a voltage as well as from and"
             + " dropper, expected one or the other",
         "voltage = \"300 V\" | voltage = 0 | 13: supply A voltage: found 0 V, expected a voltage up"
-            + " to 5 kV, not zero",
-        "[supply.A] | [supply.\"A B\"] | 12: supply A B: found a supply named \"A B\", expected"
-            + " letters, digits",
+            + " to 10 kV, not zero",
+        "[supply.A] | [supply.\"A.B\"] | 12: supply A.B: found a supply named \"A.B\", expected",
         "meter = \"10M\" | meter = \"10\" | 8: conditions meter: found \"10\", expected a"
             + " resistance from 1k to 1000M",
         "perveance = 1 | perveance = 2 | 2: perveance: found 2, expected a whole number from 1 to"

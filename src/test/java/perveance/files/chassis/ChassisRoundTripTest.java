@@ -185,7 +185,7 @@ class ChassisRoundTripTest {
     } else {
       int at = random.nextInt(supplies.size());
       Supply old = supplies.get(at);
-      String name = random.nextBoolean() ? old.name() : "S" + names++;
+      String name = random.nextBoolean() ? old.name() : "S " + names++;
       supplies.set(at, node(name));
       supplies.replaceAll(s -> refed(s, old.name(), name));
       stages.replaceAll(

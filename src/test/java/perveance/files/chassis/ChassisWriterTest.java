@@ -115,11 +115,10 @@ class ChassisWriterTest {
             "voltage = \"250 V\"\n"),
         saved(TEXT, withSupplies(chassis, List.of(a, stated))));
     Supply c =
-        new Supply(
-            "\u00DC1", new SupplyFeed.Dropped("B", 1e3), OptionalDouble.empty(), a.bleeder());
+        new Supply("C 1", new SupplyFeed.Dropped("B", 1e3), OptionalDouble.empty(), a.bleeder());
     assertEquals(
         TEXT.replace(
-            "# stays in\n", "# stays in\n\n[supply.\"\u00DC1\"]\nfrom = \"B\"\ndropper = \"1k\"\n"),
+            "# stays in\n", "# stays in\n\n[supply.\"C 1\"]\nfrom = \"B\"\ndropper = \"1k\"\n"),
         saved(TEXT, withSupplies(chassis, List.of(a, b, c))));
     List<StageEntry> onX = new ArrayList<>();
     for (StageEntry stage : chassis.stages()) {

@@ -17,6 +17,8 @@ import picocli.CommandLine.Spec;
       CheckCommand.class,
       SheetCommand.class,
       CurvesCommand.class,
+      FitCommand.class,
+      DesktopCommand.class,
       ExampleCommand.class,
       CompletionCommand.class
     },

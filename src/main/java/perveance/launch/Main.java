@@ -1,15 +1,17 @@
 package perveance.launch;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import perveance.cli.CommandLines;
+import perveance.desktop.DesktopApplication;
 
 /** Starts Perveance. */
 public final class Main {
   private Main() {}
 
   private static void desktop(Optional<Path> file) {
-    throw new UnsupportedOperationException("the desktop is not part of this build");
+    DesktopApplication.open(file.map(f -> List.of(f.toString())).orElse(List.of()));
   }
 
   /**

@@ -18,7 +18,7 @@ public final class CurvePictures {
    * @return SVG file
    */
   public static byte[] svg(CurveFamily family, OptionalDouble dissipation) {
-    return Pictures.svg(artwork(family, dissipation), Look.LIGHT, WIDTH, HEIGHT);
+    return of(CharacteristicsPlot.of(family, dissipation), true);
   }
 
   /**
@@ -29,12 +29,20 @@ public final class CurvePictures {
    * @return PNG file
    */
   public static byte[] png(CurveFamily family, OptionalDouble dissipation) {
-    return Pictures.png(artwork(family, dissipation), Look.LIGHT, WIDTH, HEIGHT, 2);
+    return of(CharacteristicsPlot.of(family, dissipation), false);
   }
 
-  private static Artwork artwork(CurveFamily family, OptionalDouble dissipation) {
-    return Artwork.of(
-        new ChartFactory(Look.LIGHT, new PlotFonts(), 12)
-            .chart(CharacteristicsPlot.of(family, dissipation)));
+  /**
+   * A picture of any description.
+   *
+   * @param plot what to draw
+   * @param vector true for SVG, false for PNG
+   * @return the file
+   */
+  public static byte[] of(PlotDescription plot, boolean vector) {
+    Artwork artwork = Artwork.of(new ChartFactory(Look.LIGHT, new PlotFonts(), 12).chart(plot));
+    return vector
+        ? Pictures.svg(artwork, Look.LIGHT, WIDTH, HEIGHT)
+        : Pictures.png(artwork, Look.LIGHT, WIDTH, HEIGHT, 2);
   }
 }

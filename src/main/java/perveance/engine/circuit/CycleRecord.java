@@ -1,5 +1,7 @@
 package perveance.engine.circuit;
 
+import perveance.engine.circuit.Element.Transformer;
+
 /**
  * Waveforms of all voltages and currents over one period, and their mean powers; filled sample by
  * sample from the ledger of currents.
@@ -14,6 +16,9 @@ final class CycleRecord {
 
   /** Currents by element and sample [A]. */
   final double[][] current;
+
+  /** Winding currents by element, winding and sample; empty for others [A]. */
+  final double[][][] winding;
 
   /** Electrode currents by valve, electrode and sample [A]. */
   final double[][][] electrode;
@@ -34,6 +39,11 @@ final class CycleRecord {
     this.count = count;
     this.voltage = new double[topology.nodeCount][count];
     this.current = new double[elements][count];
+    this.winding = new double[elements][][];
+    for (int i = 0; i < elements; i++) {
+      Element element = topology.circuit.elements().get(i);
+      winding[i] = new double[element instanceof Transformer e ? e.windings().size() : 0][count];
+    }
     this.electrode = new double[valves.count][ELECTRODES][count];
     this.power = new double[elements];
     this.electrodePower = new double[valves.count][ELECTRODES];
@@ -52,6 +62,10 @@ final class CycleRecord {
       current[i][k] = ledger.current[i];
       current[i][mirror] = ledger.current[i];
       power[i] += weight * ledger.power[i];
+      for (int w = 0; w < winding[i].length; w++) {
+        winding[i][w][k] = ledger.winding[i][w];
+        winding[i][w][mirror] = ledger.winding[i][w];
+      }
     }
     for (int v = 0; v < electrode.length; v++) {
       double cathode = nodes[valves.cathode(v)];

@@ -60,6 +60,17 @@ public sealed class PeriodicState permits MidbandSolution {
   }
 
   /**
+   * Current of one winding over the period.
+   *
+   * @param element element index of the transformer
+   * @param winding place of the winding in its transformer
+   * @return one value a sample, from start to end [A]
+   */
+  public double[] windingCurrent(int element, int winding) {
+    return cycle.winding[element][winding].clone();
+  }
+
+  /**
    * Current into one electrode of a valve over the period.
    *
    * @param element element index of the valve

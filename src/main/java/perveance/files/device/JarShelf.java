@@ -16,26 +16,39 @@ import perveance.engine.base.BadInputException;
 import perveance.files.toml.SourceText;
 
 /**
- * A folder of device files within the program's own jar. The jar is opened anew each time, which
- * costs little because the class loader holds it open too.
- *
- * @param jar the jar
- * @param root the folder in it, with a slash at its end
- * @param shown how messages name the folder
+ * A folder of device files within the program's own jar. The jar stays open as long as the program
+ * runs, as it does for the class loader; opening it for each file costs more than reading the file.
  */
-record JarShelf(Path jar, String root, String shown) implements Shelf {
+final class JarShelf implements Shelf {
+  private final ZipFile jar;
+  private final String root;
+  private final String shown;
+
+  /**
+   * Opens the jar.
+   *
+   * @param jar the jar
+   * @param root the folder in it, with a slash at its end
+   * @param shown how messages name the folder
+   */
+  JarShelf(Path jar, String root, String shown) {
+    try {
+      this.jar = new ZipFile(jar.toFile());
+    } catch (IOException e) {
+      throw unreadable(e);
+    }
+    this.root = root;
+    this.shown = shown;
+  }
+
   @Override
   public List<String> files() {
     List<String> names = new ArrayList<>();
-    try (ZipFile zip = new ZipFile(jar.toFile())) {
-      for (Enumeration<? extends ZipEntry> all = zip.entries(); all.hasMoreElements(); ) {
-        String name = all.nextElement().getName();
-        if (name.startsWith(root) && name.endsWith(SUFFIX)) {
-          names.add(name.substring(root.length()));
-        }
+    for (Enumeration<? extends ZipEntry> all = jar.entries(); all.hasMoreElements(); ) {
+      String name = all.nextElement().getName();
+      if (name.startsWith(root) && name.endsWith(SUFFIX)) {
+        names.add(name.substring(root.length()));
       }
-    } catch (IOException e) {
-      throw unreadable(e);
     }
     Collections.sort(names);
     return names;
@@ -43,30 +56,24 @@ record JarShelf(Path jar, String root, String shown) implements Shelf {
 
   @Override
   public Optional<SourceText> read(String file) throws BadInputException {
-    try (ZipFile zip = new ZipFile(jar.toFile())) {
-      ZipEntry entry = zip.getEntry(root + file);
-      return entry == null
-          ? Optional.empty()
-          : Optional.of(SourceText.decode(shown(file), bytes(zip, entry, Integer.MAX_VALUE)));
-    } catch (IOException e) {
-      throw unreadable(e);
-    }
+    ZipEntry entry = jar.getEntry(root + file);
+    return entry == null
+        ? Optional.empty()
+        : Optional.of(SourceText.decode(shown(file), bytes(entry, SourceText.MOST_BYTES + 1)));
   }
 
   @Override
   public SourceText readHead(String file, int bytes) {
-    try (ZipFile zip = new ZipFile(jar.toFile())) {
-      ZipEntry entry = zip.getEntry(root + file);
-      byte[] head = entry == null ? new byte[0] : bytes(zip, entry, bytes);
-      return SourceText.of(shown(file), new String(head, StandardCharsets.UTF_8));
-    } catch (IOException e) {
-      throw unreadable(e);
-    }
+    ZipEntry entry = jar.getEntry(root + file);
+    byte[] head = entry == null ? new byte[0] : bytes(entry, bytes);
+    return SourceText.of(shown(file), new String(head, StandardCharsets.UTF_8));
   }
 
-  private static byte[] bytes(ZipFile zip, ZipEntry entry, int most) throws IOException {
-    try (InputStream in = zip.getInputStream(entry)) {
-      return in.readNBytes(Math.min(most, SourceText.MOST_BYTES + 1));
+  private byte[] bytes(ZipEntry entry, int most) {
+    try (InputStream in = jar.getInputStream(entry)) {
+      return in.readNBytes(most);
+    } catch (IOException e) {
+      throw unreadable(e);
     }
   }
 

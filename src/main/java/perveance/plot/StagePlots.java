@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
@@ -91,8 +90,14 @@ public final class StagePlots {
 
   private static CurveFamily family(
       StageAnswer answer, LoadLineView view, StageCircuit.StageDevice section) {
-    double volts = Math.max(highest(view, true), view.anode() * 1.3);
-    double amperes = Math.max(highest(view, false), view.current() * 1.8);
+    double swing = Math.max(highest(List.of(view.ac(), view.excursion()), false), view.current());
+    double steady = highest(List.of(view.dc()), false);
+    // a winding's dc line is all but upright: its far end would flatten everything else
+    double amperes =
+        Math.max(view.current() * 1.8, steady > 4 * swing ? swing : Math.max(swing, steady));
+    double volts =
+        Math.max(
+            highest(List.of(view.dc(), view.ac(), view.excursion()), true), view.anode() * 1.3);
     return CurveFamily.of(
         section.device(), screen(answer, section), roundUp(volts * 1.05), roundUp(amperes * 1.08));
   }
@@ -124,8 +129,8 @@ public final class StagePlots {
     return answer.circuit().devices().stream().filter(d -> d.ref().equals(ref)).findFirst();
   }
 
-  private static double highest(LoadLineView view, boolean voltage) {
-    return Stream.of(view.dc(), view.ac(), view.excursion())
+  private static double highest(List<List<LoadLineView.Point>> lines, boolean voltage) {
+    return lines.stream()
         .flatMap(List::stream)
         .mapToDouble(p -> voltage ? p.voltage() : p.current())
         .max()

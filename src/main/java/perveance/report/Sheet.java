@@ -14,7 +14,7 @@ final class Sheet implements AutoCloseable {
   private static final double LEFT = PaperSize.mm(20);
   private static final double RIGHT = PaperSize.mm(12);
   private static final double TOP = PaperSize.mm(12);
-  private static final double BOTTOM = PaperSize.mm(17);
+  private static final double BOTTOM = PaperSize.mm(19);
 
   private final PDDocument document;
   private final PaperSize paper;
@@ -103,7 +103,7 @@ final class Sheet implements AutoCloseable {
     ink.line(LEFT, base, right, base, 0.5, Ink.RULE);
     ink.textRight(
         right, base + 10, faces.regular(), 8, Ink.BLACK, "page " + page + " of " + pages.size());
-    double room = width() - 60;
+    double room = width() - 165;
     double at = base + 9;
     for (String line : foot) {
       for (String wrapped : TextBlock.wrap(faces.regular(), line, 7, room)) {
@@ -115,7 +115,7 @@ final class Sheet implements AutoCloseable {
   }
 
   private static String shorten(String title) {
-    return title.length() <= 40 ? title : title.substring(0, 39) + "\u2026";
+    return title.length() <= 44 ? title : title.substring(0, 43) + "\u2026";
   }
 
   @Override

@@ -1,13 +1,14 @@
 package perveance.report;
 
+import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import perveance.app.wording.FigureRow;
 import perveance.app.wording.LimitRows;
 import perveance.app.wording.StageFigures;
 import perveance.engine.analysis.ChassisAnswer;
-import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.base.Finding;
 import perveance.plot.Artwork;
@@ -15,6 +16,7 @@ import perveance.plot.ChartFactory;
 import perveance.plot.Look;
 import perveance.plot.PlotFonts;
 import perveance.plot.SchematicPainter;
+import perveance.plot.SchematicText;
 import perveance.plot.SchematicWords;
 import perveance.plot.StagePlots;
 
@@ -26,12 +28,23 @@ final class StageStrip {
   private final SheetOptions options;
   private final ChassisAnswer chassis;
   private final StageAnswer stage;
+  private final Rectangle2D extent;
+  private final Artwork schematic;
+  private final Optional<Artwork> plot;
 
   StageStrip(Typeface faces, SheetOptions options, ChassisAnswer chassis, StageAnswer stage) {
     this.faces = faces;
     this.options = options;
     this.chassis = chassis;
     this.stage = stage;
+    PlotFonts fonts = new PlotFonts();
+    SchematicPainter painter = new SchematicPainter(Look.PAPER, fonts);
+    SchematicText text = new SchematicWords(chassis, stage, true).text(Set.of(), options.zigzag());
+    this.extent = painter.extent(stage.drawing(), text);
+    this.schematic = Artwork.of(painter, stage.drawing(), text, 8.6);
+    this.plot =
+        StagePlots.characteristics(stage)
+            .map(p -> Artwork.of(new ChartFactory(Look.PAPER, fonts, 8).chart(p)));
   }
 
   Block heading() {
@@ -39,21 +52,21 @@ final class StageStrip {
         faces, stage.ref(), say(stage.kind().replace('-', ' ')), 12, Ink.BLACK, false, 4);
   }
 
-  /** Schematic and characteristics. */
+  /** Schematic with the characteristics beside it; a wide schematic stands alone. */
   Block pictures() {
-    PlotFonts fonts = new PlotFonts();
-    Artwork schematic =
-        Artwork.of(
-            new SchematicPainter(Look.PAPER, fonts),
-            stage.drawing(),
-            new SchematicWords(chassis, stage, true).text(Set.of(), options.zigzag()),
-            8.6);
+    if (wide()) {
+      double tall = Math.min(250, 500 * extent.getHeight() / extent.getWidth() + 8);
+      return new PicturePair(List.of(schematic), new double[] {1}, tall);
+    }
     List<Artwork> pictures = new ArrayList<>(List.of(schematic));
-    StagePlots.characteristics(stage)
-        .ifPresent(
-            plot -> pictures.add(Artwork.of(new ChartFactory(Look.PAPER, fonts, 8).chart(plot))));
+    plot.ifPresent(pictures::add);
     double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.58, 0.42};
     return new PicturePair(pictures, shares, 206);
+  }
+
+  /** Beside the characteristics a schematic wider than this would have text too small to read. */
+  private boolean wide() {
+    return extent.getWidth() > 48;
   }
 
   /** Groups that are kept together on a page. */
@@ -63,7 +76,7 @@ final class StageStrip {
     groups.add(readings.opening());
     readings.rows().forEach(r -> groups.add(List.of(r)));
     groups.add(readings.sums());
-    groups.add(List.of(figuresAndParts()));
+    groups.addAll(figuresAndParts());
     groups.add(limits());
     groups.addAll(findings());
     groups.add(assumptions());
@@ -74,19 +87,31 @@ final class StageStrip {
     return new ReadingRows(faces, options, chassis, stage).spare();
   }
 
-  private Block figuresAndParts() {
+  private List<List<Block>> figuresAndParts() {
     List<Block> figures = new ArrayList<>();
     figures.add(headline("What it should do"));
-    for (FigureRow row : StageFigures.signal(stage)) {
-      figures.add(figure(row));
+    StageFigures.signal(stage).forEach(row -> figures.add(figure(row)));
+    List<Block> rows = new ArrayList<>();
+    stage.parts().forEach(duty -> rows.add(PartRows.of(faces, options, duty)));
+    rows.addAll(PartRows.valves(faces, options, stage));
+    Block head = headline("Parts to buy");
+    if (!wide()) {
+      rows.add(0, head);
+      return List.of(List.of(new Columns(new double[] {0.47, 0.53}, List.of(figures, rows))));
     }
-    List<Block> parts = new ArrayList<>();
-    parts.add(headline("Parts to buy"));
-    for (PartDuty duty : stage.parts()) {
-      parts.add(PartRows.of(faces, options, duty));
-    }
-    parts.addAll(PartRows.valves(faces, options, stage));
-    return new Columns(new double[] {0.47, 0.53}, List.of(figures, parts));
+    int half = (rows.size() + 1) / 2;
+    List<List<Block>> groups = new ArrayList<>();
+    List<Block> right =
+        plot.<List<Block>>map(p -> List.of(new PicturePair(List.of(p), new double[] {1}, 190)))
+            .orElse(List.of());
+    groups.add(List.of(new Columns(new double[] {0.5, 0.5}, List.of(figures, right))));
+    groups.add(
+        List.of(
+            head,
+            new Columns(
+                new double[] {0.5, 0.5},
+                List.of(rows.subList(0, half), rows.subList(half, rows.size())))));
+    return groups;
   }
 
   private Block figure(FigureRow row) {

@@ -109,7 +109,7 @@ public final class Figures {
    * @return for example {@code 1.6 %}
    */
   public static String percent(double ratio) {
-    return FORMAT.percent(ratio, 2);
+    return ratio < 1e-4 ? "below 0.01 %" : FORMAT.percent(ratio, 2);
   }
 
   /**

@@ -143,6 +143,15 @@ public final class DcSolution {
     throw new IllegalArgumentException("no valve named " + name);
   }
 
+  /** Sum of turns times current over the windings of a transformer [A]. */
+  double ampereTurns(Element.Transformer transformer) {
+    double sum = 0;
+    for (int w = 0; w < transformer.windings().size(); w++) {
+      sum += transformer.windings().get(w).turns() * windingCurrent(transformer.name(), w);
+    }
+    return sum;
+  }
+
   /** The unknowns of the equations, not to be changed. */
   double[] unknowns() {
     return unknowns;

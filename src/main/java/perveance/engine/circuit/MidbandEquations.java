@@ -204,11 +204,7 @@ final class MidbandEquations {
     }
     for (int t : transformers) {
       Transformer e = (Transformer) element(t);
-      double sum = 0;
-      for (int w = 0; w < e.windings().size(); w++) {
-        sum += e.windings().get(w).turns() * rest.windingCurrent(e.name(), w);
-      }
-      hold[h++] = sum / e.windings().get(0).turns();
+      hold[h++] = rest.ampereTurns(e) / e.windings().get(0).turns();
     }
     return hold;
   }

@@ -9,6 +9,11 @@ import java.util.Arrays;
  * law [V]. (C.-W. Ho, A. E. Ruehli and P. A. Brennan, IEEE Trans. Circuits Syst. 22, 504, 1975.)
  */
 final class NodalSystem {
+  /** Currents too small to look at twice [A]. */
+  private static final double NEGLIGIBLE = 1e-11;
+
+  private static final double ROUNDING = 4 * Math.ulp(1.0);
+
   final Topology topology;
   final int size;
   final double[] linear;
@@ -130,7 +135,8 @@ final class NodalSystem {
 
   /**
    * Spreads x into {@link #voltage}, evaluates all devices and sums the currents that leave every
-   * unknown node; returns the largest that is left over [A].
+   * unknown node; returns the largest that is left over beyond what rounding of its terms can make
+   * [A].
    */
   double kirchhoff(double[] x, double[] out) {
     evaluate(x);
@@ -139,9 +145,24 @@ final class NodalSystem {
     junctions.addCurrents(out);
     double largest = 0;
     for (int i = 0; i < topology.unknownNodes; i++) {
-      largest = Math.max(largest, Math.abs(out[i]));
+      double left = Math.abs(out[i]);
+      if (left > NEGLIGIBLE) {
+        left -= rounding(i, x);
+      }
+      // not a comparison with largest, which a value that is no number would pass
+      if (!(left <= largest)) {
+        largest = left;
+      }
     }
     return largest;
+  }
+
+  private double rounding(int i, double[] x) {
+    double terms = 0;
+    for (int j = 0; j < size; j++) {
+      terms += Math.abs(linear[i * size + j] * x[j]);
+    }
+    return ROUNDING * terms;
   }
 
   /** out = matrix x + constant, for the first {@code size} entries. */

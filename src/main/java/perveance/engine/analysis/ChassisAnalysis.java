@@ -42,7 +42,7 @@ public final class ChassisAnalysis {
    */
   public ChassisAnswer answer(Chassis chassis, AnalysisOptions options, Progress progress) {
     progress.report(0, "operating point");
-    ChassisModel model = new ChassisModel(chassis, new ChassisCircuits(chassis, devices));
+    ChassisModel model = ChassisModel.of(chassis, new ChassisCircuits(chassis, devices));
     Optional<DcSolution> dc = model.dc();
     FaultCircuits faults = new FaultCircuits(model.whole().circuit());
     Optional<DcSolution> cold = options.details() ? faults.cold() : Optional.empty();
@@ -53,8 +53,18 @@ public final class ChassisAnalysis {
     StageAnswers answers = new StageAnswers(model, faults, cold, spread, options);
     List<StageAnswer> stages = new ArrayList<>();
     for (StageModel stage : model.models()) {
-      stages.add(answers.answer(stage));
+      StageAnswer answer = answers.answer(stage);
+      boolean judged = options.details() && !progress.cancelled();
+      stages.add(judged ? judged(answer, stage, model) : answer);
     }
+    List<Discharge> discharges = dc.map(p -> discharges(model, p, cold)).orElse(List.of());
+    HighestVoltage highest = HighestVoltage.of(model, cold);
+    List<Finding> findings = new ArrayList<>();
+    if (options.details()) {
+      findings.addAll(
+          new ChassisFindings(model).all(highest.voltage(), highest.node(), discharges));
+    }
+    stages.forEach(s -> findings.addAll(s.findings()));
     progress.report(1, "done");
     return new ChassisAnswer(
         chassis,
@@ -62,9 +72,28 @@ public final class ChassisAnalysis {
             .orElse(List.of()),
         stages,
         model.failures(),
-        dc.map(p -> discharges(model, p, cold)).orElse(List.of()),
-        highest(model, cold),
-        findings(stages));
+        discharges,
+        highest.voltage(),
+        Findings.worstFirst(findings));
+  }
+
+  private StageAnswer judged(StageAnswer answer, StageModel stage, ChassisModel model) {
+    FindingContext context =
+        new FindingContext(
+            answer,
+            stage,
+            model.circuits().values(answer.ref()),
+            model.chassis().conditions(),
+            new ChassisRetry(model, devices));
+    List<Finding> findings = new ArrayList<>();
+    findings.addAll(RatingFindings.of(context));
+    findings.addAll(BiasFindings.of(context));
+    findings.addAll(SwingFindings.of(context));
+    findings.addAll(OutputFindings.of(context));
+    findings.addAll(ResponseFindings.of(context));
+    findings.addAll(PartFindings.of(context));
+    findings.addAll(DataFindings.of(context));
+    return answer.withFindings(Findings.worstFirst(findings));
   }
 
   /**
@@ -85,22 +114,5 @@ public final class ChassisAnalysis {
       ChassisModel model, DcSolution dc, Optional<DcSolution> cold) {
     return new Discharges(model.whole().circuit(), model.chassis().conditions().threshold())
         .all(dc, cold);
-  }
-
-  /** Highest magnitude of any node to chassis, loaded or with cold valves [V]. */
-  private static double highest(ChassisModel model, Optional<DcSolution> cold) {
-    double highest = 0;
-    for (int node = 0; node < model.whole().circuit().nodes().size(); node++) {
-      int n = node;
-      highest = Math.max(highest, model.dc().map(p -> Math.abs(p.voltage(n))).orElse(0.0));
-      highest = Math.max(highest, cold.map(p -> Math.abs(p.voltage(n))).orElse(0.0));
-    }
-    return highest;
-  }
-
-  private static List<Finding> findings(List<StageAnswer> stages) {
-    List<Finding> all = new ArrayList<>();
-    stages.forEach(s -> all.addAll(s.findings()));
-    return Findings.worstFirst(all);
   }
 }

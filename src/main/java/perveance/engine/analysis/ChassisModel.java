@@ -32,8 +32,30 @@ final class ChassisModel {
   private final ChassisCircuits circuits;
   private final Built whole;
   private final Optional<DcSolution> dc;
+  private final String reason;
+  private final Map<String, Double> supplies;
+  private final Coupling coupling;
   private final Map<String, StageModel> models = new LinkedHashMap<>();
   private final List<Failure> failures = new ArrayList<>();
+
+  /** What the stages show each other through capacitors, by reference. */
+  private record Coupling(Map<String, Double> resistance, Map<String, NextInput> nexts) {
+    static final Coupling NONE = new Coupling(Map.of(), Map.of());
+  }
+
+  private ChassisModel(Chassis chassis, ChassisCircuits circuits, Coupling coupling) {
+    this.chassis = chassis;
+    this.circuits = circuits;
+    this.coupling = coupling;
+    this.whole = circuits.whole();
+    DcOutcome outcome = new DcSolver(whole.circuit()).solve();
+    this.dc =
+        outcome instanceof DcOutcome.Converged solved
+            ? Optional.of(solved.solution())
+            : Optional.empty();
+    this.reason = outcome instanceof DcOutcome.NotConverged failed ? failed.reason() : "";
+    this.supplies = supplyVoltages();
+  }
 
   /**
    * Solves a chassis.
@@ -41,23 +63,29 @@ final class ChassisModel {
    * @param chassis the chassis, without complaints
    * @param circuits its circuits
    */
-  ChassisModel(Chassis chassis, ChassisCircuits circuits) {
-    this.chassis = chassis;
-    this.circuits = circuits;
-    this.whole = circuits.whole();
-    DcOutcome outcome = new DcSolver(whole.circuit()).solve();
-    this.dc =
-        outcome instanceof DcOutcome.Converged solved
-            ? Optional.of(solved.solution())
-            : Optional.empty();
-    String reason = outcome instanceof DcOutcome.NotConverged failed ? failed.reason() : "";
-    Map<String, Double> supplies = supplyVoltages();
-    for (Group group : circuits.groups()) {
-      solve(group, supplies, OptionalDouble.empty(), Map.of(), reason);
+  static ChassisModel of(Chassis chassis, ChassisCircuits circuits) {
+    ChassisModel alone = new ChassisModel(chassis, circuits, Coupling.NONE);
+    circuits.groups().forEach(alone::solve);
+    if (circuits.groups().stream().allMatch(g -> g.drivenBy().isEmpty())) {
+      return alone;
     }
-    if (circuits.groups().stream().anyMatch(g -> g.drivenBy().isPresent())) {
-      couple(supplies, reason);
-    }
+    ChassisModel coupled = new ChassisModel(chassis, circuits, alone.found());
+    circuits.groups().forEach(coupled::solve);
+    return coupled;
+  }
+
+  /**
+   * One stage after an edit of its keys, on what the other stages show it now.
+   *
+   * @param edited the chassis as edited, without complaints
+   * @param edits its circuits
+   * @param ref the stage
+   * @return the stage; empty when it has no solution
+   */
+  Optional<StageModel> again(Chassis edited, ChassisCircuits edits, String ref) {
+    ChassisModel changed = new ChassisModel(edited, edits, coupling);
+    edits.groups().stream().filter(g -> g.refs().contains(ref)).forEach(changed::solve);
+    return Optional.ofNullable(changed.models.get(ref));
   }
 
   private Map<String, Double> supplyVoltages() {
@@ -72,7 +100,8 @@ final class ChassisModel {
     return voltages;
   }
 
-  private void couple(Map<String, Double> supplies, String reason) {
+  /** What the stages, solved alone, show each other. */
+  private Coupling found() {
     Map<String, Double> capacitance = new HashMap<>();
     Map<String, Double> resistance = new HashMap<>();
     for (StageModel model : models.values()) {
@@ -87,17 +116,7 @@ final class ChassisModel {
         circuits.values(ref).around().next().ifPresent(n -> put(nexts, n, capacitance));
       }
     }
-    models.clear();
-    failures.clear();
-    for (Group group : circuits.groups()) {
-      Double source = group.drivenBy().map(resistance::get).orElse(null);
-      solve(
-          group,
-          supplies,
-          source == null ? OptionalDouble.empty() : OptionalDouble.of(source),
-          nexts,
-          reason);
-    }
+    return new Coupling(resistance, nexts);
   }
 
   private static void put(
@@ -106,17 +125,18 @@ final class ChassisModel {
     nexts.put(next.ref(), new NextInput(next.ref(), next.leak(), next.stopper(), known));
   }
 
-  private void solve(
-      Group group,
-      Map<String, Double> supplies,
-      OptionalDouble source,
-      Map<String, NextInput> nexts,
-      String reason) {
+  private void solve(Group group) {
     if (!supplies.keySet().containsAll(group.supplies())) {
       fail(group, reason);
       return;
     }
-    Built built = circuits.build(group, supplies, source, nexts);
+    OptionalDouble source =
+        group
+            .drivenBy()
+            .flatMap(ref -> Optional.ofNullable(coupling.resistance().get(ref)))
+            .map(OptionalDouble::of)
+            .orElse(OptionalDouble.empty());
+    Built built = circuits.build(group, supplies, source, coupling.nexts());
     DcOutcome outcome = new DcSolver(built.circuit()).solve();
     if (outcome instanceof DcOutcome.NotConverged failed) {
       fail(group, failed.reason());

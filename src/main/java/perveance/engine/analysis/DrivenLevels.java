@@ -45,6 +45,11 @@ final class DrivenLevels {
         : Optional.empty();
   }
 
+  /** The figures at a peak input; empty for no drive and where there is no steady cycle. */
+  Optional<DrivenAnswer> answer(double peak) {
+    return cycle(peak).map(c -> new DrivenFigures(model, c).answer(peak));
+  }
+
   /** The ladder of levels, the stated drive among them, rising. */
   List<DrivenAnswer> ladder(double clean, OptionalDouble drive) {
     List<Double> peaks = new ArrayList<>();
@@ -55,7 +60,7 @@ final class DrivenLevels {
     peaks.sort(Comparator.naturalOrder());
     List<DrivenAnswer> levels = new ArrayList<>();
     for (double peak : peaks) {
-      cycle(peak).map(c -> new DrivenFigures(model, c).answer(peak)).ifPresent(levels::add);
+      answer(peak).ifPresent(levels::add);
     }
     return levels;
   }

@@ -11,16 +11,16 @@ final class Effect {
 
   private Effect() {}
 
-  static String of(StageAnswer before, StageAnswer after) {
+  static String of(StageAnswer before, Variant after) {
     List<String> words = new ArrayList<>();
     add(words, "clean output", before.clean().outputPeak(), after.clean().outputPeak());
-    add(words, "gain", Math.abs(before.smallSignal().gain()), Math.abs(after.smallSignal().gain()));
-    add(words, "anode current", current(before), current(after));
+    add(words, "gain", Math.abs(before.smallSignal().gain()), Math.abs(after.gain()));
+    add(words, "anode current", current(before.points()), current(after.points()));
     return words.isEmpty() ? "changes little else" : "gives " + String.join(", ", words);
   }
 
-  private static double current(StageAnswer answer) {
-    return answer.points().isEmpty() ? 0 : answer.points().get(0).anodeCurrent();
+  private static double current(List<DevicePoint> points) {
+    return points.isEmpty() ? 0 : points.get(0).anodeCurrent();
   }
 
   private static void add(List<String> words, String what, double before, double after) {
@@ -29,7 +29,8 @@ final class Effect {
     }
     double change = after / before - 1;
     if (Math.abs(change) >= SLIGHT) {
-      String percent = QuantityFormat.TYPESET.percent(Math.abs(change), change > 0.095 ? 2 : 1);
+      String percent =
+          QuantityFormat.TYPESET.percent(Math.abs(change), Math.abs(change) >= 0.095 ? 2 : 1);
       words.add(percent + (change > 0 ? " more " : " less ") + what);
     }
   }

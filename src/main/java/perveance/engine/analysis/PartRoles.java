@@ -25,6 +25,13 @@ final class PartRoles {
     return stage.parts().stream().filter(p -> p.element().equals(element)).findFirst();
   }
 
+  /** Whether a two-terminal part has an end at a node. */
+  static boolean touches(StageModel model, Part part, int node) {
+    Element element = model.circuit().elements().get(model.circuit().element(part.element()));
+    return (element instanceof Resistor r && (r.a() == node || r.b() == node))
+        || (element instanceof Capacitor c && (c.a() == node || c.b() == node));
+  }
+
   /** The capacitor through which an output is coupled, if it is a part. */
   static Optional<Capacitor> coupling(StageModel model, Output output) {
     int plus = output.plus();

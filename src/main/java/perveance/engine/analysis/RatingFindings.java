@@ -6,8 +6,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.base.Finding;
-import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.RatingMessage;
+import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.device.Ratings;
 import perveance.engine.stage.StageCircuit.StageDevice;
@@ -17,48 +17,55 @@ final class RatingFindings {
   /** From this share of a limit on a caution is given, common practice [1]. */
   static final double NEAR = 0.9;
 
-  private record Codes(RatingMessage over, Optional<RatingMessage> near) {}
+  private record Codes(RatingMessage over, Optional<RatingMessage> near) {
+    Codes(RatingMessage over, RatingMessage near) {
+      this(over, Optional.of(near));
+    }
+  }
 
+  private static final Codes HEATER =
+      new Codes(RatingMessage.HEATER_CATHODE_OVER, RatingMessage.HEATER_CATHODE_NEAR);
+  private static final Codes LEAK = new Codes(RatingMessage.GRID_LEAK_OVER, Optional.empty());
   private static final Map<String, Codes> CODES =
       Map.of(
           "anode voltage",
-          new Codes(
-              RatingMessage.ANODE_VOLTAGE_OVER, Optional.of(RatingMessage.ANODE_VOLTAGE_NEAR)),
+          new Codes(RatingMessage.ANODE_VOLTAGE_OVER, RatingMessage.ANODE_VOLTAGE_NEAR),
           "cold anode voltage",
           new Codes(RatingMessage.COLD_START_ANODE_OVER, Optional.empty()),
           "anode dissipation",
-          new Codes(
-              RatingMessage.ANODE_DISSIPATION_OVER,
-              Optional.of(RatingMessage.ANODE_DISSIPATION_NEAR)),
+          new Codes(RatingMessage.ANODE_DISSIPATION_OVER, RatingMessage.ANODE_DISSIPATION_NEAR),
           "both anodes' dissipation",
-          new Codes(
-              RatingMessage.ANODE_DISSIPATION_OVER,
-              Optional.of(RatingMessage.ANODE_DISSIPATION_NEAR)),
+          new Codes(RatingMessage.BOTH_ANODES_OVER, Optional.empty()),
           "screen voltage",
-          new Codes(
-              RatingMessage.SCREEN_VOLTAGE_OVER, Optional.of(RatingMessage.SCREEN_VOLTAGE_NEAR)),
+          new Codes(RatingMessage.SCREEN_VOLTAGE_OVER, RatingMessage.SCREEN_VOLTAGE_NEAR),
           "screen dissipation",
-          new Codes(
-              RatingMessage.SCREEN_DISSIPATION_OVER,
-              Optional.of(RatingMessage.SCREEN_DISSIPATION_NEAR)),
+          new Codes(RatingMessage.SCREEN_DISSIPATION_OVER, RatingMessage.SCREEN_DISSIPATION_NEAR),
           "cathode current",
-          new Codes(
-              RatingMessage.CATHODE_CURRENT_OVER, Optional.of(RatingMessage.CATHODE_CURRENT_NEAR)));
+          new Codes(RatingMessage.CATHODE_CURRENT_OVER, RatingMessage.CATHODE_CURRENT_NEAR));
 
-  private RatingFindings() {}
+  private final FindingContext context;
+  private final List<Finding> findings = new ArrayList<>();
 
-  static List<Finding> of(StageAnswer answer) {
-    List<Finding> findings = new ArrayList<>();
-    for (StageDevice device : answer.circuit().devices()) {
-      Optional<Ratings> ratings = device.device().defaultRatings();
-      ratings.ifPresent(r -> missing(device, r, findings));
-      for (LimitUse use : answer.limits()) {
-        if (use.ref().equals(device.ref()) && ratings.filter(r -> under(use, r)).isPresent()) {
-          finding(use).ifPresent(findings::add);
-        }
+  private RatingFindings(FindingContext context) {
+    this.context = context;
+  }
+
+  static List<Finding> of(FindingContext context) {
+    RatingFindings all = new RatingFindings(context);
+    for (StageDevice device : context.answer().circuit().devices()) {
+      device.device().defaultRatings().ifPresent(r -> all.add(device, r));
+    }
+    return all.findings;
+  }
+
+  private void add(StageDevice device, Ratings ratings) {
+    missing(device, "anode voltage", ratings.anodeVoltage());
+    missing(device, "anode dissipation", ratings.anodeDissipation());
+    for (LimitUse use : context.answer().limits()) {
+      if (use.ref().equals(device.ref()) && under(use, ratings)) {
+        judge(use);
       }
     }
-    return findings;
   }
 
   /** Whether a use is counted under the given ratings. */
@@ -66,74 +73,63 @@ final class RatingFindings {
     return use.system() == ratings.system() && use.source().equals(LimitShares.source(ratings));
   }
 
-  private static void missing(StageDevice device, Ratings ratings, List<Finding> findings) {
-    List<String> missing = new ArrayList<>();
-    note(missing, "anode voltage", ratings.anodeVoltage());
-    note(missing, "anode dissipation", ratings.anodeDissipation());
-    for (String what : missing) {
-      findings.add(
-          Finding.of(RatingMessage.NO_RATING, Severity.NOTE, device.ref(), device.ref(), what));
-    }
-  }
-
-  private static void note(List<String> missing, String what, OptionalDouble limit) {
+  private void missing(StageDevice device, String what, OptionalDouble limit) {
     if (limit.isEmpty()) {
-      missing.add(what);
+      findings.add(
+          Finding.of(RatingMessage.NO_RATING, Severity.NOTE, context.ref(), device.ref(), what)
+              .onPart(device.ref()));
     }
   }
 
-  private static Optional<Finding> finding(LimitUse use) {
+  private static Codes codes(LimitUse use) {
     if (use.what().startsWith("grid leak")) {
-      return over(use, RatingMessage.GRID_LEAK_OVER);
+      return LEAK;
     }
-    Codes codes =
-        use.what().startsWith("heater-cathode")
-            ? new Codes(
-                RatingMessage.HEATER_CATHODE_OVER, Optional.of(RatingMessage.HEATER_CATHODE_NEAR))
-            : CODES.get(use.what());
-    if (codes == null) {
-      return Optional.empty();
-    }
-    return use.share() > 1
-        ? over(use, codes.over())
-        : codes.near().filter(code -> use.share() > NEAR).map(code -> near(use, code));
+    return use.what().startsWith("heater-cathode") ? HEATER : CODES.getOrDefault(use.what(), LEAK);
   }
 
-  private static Optional<Finding> over(LimitUse use, RatingMessage code) {
-    return use.share() > 1
-        ? Optional.of(
-            Finding.of(code, Severity.OVER_LIMIT, use.ref(), overParts(use, code.partCount()))
-                .withValue(use.value(), use.limit(), use.unit()))
-        : Optional.empty();
+  private void judge(LimitUse use) {
+    Codes codes = codes(use);
+    if (use.share() > 1) {
+      Finding over =
+          Finding.of(
+                  codes.over(),
+                  Severity.OVER_LIMIT,
+                  context.ref(),
+                  overParts(use, codes.over().partCount()))
+              .withValue(use.value(), use.limit(), use.unit())
+              .onPart(use.ref());
+      Optional<Remedy> remedy = RatingRemedies.of(context, use);
+      findings.add(remedy.map(over::withRemedy).orElse(over));
+    } else if (use.share() > NEAR) {
+      codes.near().ifPresent(code -> findings.add(near(use, code)));
+    }
   }
 
   private static String[] overParts(LimitUse use, int count) {
     List<String> parts =
         List.of(
-            use.ref() + when(use),
-            text(use, use.value()),
-            text(use, use.limit()),
+            place(use),
+            Words.of(use.value(), use.unit()),
+            Words.of(use.limit(), use.unit()),
             use.system().word());
     return parts.subList(0, count).toArray(new String[0]);
   }
 
-  private static Finding near(LimitUse use, RatingMessage code) {
+  private Finding near(LimitUse use, RatingMessage code) {
     return Finding.of(
             code,
             Severity.CAUTION,
-            use.ref(),
-            use.ref() + when(use),
-            text(use, use.value()),
-            QuantityFormat.TYPESET.percent(use.share(), 2),
-            text(use, use.limit()))
-        .withValue(use.value(), use.limit(), use.unit());
+            context.ref(),
+            place(use),
+            Words.of(use.value(), use.unit()),
+            Words.percent(use.share()),
+            Words.of(use.limit(), use.unit()))
+        .withValue(use.value(), use.limit(), use.unit())
+        .onPart(use.ref());
   }
 
-  private static String when(LimitUse use) {
-    return use.when().equals(LimitShares.IDLE) ? "" : " at " + use.when();
-  }
-
-  private static String text(LimitUse use, double value) {
-    return QuantityFormat.TYPESET.reading(value, use.unit(), 3);
+  private static String place(LimitUse use) {
+    return use.when().equals(LimitShares.IDLE) ? use.ref() : use.ref() + " at " + use.when();
   }
 }

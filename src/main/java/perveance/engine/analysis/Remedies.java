@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.function.Predicate;
 import java.util.function.ToDoubleFunction;
 import perveance.engine.base.PreferredSeries;
@@ -20,7 +21,7 @@ import perveance.engine.stage.StageCircuit.PartType;
  */
 final class Remedies {
   /** How far a part is moved along the preferred values, twelve a decade. */
-  private static final int MOST_STEPS = 8;
+  private static final int MOST_STEPS = 12;
 
   private final StageAnswer now;
   private final Retry retry;
@@ -38,7 +39,7 @@ final class Remedies {
    * @param text the new value as text
    * @param answer what the stage then does
    */
-  record Trial(Part part, double value, String text, StageAnswer answer) {}
+  record Trial(Part part, double value, String text, Variant answer) {}
 
   /** Tries one value of a part. */
   Optional<Trial> trial(Part part, double value) {
@@ -54,7 +55,7 @@ final class Remedies {
    * @param parts parts that may be changed
    * @param cured whether an answer is good
    */
-  Optional<Remedy> smallest(List<Part> parts, Predicate<StageAnswer> cured) {
+  Optional<Remedy> smallest(List<Part> parts, Predicate<Variant> cured) {
     List<Trial> cures = new ArrayList<>();
     for (Part part : parts) {
       for (boolean up : new boolean[] {true, false}) {
@@ -66,7 +67,7 @@ final class Remedies {
         .map(this::remedy);
   }
 
-  private Optional<Trial> firstCure(Part part, boolean up, Predicate<StageAnswer> cured) {
+  private Optional<Trial> firstCure(Part part, boolean up, Predicate<Variant> cured) {
     double value = part.value();
     for (int step = 0; step < MOST_STEPS; step++) {
       value = up ? above(value) : below(value);
@@ -85,12 +86,12 @@ final class Remedies {
    * The value of one part that makes a figure largest, if that gains enough.
    *
    * @param part the part
+   * @param highest the figure as it is now
    * @param figure what is to be large
    * @param gain least gain worth a change, as a ratio [1]
    */
-  Optional<Trial> best(Part part, ToDoubleFunction<StageAnswer> figure, double gain) {
+  Optional<Trial> best(Part part, double highest, ToDoubleFunction<Variant> figure, double gain) {
     Optional<Trial> best = Optional.empty();
-    double highest = figure.applyAsDouble(now);
     double least = highest * gain;
     for (boolean up : new boolean[] {true, false}) {
       double value = part.value();
@@ -120,6 +121,23 @@ final class Remedies {
             + " "
             + Effect.of(now, trial.answer())
             + ".",
+        trial.part().key(),
+        trial.text());
+  }
+
+  /** The remedy that a trial amounts to where it is about the low corner. */
+  Remedy corner(Trial trial, OptionalDouble before) {
+    OptionalDouble after = trial.answer().small().lowCorner();
+    String moved =
+        before.isPresent() && after.isPresent()
+            ? " brings the low corner from "
+                + Words.roughly(before.getAsDouble(), Unit.HERTZ)
+                + " to "
+                + Words.roughly(after.getAsDouble(), Unit.HERTZ)
+                + "."
+            : " widens the low end.";
+    return Remedy.set(
+        Words.part(trial.value(), unit(trial.part())) + " at " + designator(trial.part()) + moved,
         trial.part().key(),
         trial.text());
   }

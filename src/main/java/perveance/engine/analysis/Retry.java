@@ -6,11 +6,11 @@ import java.util.Optional;
 /** Works a stage out again with some of its keys changed, to see what a remedy would do. */
 interface Retry {
   /**
-   * The stage's answer after an edit, without bands, levels and findings.
+   * The stage after an edit.
    *
    * @param ref the stage
    * @param edits keys and their new texts
-   * @return the answer; empty when the edited stage has none
+   * @return the changed stage; empty when it cannot be built or has no solution
    */
-  Optional<StageAnswer> with(String ref, Map<String, String> edits);
+  Optional<Variant> with(String ref, Map<String, String> edits);
 }

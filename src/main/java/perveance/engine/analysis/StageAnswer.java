@@ -54,4 +54,30 @@ public record StageAnswer(
     assumptions = List.copyOf(assumptions);
     findings = List.copyOf(findings);
   }
+
+  /**
+   * The same with findings.
+   *
+   * @param found findings, worst first
+   * @return the changed answer
+   */
+  public StageAnswer withFindings(List<Finding> found) {
+    return new StageAnswer(
+        ref,
+        kind,
+        circuit,
+        drawing,
+        points,
+        limits,
+        smallSignal,
+        clean,
+        driven,
+        levels,
+        parts,
+        readings,
+        loadLine,
+        sums,
+        assumptions,
+        found);
+  }
 }

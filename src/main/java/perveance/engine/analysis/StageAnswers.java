@@ -9,10 +9,8 @@ import java.util.OptionalDouble;
 import perveance.engine.analysis.LoadLineView.Point;
 import perveance.engine.circuit.DcSolution;
 import perveance.engine.circuit.MidbandSolution;
-import perveance.engine.device.LawKind;
 import perveance.engine.stage.ChassisNames;
 import perveance.engine.stage.StageCircuit.LoadLineSpec;
-import perveance.engine.stage.StageCircuit.StageDevice;
 import perveance.engine.stage.StageValues;
 
 /** Puts the answer of each stage of a solved chassis together. */
@@ -63,7 +61,7 @@ final class StageAnswers {
         model.stage(),
         chassis.circuits().drawing(ref),
         points,
-        limits(model, points, values, driven),
+        new StageLimits(model, chassis.whole().circuit(), values).uses(points, cold, driven),
         small,
         bands.map(b -> withBands(clean, b)).orElse(clean),
         driven,
@@ -92,42 +90,6 @@ final class StageAnswers {
 
   private static CleanSwing withBands(CleanSwing clean, StageSpread bands) {
     return clean.withBands(bands.swingBands());
-  }
-
-  private List<LimitUse> limits(
-      StageModel model,
-      List<DevicePoint> points,
-      StageValues values,
-      Optional<DrivenAnswer> driven) {
-    List<LimitUse> uses = new ArrayList<>();
-    double heater = values.number("heater_elevation", 0);
-    for (int i = 0; i < points.size(); i++) {
-      DevicePoint point = points.get(i);
-      StageDevice device = model.device(point.ref());
-      LimitShares shares = new LimitShares(device, point, heater);
-      shares.addIdle(GridCircuit.resistance(chassis.whole().circuit(), point.ref()));
-      cold.ifPresent(dc -> addCold(shares, dc, point.ref()));
-      int section = i;
-      driven.ifPresent(d -> addDriven(shares, d, section, device));
-      uses.addAll(shares.uses());
-    }
-    return uses;
-  }
-
-  private static void addCold(LimitShares shares, DcSolution dc, String ref) {
-    double cathode = dc.valve(ref).cathodeVoltage();
-    shares.addCold(dc.valve(ref).voltage(0), cathode);
-  }
-
-  private static void addDriven(
-      LimitShares shares, DrivenAnswer driven, int section, StageDevice device) {
-    boolean screened = device.device().law().kind() == LawKind.PENTODE;
-    shares.addDriven(
-        driven.anodeDissipation().get(section),
-        screened && driven.screenDissipation().size() > section
-            ? OptionalDouble.of(driven.screenDissipation().get(section))
-            : OptionalDouble.empty(),
-        OptionalDouble.empty());
   }
 
   private List<PartDuty> parts(StageModel model, Optional<MidbandSolution> driven) {

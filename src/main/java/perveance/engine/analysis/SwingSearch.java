@@ -1,5 +1,6 @@
 package perveance.engine.analysis;
 
+import java.util.function.DoubleUnaryOperator;
 import perveance.engine.analysis.CleanSwing.Limit;
 
 /**
@@ -22,32 +23,31 @@ final class SwingSearch {
   /** A section this far down has to do with a fall of the gain [1]. */
   private static final double NEAR_CUT_OFF = 0.3;
 
-  private static final double FIRST_STEPS = 16;
-  private static final double GROWTH = 1.15;
-  private static final int MOST_STEPS = 60;
-  private static final int REFINEMENTS = 40;
-  private static final double ACCURACY = 1e-4;
+  private static final double FIRST_STEP = 0.25;
+  private static final double GROWTH = 1.4;
+  private static final int MOST_STEPS = 24;
+  private static final int REFINEMENTS = 30;
+  private static final double ACCURACY = 1e-5;
 
-  private final HeldCharge dynamic;
+  private final HeldCharge curve;
   private final boolean composite;
   private final double[] idleCurrent;
   private final double idleGain;
   private final double scale;
-  private Limit cause = Limit.NONE;
 
   /**
    * Starts at idle.
    *
-   * @param dynamic the characteristic
+   * @param curve the characteristic
    * @param composite whether a section may be cut off while others go on
    */
-  SwingSearch(HeldCharge dynamic, boolean composite) {
-    this.dynamic = dynamic;
+  SwingSearch(HeldCharge curve, boolean composite) {
+    this.curve = curve;
     this.composite = composite;
-    this.idleCurrent = new double[dynamic.valves()];
-    dynamic.move(0);
+    this.idleCurrent = new double[curve.valves()];
+    curve.move(0);
     for (int v = 0; v < idleCurrent.length; v++) {
-      idleCurrent[v] = dynamic.anodeCurrent(v);
+      idleCurrent[v] = curve.anodeCurrent(v);
     }
     this.scale = scale();
     this.idleGain = slope(0);
@@ -58,19 +58,19 @@ final class SwingSearch {
     double probe = 1e-3;
     double[] grid = new double[idleCurrent.length];
     for (int v = 0; v < grid.length; v++) {
-      grid[v] = dynamic.gridVoltage(v);
+      grid[v] = curve.gridVoltage(v);
     }
-    if (!dynamic.move(probe)) {
+    if (!curve.move(probe)) {
       return 1;
     }
     double least = Double.POSITIVE_INFINITY;
     for (int v = 0; v < grid.length; v++) {
-      double rate = (dynamic.anodeCurrent(v) - idleCurrent[v]) / probe;
+      double rate = (curve.anodeCurrent(v) - idleCurrent[v]) / probe;
       if (rate != 0) {
         least = Math.min(least, Math.abs(idleCurrent[v] / rate));
       }
-      double up = (dynamic.gridVoltage(v) - grid[v]) / probe;
-      double room = Math.abs(dynamic.gridOnset(v) - grid[v]);
+      double up = (curve.gridVoltage(v) - grid[v]) / probe;
+      double room = Math.abs(curve.gridOnset(v) - grid[v]);
       if (up != 0 && room > 0) {
         least = Math.min(least, room / Math.abs(up));
       }
@@ -81,11 +81,11 @@ final class SwingSearch {
   /** Gain of the main output at a source voltage, from a small step [1]. */
   private double slope(double source) {
     double step = scale * 1e-3;
-    if (!dynamic.move(source - step)) {
-      return Double.NaN;
+    if (!curve.move(source - step)) {
+      return 0;
     }
-    double before = dynamic.output(0);
-    return dynamic.move(source + step) ? (dynamic.output(0) - before) / (2 * step) : Double.NaN;
+    double before = curve.output(0);
+    return curve.move(source + step) ? (curve.output(0) - before) / (2 * step) : 0;
   }
 
   /**
@@ -94,65 +94,113 @@ final class SwingSearch {
    * @param sign 1 for a rising input, -1 for a falling one
    */
   SwingEnd end(int sign) {
-    double step = scale / FIRST_STEPS;
+    double step = FIRST_STEP * scale;
+    double before = 0;
     double clean = 0;
+    double output = 0;
     for (int i = 0; i < MOST_STEPS; i++) {
       double next = clean + step;
-      if (!(margin(sign * next) > 0)) {
-        return refined(sign, clean, next);
+      if (!curve.move(sign * next)) {
+        return at(sign * clean, Limit.NONE);
       }
+      double reached = curve.output(0);
+      double gain = (reached - output) / (sign * step) / idleGain;
+      boolean knee = gain < KNEE_SHARE && (composite || !fading());
+      if (gridRoom() <= 0 || cutOffRoom() <= 0 || knee) {
+        return nearest(sign, before, clean, next, knee);
+      }
+      before = clean;
       clean = next;
+      output = reached;
       step *= GROWTH;
     }
     return at(sign * clean, Limit.NONE);
   }
 
-  private SwingEnd refined(int sign, double inside, double outside) {
-    double low = inside;
-    double high = outside;
+  /** Which of the ends between two points comes first. */
+  private SwingEnd nearest(int sign, double before, double clean, double next, boolean knee) {
+    curve.move(sign * next);
+    boolean grid = gridRoom() <= 0;
+    boolean cutOff = cutOffRoom() <= 0;
+    double end = next;
+    Limit limit = Limit.KNEE;
+    if (grid) {
+      end = zero(clean, next, x -> curve.move(sign * x) ? gridRoom() : -1);
+      limit = Limit.GRID_CURRENT;
+    }
+    if (cutOff) {
+      double at = zero(clean, next, x -> curve.move(sign * x) ? cutOffRoom() : -1);
+      limit = at < end || !grid ? Limit.CUT_OFF : limit;
+      end = Math.min(at, end);
+    }
+    if (knee) {
+      double at = zero(before, next, x -> slope(sign * x) / idleGain - KNEE_SHARE);
+      limit = at < end || !(grid || cutOff) ? Limit.KNEE : limit;
+      end = Math.min(at, end);
+    }
+    return at(sign * end, limit);
+  }
+
+  /** Where a margin falls through zero: false position, Illinois variant. */
+  private static double zero(double from, double to, DoubleUnaryOperator margin) {
+    double low = from;
+    double high = to;
+    double atLow = margin.applyAsDouble(low);
+    double atHigh = margin.applyAsDouble(high);
+    if (!(atLow > 0)) {
+      return low;
+    }
+    int side = 0;
     for (int i = 0; i < REFINEMENTS && high - low > ACCURACY * high; i++) {
-      double middle = 0.5 * (low + high);
-      if (margin(sign * middle) > 0) {
-        low = middle;
+      double x = atHigh < 0 ? low + (high - low) * atLow / (atLow - atHigh) : high;
+      double at = margin.applyAsDouble(x);
+      if (Math.abs(at) < 1e-7) {
+        return x;
+      } else if (at > 0) {
+        low = x;
+        atLow = at;
+        atHigh = side > 0 ? atHigh / 2 : atHigh;
+        side = 1;
       } else {
-        high = middle;
+        high = x;
+        atHigh = at;
+        atLow = side < 0 ? atLow / 2 : atLow;
+        side = -1;
       }
     }
-    margin(sign * high);
-    return at(sign * low, cause);
+    return low;
   }
 
   private SwingEnd at(double source, Limit limit) {
-    dynamic.move(source);
-    return new SwingEnd(source, dynamic.input(), dynamic.output(0), limit);
+    curve.move(source);
+    return new SwingEnd(source, curve.input(), curve.output(0), limit);
   }
 
-  /** Above zero while clean; the smallest of the margins, whose cause is kept. */
-  private double margin(double source) {
-    double gain = slope(source) / idleGain;
-    if (!dynamic.move(source) || Double.isNaN(gain)) {
-      cause = Limit.NONE;
-      return -1;
-    }
+  /** Least room to the onset of grid current; zero or below once it flows [V]. */
+  private double gridRoom() {
     double least = Double.POSITIVE_INFINITY;
-    boolean fading = false;
     for (int v = 0; v < idleCurrent.length; v++) {
-      double room = dynamic.gridOnset(v) - dynamic.gridVoltage(v);
-      if (room <= 0) {
-        cause = Limit.GRID_CURRENT;
-        return room;
-      }
-      double share = dynamic.anodeCurrent(v) / idleCurrent[v];
-      fading |= share < NEAR_CUT_OFF;
-      if (!composite && share - CUT_OFF_SHARE < least) {
-        least = share - CUT_OFF_SHARE;
-        cause = Limit.CUT_OFF;
-      }
-    }
-    if ((composite || !fading) && gain - KNEE_SHARE < least) {
-      least = gain - KNEE_SHARE;
-      cause = Limit.KNEE;
+      least = Math.min(least, curve.gridOnset(v) - curve.gridVoltage(v));
     }
     return least;
+  }
+
+  /** Least share of current above cut-off; zero or below once a section counts as cut off [1]. */
+  private double cutOffRoom() {
+    double least = 1;
+    for (int v = 0; v < idleCurrent.length && !composite; v++) {
+      least = Math.min(least, curve.anodeCurrent(v) / idleCurrent[v] - CUT_OFF_SHARE);
+    }
+    return least;
+  }
+
+  /** Whether a section is near cut-off, which then explains a fall of the gain. */
+  private boolean fading() {
+    for (int v = 0; v < idleCurrent.length; v++) {
+      if (curve.anodeCurrent(v) < NEAR_CUT_OFF * idleCurrent[v]) {
+        return true;
+      }
+    }
+    return false;
   }
 }

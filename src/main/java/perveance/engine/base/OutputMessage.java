@@ -5,7 +5,8 @@ public enum OutputMessage implements MessageCode {
   LOAD_OFF_BEST("{0} works into {1}; the most power within limits comes near {2}."),
   POWER_SMALL("{0} gives {1} clean into {2}."),
   SCREEN_RISES("{0}: at drive the screens take {1}, against {2} at idle."),
-  PAIR_UNBALANCED("{0}: the two sides differ by {1} at idle.");
+  PAIR_UNBALANCED("{0}: the two sides differ by {1} at idle."),
+  OUTPUTS_UNBALANCED("{0}: the gains to its two outputs differ by {1}.");
 
   private final String template;
 

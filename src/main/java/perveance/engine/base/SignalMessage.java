@@ -2,8 +2,9 @@ package perveance.engine.base;
 
 /** Findings about signal: headroom, distortion, response, noise. */
 public enum SignalMessage implements MessageCode {
-  GRID_CURRENT_FIRST("{0} overloads by grid current first, at {1} peak in; cut-off comes at {2}."),
-  CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; grid current starts at {2}."),
+  GRID_CURRENT_FIRST(
+      "{0} overloads by grid current first, at {1} peak in; the other side ends at {2}."),
+  CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; the other side ends at {2}."),
   KNEE_FIRST("{0} overloads at the anode knee first, at {1} peak in."),
   NO_HEADROOM("{0} is driven with {1} peak but is clean only to {2}."),
   LITTLE_HEADROOM("{0} has only {1} of headroom over the stated drive."),

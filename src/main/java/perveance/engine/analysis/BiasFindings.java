@@ -1,0 +1,187 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import perveance.engine.base.BiasMessage;
+import perveance.engine.base.Finding;
+import perveance.engine.base.Remedy;
+import perveance.engine.base.Severity;
+import perveance.engine.base.Unit;
+import perveance.engine.circuit.Element.Valve;
+import perveance.engine.stage.StageCircuit.Part;
+
+/** Findings about where the valves idle. */
+final class BiasFindings {
+  /** Below this a receiving valve is as good as cut off [A]. */
+  private static final double CUT_OFF = 20e-6;
+
+  /** Grid current that counts, the makers' criterion [A]. */
+  private static final double GRID_CURRENT = 0.3e-6;
+
+  /** Share of the open-circuit voltage from which the anode hardly swings up any more [1]. */
+  private static final double NEAR_SUPPLY = 0.9;
+
+  /** Share of it below which the valve is bottomed [1]. */
+  private static final double BOTTOMED = 0.1;
+
+  /** Ratio of the ends of the band from which an idle current must be set by measurement [1]. */
+  private static final double WIDE = 1.8;
+
+  private final FindingContext context;
+  private final List<Finding> findings = new ArrayList<>();
+
+  private BiasFindings(FindingContext context) {
+    this.context = context;
+  }
+
+  static List<Finding> of(FindingContext context) {
+    BiasFindings all = new BiasFindings(context);
+    for (DevicePoint point : context.answer().points()) {
+      all.cutOff(point);
+      all.gridCurrent(point);
+      all.spread(point);
+    }
+    context.answer().loadLine().ifPresent(all::onLine);
+    return all.findings;
+  }
+
+  private void add(Finding finding, DevicePoint point, Optional<Remedy> remedy) {
+    Finding on = finding.onPart(point.ref());
+    findings.add(remedy.map(on::withRemedy).orElse(on));
+  }
+
+  private void cutOff(DevicePoint point) {
+    if (point.anodeCurrent() >= CUT_OFF) {
+      return;
+    }
+    Finding finding =
+        Finding.of(
+                BiasMessage.CUT_OFF_IDLE,
+                Severity.CAUTION,
+                context.ref(),
+                point.ref(),
+                Words.of(point.anodeCurrent(), Unit.AMPERE))
+            .withValue(point.anodeCurrent(), CUT_OFF, Unit.AMPERE);
+    add(
+        finding,
+        point,
+        context.remedies().smallest(biasParts(), v -> current(v, point.ref()) > 5 * CUT_OFF));
+  }
+
+  private static double current(Variant variant, String ref) {
+    return variant.points().stream()
+        .filter(p -> p.ref().equals(ref))
+        .mapToDouble(DevicePoint::anodeCurrent)
+        .sum();
+  }
+
+  private void gridCurrent(DevicePoint point) {
+    if (point.gridCurrent() < GRID_CURRENT) {
+      return;
+    }
+    Finding finding =
+        Finding.of(
+                BiasMessage.GRID_CURRENT_IDLE,
+                Severity.CAUTION,
+                context.ref(),
+                point.ref(),
+                Words.of(point.gridCurrent(), Unit.AMPERE),
+                Words.of(point.grid(), Unit.VOLT))
+            .withValue(point.gridCurrent(), GRID_CURRENT, Unit.AMPERE);
+    add(
+        finding,
+        point,
+        context
+            .remedies()
+            .smallest(
+                biasParts(),
+                v ->
+                    v.points().stream()
+                        .filter(p -> p.ref().equals(point.ref()))
+                        .allMatch(p -> p.gridCurrent() < GRID_CURRENT)));
+  }
+
+  /** A band so wide that only measurement sets the current, as with a fixed bias. */
+  private void spread(DevicePoint point) {
+    Band band = point.bands().get("anodeCurrent");
+    if (band == null || !(band.low() > 0) || band.high() < WIDE * band.low()) {
+      return;
+    }
+    Finding finding =
+        Finding.of(
+                BiasMessage.FIXED_BIAS_SPREAD,
+                Severity.CAUTION,
+                context.ref(),
+                point.ref(),
+                Words.roughly(band.low(), Unit.AMPERE),
+                Words.roughly(band.high(), Unit.AMPERE))
+            .withValue(band.high(), Unit.AMPERE);
+    add(
+        finding,
+        point,
+        Optional.of(
+            Remedy.byHand("Set the idle current by measurement, starting from the cold side.")));
+  }
+
+  private void onLine(LoadLineView view) {
+    Optional<DevicePoint> point =
+        context.answer().points().stream().filter(p -> p.ref().equals(view.ref())).findFirst();
+    double open = view.anode() + view.current() * view.dcResistance();
+    boolean resistive = view.dcResistance() * view.current() > 0.02 * open;
+    if (point.isEmpty() || !resistive || !(open > 0)) {
+      return;
+    }
+    if (view.anode() > NEAR_SUPPLY * open) {
+      Finding finding =
+          Finding.of(
+                  BiasMessage.ANODE_NEAR_SUPPLY,
+                  Severity.CAUTION,
+                  context.ref(),
+                  view.ref(),
+                  Words.of(view.anode(), Unit.VOLT),
+                  Words.of(open, Unit.VOLT))
+              .withValue(view.anode(), open, Unit.VOLT);
+      add(finding, point.get(), moreSwing());
+    } else if (view.anode() < BOTTOMED * open) {
+      Finding finding =
+          Finding.of(
+                  BiasMessage.ANODE_BOTTOMED,
+                  Severity.CAUTION,
+                  context.ref(),
+                  view.ref(),
+                  Words.of(view.anode(), Unit.VOLT))
+              .withValue(view.anode(), Unit.VOLT);
+      add(finding, point.get(), moreSwing());
+    }
+  }
+
+  private Optional<Remedy> moreSwing() {
+    Remedies remedies = context.remedies();
+    double now = context.answer().clean().outputPeak();
+    return biasParts().stream()
+        .flatMap(p -> remedies.best(p, now, v -> v.clean().outputPeak(), 1.1).stream())
+        .findFirst()
+        .map(remedies::remedy);
+  }
+
+  /** Resistors that make the bias: those at a cathode. */
+  private List<Part> biasParts() {
+    return biasParts(context);
+  }
+
+  static List<Part> biasParts(FindingContext context) {
+    List<Part> found = new ArrayList<>();
+    for (Part part : context.remedies().resistors()) {
+      for (DevicePoint point : context.answer().points()) {
+        Valve valve = context.model().valve(point.ref());
+        if (valve.cathode() != 0
+            && PartRoles.touches(context.model(), part, valve.cathode())
+            && !found.contains(part)) {
+          found.add(part);
+        }
+      }
+    }
+    return found;
+  }
+}

@@ -1,0 +1,111 @@
+package perveance.engine.analysis;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import perveance.engine.analysis.Band.Share;
+import perveance.engine.base.DataMessage;
+import perveance.engine.base.Finding;
+import perveance.engine.base.Remedy;
+import perveance.engine.base.Severity;
+import perveance.engine.base.Unit;
+import perveance.engine.device.FitSummary;
+import perveance.engine.stage.StageCircuit.Part;
+import perveance.engine.stage.StageCircuit.StageDevice;
+
+/** Findings about how far the answer can be trusted, and what would narrow it. */
+final class DataFindings {
+  /** A law that misses its data by more than this is loose [1]. */
+  private static final double LOOSE = 0.10;
+
+  /** A cause with this share of a band is worth measuring [1]. */
+  private static final double MOST = 0.4;
+
+  private final FindingContext context;
+  private final List<Finding> findings = new ArrayList<>();
+
+  private DataFindings(FindingContext context) {
+    this.context = context;
+  }
+
+  static List<Finding> of(FindingContext context) {
+    DataFindings all = new DataFindings(context);
+    for (DevicePoint point : context.answer().points()) {
+      all.outside(point);
+    }
+    context.answer().circuit().devices().stream()
+        .map(StageDevice::device)
+        .distinct()
+        .forEach(d -> all.fit(d.type(), d.fit()));
+    context.answer().points().stream().findFirst().ifPresent(all::cause);
+    return all.findings;
+  }
+
+  private void outside(DevicePoint point) {
+    point
+        .outsideEvidence()
+        .ifPresent(
+            what ->
+                findings.add(
+                    Finding.of(
+                            DataMessage.OUTSIDE_EVIDENCE,
+                            Severity.CAUTION,
+                            context.ref(),
+                            point.ref(),
+                            what)
+                        .onPart(point.ref())));
+  }
+
+  private void fit(String type, FitSummary fit) {
+    if (fit.worstError() > LOOSE) {
+      findings.add(
+          Finding.of(
+                  DataMessage.FIT_LOOSE,
+                  Severity.NOTE,
+                  context.ref(),
+                  type,
+                  Words.percent(fit.worstError()))
+              .withValue(fit.worstError(), LOOSE, Unit.RATIO));
+    }
+  }
+
+  /** The part or supply behind most of the doubt in the anode voltage: worth measuring. */
+  private void cause(DevicePoint point) {
+    Band band = point.bands().get("anodeChassis");
+    Optional<Share> most =
+        band == null
+            ? Optional.empty()
+            : band.shares().stream().max(Comparator.comparingDouble(Share::fraction));
+    if (band == null
+        || most.isEmpty()
+        || most.get().fraction() < MOST
+        || most.get().cause().startsWith("valve")) {
+      return;
+    }
+    String cause = most.get().cause();
+    Optional<Part> part =
+        context.answer().circuit().parts().stream()
+            .filter(p -> p.element().equals(context.ref() + "." + cause))
+            .findFirst();
+    String named = part.map(context::named).orElse(cause);
+    double left = Math.sqrt(1 - most.get().fraction());
+    double middle = 0.5 * (band.low() + band.high());
+    double half = 0.5 * (band.high() - band.low()) * left;
+    Finding finding =
+        Finding.of(
+                DataMessage.BAND_CAUSE,
+                Severity.NOTE,
+                context.ref(),
+                point.ref(),
+                Words.percent(most.get().fraction()),
+                "anode voltage",
+                named,
+                perveance.engine.base.QuantityFormat.TYPESET.range(
+                    middle - half, middle + half, Unit.VOLT))
+            .withValue(most.get().fraction(), Unit.RATIO)
+            .withRemedy(new Remedy("Measure " + named + " and state what you find.", Map.of()));
+    findings.add(part.map(p -> finding.onPart(p.element())).orElse(finding));
+  }
+}

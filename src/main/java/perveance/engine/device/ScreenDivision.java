@@ -11,7 +11,7 @@ package perveance.engine.device;
  * f  = h / (1 + q)
  * h  = z / (1 + z^n)^(1/n),  z = Va/Vk,  Vk = c u/D0 + V0   the knee
  * q  = k B A                                               Ig2/Ia above the knee
- * A  = ((1 + x0) / (Va/Vg2 + x0))^b                        falls as the anode is raised
+ * A  = 1 + b (1 - x) / (x + x0),  x = Va/Vg2              falls as the anode is raised
  * B  = 1 - exp(-(u/(D0 Vg2) / r0)^2), 1 for r0 = 0         beams narrow at low current
  * }</pre>
  *
@@ -34,13 +34,10 @@ final class ScreenDivision {
   /** Anode voltage below which its effect is rounded off [V]. */
   private static final double ANODE_ROUNDING = 0.1;
 
-  /** Screen voltages are bent towards positive values on this scale [V]. */
-  private static final double SCREEN_ROUNDING = 1.0;
-
   private static final double TWO_THIRDS = 2.0 / 3.0;
 
   private final double share;
-  private final double fallPower;
+  private final double fallPart;
   private final double fallOffset;
   private final double inverseBeamWidth;
   private final double kneePerDrive;
@@ -48,7 +45,7 @@ final class ScreenDivision {
 
   ScreenDivision(SpreadPentodeParameters p) {
     this.share = p.screenShare();
-    this.fallPower = p.shareFall();
+    this.fallPart = p.shareFall();
     this.fallOffset = p.shareOffset();
     this.inverseBeamWidth = p.beamWidth() > 0 ? 1 / (p.penetration() * p.beamWidth()) : 0;
     this.kneePerDrive = p.knee() / p.penetration();
@@ -67,27 +64,33 @@ final class ScreenDivision {
   void divide(double drive, double anode, double screen, ElectrodeCurrents out) {
     double a = rounded(anode);
     double aSlope = Math.min(1, Math.max(0, anode / ANODE_ROUNDING));
-    double root = Math.sqrt(screen * screen + SCREEN_ROUNDING * SCREEN_ROUNDING);
-    double g2 = 0.5 * (screen + root);
-    double g2Slope = g2 / root;
+    // bent to 1 / (2 - Vg2) below one volt, so that it stays positive
+    double inverseScreen = 1 / (screen >= 1 ? screen : 1 / (2 - screen));
+    double g2Slope = screen >= 1 ? 1 : 1 / (inverseScreen * inverseScreen);
 
-    double below = a + fallOffset * g2;
-    double fall = fallen((1 + fallOffset) * g2 / below);
-    double ratio = drive * inverseBeamWidth / g2;
-    double tail = inverseBeamWidth > 0 ? Math.exp(-ratio * ratio) : 0;
-    double beam = 1 - tail;
-    double beamByLog = 2 * ratio * ratio * tail;
-    double q = share * beam * fall;
-    double qByLogDrive = share * fall * beamByLog;
-    double qByAnode = -fallPower * q / below;
-    double qByScreen = (fallPower * q * a / below - qByLogDrive) / g2;
+    double x = a * inverseScreen;
+    double inverseBelow = 1 / (x + fallOffset);
+    double beam = 1;
+    double beamByLog = 0;
+    if (inverseBeamWidth > 0) {
+      double ratio = drive * inverseBeamWidth * inverseScreen;
+      double tail = Math.exp(-ratio * ratio);
+      beam = 1 - tail;
+      beamByLog = 2 * ratio * ratio * tail;
+    }
+    double fall = share * (1 + fallPart * (1 - x) * inverseBelow);
+    double q = fall * beam;
+    double qByLogDrive = fall * beamByLog;
+    double qByX = -share * fallPart * (1 + fallOffset) * inverseBelow * inverseBelow * beam;
+    double qByAnode = qByX * inverseScreen;
+    double qByScreen = -(qByX * x + qByLogDrive) * inverseScreen;
 
-    double knee = kneePerDrive * drive + KNEE_AT_NO_CURRENT;
-    double z = a / knee;
+    double inverseKnee = 1 / (kneePerDrive * drive + KNEE_AT_NO_CURRENT);
+    double z = a * inverseKnee;
     double sum = 1 + power(z);
     double slope = inverseRoot(sum);
     double h = z * slope;
-    double hByAnode = slope / (sum * knee);
+    double hByAnode = slope * inverseKnee / sum;
     double hByLogDrive = -hByAnode * z * kneePerDrive * drive;
 
     double part = 1 / (1 + q);
@@ -122,10 +125,6 @@ final class ScreenDivision {
     return anode < ANODE_ROUNDING
         ? anode * anode / (2 * ANODE_ROUNDING)
         : anode - 0.5 * ANODE_ROUNDING;
-  }
-
-  private double fallen(double ratio) {
-    return fallPower == 1 ? ratio : Math.pow(ratio, fallPower);
   }
 
   /** z^n; the usual powers without the general function, which is slow. */

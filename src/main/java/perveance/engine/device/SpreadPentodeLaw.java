@@ -36,6 +36,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
   private final SpreadCathode remote;
   private final ScreenDivision division;
   private final GridCurrent gridCurrent;
+  private final double inversePerveance;
 
   /**
    * Makes the law.
@@ -46,6 +47,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     this.values = values;
     this.cathode = part(values, 1 - values.remoteShare(), 1);
     this.remote = part(values, values.remoteShare(), values.remotePenetration());
+    this.inversePerveance = 1 / values.perveance();
     this.division = new ScreenDivision(values);
     this.gridCurrent =
         new GridCurrent(values.gridPerveance(), values.gridOnset(), values.thermalVoltage());
@@ -97,7 +99,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     }
     if (total > 0) {
       out.set(ElectrodeCurrents.ANODE, total, influence * byPull, byGrid, byPull);
-      double root = Math.cbrt(total / values.perveance());
+      double root = Math.cbrt(total * inversePerveance);
       division.divide(root * root, va, vg2, out);
     } else {
       out.clear();

@@ -15,8 +15,8 @@ import java.util.Map;
  * @param remotePenetration penetration factor there over D0, 1 or above [1]
  * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
  * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
- * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
- * @param shareOffset x0, anode to screen voltage ratio below which it falls no more, above 0 [1]
+ * @param shareFall b, part of the share that falls as the anode is raised, 0 to 1 [1]
+ * @param shareOffset x0, anode to screen voltage ratio that sets how steeply, above 0 [1]
  * @param beamWidth r0, drive ratio at which the beams fill the screen's gaps; 0 where not aligned
  *     [1]
  * @param knee c, knee voltage as a part of the voltage that draws the current at no bias, above 0
@@ -55,7 +55,7 @@ public record SpreadPentodeParameters(
     within("remotePenetration", remotePenetration, 1, 100);
     within("anodeInfluence", anodeInfluence, 0, 1);
     positive("screenShare", screenShare);
-    within("shareFall", shareFall, 0, 3);
+    within("shareFall", shareFall, 0, 1);
     positive("shareOffset", shareOffset);
     within("beamWidth", beamWidth, 0, 10);
     positive("knee", knee);
@@ -75,8 +75,8 @@ public record SpreadPentodeParameters(
    * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
    * @param anodeInfluence L, part of the anode voltage that adds to the screen's pull, 0 to 1 [1]
    * @param screenShare k, Ig2/Ia with anode and screen at the same voltage, above 0 [1]
-   * @param shareFall b, power by which the share falls as the anode is raised, 0 to 3 [1]
-   * @param shareOffset x0, anode to screen voltage ratio below which it falls no more, above 0 [1]
+   * @param shareFall b, part of the share that falls as the anode is raised, 0 to 1 [1]
+   * @param shareOffset x0, anode to screen voltage ratio that sets how steeply, above 0 [1]
    * @param beamWidth r0, drive ratio at which the beams fill the screen's gaps; 0 where not aligned
    *     [1]
    * @param knee c, knee voltage as a part of the voltage that draws the current at no bias, above 0
@@ -181,8 +181,8 @@ public record SpreadPentodeParameters(
         parameter(
             7, anodeInfluence, "1", "part of the anode voltage that adds to the screen's pull"),
         parameter(8, screenShare, "1", "Ig2/Ia at equal anode and screen voltage, wide beams"),
-        parameter(9, shareFall, "1", "power by which the screen's share falls with anode voltage"),
-        parameter(10, shareOffset, "1", "Va/Vg2 below which the share falls no more"),
+        parameter(9, shareFall, "1", "part of the screen's share that falls with anode voltage"),
+        parameter(10, shareOffset, "1", "Va/Vg2 that sets how steeply the share falls"),
         parameter(
             11, beamWidth, "1", "drive at which beams fill the screen's gaps, 0 if not aligned"),
         parameter(12, knee, "1", "knee over the voltage that draws the current at no bias"),

@@ -12,7 +12,7 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
   private final DeviceLaw law =
       new SpreadPentodeLaw(
           new SpreadPentodeParameters(
-              3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3, -0.7,
+              3.6e-3, 0.5, 1 / 20.8, 0.37, 0.3, 0.04, 0.114, 0.2, 0.5, 0, 0.08, 1.5, 1e-3, -0.7,
               0.09));
 
   @Override
@@ -103,7 +103,7 @@ class SpreadPentodeLawTest extends DeviceLawContractTest {
     DeviceLaw even =
         new SpreadPentodeLaw(
             new SpreadPentodeParameters(
-                3.6e-3, 0.5, 1 / 20.8, 0, 0, 0.04, 0.114, 0.13, 0.1, 0, 0.08, 1.5, 1e-3, -0.7,
+                3.6e-3, 0.5, 1 / 20.8, 0, 0, 0.04, 0.114, 0.2, 0.5, 0, 0.08, 1.5, 1e-3, -0.7,
                 0.09));
     ElectrodeCurrents out = new ElectrodeCurrents();
     even.evaluate(250, -9, 250, out);

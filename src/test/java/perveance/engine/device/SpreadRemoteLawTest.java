@@ -5,7 +5,7 @@ class SpreadRemoteLawTest extends DeviceLawContractTest {
   private final DeviceLaw law =
       new SpreadPentodeLaw(
           new SpreadPentodeParameters(
-              8e-4, 0.4, 0.072, 0.57, 0.3, 0.05, 3, 0.001, 0.3, 0.13, 0.1, 0, 0.08, 1.5, 2.8e-4,
+              8e-4, 0.4, 0.072, 0.57, 0.3, 0.05, 3, 0.001, 0.3, 0.2, 0.5, 0, 0.08, 1.5, 2.8e-4,
               -0.6, 0.0862));
 
   @Override

@@ -13,11 +13,11 @@ package perveance.engine.device.fit;
  */
 public enum PentodeClass {
   /** Suppressor grid, cathode current of 25 mA or less. */
-  SMALL("pentodes of small current", 0.5, 0.05, 0.003, 0.13, 0.1, 0, 0.08, 1.5),
+  SMALL("pentodes of small current", 0.5, 0.05, 0.003, 0.2, 0.5, 0, 0.08, 1.5),
   /** The same with a grid of uneven pitch for remote cut-off. */
-  REMOTE("remote cut-off pentodes", 0.5, 0.05, 0.003, 0.13, 0.1, 0, 0.08, 1.5),
+  REMOTE("remote cut-off pentodes", 0.5, 0.05, 0.003, 0.2, 0.5, 0, 0.08, 1.5),
   /** Suppressor grid, larger currents. */
-  POWER("output pentodes", 0.4, 0.15, 0.03, 0.13, 0.1, 0, 0.065, 1.5),
+  POWER("output pentodes", 0.4, 0.15, 0.03, 0.2, 0.5, 0, 0.065, 1.5),
   /** Beam plates and aligned grids. */
   BEAM("beam tetrodes", 0.4, 0.15, 0.03, 1, 0.8, 0.35, 0.09, 3);
 
@@ -109,7 +109,7 @@ public enum PentodeClass {
   }
 
   /**
-   * Usual power by which the screen's share falls.
+   * Usual part of the screen's share that falls as the anode is raised.
    *
    * @return b [1]
    */
@@ -118,7 +118,7 @@ public enum PentodeClass {
   }
 
   /**
-   * Usual anode to screen voltage ratio below which the share falls no more.
+   * Usual anode to screen voltage ratio that sets how steeply the share falls.
    *
    * @return x0 [1]
    */

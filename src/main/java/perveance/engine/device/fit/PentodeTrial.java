@@ -139,7 +139,7 @@ final class PentodeTrial {
     start.add(FitParameter.between("spread", pentodeClass.spread(), 0, 1));
     start.add(FitParameter.between("anode influence", pentodeClass.anodeInfluence(), 0, 1));
     start.add(FitParameter.between("screen share", 0.12, 0, 2));
-    start.add(FitParameter.between(beam ? "share offset" : "share fall", fall, 0, 10));
+    start.add(FitParameter.between(beam ? "share offset" : "share fall", fall, 0, beam ? 10 : 1));
     if (beam) {
       start.add(FitParameter.positive("beam width", pentodeClass.beamWidth()));
     } else if (remote) {

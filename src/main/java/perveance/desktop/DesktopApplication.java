@@ -20,9 +20,9 @@ import org.jspecify.annotations.Nullable;
 import perveance.desktop.view.DialogAsking;
 import perveance.desktop.view.MainWindow;
 import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.DocumentException;
 import perveance.desktop.viewmodel.Settings;
-import perveance.desktop.viewmodel.Workbench;
 
 /** The desktop program. */
 public final class DesktopApplication extends Application {
@@ -57,8 +57,7 @@ public final class DesktopApplication extends Application {
     Executor afterPause =
         CompletableFuture.delayedExecutor(PAUSE_MILLISECONDS, TimeUnit.MILLISECONDS, thorough);
     Desk desk =
-        Wiring.desk(
-            home, settings, asking, new Workbench.Desks(quick, afterPause, Platform::runLater));
+        Wiring.desk(home, settings, asking, new Desks(quick, afterPause, Platform::runLater));
     MainWindow window = new MainWindow(desk);
     Thread.currentThread().setUncaughtExceptionHandler((t, e) -> tell(asking, e));
     stage.setTitle("Perveance");

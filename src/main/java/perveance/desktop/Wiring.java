@@ -3,12 +3,16 @@ package perveance.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import perveance.desktop.viewmodel.Asking;
 import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.Document;
 import perveance.desktop.viewmodel.Documents;
+import perveance.desktop.viewmodel.Engine;
+import perveance.desktop.viewmodel.PointDrag;
 import perveance.desktop.viewmodel.Settings;
 import perveance.desktop.viewmodel.Starters;
 import perveance.desktop.viewmodel.Workbench;
@@ -19,15 +23,29 @@ import perveance.files.device.DeviceFiles;
 final class Wiring {
   private Wiring() {}
 
+  static Desk desk(Path home, ObjectProperty<Settings> settings, Asking asking, Desks desks) {
+    return desk(home, UnaryOperator.identity(), settings, asking, desks);
+  }
+
+  /** With an engine that is looked at or added to on its way to the window. */
   static Desk desk(
-      Path home, ObjectProperty<Settings> settings, Asking asking, Workbench.Desks desks) {
+      Path home,
+      UnaryOperator<Engine> around,
+      ObjectProperty<Settings> settings,
+      Asking asking,
+      Desks desks) {
     DeviceFiles devices = new DeviceFiles(List.of(home.resolve("devices")));
     Chassis first = Starters.example(settings.get());
-    Workbench bench = new Workbench(first, new EngineRoom(devices), desks);
+    Workbench bench = new Workbench(first, around.apply(new EngineRoom(devices)), desks);
     Documents documents = new FileDocuments(devices, home);
     Documents.Opened opened = new Documents.Opened(Optional.empty(), "", false, first);
     return new Desk(
-        bench, new Document(bench, documents, opened), settings, new SheetPress(), asking);
+        bench,
+        new Document(bench, documents, opened),
+        settings,
+        new SheetPress(),
+        asking,
+        new PointDrag(bench, desks.quick(), desks.foreground()));
   }
 
   static ObjectProperty<Settings> settings(Path home) {

@@ -15,8 +15,8 @@ import javax.imageio.ImageIO;
 import org.jspecify.annotations.Nullable;
 import perveance.desktop.view.MainWindow;
 import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.Settings;
-import perveance.desktop.viewmodel.Workbench;
 
 /**
  * Draws every view at two sizes, light and dark, into pictures for people to look at.
@@ -78,7 +78,7 @@ public final class WindowPictures {
         () -> {
           ObjectProperty<Settings> settings =
               new SimpleObjectProperty<>(Settings.USUAL.withDark(dark));
-          Workbench.Desks desks = new Workbench.Desks(Runnable::run, Runnable::run, Runnable::run);
+          Desks desks = new Desks(Runnable::run, Runnable::run, Runnable::run);
           Desk desk = Wiring.desk(folder.resolve("home"), settings, new Answers(), desks);
           MainWindow window = new MainWindow(desk);
           if (file != null) {

@@ -1,13 +1,19 @@
 package perveance.desktop.view;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import javafx.geometry.Bounds;
+import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.Label;
+import javafx.scene.control.ToggleButton;
+import javafx.scene.control.ToggleGroup;
+import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.StackPane;
 import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.PointDrag;
 import perveance.desktop.viewmodel.Workbench;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
@@ -31,6 +37,7 @@ final class CharacteristicsView extends StackPane {
   private Optional<PlotDescription> frame = Optional.empty();
   private String drawnFor = "";
   private boolean held;
+  private final PointDragging dragging;
 
   CharacteristicsView(Desk desk, PlotFonts fonts) {
     this.desk = desk;
@@ -46,7 +53,31 @@ final class CharacteristicsView extends StackPane {
     lines.setOnMouseExited(e -> readout.setVisible(false));
     setAccessibleRole(AccessibleRole.IMAGE_VIEW);
     setId("characteristics");
-    new PointDragging(desk, this, lines);
+    dragging = new PointDragging(desk, desk.drag(), this, lines);
+    movers();
+  }
+
+  /** What moves when the operating point is dragged: the person chooses. */
+  private void movers() {
+    ToggleGroup group = new ToggleGroup();
+    HBox bar = new HBox(8, Bits.label("The point moves by", "soft", "small"));
+    for (PointDrag.Mover mover : PointDrag.Mover.values()) {
+      ToggleButton choice = new ToggleButton(desk.say(mover.word()));
+      choice.getStyleClass().setAll("tab-word", "small");
+      choice.setToggleGroup(group);
+      choice.setSelected(mover == PointDrag.Mover.BIAS);
+      choice.setId("mover-" + mover.name().toLowerCase(Locale.ROOT));
+      choice.setOnAction(
+          e -> {
+            choice.setSelected(true);
+            dragging.mover(mover);
+          });
+      bar.getChildren().add(choice);
+    }
+    bar.setAlignment(Pos.CENTER_RIGHT);
+    bar.setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
+    StackPane.setAlignment(bar, Pos.BOTTOM_LEFT);
+    getChildren().add(bar);
   }
 
   /** While a hand drags, the axes stand still. */
@@ -59,6 +90,10 @@ final class CharacteristicsView extends StackPane {
 
   Optional<PlotDescription> frame() {
     return frame;
+  }
+
+  LoadLineLayer lines() {
+    return lines;
   }
 
   PlotScale scale() {
@@ -109,7 +144,7 @@ final class CharacteristicsView extends StackPane {
     setAccessibleText(
         desk.say(
             String.format(
-                java.util.Locale.ROOT,
+                Locale.ROOT,
                 "Anode characteristics, operating point %.0f V, %.2f mA",
                 view.get().anode(),
                 1e3 * view.get().current())));
@@ -127,7 +162,7 @@ final class CharacteristicsView extends StackPane {
       double milliamperes = s.valueY(y);
       readout.setText(
           String.format(
-              java.util.Locale.ROOT,
+              Locale.ROOT,
               "%.0f V  %.2f mA  %.2f W",
               volts,
               milliamperes,

@@ -96,6 +96,14 @@ public final class MainWindow {
     files.open(file);
   }
 
+  Commands commands() {
+    return commands;
+  }
+
+  PlotCard plots() {
+    return plots;
+  }
+
   private void layOut() {
     root.getStyleClass().add("window");
     root.setTop(top);

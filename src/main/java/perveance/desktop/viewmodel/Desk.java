@@ -10,13 +10,15 @@ import javafx.beans.property.ObjectProperty;
  * @param settings what is kept between runs
  * @param press makes the sheet
  * @param asking asks the person
+ * @param drag what a hand on the characteristics does
  */
 public record Desk(
     Workbench bench,
     Document document,
     ObjectProperty<Settings> settings,
     Press press,
-    Asking asking) {
+    Asking asking,
+    PointDrag drag) {
   /**
    * A text in the words that the person has chosen.
    *

@@ -70,7 +70,7 @@ public final class Document {
    */
   public void show(Documents.Opened other) {
     opened.set(other);
-    bench.replace(other.chassis(), other.file().orElse(null));
+    bench.replace(other.chassis());
   }
 
   /**

@@ -58,8 +58,20 @@ public final class StageStarter {
           Map.entry("secondary_load", "8R"),
           Map.entry("connection", "triode"));
 
+  /** Where they differ in a stage with an output transformer. */
+  private static final Map<String, String> USUAL_OUTPUT =
+      Map.of(
+          "cathode_resistor",
+          "330R",
+          "cathode_bypass",
+          "100u",
+          "drive",
+          "5 V",
+          "grid_leak",
+          "470k");
+
   private static final List<String> USUAL_VALVES =
-      List.of("12AX7", "12AU7", "300B", "EL84", "EL34");
+      List.of("12AX7", "12AU7", "EL84", "300B", "EL34");
   private static final List<String> WELCOME = List.of("grid_leak", "coupling", "load", "drive");
 
   private final Engine engine;
@@ -94,8 +106,12 @@ public final class StageStarter {
     return Optional.empty();
   }
 
+  private static boolean isOutput(StageKind kind) {
+    return kind.keys().stream().anyMatch(k -> k.key().equals("primary"));
+  }
+
   private List<String> valves(StageKind kind) {
-    boolean output = kind.keys().stream().anyMatch(k -> k.key().equals("primary"));
+    boolean output = isOutput(kind);
     List<String> known =
         USUAL_VALVES.stream().filter(v -> engine.devices().find(v).isPresent()).toList();
     if (!output) {
@@ -120,12 +136,28 @@ public final class StageStarter {
       if (complaint.isEmpty()) {
         return Optional.of(entry);
       }
-      if (!tried.add(complaint.get().key())) {
+      StageEntry before = entry;
+      for (String key : cures(complaint.get(), kind)) {
+        if (entry.equals(before) && tried.add(key)) {
+          entry = with(chassis, entry, kind, key, valve);
+        }
+      }
+      if (entry.equals(before)) {
         return Optional.empty();
       }
-      entry = with(chassis, entry, kind, complaint.get().key(), valve);
     }
     return Optional.empty();
+  }
+
+  /** The key complained of, then every other key that the complaint says would do. */
+  private static List<String> cures(ChassisComplaint complaint, StageKind kind) {
+    List<String> cures = new ArrayList<>(List.of(complaint.key()));
+    for (KeySpec spec : kind.keys()) {
+      if (List.of(complaint.expected().split("[^a-z0-9_]+")).contains(spec.key())) {
+        cures.add(spec.key());
+      }
+    }
+    return cures;
   }
 
   /** Keys that hardly any stage is without, where the kind takes them. */
@@ -160,7 +192,7 @@ public final class StageStarter {
           case DEVICE -> valve;
           case SUPPLY -> chassis.supplies().isEmpty() ? "" : chassis.supplies().get(0).name();
           case STAGE -> "";
-          default -> key.equals("ref2") ? entry.ref() + "b" : USUAL.getOrDefault(key, "");
+          default -> key.equals("ref2") ? entry.ref() + "b" : usual(kind, key);
         };
     if (text.isEmpty()) {
       return entry;
@@ -172,6 +204,11 @@ public final class StageStarter {
             && accepted.edit() instanceof perveance.app.Edit.SetKey set
         ? entry.with(key, set.setting())
         : entry;
+  }
+
+  private static String usual(StageKind kind, String key) {
+    String plain = USUAL.getOrDefault(key, "");
+    return isOutput(kind) ? USUAL_OUTPUT.getOrDefault(key, plain) : plain;
   }
 
   /**

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Executor;
 import java.util.function.BiFunction;
+import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
@@ -37,11 +38,11 @@ public final class Workbench {
   private static final AnalysisOptions QUICK = new AnalysisOptions(0, 1, false, true);
 
   private final Engine engine;
+  private final Desks desks;
   private final ReadOnlyObjectWrapper<History> history;
   private final ReadOnlyBooleanWrapper settled = new ReadOnlyBooleanWrapper();
   private final ReadOnlyObjectWrapper<@Nullable ChassisAnswer> answer =
       new ReadOnlyObjectWrapper<>();
-  private final ReadOnlyObjectWrapper<@Nullable Path> place = new ReadOnlyObjectWrapper<>();
   private final ReadOnlyObjectWrapper<Chassis> saved;
   private final ReadOnlyStringWrapper message = new ReadOnlyStringWrapper("");
   private final StringProperty chosenStage = new SimpleStringProperty("");
@@ -58,6 +59,7 @@ public final class Workbench {
    */
   public Workbench(Chassis start, Engine engine, Desks desks) {
     this.engine = engine;
+    this.desks = desks;
     history = new ReadOnlyObjectWrapper<>(History.of(start));
     saved = new ReadOnlyObjectWrapper<>(start);
     live = question(QUICK, desks.quick(), desks.foreground());
@@ -67,13 +69,22 @@ public final class Workbench {
   }
 
   /**
-   * Where things run.
+   * A line of questions beside the main one, of which only the latest is answered.
    *
-   * @param quick answers without bands
-   * @param thorough answers with bands
-   * @param foreground where answers arrive: the thread of the window
+   * @param work answers a question
+   * @param done receives the answer, in the foreground
+   * @param <Q> question
+   * @param <A> answer
+   * @return where to ask
    */
-  public record Desks(Executor quick, Executor thorough, Executor foreground) {}
+  public <Q, A> LatestOnly<Q, A> aside(BiFunction<Q, Progress, A> work, Consumer<A> done) {
+    return new LatestOnly<>(
+        desks.quick(),
+        desks.foreground(),
+        work,
+        done,
+        e -> message.set(String.valueOf(e.getMessage())));
+  }
 
   private LatestOnly<Chassis, ChassisAnswer> question(
       AnalysisOptions options, Executor background, Executor foreground) {
@@ -130,15 +141,6 @@ public final class Workbench {
    */
   public Engine engine() {
     return engine;
-  }
-
-  /**
-   * File of the chassis.
-   *
-   * @return file, null when it has none yet
-   */
-  public ReadOnlyObjectProperty<@Nullable Path> place() {
-    return place.getReadOnlyProperty();
   }
 
   /**
@@ -282,12 +284,10 @@ public final class Workbench {
    * Takes another chassis in place of this one; its history starts anew.
    *
    * @param chassis the chassis
-   * @param file its file, null when it has none
    */
-  public void replace(Chassis chassis, @Nullable Path file) {
+  public void replace(Chassis chassis) {
     history.set(History.of(chassis));
     saved.set(chassis);
-    place.set(file);
     chooseFirst(chassis);
     recompute();
   }
@@ -316,7 +316,6 @@ public final class Workbench {
    */
   public void saved(Path file) {
     saved.set(chassis());
-    place.set(file);
     message.set("Saved " + file);
   }
 

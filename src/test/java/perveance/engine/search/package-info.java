@@ -1,0 +1,3 @@
+/** Tests of the proposals. */
+@org.jspecify.annotations.NullMarked
+package perveance.engine.search;

@@ -6,7 +6,7 @@ import perveance.engine.numeric.Harmonics;
  * One period of a steady signal: waveforms of all voltages and currents, means and harmonics;
  * immutable. Elements and nodes are those of {@link #circuit}.
  */
-public sealed class PeriodicState permits MidbandSolution {
+public sealed class PeriodicState permits MidbandSolution, ReactiveSolution {
   private final Circuit circuit;
   private final CycleRecord cycle;
 

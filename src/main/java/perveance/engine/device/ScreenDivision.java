@@ -63,7 +63,7 @@ final class ScreenDivision {
    */
   void divide(double drive, double anode, double screen, ElectrodeCurrents out) {
     double a = rounded(anode);
-    double aSlope = Math.min(1, Math.max(0, anode / ANODE_ROUNDING));
+    double aSlope = anode >= ANODE_ROUNDING ? 1 : anode > 0 ? anode / ANODE_ROUNDING : 0;
     // bent to 1 / (2 - Vg2) below one volt, so that it stays positive
     double inverseScreen = 1 / (screen >= 1 ? screen : 1 / (2 - screen));
     double g2Slope = screen >= 1 ? 1 : 1 / (inverseScreen * inverseScreen);

@@ -110,7 +110,11 @@ public final class SpreadPentodeLaw implements DeviceLaw {
   }
 
   private static double bounded(double voltage) {
-    return Math.max(-HIGHEST_VOLTAGE, Math.min(HIGHEST_VOLTAGE, voltage));
+    // two comparisons that are never true cost less than the general minimum and maximum
+    if (voltage > HIGHEST_VOLTAGE) {
+      return HIGHEST_VOLTAGE;
+    }
+    return voltage < -HIGHEST_VOLTAGE ? -HIGHEST_VOLTAGE : voltage;
   }
 
   @Override

@@ -24,7 +24,7 @@ class AccuracyReportTest {
 
   /** All that is compared; another kind of device adds its stages here. */
   private static final List<AccuracySource> SOURCES =
-      List.of(new LibraryEvidence(), new TriodeStageAccuracy());
+      List.of(new LibraryEvidence(), new TriodeStageAccuracy(), new PentodeStageAccuracy());
 
   private static String report() {
     List<AccuracyLine> lines = new ArrayList<>();

@@ -23,13 +23,8 @@ class CoupledPentodesTest {
    */
   @Test
   void currentAndGainOfTheEf86() {
-    List<Double> current = new ArrayList<>();
-    List<Double> gain = new ArrayList<>();
-    for (ReferenceTable.Row row : rows()) {
-      TestCoupledPentode stage = stage(row);
-      current.add(1e3 * stage.current() / row.number("cathode_current_mA") - 1);
-      gain.add(stage.gain() / row.number("gain") - 1);
-    }
+    List<Double> current = currentErrors();
+    List<Double> gain = gainErrors();
     assertEquals(7, gain.size());
     assertTrue(ResistanceCoupledTriodesTest.worst(current) <= 0.06, "current " + current);
     assertTrue(ResistanceCoupledTriodesTest.median(gain) <= 0.06, "gain " + gain);
@@ -46,6 +41,16 @@ class CoupledPentodesTest {
       gain.add(stage(row).gainAtOutput(row.number("output_V_rms")) / row.number("gain") - 1);
     }
     assertTrue(ResistanceCoupledTriodesTest.median(gain) <= 0.12, "gain " + gain);
+  }
+
+  static List<Double> currentErrors() {
+    return rows().stream()
+        .map(row -> 1e3 * stage(row).current() / row.number("cathode_current_mA") - 1)
+        .toList();
+  }
+
+  static List<Double> gainErrors() {
+    return rows().stream().map(row -> stage(row).gain() / row.number("gain") - 1).toList();
   }
 
   private static List<ReferenceTable.Row> rows() {

@@ -37,6 +37,13 @@ final class LawComparison {
             row(type, "Najnudel et al. 2020", SecondOpinions.najnudel(type), device.evidence()));
       }
     }
+    for (String type : new String[] {"EL34", "6L6GC", "KT88", "6550"}) {
+      Device device = Library.device(type);
+      List<Evidence> evidence =
+          device.evidence().stream().filter(e -> e.connection().equals("pentode")).toList();
+      text.append(row(type, "this library", device.law(), evidence));
+      text.append(row(type, "Koren 1996", FormulaPentode.koren(type), evidence));
+    }
     return text.toString();
   }
 

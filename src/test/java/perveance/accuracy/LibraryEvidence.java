@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Set;
 import perveance.engine.device.Device;
 import perveance.engine.device.Evidence;
+import perveance.engine.device.fit.Figure;
 import perveance.engine.device.fit.LawReadings;
 import perveance.engine.device.fit.Residual;
 
@@ -59,13 +60,32 @@ final class LibraryEvidence implements AccuracySource {
     if (evidence.kind().equals("curve")) {
       return tied + "chart";
     }
+    if (evidence.kind().equals("cut-off") && residual.figure() == Figure.MUTUAL_CONDUCTANCE) {
+      return "gm at remote cut-off";
+    }
+    if (evidence.connection().equals("pentode")) {
+      return pentode(residual.figure());
+    }
     return tied
         + switch (residual.figure()) {
-          case CURRENT -> "tabulated current";
+          case CURRENT ->
+              evidence.connection().equals("diode")
+                  ? "current at the printed drop"
+                  : "tabulated current";
           case SCREEN_CURRENT -> "tabulated screen current";
           case AMPLIFICATION, ANODE_RESISTANCE, MUTUAL_CONDUCTANCE -> "tabulated mu, ra, gm";
           case CUT_OFF -> "cut-off voltage";
         };
+  }
+
+  private static String pentode(Figure figure) {
+    return switch (figure) {
+      case CURRENT -> "tabulated current";
+      case SCREEN_CURRENT -> "tabulated screen current";
+      case AMPLIFICATION, MUTUAL_CONDUCTANCE -> "tabulated gm, mu(g1-g2)";
+      case ANODE_RESISTANCE -> "tabulated ra";
+      case CUT_OFF -> "cut-off voltage";
+    };
   }
 
   private static String sources(List<Residual> residuals) {

@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
@@ -16,7 +17,23 @@ import org.junit.jupiter.api.Test;
  */
 @Tag("published")
 class OutputPentodesTest {
-  record Row(String text, boolean predicted, double power, double distortion, double screen) {}
+  /**
+   * Errors of one row.
+   *
+   * @param type device
+   * @param text type, volts and load
+   * @param predicted false where the row set the knee of its class
+   * @param power relative [1]
+   * @param distortion in percentage points
+   * @param screen relative error of the mean screen current at drive, empty where not printed [1]
+   */
+  record Row(
+      String type,
+      String text,
+      boolean predicted,
+      double power,
+      double distortion,
+      OptionalDouble screen) {}
 
   static List<Row> singleEnded() {
     List<Row> rows = new ArrayList<>();
@@ -54,15 +71,18 @@ class OutputPentodesTest {
   }
 
   private static Row result(ReferenceTable.Row row, TestOutputPentode.Driven driven, int valves) {
-    double screen = row.maybe("screen_current_at_drive_mA").orElse(Double.NaN);
+    OptionalDouble screen = row.maybe("screen_current_at_drive_mA");
     String text =
         String.join(" ", row.text("type"), row.text("anode_voltage_V"), row.text("load_ohm"));
     return new Row(
+        row.text("type"),
         text,
         valves == 2 || row.text("set_knee").equals("no"),
         driven.power() / row.number("power_W") - 1,
         driven.distortion() - row.number("distortion_percent"),
-        1e3 * valves * driven.screenCurrent() / screen - 1);
+        screen.isPresent()
+            ? OptionalDouble.of(1e3 * valves * driven.screenCurrent() / screen.getAsDouble() - 1)
+            : screen);
   }
 
   /**
@@ -108,7 +128,7 @@ class OutputPentodesTest {
   }
 
   /**
-   * Mean screen current at full drive, all 19 rows that print it: it says how the division changes
+   * Mean screen current at full drive, all 18 rows that print it: it says how the division changes
    * along the load line. Within 20 % median (the tolerance of a tabulated screen current).
    */
   @Test
@@ -116,7 +136,7 @@ class OutputPentodesTest {
     List<Row> rows = new ArrayList<>(singleEnded());
     rows.addAll(pushPull());
     List<Double> errors =
-        rows.stream().map(Row::screen).filter(e -> !e.isNaN()).map(Math::abs).toList();
+        rows.stream().flatMap(row -> row.screen.stream().boxed()).map(Math::abs).toList();
     assertEquals(18, errors.size());
     assertTrue(ResistanceCoupledTriodesTest.median(errors) <= 0.20, rows.toString());
   }

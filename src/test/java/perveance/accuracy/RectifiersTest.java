@@ -53,27 +53,30 @@ class RectifiersTest {
    */
   @Test
   void outputsAtTheReservoirArePredicted() {
-    List<Double> errors = new ArrayList<>();
-    for (String type : List.of("GZ34", "5Y3GT")) {
-      Device device = Library.device(type);
-      for (RectifierOutput row : device.rectifier().orElseThrow().outputs()) {
-        if (row.filter() == RectifierFilter.CHOKE) {
-          continue; // marked low, and the choke's resistance is not told
-        }
-        TestRectifier rectifier =
-            new TestRectifier(
-                device.law(),
-                row.anodeVoltage(),
-                row.resistance().orElseThrow(),
-                row.capacitance().orElseThrow(),
-                50);
-        double error = rectifier.output(row.outputCurrent()) / row.outputVoltage() - 1;
-        assertEquals(0, error, 0.05, type + " " + row);
-        errors.add(error);
-      }
-    }
+    List<Double> errors = new ArrayList<>(outputErrors("GZ34"));
+    errors.addAll(outputErrors("5Y3GT"));
     assertEquals(8, errors.size());
     assertTrue(ResistanceCoupledTriodesTest.median(errors) <= 0.03, errors.toString());
+    assertTrue(ResistanceCoupledTriodesTest.worst(errors) <= 0.05, errors.toString());
+  }
+
+  static List<Double> outputErrors(String type) {
+    List<Double> errors = new ArrayList<>();
+    Device device = Library.device(type);
+    for (RectifierOutput row : device.rectifier().orElseThrow().outputs()) {
+      if (row.filter() == RectifierFilter.CHOKE) {
+        continue; // marked low, and the choke's resistance is not told
+      }
+      TestRectifier rectifier =
+          new TestRectifier(
+              device.law(),
+              row.anodeVoltage(),
+              row.resistance().orElseThrow(),
+              row.capacitance().orElseThrow(),
+              50);
+      errors.add(rectifier.output(row.outputCurrent()) / row.outputVoltage() - 1);
+    }
+    return errors;
   }
 
   /** Limits by voltage: GZ34, Philips (memory): 250 mA up to 450 V, 200 at 500, 160 at 550. */

@@ -15,9 +15,6 @@ import org.junit.jupiter.params.provider.MethodSource;
 import perveance.engine.base.BadInputException;
 import perveance.engine.device.Device;
 import perveance.engine.device.LawParameter;
-import perveance.engine.device.SpaceChargeDiodeLaw;
-import perveance.engine.device.SpreadPentodeLaw;
-import perveance.engine.device.SpreadTriodeLaw;
 import perveance.engine.device.fit.Filament;
 import perveance.engine.device.fit.FitConditions;
 import perveance.engine.device.fit.FitResult;
@@ -29,6 +26,7 @@ import perveance.engine.device.fit.RectifierFitter;
 import perveance.engine.device.fit.TriodeFitter;
 import perveance.files.device.DeviceReader;
 import perveance.files.device.DeviceSheet;
+import perveance.files.device.DeviceWriter;
 import perveance.files.toml.SourceText;
 
 /**
@@ -55,14 +53,6 @@ class LibraryRefitTest {
     };
   }
 
-  private static String lawName(DeviceSheet sheet) {
-    return switch (sheet.kind()) {
-      case "triode" -> SpreadTriodeLaw.NAME;
-      case "rectifier" -> SpaceChargeDiodeLaw.NAME;
-      default -> SpreadPentodeLaw.NAME;
-    };
-  }
-
   /**
    * Pinned: the law in the file is what its evidence gives. Files keep six figures; 1e-5 of the
    * value (or of the unit for numbers near zero) leaves room for their rounding only.
@@ -75,9 +65,10 @@ class LibraryRefitTest {
     DeviceSheet sheet = DeviceReader.readSheet(SourceText.of(file.toString(), text));
     FitResult result = fitter(sheet).fit(sheet.evidence(), conditions(sheet));
     LawFit fit = assertInstanceOf(FitResult.Fitted.class, result, () -> file + ": " + result).fit();
-    String rewritten = FittedSections.replace(text, lawName(sheet), fit);
     if (WRITE) {
-      Files.writeString(file, rewritten);
+      SourceText source = SourceText.of(file.toString(), text);
+      Files.writeString(
+          file, DeviceWriter.update(source, fit.law(), fit.summary(), fit.validity()));
       return;
     }
     Device device = DeviceReader.read(SourceText.of(file.toString(), text));

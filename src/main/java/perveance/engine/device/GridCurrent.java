@@ -21,9 +21,11 @@ final class GridCurrent {
 
   private static final double FAR_BELOW = -60;
   private static final double FAR_ABOVE = 36;
+  private static final double SMALL = 0.005;
 
   private final double perveance;
   private final double width;
+  private final double inverseWidth;
   private final double origin;
 
   /**
@@ -36,67 +38,58 @@ final class GridCurrent {
   GridCurrent(double perveance, double onset, double thermalVoltage) {
     this.perveance = perveance;
     this.width = 1.5 * thermalVoltage;
+    this.inverseWidth = 1 / width;
     double p = Math.cbrt(Math.pow(ONSET_CURRENT / perveance, 2));
     this.origin = onset - width * Math.log(Math.expm1(p / width));
   }
 
   /**
-   * How far the grid is above its own contact potential, as a smooth step.
+   * Writes the grid's current and slopes: its own current, and the part of a current turned back
+   * before the anode that ends on an open grid.
    *
-   * @param grid grid to cathode [V]
-   * @return 0 far below, 1 far above [1]
+   * @param grid grid to cathode, finite [V]
+   * @param turned current that turns back before the anode [A]
+   * @param turnedByAnode its slope by the anode voltage [S]
+   * @param turnedByGrid its slope by the grid voltage [S]
+   * @param out receives the grid's current and slopes
    */
-  double openness(double grid) {
-    double x = (grid - origin) / width;
+  void evaluate(
+      double grid,
+      double turned,
+      double turnedByAnode,
+      double turnedByGrid,
+      ElectrodeCurrents out) {
+    double x = (grid - origin) * inverseWidth;
     if (x < FAR_BELOW) {
-      return 0;
+      out.set(ElectrodeCurrents.GRID, 0, 0, 0, 0);
+      return;
     }
-    return x > FAR_ABOVE ? 1 : 1 / (1 + Math.exp(-x));
+    // a smooth step, 0 where the grid is far below its contact potential, 1 far above
+    double open = x > FAR_ABOVE ? 1 : 1 / (1 + Math.exp(-x));
+    double p = width * softPlus(x, open);
+    double root = perveance * Math.sqrt(p);
+    double step = open * (1 - open) * inverseWidth;
+    out.set(
+        ElectrodeCurrents.GRID,
+        root * p + turned * open,
+        turnedByAnode * open,
+        1.5 * root * open + turnedByGrid * open + turned * step,
+        0);
   }
 
-  /**
-   * The current.
-   *
-   * @param grid grid to cathode [V]
-   * @param openness {@link #openness} at that voltage [1]
-   * @return current into the grid [A]
-   */
-  double current(double grid, double openness) {
-    double p = positivePart(grid, openness);
-    return perveance * p * Math.sqrt(p);
-  }
-
-  /**
-   * Slope of the current.
-   *
-   * @param grid grid to cathode [V]
-   * @param openness {@link #openness} at that voltage [1]
-   * @return dIg/dVg [S]
-   */
-  double slope(double grid, double openness) {
-    return 1.5 * perveance * Math.sqrt(positivePart(grid, openness)) * openness;
-  }
-
-  /**
-   * Slope of the openness.
-   *
-   * @param openness {@link #openness} at a voltage [1]
-   * @return its slope by the grid voltage [1/V]
-   */
-  double opennessSlope(double openness) {
-    return openness * (1 - openness) / width;
-  }
-
-  private double positivePart(double grid, double openness) {
-    if (openness == 0) {
-      return 0;
+  /** ln(1 + e^x), written so that no digits are lost and far below without a logarithm. */
+  private static double softPlus(double x, double open) {
+    if (open < SMALL) {
+      // -ln(1 - open) by its series; the next term is below 1e-16 of the sum
+      return open
+          * (1
+              + open
+                  * (1.0 / 2
+                      + open
+                          * (1.0 / 3
+                              + open
+                                  * (1.0 / 4 + open * (1.0 / 5 + open * (1.0 / 6 + open / 7))))));
     }
-    // ln(1 + e^x) written three ways so that no digits are lost
-    if (openness < 1e-5) {
-      return width * openness * (1 + 0.5 * openness);
-    }
-    return openness < 0.5
-        ? -width * Math.log(1 - openness)
-        : grid - origin - width * Math.log(openness);
+    return open < 0.5 ? -Math.log(1 - open) : x - Math.log(open);
   }
 }

@@ -104,9 +104,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     } else {
       out.clear();
     }
-    double open = gridCurrent.openness(vg);
-    out.set(
-        ElectrodeCurrents.GRID, gridCurrent.current(vg, open), 0, gridCurrent.slope(vg, open), 0);
+    gridCurrent.evaluate(vg, 0, 0, 0, out);
   }
 
   private static double bounded(double voltage) {

@@ -33,6 +33,7 @@ public final class SpreadTriodeLaw implements DeviceLaw {
   private final SpreadCathode cathode;
   private final GridCurrent gridCurrent;
   private final double turnBackSquared;
+  private final double inverseTurnBackSquared;
 
   /**
    * A law with these constants.
@@ -52,6 +53,7 @@ public final class SpreadTriodeLaw implements DeviceLaw {
         new GridCurrent(
             parameters.gridPerveance(), parameters.gridOnset(), parameters.thermalVoltage());
     this.turnBackSquared = parameters.turnBack() * parameters.turnBack();
+    this.inverseTurnBackSquared = 1 / turnBackSquared;
   }
 
   /**
@@ -79,28 +81,23 @@ public final class SpreadTriodeLaw implements DeviceLaw {
     double emitted = out.current(ElectrodeCurrents.ANODE);
     double byAnode = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
     double byGrid = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
-    double refused = 1;
-    double refusedSlope = 0;
+    double turned = emitted;
+    double turnedByAnode = byAnode;
+    double turnedByGrid = byGrid;
     if (va > 0) {
       double root = turnBackSquared / (turnBackSquared + va * va);
-      refused = root * root;
-      refusedSlope = -4 * va * refused * root / turnBackSquared;
+      double refused = root * root;
+      turned *= refused;
+      turnedByGrid *= refused;
+      turnedByAnode = byAnode * refused - 4 * va * inverseTurnBackSquared * root * turned;
     }
-    double passed = 1 - refused;
     out.set(
         ElectrodeCurrents.ANODE,
-        emitted * passed,
-        byAnode * passed - emitted * refusedSlope,
-        byGrid * passed,
+        emitted - turned,
+        byAnode - turnedByAnode,
+        byGrid - turnedByGrid,
         0);
-    double open = gridCurrent.openness(vg);
-    out.set(
-        ElectrodeCurrents.GRID,
-        gridCurrent.current(vg, open) + emitted * refused * open,
-        (byAnode * refused + emitted * refusedSlope) * open,
-        gridCurrent.slope(vg, open)
-            + refused * (byGrid * open + emitted * gridCurrent.opennessSlope(open)),
-        0);
+    gridCurrent.evaluate(vg, turned, turnedByAnode, turnedByGrid, out);
     out.set(ElectrodeCurrents.SCREEN, 0, 0, 0, 0);
   }
 

@@ -19,6 +19,9 @@ final class BandBuilder {
   /** Shares below this are noise of the sampling and are left out. */
   private static final double LEAST_SHARE = 0.01;
 
+  /** Fewer answers than this make no band. */
+  static final int LEAST_SAMPLES = 10;
+
   private final SampleDraws draws;
   private final List<String> causes;
 
@@ -34,26 +37,38 @@ final class BandBuilder {
    * @return the band
    */
   Band band(double[] figure) {
-    double[] sorted = Arrays.stream(figure).filter(Double::isFinite).sorted().toArray();
-    if (sorted.length < figure.length / 2) {
+    double[] sorted = answers(figure);
+    if (sorted.length < LEAST_SAMPLES) {
       throw new IllegalArgumentException("figure has " + sorted.length + " answers");
     }
+    double mean = Statistics.mean(sorted);
+    Arrays.sort(sorted);
     return new Band(
         Statistics.percentileOfSorted(sorted, 0.025),
         Statistics.percentileOfSorted(sorted, 0.975),
-        shares(figure));
+        shares(figure, mean));
   }
 
-  private List<Share> shares(double[] figure) {
-    double mean = Arrays.stream(figure).filter(Double::isFinite).average().orElse(0);
+  /** The samples that have an answer. */
+  static double[] answers(double[] figure) {
+    double[] found = new double[figure.length];
+    int count = 0;
+    for (double value : figure) {
+      if (Double.isFinite(value)) {
+        found[count++] = value;
+      }
+    }
+    return Arrays.copyOf(found, count);
+  }
+
+  private List<Share> shares(double[] figure, double mean) {
+    double[] offset = new double[figure.length];
+    for (int s = 0; s < figure.length; s++) {
+      offset[s] = Double.isFinite(figure[s]) ? figure[s] - mean : 0;
+    }
     Map<String, Double> squares = new LinkedHashMap<>();
     for (int cause = 0; cause < causes.size(); cause++) {
-      double product = 0;
-      for (int s = 0; s < figure.length; s++) {
-        if (Double.isFinite(figure[s])) {
-          product += (figure[s] - mean) * draws.of(cause, s);
-        }
-      }
+      double product = draws.product(cause, offset);
       squares.merge(causes.get(cause), product * product, Double::sum);
     }
     return scaled(squares);

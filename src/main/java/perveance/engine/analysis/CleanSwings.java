@@ -15,7 +15,7 @@ final class CleanSwings {
    * @param composite whether a section may be cut off while others go on
    * @param drive stated peak input, empty when none is stated [V]
    */
-  static CleanSwing of(HeldCharge dynamic, boolean composite, OptionalDouble drive) {
+  static CleanSwing of(StageCurve dynamic, boolean composite, OptionalDouble drive) {
     SwingSearch search = new SwingSearch(dynamic, composite);
     SwingEnd up = search.end(1);
     SwingEnd down = search.end(-1);
@@ -44,7 +44,7 @@ final class CleanSwings {
     return Math.abs(up.source()) <= Math.abs(down.source());
   }
 
-  private static double smallerOutput(HeldCharge dynamic, double source) {
+  private static double smallerOutput(StageCurve dynamic, double source) {
     double smaller = Double.POSITIVE_INFINITY;
     for (int sign = -1; sign <= 1; sign += 2) {
       if (dynamic.move(sign * source)) {
@@ -61,7 +61,7 @@ final class CleanSwings {
   }
 
   /** Goes on from the end on the side where a grid rises, along the slope it has there. */
-  private static double toZeroBias(HeldCharge dynamic, SwingEnd up, SwingEnd down) {
+  private static double toZeroBias(StageCurve dynamic, SwingEnd up, SwingEnd down) {
     double least = Double.POSITIVE_INFINITY;
     for (SwingEnd end : new SwingEnd[] {up, down}) {
       double step = 0.01 * end.source();

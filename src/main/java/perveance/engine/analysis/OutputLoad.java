@@ -1,5 +1,7 @@
 package perveance.engine.analysis;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.circuit.Element;
@@ -13,17 +15,27 @@ final class OutputLoad {
   private OutputLoad() {}
 
   /**
-   * Conductance across an output that is no part of the stage: its named load and what stands for
-   * the next stage.
+   * Resistors across an output that are no part of the stage: its named load and what stands for
+   * the next stage, by their place in the circuit.
    */
+  static List<Integer> loads(StageModel model, Output output) {
+    List<Integer> found = new ArrayList<>();
+    List<Element> elements = model.circuit().elements();
+    for (int i = 0; i < elements.size(); i++) {
+      if (elements.get(i) instanceof Resistor r
+          && across(r, output.plus(), output.minus())
+          && outside(model, output, r)) {
+        found.add(i);
+      }
+    }
+    return found;
+  }
+
+  /** Conductance of all loads of an output [S]. */
   static double conductance(StageModel model, Output output) {
     double sum = 0;
-    int plus = output.plus();
-    int minus = output.minus();
-    for (Element element : model.circuit().elements()) {
-      if (element instanceof Resistor r && across(r, plus, minus) && outside(model, output, r)) {
-        sum += 1 / r.resistance();
-      }
+    for (int load : loads(model, output)) {
+      sum += 1 / ((Resistor) model.circuit().elements().get(load)).resistance();
     }
     return sum;
   }

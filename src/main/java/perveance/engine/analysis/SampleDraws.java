@@ -45,6 +45,16 @@ final class SampleDraws {
     return deviate[cause * samples + sample];
   }
 
+  /** Sum over the samples of a cause's deviate times a figure. */
+  double product(int cause, double[] figure) {
+    int first = cause * samples;
+    double sum = 0;
+    for (int s = 0; s < samples; s++) {
+      sum += deviate[first + s] * figure[s];
+    }
+    return sum;
+  }
+
   int samples() {
     return samples;
   }

@@ -16,6 +16,7 @@ final class Specimen {
   private final SampleDraws draws;
   private final Causes causes;
   private final List<Varied> varied = new ArrayList<>();
+  private final double[] resistance;
 
   /** An element that varies, its place in the circuit and its first cause. */
   private record Varied(int element, Element nominal, int cause) {}
@@ -33,8 +34,12 @@ final class Specimen {
     this.draws = draws;
     this.causes = causes;
     Circuit circuit = solver.circuit();
+    this.resistance = new double[circuit.elements().size()];
     for (int i = 0; i < circuit.elements().size(); i++) {
       Element element = circuit.elements().get(i);
+      if (element instanceof Resistor r) {
+        resistance[i] = r.resistance();
+      }
       int cause = causes.place(element.name());
       if (cause >= 0 && !held.contains(element.name())) {
         varied.add(new Varied(i, element, cause));
@@ -47,8 +52,8 @@ final class Specimen {
     for (Varied v : varied) {
       double deviate = draws.of(v.cause(), sample);
       if (v.nominal() instanceof Resistor r) {
-        solver.setResistance(
-            v.element(), r.resistance() * Math.exp(causes.resistorDeviation() * deviate));
+        resistance[v.element()] = r.resistance() * Math.exp(causes.resistorDeviation() * deviate);
+        solver.setResistance(v.element(), resistance[v.element()]);
       } else if (v.nominal() instanceof VoltageSource s) {
         solver.setVoltage(v.element(), s.voltage() * (1 + causes.supplyDeviation() * deviate));
       } else if (v.nominal() instanceof Valve valve) {
@@ -61,5 +66,10 @@ final class Specimen {
                     Causes.CONTACT * draws.of(v.cause() + 1, sample)));
       }
     }
+  }
+
+  /** A resistor's value in the sample last taken [ohm]. */
+  double resistance(int element) {
+    return resistance[element];
   }
 }

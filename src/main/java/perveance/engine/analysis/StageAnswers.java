@@ -44,7 +44,7 @@ final class StageAnswers {
     StageValues values = chassis.circuits().values(ref);
     Optional<StageSpread> bands = spread.flatMap(s -> s.stage(ref));
     List<DevicePoint> points = withBands(OperatingPoints.of(model.stage(), model.dc()), bands);
-    HeldCharge dynamic = new HeldCharge(model);
+    StageCurve dynamic = new StageCurve(model);
     boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
     OptionalDouble drive = values.find("drive");
     CleanSwing clean = CleanSwings.of(dynamic, composite, drive);

@@ -1,38 +1,36 @@
 package perveance.engine.analysis;
 
-import static perveance.engine.device.ElectrodeCurrents.ANODE;
-import static perveance.engine.device.ElectrodeCurrents.GRID;
-import static perveance.engine.device.ElectrodeCurrents.SCREEN;
-
 import java.util.Arrays;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import perveance.engine.circuit.DcSolver;
-import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.SmallSignal;
-import perveance.engine.device.ElectrodeCurrents;
-import perveance.engine.device.LawKind;
+import perveance.engine.stage.StageCircuit.LoadLineSpec;
 import perveance.engine.stage.StageCircuit.Output;
 import perveance.engine.stage.StageCircuit.StageDevice;
+import perveance.engine.stage.StageCircuit.TestPoint;
 
 /**
  * One stage over many specimens: solves each, reads its operating point and its mid-band figures,
  * and keeps them for the bands.
  */
 final class StageSpread {
-  private static final double DECLARED_SOLVED = 0.5;
+  private static final double SOLVED_ENOUGH = 0.5;
 
   private final StageModel model;
   private final DcSolver solver;
   private final SampleDraws draws;
   private final Causes causes;
   private final RailSpread rails;
-  private final Map<String, double[]> figures = new LinkedHashMap<>();
-  private final Map<String, Map<String, double[]>> deviceFigures = new HashMap<>();
-  private final Map<String, double[]> swings = new LinkedHashMap<>();
-  private final Map<String, double[]> nodes = new HashMap<>();
+  private final SwingSpread swings;
+  private final Map<String, DeviceSamples> devices = new LinkedHashMap<>();
+  private final double[][] nodes;
+  private final double[] gain;
+  private final double[] secondGain;
+  private final double[] outputResistance;
+  private final List<Integer> loads;
   private int solved;
 
   StageSpread(StageModel model, SampleDraws draws, Causes causes, RailSpread rails) {
@@ -41,6 +39,25 @@ final class StageSpread {
     this.draws = draws;
     this.causes = causes;
     this.rails = rails;
+    boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
+    this.swings = new SwingSpread(model, composite, draws.samples());
+    for (StageDevice device : model.stage().devices()) {
+      int element = model.circuit().element(device.ref());
+      devices.put(
+          device.ref(), new DeviceSamples(element, model.valve(device.ref()), draws.samples()));
+    }
+    this.nodes = new double[model.stage().testPoints().size()][];
+    Arrays.setAll(nodes, i -> empty());
+    this.gain = empty();
+    this.secondGain = empty();
+    this.outputResistance = empty();
+    this.loads = OutputLoad.loads(model, model.mainOutput());
+  }
+
+  private double[] empty() {
+    double[] values = new double[draws.samples()];
+    Arrays.fill(values, Double.NaN);
+    return values;
   }
 
   /** Works out all specimens. */
@@ -52,6 +69,8 @@ final class StageSpread {
       return;
     }
     SmallSignal signal = new SmallSignal(solver);
+    swings.follow(solver, nominal);
+    double[] shift = new double[model.stage().devices().size()];
     double[] point = new double[nominal.length];
     for (int s = 0; s < draws.samples(); s++) {
       specimen.take(s);
@@ -59,10 +78,13 @@ final class StageSpread {
       System.arraycopy(nominal, 0, point, 0, point.length);
       if (possible && solver.solveInto(point)) {
         solved++;
-        readDevices(s);
-        readNodes(s);
+        readPoint(s);
         signal.take(solver);
-        readSignal(signal, s);
+        readSignal(signal, specimen, s);
+        if (s % SwingSpread.STRIDE == 0) {
+          readShift(s, shift);
+          swings.read(s, solver, point, shift);
+        }
       }
     }
   }
@@ -88,57 +110,28 @@ final class StageSpread {
     return true;
   }
 
-  private void readDevices(int sample) {
-    for (StageDevice device : model.stage().devices()) {
-      int element = model.circuit().element(device.ref());
-      Valve valve = (Valve) model.circuit().elements().get(element);
-      ElectrodeCurrents at = solver.valve(element);
-      double cathode = solver.voltage(valve.cathode());
-      double anode = solver.voltage(valve.anode());
-      double gm = at.slope(ANODE, GRID);
-      double ga = at.slope(ANODE, ANODE);
-      put(device, "anode", sample, anode - cathode);
-      put(device, "grid", sample, solver.voltage(valve.grid()) - cathode);
-      put(device, "anodeChassis", sample, anode);
-      put(device, "cathodeChassis", sample, cathode);
-      put(device, "gridChassis", sample, solver.voltage(valve.grid()));
-      put(device, "anodeCurrent", sample, at.current(ANODE));
-      put(device, "mutualConductance", sample, gm);
-      put(device, "anodeResistance", sample, ga > 0 ? 1 / ga : Double.NaN);
-      put(device, "amplificationFactor", sample, ga > 0 ? gm / ga : Double.NaN);
-      put(device, "anodeDissipation", sample, (anode - cathode) * at.current(ANODE));
-      if (valve.law().kind() == LawKind.PENTODE) {
-        double screen = solver.voltage(valve.screen());
-        put(device, "screen", sample, screen - cathode);
-        put(device, "screenChassis", sample, screen);
-        put(device, "screenCurrent", sample, at.current(SCREEN));
-        put(device, "screenDissipation", sample, (screen - cathode) * at.current(SCREEN));
-      }
+  private void readPoint(int sample) {
+    for (DeviceSamples device : devices.values()) {
+      device.read(solver, sample);
+    }
+    List<TestPoint> points = model.stage().testPoints();
+    for (int i = 0; i < nodes.length; i++) {
+      nodes[i][sample] = solver.voltage(points.get(i).node());
     }
   }
 
-  private void put(StageDevice device, String figure, int sample, double value) {
-    deviceFigures.computeIfAbsent(device.ref(), r -> new LinkedHashMap<>())
-            .computeIfAbsent(figure, f -> empty())[sample] =
-        value;
-  }
-
-  private void readNodes(int sample) {
-    for (var point : model.stage().testPoints()) {
-      int node = point.node();
-      nodes.computeIfAbsent(model.circuit().nodes().get(node), n -> empty())[sample] =
-          solver.voltage(node);
+  private void readSignal(SmallSignal signal, Specimen specimen, int sample) {
+    Output main = model.mainOutput();
+    gain[sample] = gain(signal, main);
+    if (model.secondOutput().isPresent()) {
+      secondGain[sample] = gain(signal, model.secondOutput().get());
     }
-  }
-
-  private void readSignal(SmallSignal signal, int sample) {
-    List<Output> outputs = model.stage().outputs();
-    Output main = outputs.get(0);
-    put("gain", sample, gain(signal, main));
-    if (outputs.size() > 1) {
-      put("secondGain", sample, gain(signal, outputs.get(1)));
+    double loaded = signal.midbandOutputResistance(main.plus(), main.minus());
+    double outside = 0;
+    for (int load : loads) {
+      outside += 1 / specimen.resistance(load);
     }
-    put("outputResistance", sample, OutputLoad.sourceResistance(model, signal, main));
+    outputResistance[sample] = 1 / (1 / loaded - outside);
   }
 
   private double gain(SmallSignal signal, Output output) {
@@ -149,45 +142,57 @@ final class StageSpread {
         : gain / signal.midbandGain(source, model.stage().inputNode(), 0);
   }
 
-  private void put(String figure, int sample, double value) {
-    figures.computeIfAbsent(figure, f -> empty())[sample] = value;
-  }
-
-  private double[] empty() {
-    double[] values = new double[draws.samples()];
-    Arrays.fill(values, Double.NaN);
-    return values;
+  private void readShift(int sample, double[] shift) {
+    for (int v = 0; v < shift.length; v++) {
+      int cause = causes.place(model.stage().devices().get(v).ref());
+      shift[v] = Causes.CONTACT * draws.of(cause + 1, sample);
+    }
   }
 
   /** Whether enough specimens have an answer to speak of a band. */
   boolean usable() {
-    return solved > DECLARED_SOLVED * draws.samples();
+    return solved > SOLVED_ENOUGH * draws.samples();
   }
 
-  /** Bands of the stage's figures. */
+  /** Bands of the stage's small-signal figures. */
   Map<String, Band> bands() {
+    Map<String, double[]> figures = new LinkedHashMap<>();
+    figures.put("gain", gain);
+    figures.put("secondGain", secondGain);
+    figures.put("outputResistance", outputResistance);
     return bands(figures);
   }
 
   /** Bands of the clean swing. */
   Map<String, Band> swingBands() {
-    return bands(swings);
+    return bands(swings.figures());
   }
 
   /** Bands of one device's operating point. */
   Map<String, Band> bands(String device) {
-    return bands(deviceFigures.getOrDefault(device, Map.of()));
+    DeviceSamples samples = devices.get(device);
+    return samples == null ? Map.of() : bands(samples.figures());
   }
 
   /** Bands of the voltages of the test points, by node name. */
   Map<String, Band> nodeBands() {
-    return bands(nodes);
+    Map<String, double[]> figures = new LinkedHashMap<>();
+    for (int i = 0; i < nodes.length; i++) {
+      int node = model.stage().testPoints().get(i).node();
+      figures.put(model.circuit().nodes().get(node), nodes[i]);
+    }
+    return bands(figures);
   }
 
   private Map<String, Band> bands(Map<String, double[]> from) {
     BandBuilder builder = new BandBuilder(draws, causes.names(model.stage()));
     Map<String, Band> bands = new LinkedHashMap<>();
-    from.forEach((name, values) -> bands.put(name, builder.band(values)));
+    from.forEach(
+        (name, values) -> {
+          if (BandBuilder.answers(values).length >= BandBuilder.LEAST_SAMPLES) {
+            bands.put(name, builder.band(values));
+          }
+        });
     return bands;
   }
 }

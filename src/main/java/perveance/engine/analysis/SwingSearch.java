@@ -29,11 +29,11 @@ final class SwingSearch {
   private static final int REFINEMENTS = 30;
   private static final double ACCURACY = 1e-5;
 
-  private final HeldCharge curve;
+  private final StageCurve curve;
   private final boolean composite;
   private final double[] idleCurrent;
-  private final double idleGain;
   private final double scale;
+  private double idleGain;
 
   /**
    * Starts at idle.
@@ -41,16 +41,50 @@ final class SwingSearch {
    * @param curve the characteristic
    * @param composite whether a section may be cut off while others go on
    */
-  SwingSearch(HeldCharge curve, boolean composite) {
+  SwingSearch(StageCurve curve, boolean composite) {
     this.curve = curve;
     this.composite = composite;
     this.idleCurrent = new double[curve.valves()];
     curve.move(0);
+    readIdle();
+    this.scale = scale();
+    this.idleGain = slope(0);
+  }
+
+  /**
+   * The same limits on another specimen's characteristic, which stands at idle.
+   *
+   * @param specimen the characteristic
+   * @param knee whether a knee is followed, for which the gain at idle is needed
+   */
+  private SwingSearch(SwingSearch nominal, StageCurve specimen, boolean knee) {
+    this.curve = specimen;
+    this.composite = nominal.composite;
+    this.idleCurrent = new double[specimen.valves()];
+    readIdle();
+    this.scale = nominal.scale;
+    this.idleGain = knee ? slope(0) : nominal.idleGain;
+  }
+
+  /** The same limits on another specimen's characteristic, which stands at idle. */
+  SwingSearch on(StageCurve specimen, boolean knee) {
+    return new SwingSearch(this, specimen, knee);
+  }
+
+  private void readIdle() {
     for (int v = 0; v < idleCurrent.length; v++) {
       idleCurrent[v] = curve.anodeCurrent(v);
     }
-    this.scale = scale();
-    this.idleGain = slope(0);
+  }
+
+  /** How far a source voltage is from one kind of end; zero or below beyond it [1]. */
+  double margin(Limit limit, double source) {
+    return switch (limit) {
+      case GRID_CURRENT -> curve.move(source) ? gridRoom() : -1;
+      case CUT_OFF -> curve.move(source) ? cutOffRoom() : -1;
+      case KNEE -> slope(source) / idleGain - KNEE_SHARE;
+      case NONE -> 1;
+    };
   }
 
   /** Source voltage that would bring the first section to an end if all were linear [V]. */
@@ -125,16 +159,16 @@ final class SwingSearch {
     double end = next;
     Limit limit = Limit.KNEE;
     if (grid) {
-      end = zero(clean, next, x -> curve.move(sign * x) ? gridRoom() : -1);
+      end = zero(clean, next, x -> margin(Limit.GRID_CURRENT, sign * x));
       limit = Limit.GRID_CURRENT;
     }
     if (cutOff) {
-      double at = zero(clean, next, x -> curve.move(sign * x) ? cutOffRoom() : -1);
+      double at = zero(clean, next, x -> margin(Limit.CUT_OFF, sign * x));
       limit = at < end || !grid ? Limit.CUT_OFF : limit;
       end = Math.min(at, end);
     }
     if (knee) {
-      double at = zero(before, next, x -> slope(sign * x) / idleGain - KNEE_SHARE);
+      double at = zero(before, next, x -> margin(Limit.KNEE, sign * x));
       limit = at < end || !(grid || cutOff) ? Limit.KNEE : limit;
       end = Math.min(at, end);
     }

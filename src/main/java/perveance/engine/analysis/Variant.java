@@ -51,7 +51,7 @@ final class Variant {
   CleanSwing clean() {
     if (clean.isEmpty()) {
       boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
-      clean = Optional.of(CleanSwings.of(new HeldCharge(model), composite, values.find("drive")));
+      clean = Optional.of(CleanSwings.of(new StageCurve(model), composite, values.find("drive")));
     }
     return clean.get();
   }

@@ -231,6 +231,11 @@ public final class DcSolver {
     return newton.kirchhoffResidual();
   }
 
+  /** Row of the first branch current of an inductor or transformer in a point. */
+  int branchRow(int element) {
+    return equations.system.branchRow(equations.branchOf[element]);
+  }
+
   NodalSystem system() {
     return equations.system;
   }

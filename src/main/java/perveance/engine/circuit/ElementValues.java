@@ -71,6 +71,13 @@ final class ElementValues {
     changed = true;
   }
 
+  /** Takes all values of another set for the same circuit. */
+  void copy(ElementValues other) {
+    System.arraycopy(other.value, 0, value, 0, value.length);
+    System.arraycopy(other.laws, 0, laws, 0, laws.length);
+    changed = true;
+  }
+
   private void requireKind(int element, Class<? extends Element> kind) {
     if (element < 0 || element >= value.length) {
       throw new IllegalArgumentException("no element with index " + element);

@@ -40,23 +40,39 @@ final class MidbandEquations {
     this.system = new NodalSystem(topology, plan.branches);
     this.transformers = Elements.indexArray(circuit, Transformer.class);
     this.holds = plan.holdingCapacitors.length + plan.holdingInductors.length + transformers.length;
-    stamp();
-    quietConstant = system.constant.clone();
-    quietVoltage = system.voltage.clone();
-    shares.forEach((source, share) -> values.value[source] += share);
-    stamp();
-    constantPerDrive = difference(system.constant, quietConstant);
-    voltagePerDrive = difference(system.voltage, quietVoltage);
-    shares.forEach((source, share) -> values.value[source] -= share);
-    stamp();
+    this.quietConstant = new double[system.size];
+    this.constantPerDrive = new double[system.size];
+    this.quietVoltage = new double[topology.nodeCount];
+    this.voltagePerDrive = new double[topology.nodeCount];
+    refresh();
   }
 
-  private static double[] difference(double[] a, double[] b) {
-    double[] out = a.clone();
-    for (int i = 0; i < out.length; i++) {
-      out[i] -= b[i];
+  /** Takes other element values of the same circuit. */
+  void take(ElementValues other) {
+    values.copy(other);
+    System.arraycopy(values.value, 0, quietValue, 0, quietValue.length);
+    refresh();
+  }
+
+  /** Writes the equations for the present values and finds what a unit of drive changes in them. */
+  private void refresh() {
+    stamp();
+    System.arraycopy(system.constant, 0, quietConstant, 0, quietConstant.length);
+    System.arraycopy(system.voltage, 0, quietVoltage, 0, quietVoltage.length);
+    for (Map.Entry<Integer, Double> share : shares.entrySet()) {
+      values.value[share.getKey()] = quietValue[share.getKey()] + share.getValue();
     }
-    return out;
+    stamp();
+    for (int i = 0; i < quietConstant.length; i++) {
+      constantPerDrive[i] = system.constant[i] - quietConstant[i];
+    }
+    for (int i = 0; i < quietVoltage.length; i++) {
+      voltagePerDrive[i] = system.voltage[i] - quietVoltage[i];
+    }
+    for (Integer source : shares.keySet()) {
+      values.value[source] = quietValue[source];
+    }
+    stamp();
   }
 
   private void stamp() {
@@ -207,6 +223,26 @@ final class MidbandEquations {
       hold[h++] = rest.ampereTurns(e) / e.windings().get(0).turns();
     }
     return hold;
+  }
+
+  /** Held quantities at the last point of a dc solver of the same circuit. */
+  void holdsAt(DcSolver rest, double[] point, double[] hold) {
+    int h = 0;
+    for (int c : plan.holdingCapacitors) {
+      Capacitor e = (Capacitor) element(c);
+      hold[h++] = rest.voltage(e.a()) - rest.voltage(e.b());
+    }
+    for (int l : plan.holdingInductors) {
+      hold[h++] = point[rest.branchRow(l)];
+    }
+    for (int t : transformers) {
+      Transformer e = (Transformer) element(t);
+      double sum = 0;
+      for (int w = 0; w < e.windings().size(); w++) {
+        sum += e.windings().get(w).turns() * point[rest.branchRow(t) + w];
+      }
+      hold[h++] = sum / e.windings().get(0).turns();
+    }
   }
 
   /** Unknowns at a dc point with nothing driven. */

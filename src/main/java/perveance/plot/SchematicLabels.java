@@ -202,6 +202,7 @@ final class SchematicLabels {
     return switch (symbol.type()) {
       case TRANSFORMER -> 4.2;
       case CENTRE_TAPPED_TRANSFORMER -> 8.2;
+      case CAPACITOR, ELECTROLYTIC -> 1.0;
       default -> reach(symbol);
     };
   }

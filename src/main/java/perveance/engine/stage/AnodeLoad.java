@@ -8,10 +8,10 @@ import perveance.engine.stage.Drawing.SymbolType;
 /** The upper part of most drawings: rail, anode load, anode. */
 final class AnodeLoad {
   /** Height of the rail. */
-  static final int RAIL = 2;
+  static final int RAIL = 1;
 
   /** Height of the centre of the load. */
-  static final int LOAD = 5;
+  static final int LOAD = 4;
 
   /** Height of the anode's node. */
   static final int ANODE = 9;

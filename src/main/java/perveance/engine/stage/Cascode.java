@@ -159,8 +159,8 @@ final class Cascode implements StageKind {
   private static void sketchUpperGrid(Sketch sketch) {
     if (sketch.values().has(UPPER_GRID_VOLTAGE.key())) {
       sketch.wire(X - 4, UPPER, X - 12, UPPER, X - 12, UPPER - 3);
-      String local = UPPER_GRID_VOLTAGE.key();
-      sketch.symbol(SymbolType.SUPPLY, X - 12, UPPER - 3, local, Side.ABOVE, "upper grid");
+      KeySpec key = UPPER_GRID_VOLTAGE;
+      sketch.source(SymbolType.SUPPLY, X - 12, UPPER - 3, key, Side.ABOVE, "grid");
       return;
     }
     sketch.wire(X - 4, UPPER, DIVIDER, UPPER);

@@ -102,7 +102,7 @@ final class CathodeFollower implements StageKind {
     } else {
       GridInput.sketch(sketch, 8, y);
     }
-    OutputCoupling.sketch(sketch, x, y + 6);
+    OutputCoupling.sketchFromCathode(sketch, x, y + 6);
     return sketch.finish();
   }
 }

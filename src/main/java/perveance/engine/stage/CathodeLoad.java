@@ -102,14 +102,13 @@ final class CathodeLoad {
       top = y + 8;
       bypass(sketch, x, y);
     }
-    SymbolType type = SymbolType.RESISTOR;
-    String local = loaded(values) ? CATHODE_LOAD.key() : CATHODE_RESISTOR.key();
-    if (values.has(CATHODE_CURRENT.key())) {
-      type = SymbolType.CURRENT_SOURCE;
-      local = CATHODE_CURRENT.key();
-    }
     sketch.wire(x, top, x, top + 2);
-    sketch.upright(type, x, top + 4, local, Side.LEFT);
+    if (values.has(CATHODE_CURRENT.key())) {
+      sketch.source(SymbolType.CURRENT_SOURCE, x, top + 4, CATHODE_CURRENT, Side.LEFT, "");
+    } else {
+      String local = loaded(values) ? CATHODE_LOAD.key() : CATHODE_RESISTOR.key();
+      sketch.upright(SymbolType.RESISTOR, x, top + 4, local, Side.LEFT);
+    }
     sketch.ground(x, top + 6);
     return y + 8;
   }

@@ -79,8 +79,8 @@ final class CommonCathode implements StageKind {
     if (resistor) {
       sketch.upright(SymbolType.RESISTOR, x, AnodeLoad.LOAD, ANODE_LOAD.key(), Side.RIGHT);
     } else {
-      String local = ANODE_CURRENT.key();
-      sketch.upright(SymbolType.CURRENT_SOURCE, x, AnodeLoad.LOAD, local, Side.RIGHT);
+      int y = AnodeLoad.LOAD;
+      sketch.source(SymbolType.CURRENT_SOURCE, x, y, ANODE_CURRENT, Side.RIGHT, "");
     }
     GroundedCathode.sketch(sketch);
     return sketch.finish();

@@ -96,8 +96,9 @@ final class Concertina implements StageKind {
       sketch.mark(X + 4, joint, "joint", Side.BELOW);
     }
     // clear of a bypass across the bias resistor
-    sketch.wire(X, lower, X + 8, lower);
-    OutputCoupling.sketch(sketch, X + 8, lower, LOAD2, "2");
+    int from = CathodeLoad.divided(values) ? X + 14 : X + 10;
+    sketch.wire(X, lower, from, lower);
+    OutputCoupling.sketch(sketch, from, lower, LOAD2, "2");
     return sketch.finish();
   }
 }

@@ -162,16 +162,16 @@ final class GridInput {
   static void terminal(Sketch sketch, int joint, int y) {
     StageValues values = sketch.values();
     if (direct(values)) {
-      sketch.input(joint - 6, y, Optional.empty(), "from " + driver(values));
-      sketch.wire(joint - 6, y, joint, y);
+      sketch.input(joint - 4, y, Optional.empty(), "from " + driver(values));
+      sketch.wire(joint - 4, y, joint, y);
     } else if (values.has(INPUT_COUPLING.key())) {
       sketch.input(joint - 12, y, Optional.of(SOURCE), "in");
       sketch.wire(joint - 12, y, joint - 6, y);
       sketch.lying(SymbolType.CAPACITOR, joint - 4, y, INPUT_COUPLING.key(), Side.ABOVE);
       sketch.wire(joint - 2, y, joint, y);
     } else {
-      sketch.input(joint - 6, y, Optional.of(SOURCE), "in");
-      sketch.wire(joint - 6, y, joint, y);
+      sketch.input(joint - 4, y, Optional.of(SOURCE), "in");
+      sketch.wire(joint - 4, y, joint, y);
     }
   }
 
@@ -185,7 +185,7 @@ final class GridInput {
   /** Draws the foot of the grid leak: a bias or chassis. */
   static void foot(Sketch sketch, int x, int y) {
     if (sketch.values().has(GRID_BIAS.key())) {
-      sketch.symbol(SymbolType.BIAS, x, y, GRID_BIAS.key(), Side.BELOW, "bias");
+      sketch.source(SymbolType.BIAS, x, y, GRID_BIAS, Side.BELOW, "bias");
     } else {
       sketch.ground(x, y);
     }

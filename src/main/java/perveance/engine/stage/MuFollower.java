@@ -123,14 +123,14 @@ final class MuFollower implements StageKind {
     GridInput.sketch(sketch, LEAK, LOWER);
     GridInput.sketchStopper(sketch, LEAK, X - 4, LOWER, "");
     CathodeBias.sketch(sketch, X, LOWER + 4);
-    OutputCoupling.sketch(sketch, X, UPPER + 6);
+    OutputCoupling.sketchFromCathode(sketch, X, UPPER + 6);
     return sketch.finish();
   }
 
   private static void sketchUpperGrid(Sketch sketch) {
-    sketch.wire(X - 4, UPPER, LEAK, UPPER, LEAK, UPPER + 2);
-    sketch.upright(SymbolType.RESISTOR, LEAK, UPPER + 4, UPPER_GRID_LEAK.key(), Side.RIGHT);
-    sketch.wire(LEAK, UPPER + 6, LEAK, UPPER + 12, X, UPPER + 12);
+    sketch.wire(X - 4, UPPER, LEAK, UPPER, LEAK, UPPER + 1);
+    sketch.upright(SymbolType.RESISTOR, LEAK, UPPER + 3, UPPER_GRID_LEAK.key(), Side.RIGHT);
+    sketch.wire(LEAK, UPPER + 5, LEAK, UPPER + 12, X, UPPER + 12);
     sketch.wire(LEAK, UPPER, COUPLING, UPPER);
     SymbolType type = StageWiring.capacitorSymbol(sketch.values(), UPPER_COUPLING);
     sketch.wire(COUPLING, UPPER, COUPLING, UPPER + 13);

@@ -117,6 +117,13 @@ final class OutputCoupling {
     sketch(sketch, x, y, 1, load, suffix);
   }
 
+  /** Draws an output from a cathode, clear of the text beside the valve above. */
+  static void sketchFromCathode(Sketch sketch, int x, int y) {
+    int from = coupled(sketch.values(), LOAD) ? x + 10 : x;
+    sketch.wire(x, y, from, y);
+    sketch(sketch, from, y, LOAD, "");
+  }
+
   /** Draws an output to the left of a point. */
   static void sketchLeft(Sketch sketch, int x, int y, KeySpec load, String suffix) {
     sketch(sketch, x, y, -1, load, suffix);
@@ -126,10 +133,10 @@ final class OutputCoupling {
     StageValues values = sketch.values();
     int at = x + 8 * way;
     if (coupled(values, load)) {
-      sketch.wire(x, y, x + 8 * way, y);
-      sketch.lying(SymbolType.CAPACITOR, x + 10 * way, y, COUPLING.key() + suffix, Side.ABOVE);
-      at = x + 18 * way;
-      sketch.wire(x + 12 * way, y, at, y);
+      sketch.wire(x, y, x + 4 * way, y);
+      sketch.lying(SymbolType.CAPACITOR, x + 6 * way, y, COUPLING.key() + suffix, Side.ABOVE);
+      at = x + 12 * way;
+      sketch.wire(x + 8 * way, y, at, y);
     } else {
       sketch.wire(x, y, at, y);
     }

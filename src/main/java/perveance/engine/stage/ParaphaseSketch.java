@@ -21,7 +21,7 @@ final class ParaphaseSketch {
   private static final int FIRST = 16;
   private static final int DOWN = 32;
   private static final int SECOND = FIRST + DOWN;
-  private static final int OUT = 38;
+  private static final int OUT = 36;
   private static final int TAP = 30;
 
   private ParaphaseSketch() {}
@@ -38,7 +38,7 @@ final class ParaphaseSketch {
     sketch.wire(X, rail, X, rail + 1);
     sketch.upright(SymbolType.RESISTOR, X, AnodeLoad.LOAD + DOWN, ANODE_LOAD2.key(), Side.RIGHT);
     int anode = AnodeLoad.ANODE + DOWN;
-    sketch.wire(X, anode - 2, X, SECOND - 4);
+    sketch.wire(X, AnodeLoad.LOAD + 2 + DOWN, X, SECOND - 4);
     sketch.mark(X, anode, "anode2", Side.LEFT);
     ValvePair.sketch(sketch, values.secondDevice(), X, SECOND, false, ValvePair.second(values));
     cathodes(sketch);
@@ -56,14 +56,14 @@ final class ParaphaseSketch {
     CathodeBias.sketch(sketch, X, SECOND + 4, "");
     boolean bypassed = sketch.values().has(CATHODE_BYPASS.key());
     int end = bypassed ? X + CathodeBias.BYPASS : X;
-    int bus = X + 14;
+    int bus = X + 13;
     sketch.wire(X, FIRST + 4, X, FIRST + 6, bus, FIRST + 6, bus, SECOND + 6, end, SECOND + 6);
   }
 
   private static void output(Sketch sketch, int y, KeySpec load, String suffix) {
-    sketch.wire(X, y, X + 8, y);
-    sketch.lying(SymbolType.CAPACITOR, X + 10, y, COUPLING.key() + suffix, Side.ABOVE);
-    sketch.wire(X + 12, y, OUT + 22, y);
+    sketch.wire(X, y, X + 4, y);
+    sketch.lying(SymbolType.CAPACITOR, X + 6, y, COUPLING.key() + suffix, Side.ABOVE);
+    sketch.wire(X + 8, y, OUT + 22, y);
     if (OutputCoupling.loaded(sketch.values(), load)) {
       int at = OUT + 18;
       sketch.wire(at, y, at, y + 2);

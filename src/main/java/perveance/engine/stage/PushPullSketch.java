@@ -16,8 +16,8 @@ final class PushPullSketch {
   private static final int X = 20;
   private static final int JOINT = 8;
   private static final int TOP = 16;
-  private static final int BOTTOM = 46;
-  private static final int CORE = 32;
+  private static final int BOTTOM = 40;
+  private static final int CORE = 28;
   private static final int SCREEN = 16;
 
   private final Sketch sketch;
@@ -80,8 +80,8 @@ final class PushPullSketch {
       sketch.lying(SymbolType.CAPACITOR, JOINT - 4, y, local, Side.ABOVE);
       sketch.wire(JOINT - 2, y, JOINT, y);
     } else {
-      sketch.input(JOINT - 6, y, SOURCE.key() + suffix, text);
-      sketch.wire(JOINT - 6, y, JOINT, y);
+      sketch.input(JOINT - 4, y, SOURCE.key() + suffix, text);
+      sketch.wire(JOINT - 4, y, JOINT, y);
     }
     sketch.wire(JOINT, y, JOINT, y + 2);
     sketch.upright(SymbolType.RESISTOR, JOINT, y + 4, GRID_LEAK.key() + suffix, Side.LEFT);
@@ -121,7 +121,7 @@ final class PushPullSketch {
   }
 
   private int core() {
-    return last + 30;
+    return last + (screened ? 30 : 26);
   }
 
   private void transformer() {
@@ -150,7 +150,7 @@ final class PushPullSketch {
         sketch.wire(x, BOTTOM, x, BOTTOM - 7);
       }
     } else if (tapped) {
-      toTap(TOP, CORE - 4, CORE - 6);
+      toTap(TOP, CORE - 4, CORE - 5);
       toTap(BOTTOM, CORE + 4, CORE + 6);
     } else {
       for (int x = first; x <= right; x += step) {

@@ -129,7 +129,7 @@ final class ScreenFeed {
     StageValues values = sketch.values();
     int x = valve + 14;
     sketch.wire(valve + 4, y, x, y);
-    int top = y - 11;
+    int top = y - 12;
     if (values.has(SCREEN_RESISTOR.key())) {
       sketch.wire(x, top + 2, x, y);
       sketch.upright(SymbolType.RESISTOR, x, top, SCREEN_RESISTOR.key(), Side.RIGHT);
@@ -138,7 +138,7 @@ final class ScreenFeed {
       sketch.wire(x, y, x, rail);
     }
     if (values.has(SCREEN_VOLTAGE.key())) {
-      sketch.symbol(SymbolType.SUPPLY, x, rail, SCREEN_VOLTAGE.key(), Side.ABOVE, "screen");
+      sketch.source(SymbolType.SUPPLY, x, rail, SCREEN_VOLTAGE, Side.ABOVE, "screen");
     } else if (values.has(SCREEN_SUPPLY.key())) {
       sketch.supply(x, rail, SCREEN_SUPPLY, Side.ABOVE);
     } else {

@@ -16,9 +16,13 @@ final class SecondGrid {
   private static final int GRID = Tail.RIGHT + 4;
 
   private static final int LEAK = Tail.RIGHT + 6;
-  private static final int BYPASS = Tail.RIGHT + 18;
 
   private SecondGrid() {}
+
+  /** The bypass stands beyond the text of the leak, or close by where there is none. */
+  private static int bypassAt(StageValues values) {
+    return GridInput.direct(values) ? Tail.RIGHT + 8 : Tail.RIGHT + 18;
+  }
 
   /** Whether it stands straight at chassis or at a stated bias, without a leak. */
   static boolean tied(StageValues values) {
@@ -59,7 +63,7 @@ final class SecondGrid {
       return;
     }
     if (GridInput.direct(values)) {
-      int above = y - 6;
+      int above = y - 5;
       sketch.wire(Tail.JOINT, y, Tail.JOINT, above, Tail.MIDDLE - 2, above);
       sketch.lying(SymbolType.RESISTOR, Tail.MIDDLE, above, SECOND_GRID_LEAK.key(), Side.ABOVE);
       sketch.wire(Tail.MIDDLE + 2, above, GRID + 4, above, GRID + 4, y);
@@ -78,12 +82,13 @@ final class SecondGrid {
   private static void bypass(Sketch sketch, int y) {
     SymbolType type = StageWiring.capacitorSymbol(sketch.values(), SECOND_GRID_BYPASS);
     int end = y + 7;
-    sketch.wire(GRID, y, BYPASS, y, BYPASS, y + 3);
-    sketch.upright(type, BYPASS, y + 5, SECOND_GRID_BYPASS.key(), Side.RIGHT);
+    int at = bypassAt(sketch.values());
+    sketch.wire(GRID, y, at, y, at, y + 3);
+    sketch.upright(type, at, y + 5, SECOND_GRID_BYPASS.key(), Side.RIGHT);
     if (sketch.values().has(FEEDBACK_SHUNT.key())) {
-      sketch.wire(BYPASS, end, BYPASS, Tail.SHUNT, Tail.MIDDLE, Tail.SHUNT);
+      sketch.wire(at, end, at, Tail.SHUNT, Tail.MIDDLE, Tail.SHUNT);
     } else {
-      sketch.ground(BYPASS, end);
+      sketch.ground(at, end);
     }
   }
 }

@@ -58,8 +58,7 @@ final class SingleEndedSketch {
   /** Draws the rail that feeds the anodes. */
   static void anodeSupply(Sketch sketch, int x, int y) {
     if (OutputIdle.stated(sketch.values())) {
-      String local = ANODE_VOLTAGE.key();
-      sketch.symbol(SymbolType.SUPPLY, x, y, local, Side.ABOVE, "anode supply");
+      sketch.source(SymbolType.SUPPLY, x, y, ANODE_VOLTAGE, Side.ABOVE, "anode");
     } else {
       sketch.supply(x, y, SUPPLY, Side.ABOVE);
     }
@@ -136,8 +135,7 @@ final class SingleEndedSketch {
     if (sketch.values().has(SCREEN_SUPPLY.key())) {
       sketch.supply(x, y, SCREEN_SUPPLY, Side.ABOVE);
     } else {
-      String local = SCREEN_VOLTAGE.key();
-      sketch.symbol(SymbolType.SUPPLY, x, y, local, Side.ABOVE, "screen supply");
+      sketch.source(SymbolType.SUPPLY, x, y, SCREEN_VOLTAGE, Side.ABOVE, "screen");
     }
   }
 }

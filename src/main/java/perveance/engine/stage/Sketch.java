@@ -51,6 +51,12 @@ final class Sketch {
     add(type, x, y, false, false, name(local), label, text);
   }
 
+  /** A source of this stage with what is stated for it, as it is written. */
+  void source(SymbolType type, int x, int y, KeySpec key, Side label, String what) {
+    String stated = values.word(key.key()).orElse("");
+    add(type, x, y, false, false, name(key.key()), label, (what + " " + stated).strip());
+  }
+
   /** The rail of the supply that a key names. */
   void supply(int x, int y, KeySpec key, Side label) {
     String supply = values.word(key.key()).orElse("");

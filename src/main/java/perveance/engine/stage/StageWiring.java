@@ -27,6 +27,9 @@ final class StageWiring {
   /** Resistance of a current source where none is stated; a cascoded one has more [ohm]. */
   static final double USUAL_SOURCE_RESISTANCE = 10e6;
 
+  /** What a current source that has run out of voltage goes over by [V]. */
+  private static final double LIMIT = 0.65;
+
   /** Taken where a stage stands without a supply, to choose a diode's working current [V]. */
   static final double USUAL_SUPPLY = 250;
 
@@ -129,14 +132,20 @@ final class StageWiring {
         : SymbolType.CAPACITOR;
   }
 
-  /** A stated current source with its resistance for signals. */
+  /**
+   * A stated current source with its resistance for signals. It cannot lift its far end above its
+   * near one: a junction across it takes over, so that a cold valve sees the supply and no more.
+   */
   void currentSource(KeySpec key, int from, int to) {
     double current = values.number(key.key());
     circuit.add(new Element.CurrentSource(name(key.key()), from, to, current));
     KeySpec resistanceKey = StageKeys.CURRENT_SOURCE_RESISTANCE;
     double resistance = values.number(resistanceKey.key(), USUAL_SOURCE_RESISTANCE);
     outerResistor(resistanceKey.key(), from, to, resistance);
-    assume("The current source works at any voltage across it.");
+    circuit.add(
+        new Element.Junction(
+            name(key.key() + "_limit"), to, from, BiasDiode.SILICON.law(LIMIT, current)));
+    assume("The current source keeps its current down to no voltage across it.");
     if (!values.has(resistanceKey.key())) {
       assume("The resistance of the current source is not stated; taken as 10 Mohm.");
     }

@@ -28,7 +28,7 @@ final class Tail {
 
   static final int RIGHT = 44;
   static final int MIDDLE = 32;
-  static final int JOINT = 8;
+  static final int JOINT = 9;
   static final int VALVES = 21;
   static final int CATHODES = VALVES + 6;
   static final int FOOT = CATHODES + 7;
@@ -107,10 +107,12 @@ final class Tail {
     } else {
       sketch.wire(MIDDLE, CATHODES, MIDDLE, FOOT + 1);
     }
-    boolean resistor = values.has(TAIL_RESISTOR.key());
-    SymbolType type = resistor ? SymbolType.RESISTOR : SymbolType.CURRENT_SOURCE;
-    String local = resistor ? TAIL_RESISTOR.key() : TAIL_CURRENT.key();
-    sketch.upright(type, MIDDLE, FOOT + 3, local, Side.RIGHT);
+    if (values.has(TAIL_RESISTOR.key())) {
+      sketch.upright(SymbolType.RESISTOR, MIDDLE, FOOT + 3, TAIL_RESISTOR.key(), Side.RIGHT);
+    } else {
+      int y = FOOT + 3;
+      sketch.source(SymbolType.CURRENT_SOURCE, MIDDLE, y, TAIL_CURRENT, Side.RIGHT, "");
+    }
     if (values.has(FEEDBACK_SHUNT.key())) {
       sketch.wire(MIDDLE, END, MIDDLE, SHUNT + 1);
       sketch.upright(SymbolType.RESISTOR, MIDDLE, SHUNT + 3, FEEDBACK_SHUNT.key(), Side.RIGHT);

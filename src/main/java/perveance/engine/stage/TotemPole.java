@@ -101,7 +101,7 @@ final class TotemPole implements StageKind {
     GridInput.sketch(sketch, 8, LOWER);
     GridInput.sketchStopper(sketch, 8, X - 4, LOWER, "");
     CathodeBias.sketch(sketch, X, LOWER + 4);
-    OutputCoupling.sketch(sketch, X, UPPER + 6);
+    OutputCoupling.sketchFromCathode(sketch, X, UPPER + 6);
     return sketch.finish();
   }
 }

@@ -137,7 +137,8 @@ final class SchematicLabels {
   /** Where a symbol's own text stands. */
   Rectangle2D fixedBox(Drawing.Symbol symbol, String words) {
     double w = width(words, value);
-    double rail = isRail(symbol) ? 1.6 : 0;
+    boolean round = symbol.type() == Drawing.SymbolType.CURRENT_SOURCE;
+    double rail = isRail(symbol) ? 1.6 : round ? 0.5 : 0;
     double x =
         switch (symbol.label()) {
           case LEFT -> symbol.x() - 0.7 - w - rail;

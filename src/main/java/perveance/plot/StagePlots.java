@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
@@ -17,6 +19,11 @@ import perveance.engine.stage.StageCircuit;
 /** The plots of one stage, described from its answer. */
 public final class StagePlots {
   private static final int EDGE_POINTS = 80;
+
+  /** Ends of load lines beyond so many times the operating point are left out of the picture. */
+  private static final double FARTHEST_VOLTAGE = 2.5;
+
+  private static final double FARTHEST_CURRENT = 5;
 
   private StagePlots() {}
 
@@ -90,16 +97,25 @@ public final class StagePlots {
 
   private static CurveFamily family(
       StageAnswer answer, LoadLineView view, StageCircuit.StageDevice section) {
-    double swing = Math.max(highest(List.of(view.ac(), view.excursion()), false), view.current());
-    double steady = highest(List.of(view.dc()), false);
-    // a winding's dc line is all but upright: its far end would flatten everything else
-    double amperes =
-        Math.max(view.current() * 1.8, steady > 4 * swing ? swing : Math.max(swing, steady));
-    double volts =
-        Math.max(
-            highest(List.of(view.dc(), view.ac(), view.excursion()), true), view.anode() * 1.3);
+    double volts = room(view, view.anode(), FARTHEST_VOLTAGE, LoadLineView.Point::voltage);
+    double amperes = room(view, view.current(), FARTHEST_CURRENT, LoadLineView.Point::current);
     return CurveFamily.of(
-        section.device(), screen(answer, section), roundUp(volts * 1.05), roundUp(amperes * 1.08));
+        section.device(),
+        screen(answer, section),
+        roundUp(Math.max(volts, 1.3 * view.anode()) * 1.05),
+        roundUp(Math.max(amperes, 1.8 * view.current()) * 1.08));
+  }
+
+  /**
+   * How far an axis has to reach: all of the swing, and the load lines as far as that leaves the
+   * curves legible.
+   */
+  private static double room(
+      LoadLineView view, double point, double farthest, ToDoubleFunction<LoadLineView.Point> axis) {
+    double lines =
+        Stream.of(view.dc(), view.ac()).flatMap(List::stream).mapToDouble(axis).max().orElse(0);
+    double swing = view.excursion().stream().mapToDouble(axis).max().orElse(0);
+    return Math.max(swing, Math.min(lines, farthest * point));
   }
 
   private static OptionalDouble limit(Device device) {
@@ -127,14 +143,6 @@ public final class StagePlots {
    */
   public static Optional<StageCircuit.StageDevice> section(StageAnswer answer, String ref) {
     return answer.circuit().devices().stream().filter(d -> d.ref().equals(ref)).findFirst();
-  }
-
-  private static double highest(List<List<LoadLineView.Point>> lines, boolean voltage) {
-    return lines.stream()
-        .flatMap(List::stream)
-        .mapToDouble(p -> voltage ? p.voltage() : p.current())
-        .max()
-        .orElse(0);
   }
 
   /**

@@ -5,18 +5,24 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.embed.swing.SwingFXUtils;
+import javafx.scene.Scene;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.image.WritableImage;
 import javafx.stage.Stage;
 import javax.imageio.ImageIO;
 import org.jspecify.annotations.Nullable;
 import perveance.desktop.view.MainWindow;
+import perveance.desktop.view.WindowProbe;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.Settings;
+import perveance.desktop.viewmodel.StageList;
+import perveance.engine.stage.StageKind;
+import perveance.engine.stage.StageKinds;
 
 /**
  * Draws every view at two sizes, light and dark, into pictures for people to look at.
@@ -28,6 +34,7 @@ public final class WindowPictures {
       List.of("characteristics", "transfer", "waveform", "distortion", "response", "spread");
 
   private final Path folder;
+  private @Nullable Desk desk;
 
   private WindowPictures(Path folder) {
     this.folder = folder;
@@ -46,6 +53,8 @@ public final class WindowPictures {
     for (boolean dark : new boolean[] {false, true}) {
       for (int[] size : new int[][] {{1280, 800}, {1920, 1200}}) {
         pictures.views("example", null, size, dark);
+        pictures.kinds(size, dark);
+        pictures.pickers(size, dark);
         for (int i = 1; i < args.length; i++) {
           Path file = Path.of(args[i]);
           String name = String.valueOf(file.getFileName()).replaceFirst("\\.toml$", "");
@@ -67,6 +76,34 @@ public final class WindowPictures {
     Toolkit.run(stage::close);
   }
 
+  private void kinds(int[] size, boolean dark) {
+    Stage stage = window(null, size, dark);
+    StageList list = new StageList(shown().bench());
+    for (StageKind kind : StageKinds.all()) {
+      Toolkit.run(() -> list.add(kind, Optional.empty()));
+      save(stage, "kind-" + kind.name(), size, dark);
+    }
+    Toolkit.run(stage::close);
+  }
+
+  private void pickers(int[] size, boolean dark) {
+    Stage stage = window(null, size, dark);
+    for (String picker : List.of("kind", "device")) {
+      Toolkit.run(
+          () -> {
+            stage.setScene(new Scene(WindowProbe.picker(shown(), picker)));
+            stage.setWidth(1040);
+            stage.setHeight(640);
+          });
+      save(stage, "picker-" + picker, size, dark);
+    }
+    Toolkit.run(stage::close);
+  }
+
+  private Desk shown() {
+    return java.util.Objects.requireNonNull(desk);
+  }
+
   private void first(String name, Path file, int[] size, boolean dark) {
     Stage stage = window(file, size, dark);
     save(stage, name, size, dark);
@@ -79,8 +116,8 @@ public final class WindowPictures {
           ObjectProperty<Settings> settings =
               new SimpleObjectProperty<>(Settings.USUAL.withDark(dark));
           Desks desks = new Desks(Runnable::run, Runnable::run, Runnable::run);
-          Desk desk = Wiring.desk(folder.resolve("home"), settings, new Answers(), desks);
-          MainWindow window = new MainWindow(desk);
+          desk = Wiring.desk(folder.resolve("home"), settings, new Answers(), desks);
+          MainWindow window = new MainWindow(shown());
           if (file != null) {
             window.open(file);
           }

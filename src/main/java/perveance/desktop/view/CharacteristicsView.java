@@ -4,8 +4,10 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import javafx.geometry.Bounds;
+import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
@@ -27,6 +29,8 @@ import perveance.plot.StagePlots;
  * operating point and swing are drawn anew with each answer.
  */
 final class CharacteristicsView extends StackPane {
+  private static final double MOVERS_HEIGHT = 24;
+
   private final Desk desk;
   private final Workbench bench;
   private final PlotFonts fonts;
@@ -37,6 +41,7 @@ final class CharacteristicsView extends StackPane {
   private Optional<PlotDescription> frame = Optional.empty();
   private String drawnFor = "";
   private boolean held;
+  private Runnable released = () -> {};
   private final PointDragging dragging;
 
   CharacteristicsView(Desk desk, PlotFonts fonts) {
@@ -47,7 +52,10 @@ final class CharacteristicsView extends StackPane {
     words.setMouseTransparent(true);
     readout.setVisible(false);
     words.getChildren().add(readout);
-    getChildren().addAll(family, lines, words);
+    for (Node layer : List.of(family, lines, words)) {
+      StackPane.setMargin(layer, new Insets(0, 0, MOVERS_HEIGHT, 0));
+      getChildren().add(layer);
+    }
     family.onDrawn(this::drawLines);
     lines.setOnMouseMoved(e -> read(e.getX(), e.getY()));
     lines.setOnMouseExited(e -> readout.setVisible(false));
@@ -80,11 +88,17 @@ final class CharacteristicsView extends StackPane {
     getChildren().add(bar);
   }
 
+  /** Told when a hand lets go. */
+  void onReleased(Runnable listener) {
+    released = listener;
+  }
+
   /** While a hand drags, the axes stand still. */
   void hold(boolean on) {
     held = on;
     if (!on) {
       refresh();
+      released.run();
     }
   }
 

@@ -1,10 +1,10 @@
 package perveance.desktop.view;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import javafx.scene.control.Label;
-import javafx.scene.control.Tooltip;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
@@ -21,6 +21,7 @@ final class FiguresRow extends VBox {
   private static final Set<String> ELSEWHERE = Set.of("output", "power", "distortion");
 
   private final Desk desk;
+  private final List<Cell> cells = new ArrayList<>();
   private final GridPane grid = new GridPane();
   private final Label basis = Bits.wrapped("", "soft", "small");
 
@@ -38,39 +39,57 @@ final class FiguresRow extends VBox {
     getChildren().addAll(grid, basis);
   }
 
-  void refresh() {
-    grid.getChildren().clear();
-    Optional<StageAnswer> answer = desk.bench().stageAnswer();
-    if (answer.isEmpty()) {
-      basis.setText("");
-      return;
+  /** The labels of one figure; their texts change, they stay. */
+  private record Cell(VBox box, Label name, Label value, Label band, Label note) {
+    static Cell empty() {
+      Label name = Bits.label("", "figure-label");
+      Label value = Bits.label("", "figure-value");
+      Label band = Bits.label("", "figure-note");
+      Label note = Bits.label("", "figure-note");
+      return new Cell(new VBox(name, value, band, note), name, value, band, note);
     }
-    List<FigureRow> rows =
-        StageFigures.signal(answer.get()).stream()
-            .filter(r -> !ELSEWHERE.contains(r.label()))
-            .toList();
-    for (int i = 0; i < rows.size(); i++) {
-      grid.add(figure(rows.get(i)), i % COLUMNS, i / COLUMNS);
-    }
-    basis.setText(
-        desk.say(
-            desk.bench().settled().get()
-                ? "Predicted from typical data. Bands hold 95 % of typical valves and parts."
-                : "Bands follow."));
   }
 
-  private VBox figure(FigureRow row) {
-    Label value = Bits.label(desk.say(row.value()));
-    String second = row.band().isEmpty() ? row.note() : row.band();
-    Label note = Bits.label(desk.say(second));
-    VBox box = Bits.figure(desk.say(capital(row.label())), value, note);
-    if (!row.note().isEmpty() && !row.band().isEmpty()) {
-      box.getChildren().add(Bits.label(desk.say(row.note()), "figure-note"));
+  void refresh() {
+    Optional<StageAnswer> answer = desk.bench().stageAnswer();
+    List<FigureRow> rows =
+        answer.stream()
+            .flatMap(a -> StageFigures.signal(a).stream())
+            .filter(r -> !ELSEWHERE.contains(r.label()))
+            .toList();
+    while (cells.size() > rows.size()) {
+      grid.getChildren().remove(cells.remove(cells.size() - 1).box());
     }
-    String all = row.label() + " " + row.value() + " " + row.band() + " " + row.note();
-    Tooltip.install(box, new Tooltip(desk.say(all)));
-    box.setAccessibleText(desk.say(all));
-    return box;
+    while (cells.size() < rows.size()) {
+      Cell cell = Cell.empty();
+      grid.add(cell.box(), cells.size() % COLUMNS, cells.size() / COLUMNS);
+      cells.add(cell);
+    }
+    for (int i = 0; i < rows.size(); i++) {
+      show(cells.get(i), rows.get(i));
+    }
+    basis.setText(answer.isEmpty() ? "" : desk.say(basis()));
+  }
+
+  private String basis() {
+    return desk.bench().settled().get()
+        ? "Predicted from typical data. Bands hold 95 % of typical valves and parts."
+        : "Predicted from typical data. Bands follow.";
+  }
+
+  private void show(Cell cell, FigureRow row) {
+    cell.name().setText(desk.say(capital(row.label())));
+    cell.value().setText(desk.say(row.value()));
+    text(cell.band(), desk.say(row.band()));
+    text(cell.note(), desk.say(row.note()));
+    cell.box()
+        .setAccessibleText(
+            desk.say(row.label() + " " + row.value() + " " + row.band() + " " + row.note()));
+  }
+
+  private static void text(Label label, String text) {
+    label.setText(text);
+    label.setManaged(!text.isEmpty());
   }
 
   private static String capital(String text) {

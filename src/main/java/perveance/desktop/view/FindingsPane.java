@@ -77,7 +77,7 @@ final class FindingsPane extends VBox {
   }
 
   private VBox card(Finding finding) {
-    String title = finding.where();
+    String title = finding.where().replace('.', ' ');
     VBox card =
         card(
             finding.severity().code(),

@@ -139,6 +139,7 @@ public final class MainWindow {
     desk.bench().answer().addListener((o, was, is) -> refresh());
     desk.bench().history().addListener((o, was, is) -> followEdits());
     desk.bench().settled().addListener((o, was, is) -> figures.refresh());
+    plots.characteristics().onReleased(this::refresh);
     desk.bench()
         .chosenStage()
         .addListener(
@@ -166,21 +167,26 @@ public final class MainWindow {
   }
 
   private void followEdits() {
-    chassis.refresh();
+    if (!desk.drag().isHeld()) {
+      chassis.refresh();
+    }
     if (desk.bench().chassis().stages().isEmpty()) {
       refresh();
     }
   }
 
   private void refresh() {
-    top.refresh();
-    caution.refresh();
-    chassis.refresh();
-    schematic.refresh();
     plots.refresh();
-    figures.refresh();
-    findings.refresh();
+    schematic.refresh();
     foot.refresh();
+    figures.refresh();
+    // lists follow when the hand rests, so that a drag stays light
+    if (!desk.drag().isHeld()) {
+      top.refresh();
+      caution.refresh();
+      chassis.refresh();
+      findings.refresh();
+    }
   }
 
   private void over(DragEvent event) {

@@ -7,6 +7,7 @@ import java.util.function.ToDoubleFunction;
 import perveance.app.Edit;
 import perveance.desktop.task.LatestOnly;
 import perveance.engine.analysis.AnalysisOptions;
+import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.base.Progress;
@@ -185,7 +186,9 @@ public final class PointDrag {
 
   private void ask(KeySpec key, ToDoubleFunction<StageAnswer> figure, double wanted) {
     KeyGoal goal = new KeyGoal(bench.chosenStage().get(), key, figure, wanted, NEAR * wanted);
-    searches.ask(new Question(bench.chassis(), goal));
+    ChassisAnswer last = bench.answer().get();
+    Chassis near = last == null ? bench.chassis() : Nearby.part(bench.chassis(), goal.ref(), last);
+    searches.ask(new Question(near, goal));
   }
 
   private Solved search(Question question, Progress progress) {

@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.concurrent.Executor;
 import java.util.function.BiFunction;
 import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
@@ -38,6 +37,7 @@ public final class Workbench {
   private static final AnalysisOptions QUICK = new AnalysisOptions(0, 1, false, true);
 
   private final Engine engine;
+  private List<String> complaints = List.of();
   private final Desks desks;
   private final ReadOnlyObjectWrapper<History> history;
   private final ReadOnlyBooleanWrapper settled = new ReadOnlyBooleanWrapper();
@@ -47,7 +47,7 @@ public final class Workbench {
   private final ReadOnlyStringWrapper message = new ReadOnlyStringWrapper("");
   private final StringProperty chosenStage = new SimpleStringProperty("");
   private final StringProperty chosenPart = new SimpleStringProperty("");
-  private final LatestOnly<Chassis, ChassisAnswer> live;
+  private final LatestOnly<Nearby.Question, ChassisAnswer> live;
   private final LatestOnly<Chassis, ChassisAnswer> full;
 
   /**
@@ -62,10 +62,22 @@ public final class Workbench {
     this.desks = desks;
     history = new ReadOnlyObjectWrapper<>(History.of(start));
     saved = new ReadOnlyObjectWrapper<>(start);
-    live = question(QUICK, desks.quick(), desks.foreground());
-    full = question(AnalysisOptions.FULL, desks.thorough(), desks.foreground());
+    live =
+        new LatestOnly<>(
+            desks.quick(),
+            desks.foreground(),
+            (question, progress) -> Nearby.answer(engine, question, QUICK, progress),
+            a -> receive(a, QUICK),
+            this::notComputed);
+    full =
+        new LatestOnly<>(
+            desks.thorough(),
+            desks.foreground(),
+            (chassis, progress) -> engine.answer(chassis, AnalysisOptions.FULL, progress),
+            a -> receive(a, AnalysisOptions.FULL),
+            this::notComputed);
     chooseFirst(start);
-    recompute();
+    recompute(engine.complaints(chassis()));
   }
 
   /**
@@ -84,14 +96,6 @@ public final class Workbench {
         work,
         done,
         e -> message.set(String.valueOf(e.getMessage())));
-  }
-
-  private LatestOnly<Chassis, ChassisAnswer> question(
-      AnalysisOptions options, Executor background, Executor foreground) {
-    BiFunction<Chassis, Progress, ChassisAnswer> work =
-        (chassis, progress) -> engine.answer(chassis, options, progress);
-    return new LatestOnly<>(
-        background, foreground, work, a -> receive(a, options), this::notComputed);
   }
 
   /** A quick answer that comes after the thorough one of the same chassis brings nothing new. */
@@ -235,11 +239,11 @@ public final class Workbench {
     } catch (IllegalArgumentException e) {
       return refuse(String.valueOf(e.getMessage()));
     }
-    List<String> complaints = engine.complaints(after.now());
-    if (!complaints.isEmpty() && engine.complaints(chassis()).isEmpty()) {
-      return refuse(String.join("; ", complaints));
+    List<String> found = engine.complaints(after.now());
+    if (!found.isEmpty() && complaints.isEmpty()) {
+      return refuse(String.join("; ", found));
     }
-    take(after);
+    take(after, found);
     return Optional.empty();
   }
 
@@ -249,23 +253,27 @@ public final class Workbench {
   }
 
   private void take(History after) {
+    take(after, engine.complaints(after.now()));
+  }
+
+  private void take(History after, List<String> found) {
     History before = history.get();
     if (after.past().size() != before.past().size() || !after.now().equals(before.now())) {
       history.set(after);
       message.set("");
       keepChoice();
-      recompute();
+      recompute(found);
     }
   }
 
-  private void recompute() {
+  private void recompute(List<String> found) {
     settled.set(false);
-    List<String> complaints = engine.complaints(chassis());
+    complaints = found;
     if (!complaints.isEmpty()) {
       message.set(String.join("; ", complaints));
       return;
     }
-    live.ask(chassis());
+    live.ask(new Nearby.Question(chassis(), chosenStage.get(), answer.get()));
     full.ask(chassis());
   }
 
@@ -289,7 +297,7 @@ public final class Workbench {
     history.set(History.of(chassis));
     saved.set(chassis);
     chooseFirst(chassis);
-    recompute();
+    recompute(engine.complaints(chassis()));
   }
 
   /**

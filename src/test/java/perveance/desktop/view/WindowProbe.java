@@ -2,6 +2,11 @@ package perveance.desktop.view;
 
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
+import javafx.scene.Parent;
+import javafx.scene.layout.StackPane;
+import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.StageList;
+import perveance.plot.PlotFonts;
 
 /** What a test needs to reach inside a window. */
 public final class WindowProbe {
@@ -35,6 +40,25 @@ public final class WindowProbe {
             .findFirst()
             .orElseThrow();
     return new Point2D(grip.x(), grip.y());
+  }
+
+  /**
+   * What a picker shows, without its dialog.
+   *
+   * @param desk what it works with
+   * @param which kind or device
+   * @return its content, dressed
+   */
+  public static Parent picker(Desk desk, String which) {
+    PlotFonts fonts = new PlotFonts();
+    Parent content =
+        which.equals("kind")
+            ? new KindPicker(desk, new StageList(desk.bench()), fonts).content()
+            : new DevicePicker(desk, fonts, "el84").content();
+    StackPane root = new StackPane(content);
+    root.getStyleClass().add("dialog-pane");
+    Skin.dress(root, desk.settings().get());
+    return root;
   }
 
   /**

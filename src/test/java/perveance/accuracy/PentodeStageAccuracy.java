@@ -12,7 +12,7 @@ final class PentodeStageAccuracy implements AccuracySource {
     List<AccuracyLine> lines = new ArrayList<>();
     List<OutputPentodesTest.Row> single = OutputPentodesTest.singleEnded();
     List<OutputPentodesTest.Row> pair = OutputPentodesTest.pushPull();
-    for (String type : new String[] {"EL84", "EL34", "6L6", "6V6GT"}) {
+    for (String type : new String[] {"EL84", "EL34", "6L6", "6F6", "6V6GT"}) {
       add(lines, type, "class A", single, true);
       add(lines, type, "class A, set the knee of its class:", single, false);
       add(lines, type, "push-pull", pair, true);

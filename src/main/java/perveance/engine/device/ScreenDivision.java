@@ -1,5 +1,7 @@
 package perveance.engine.device;
 
+import perveance.engine.numeric.CubeRoot;
+
 /**
  * How the cathode current of a pentode or beam tetrode divides between anode and screen.
  *
@@ -138,9 +140,9 @@ final class ScreenDivision {
   /** sum^(-1/n). */
   private double inverseRoot(double sum) {
     if (sharpness == 1.5) {
-      double root = Math.cbrt(sum);
+      double root = CubeRoot.of(sum);
       return 1 / (root * root);
     }
-    return sharpness == 3 ? 1 / Math.cbrt(sum) : Math.pow(sum, -1 / sharpness);
+    return sharpness == 3 ? 1 / CubeRoot.of(sum) : Math.pow(sum, -1 / sharpness);
   }
 }

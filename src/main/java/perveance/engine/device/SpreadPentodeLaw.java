@@ -1,6 +1,7 @@
 package perveance.engine.device;
 
 import java.util.List;
+import perveance.engine.numeric.CubeRoot;
 
 /**
  * Pentodes and beam tetrodes.
@@ -99,7 +100,7 @@ public final class SpreadPentodeLaw implements DeviceLaw {
     }
     if (total > 0) {
       out.set(ElectrodeCurrents.ANODE, total, influence * byPull, byGrid, byPull);
-      double root = Math.cbrt(total * inversePerveance);
+      double root = CubeRoot.of(total * inversePerveance);
       division.divide(root * root, va, vg2, out);
     } else {
       out.clear();

@@ -13,7 +13,7 @@ public enum GridClass {
   /** Indirectly heated, mu 45 or above: a closely wound grid of thin wire. */
   CLOSE("indirectly heated, mu 45 or above", 0.20, 0.07, 0.5, 0.25, -0.6, 3),
   /** The filament is the cathode. */
-  FILAMENT("directly heated", 0.15, 0.06, 0, 2, 0, 10);
+  FILAMENT("directly heated", 0.15, 0.06, 0, 2, 0, 5);
 
   private static final double CLOSE_FROM = 45;
 

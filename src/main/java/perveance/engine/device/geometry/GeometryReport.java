@@ -6,7 +6,7 @@ package perveance.engine.device.geometry;
  * @param perveance G of the device law [A V^-1.5]
  * @param amplificationFactor mu [1]
  * @param loadingFactor F of the equivalent diode [1]
- * @param spread relative half width of the penetration factor from the wires' pattern [1]
+ * @param spread of the penetration factor from the wires' pattern, as the device law counts it [1]
  * @param effectiveVoltage of the equivalent diode in the grid's place [V]
  * @param cathodeCurrent space-charge-limited [A]
  * @param mutualConductance gm [S]

@@ -52,23 +52,25 @@ public sealed interface GridWires permits PlaneGrid, CylinderGrid {
   }
 
   /**
-   * Spread of the penetration factor along the cathode that the wires' pattern makes, relative half
-   * width for the {@code spread} of a device law.
+   * Spread of the penetration factor along the cathode that the wires' pattern makes, as the {@code
+   * spread} of a device law counts it (sqrt 3 times the standard deviation over the mean).
    *
-   * <p>Field at the cathode of thin wires: {@code E = E0 S + (Va / dak)(1 - S)} with S from tanh(pi
-   * q) under a wire's gap to coth(pi q), q = dgk / a. The place where E vanishes has the
-   * penetration {@code D + (deff / dak)(1 - S) / S}; its half width over D is {@code mu (deff /
-   * dak) / sinh(2 pi q)}, deff = F dgk with F the loading factor of the equivalent diode. Derived
-   * here.
+   * <p>Field at the cathode of thin wires: {@code E = E0 S + (Va / dak)(1 - S)} with {@code S =
+   * sinh x / (cosh x - cos(2 pi y / a))}, x = 2 pi dgk / a. The place where E vanishes has the
+   * penetration {@code D + (deff / dak)(1 - S) / S}, and {@code (1 - S) / S = (exp(-x) - cos(2 pi y
+   * / a)) / sinh x}: a sine of amplitude 1 / sinh x, whose standard deviation is that over sqrt 2.
+   * With deff = F dgk, F the loading factor of the equivalent diode, the spread is {@code sqrt(3/2)
+   * mu (deff / dak) / sinh x}. Derived here. Uneven winding comes on top.
    *
    * @param cathodeToGrid dgk, above 0 [m]
    * @param cathodeToAnode dak [m]
    * @param loadingFactor F [1]
-   * @return half width of the spread over its mean, at most 1 [1]
+   * @return spread, at most 1 [1]
    */
   default double spread(double cathodeToGrid, double cathodeToAnode, double loadingFactor) {
     double q = cathodeToGrid / pitch();
     double effective = loadingFactor * cathodeToGrid / cathodeToAnode;
-    return Math.min(1, amplificationFactor() * effective / Math.sinh(2 * Math.PI * q));
+    double amplitude = amplificationFactor() * effective / Math.sinh(2 * Math.PI * q);
+    return Math.min(1, Math.sqrt(1.5) * amplitude);
   }
 }

@@ -2,6 +2,7 @@ package perveance.engine.device.geometry;
 
 import perveance.engine.base.PhysicalConstants;
 import perveance.engine.device.SpreadTriodeParameters;
+import perveance.engine.device.fit.GridClass;
 
 /**
  * A triode from its dimensions: the equivalent diode.
@@ -19,14 +20,11 @@ import perveance.engine.device.SpreadTriodeParameters;
  */
 public record TriodeGeometry(
     DiodeGeometry cathodeToGrid, DiodeGeometry cathodeToAnode, GridWires grid) {
-  /** Voltage under which half of the electrons turn back before the anode, a usual value [V]. */
-  private static final double USUAL_TURN_BACK = 5;
-
   /** Perveance of a control grid over that of its cathode, a usual value [1]. */
-  private static final double USUAL_GRID_SHARE = 0.3;
+  private static final double USUAL_GRID_SHARE = 0.35;
 
-  /** Usual onset of grid current where nothing is known [V]. */
-  private static final double USUAL_ONSET = -0.6;
+  /** Spread of an oxide cathode's own potential, a usual value [V]. */
+  private static final double USUAL_CATHODE_SPREAD = 0.3;
 
   /** Checks the order of the electrodes. */
   public TriodeGeometry {
@@ -118,22 +116,24 @@ public record TriodeGeometry(
   }
 
   /**
-   * Constants of the device law, with usual values for what dimensions do not tell (grid current,
-   * contact potential 0).
+   * Constants of the device law of an oxide cathode, with the usual values of its class for what
+   * dimensions do not tell (grid current, unevenness of the cathode; contact potential 0).
    *
    * @param cathodeTemperature for the tails of the currents [K]
    * @return constants for the triode law
    */
   public SpreadTriodeParameters law(double cathodeTemperature) {
     GeometryReport constants = report(1, 0);
+    GridClass usual = GridClass.of(false, constants.amplificationFactor());
     return new SpreadTriodeParameters(
         constants.perveance(),
         0,
         1 / constants.amplificationFactor(),
         constants.spread(),
-        USUAL_TURN_BACK,
+        USUAL_CATHODE_SPREAD,
+        usual.turnBack(),
         USUAL_GRID_SHARE * constants.perveance(),
-        USUAL_ONSET,
+        usual.gridOnset(),
         PhysicalConstants.thermalVoltage(cathodeTemperature));
   }
 }

@@ -75,44 +75,58 @@ class TriodeGeometryTest {
   }
 
   /*
-   * Derived. Case: the triode of W27 as a device law with its spread taken out. Expected: the
-   * law's current and gm are the report's, apart from the turn-back factor 250^2 / (250^2 + 5^2).
+   * Derived. Case: the triode of W27 with 0.6 mm to its grid, as a device law. Expected: the law's
+   * current and gm are the report's but for what the law adds: electrons that turn back (under 0.1
+   * %) and the spread of grid and cathode. With variance v about the mean m the three-halves power
+   * gains 3 v / (8 m^2), with a cathode spread of 0.3 V and m = 3.5 V 0.1 %. Tolerance 1 %.
    */
   @Test
   @DisplayName("dimensions make a device law that agrees with the report")
   void deviceLaw() {
     TriodeGeometry triode =
         TriodeGeometry.plane(1e-4, 0.6e-3, new PlaneGrid(0.3e-3, 0.03e-3, 1e-3));
-    GeometryReport report = triode.report(250, -4);
+    GeometryReport report = triode.report(250, -3);
     ElectrodeCurrents out = new ElectrodeCurrents();
-    new SpreadTriodeLaw(triode.law(1000)).evaluate(250, -4, 0, out);
-    double passed = 250.0 * 250 / (250.0 * 250 + 25);
+    new SpreadTriodeLaw(triode.law(1000)).evaluate(250, -3, 0, out);
     assertEquals(
-        report.cathodeCurrent() * passed,
+        report.cathodeCurrent(),
         out.current(ElectrodeCurrents.ANODE),
-        1e-3 * report.cathodeCurrent());
+        1e-2 * report.cathodeCurrent());
     assertEquals(
-        report.mutualConductance() * passed,
+        report.mutualConductance(),
         out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID),
-        1e-3 * report.mutualConductance());
+        1e-2 * report.mutualConductance());
   }
 
   /*
    * Derived. Cases: the grid's pattern at the cathode for q = dgk / a of 0.5, 0.75 and 1. Expected:
-   * the field factor S swings from tanh(pi q) to coth(pi q): 0.917 to 1.090, 0.982 to 1.018, 0.9963
-   * to 1.0037, so (1 - S) / S swings by 1 / sinh(2 pi q) about 0.0037 and the spread falls with it.
+   * the field factor S swings from tanh(pi q) to coth(pi q), 0.917 to 1.090, 0.982 to 1.018, 0.9963
+   * to 1.0037; the spread is sqrt 3 times the standard deviation of the penetration over one pitch,
+   * here summed over 1000 places. Tolerance: rounding of the sum.
    */
   @ParameterizedTest
   @CsvSource({"0.5,0.917,1.090,5e-4", "0.75,0.982,1.018,5e-4", "1.0,0.9963,1.0037,5e-5"})
   @DisplayName("the wires' pattern fades within a pitch")
   void pattern(double q, double least, double most, double tolerance) {
-    double s = Math.tanh(Math.PI * q);
-    assertEquals(least, s, tolerance);
-    assertEquals(most, 1 / s, tolerance);
+    double x = 2 * Math.PI * q;
+    double lowest = 2;
+    double highest = 0;
+    double sum = 0;
+    double squares = 0;
+    int places = 1000;
+    for (int i = 0; i < places; i++) {
+      double s = Math.sinh(x) / (Math.cosh(x) - Math.cos(2 * Math.PI * i / places));
+      lowest = Math.min(lowest, s);
+      highest = Math.max(highest, s);
+      sum += (1 - s) / s / places;
+      squares += (1 - s) / s * (1 - s) / s / places;
+    }
+    assertEquals(least, lowest, tolerance);
+    assertEquals(most, highest, tolerance);
     PlaneGrid grid = new PlaneGrid(1e-3, 0.05e-3, 2e-3);
-    double halfWidth = 0.5 * ((1 - s) / s - (1 - 1 / s) * s);
-    double expected = grid.amplificationFactor() * 1.2 * q / (q + 2) * halfWidth;
-    assertEquals(expected, grid.spread(q * 1e-3, (q + 2) * 1e-3, 1.2), 1e-12);
+    double deviation = Math.sqrt(squares - sum * sum);
+    double expected = Math.sqrt(3) * grid.amplificationFactor() * 1.2 * q / (q + 2) * deviation;
+    assertEquals(expected, grid.spread(q * 1e-3, (q + 2) * 1e-3, 1.2), 1e-9);
   }
 
   /*

@@ -150,11 +150,13 @@ final class SpiceLaw {
   private void division() {
     String va = "v(%s,%s)".formatted(anode, cathode);
     helper("va", "%1$s<0 ? 0 : (%1$s<0.1 ? %1$s*%1$s/0.2 : %1$s-0.05)", va);
-    helper("s", "0.5*(v(%1$s,%2$s)+sqrt(v(%1$s,%2$s)*v(%1$s,%2$s)+1))", screen, cathode);
+    String vs = "v(%s,%s)".formatted(screen, cathode);
+    helper("s", "%1$s>=1 ? %1$s : 1/(2-min(%1$s,1))", vs);
+    helper("y", "v(%s)/max(v(%s),1e-9)", node("va"), node("s"));
     helper("ue", "pow(max(v(%s),1e-30)/%s,2/3)", node("ik"), of("perveance"));
     String fall =
-        "pow((1+%1$s)*max(v(%2$s),1e-9)/(v(%3$s)+%1$s*max(v(%2$s),1e-9)),%4$s)"
-            .formatted(of("share_offset"), node("s"), node("va"), of("share_fall"));
+        "(1+%1$s*(1-v(%2$s))/(v(%2$s)+%3$s))"
+            .formatted(of("share_fall"), node("y"), of("share_offset"));
     String beam = "1";
     if (get("beam_width") > 0) {
       String ratio =

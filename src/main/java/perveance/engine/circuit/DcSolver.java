@@ -35,6 +35,7 @@ public final class DcSolver {
   private final Newton newton;
   private final DcStepping stepping;
   private final Optional<NotConverged> refusal;
+  private long revision;
 
   /**
    * Compiles a circuit.
@@ -67,6 +68,7 @@ public final class DcSolver {
    */
   public void setResistance(int element, double resistance) {
     ElementChecks.positive("resistance", resistance);
+    revision++;
     values.set(element, Resistor.class, resistance);
   }
 
@@ -78,6 +80,7 @@ public final class DcSolver {
    */
   public void setVoltage(int element, double voltage) {
     ElementChecks.finite("voltage", voltage);
+    revision++;
     values.set(element, VoltageSource.class, voltage);
   }
 
@@ -89,6 +92,7 @@ public final class DcSolver {
    */
   public void setCurrent(int element, double current) {
     ElementChecks.finite("current", current);
+    revision++;
     values.set(element, CurrentSource.class, current);
   }
 
@@ -99,6 +103,7 @@ public final class DcSolver {
    * @param law new law of the same kind
    */
   public void setLaw(int element, DeviceLaw law) {
+    revision++;
     values.setLaw(element, law);
   }
 
@@ -130,6 +135,7 @@ public final class DcSolver {
     if (refusal.isPresent()) {
       return refusal.get();
     }
+    revision++;
     Newton.End end = stepping.solve(point);
     double left = newton.kirchhoffResidual();
     if (end == Newton.End.CONVERGED) {
@@ -177,6 +183,7 @@ public final class DcSolver {
       throw new IllegalArgumentException(
           "point has " + point.length + " entries, not " + pointLength());
     }
+    revision++;
     return refusal.isEmpty() && stepping.solve(point) == Newton.End.CONVERGED;
   }
 
@@ -234,6 +241,11 @@ public final class DcSolver {
   /** Row of the first branch current of an inductor or transformer in a point. */
   int branchRow(int element) {
     return equations.system.branchRow(equations.branchOf[element]);
+  }
+
+  /** Changes with every solve and every change of a value. */
+  long revision() {
+    return revision;
   }
 
   NodalSystem system() {

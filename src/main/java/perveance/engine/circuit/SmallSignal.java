@@ -22,8 +22,12 @@ public final class SmallSignal {
   private final FrameSolver atMidband;
   private double factoredFrequency = -1;
   private boolean midbandFactored;
+  private final Optional<DcSolver> source;
+  private boolean restWanted;
+  private long takenRevision;
 
-  private SmallSignal(Circuit circuit) {
+  private SmallSignal(Circuit circuit, Optional<DcSolver> source) {
+    this.source = source;
     this.topology = new Topology(circuit);
     this.full = new LinearStamper(topology, false);
     this.held = new LinearStamper(topology, true);
@@ -37,7 +41,7 @@ public final class SmallSignal {
    * @param point dc point
    */
   public SmallSignal(DcSolution point) {
-    this(point.circuit());
+    this(point.circuit(), Optional.empty());
     ElementValues values = new ElementValues(point.circuit());
     ValveBank valves = new ValveBank(point.circuit(), topology);
     JunctionBank junctions = new JunctionBank(point.circuit(), topology);
@@ -48,7 +52,8 @@ public final class SmallSignal {
     valves.take(values);
     valves.evaluate(voltage);
     junctions.evaluate(voltage);
-    stamp(values, valves, junctions);
+    full.stamp(values, valves, junctions);
+    held.stamp(values, valves, junctions);
   }
 
   /**
@@ -57,29 +62,37 @@ public final class SmallSignal {
    * @param solver solver whose last solve found a point
    */
   public SmallSignal(DcSolver solver) {
-    this(solver.circuit());
+    this(solver.circuit(), Optional.of(solver));
     take(solver);
   }
 
   /**
-   * Takes the last point and the present values of the solver it was made for. Allocates nothing.
+   * Takes the last point and the present values of the solver it was made for. Figures at a
+   * frequency must be asked for before the solver is used again, or not at all.
    *
    * @param solver solver whose last solve found a point
-   * @throws IllegalArgumentException when the solver belongs to another circuit
+   * @throws IllegalArgumentException when it was made for another solver
    */
   public void take(DcSolver solver) {
-    if (!solver.circuit().equals(topology.circuit)) {
-      throw new IllegalArgumentException("solver belongs to another circuit");
+    if (source.isEmpty() || !source.get().equals(solver)) {
+      throw new IllegalArgumentException("solver is not the one this was made for");
     }
     NodalSystem system = solver.system();
-    stamp(solver.values(), system.valves, system.junctions);
+    held.stamp(solver.values(), system.valves, system.junctions);
+    midbandFactored = false;
+    restWanted = true;
+    takenRevision = solver.revision();
   }
 
-  private void stamp(ElementValues values, ValveBank valves, JunctionBank junctions) {
-    full.stamp(values, valves, junctions);
-    held.stamp(values, valves, junctions);
+  /** Spread sampling asks for mid-band alone, so the rest is taken when it is first wanted. */
+  private void takeRest(DcSolver solver) {
+    if (solver.revision() != takenRevision) {
+      throw new IllegalStateException("the solver has moved on since its point was taken");
+    }
+    NodalSystem system = solver.system();
+    full.stamp(solver.values(), system.valves, system.junctions);
     factoredFrequency = -1;
-    midbandFactored = false;
+    restWanted = false;
   }
 
   /**
@@ -229,6 +242,9 @@ public final class SmallSignal {
 
   private boolean factor(double frequency) {
     ElementChecks.positive("frequency", frequency);
+    if (restWanted) {
+      takeRest(source.orElseThrow());
+    }
     if (frequency != factoredFrequency) {
       boolean done = atFrequency.factor(2 * Math.PI * frequency);
       factoredFrequency = done ? frequency : -1;

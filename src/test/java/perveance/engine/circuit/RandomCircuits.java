@@ -115,7 +115,7 @@ final class RandomCircuits {
             random.nextDouble(),
             between(1e-4, 0.1),
             between(0.02, 1),
-            3 * random.nextDouble(),
+            random.nextDouble(),
             between(0.01, 1),
             random.nextInt(2) * between(0.1, 5),
             between(0.02, 1),

@@ -9,6 +9,7 @@ import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.base.Unit;
 import perveance.engine.circuit.Element.Valve;
+import perveance.engine.device.ElectrodeCurrents;
 import perveance.engine.stage.StageCircuit.Part;
 
 /** Findings about where the valves idle. */
@@ -28,6 +29,12 @@ final class BiasFindings {
   /** Ratio of the ends of the band from which an idle current must be set by measurement [1]. */
   private static final double WIDE = 1.8;
 
+  /** A grid this far above a cold cathode may arc or pull emission when it warms [V]. */
+  private static final double COLD_GRID = 30;
+
+  /** A remedy must not cost more clean output than this leaves [1]. */
+  static final double KEPT = 0.8;
+
   private final FindingContext context;
   private final List<Finding> findings = new ArrayList<>();
 
@@ -41,6 +48,7 @@ final class BiasFindings {
       all.cutOff(point);
       all.gridCurrent(point);
       all.spread(point);
+      all.coldGrid(point);
     }
     context.answer().loadLine().ifPresent(all::onLine);
     return all.findings;
@@ -98,8 +106,30 @@ final class BiasFindings {
                 biasParts(),
                 v ->
                     v.points().stream()
-                        .filter(p -> p.ref().equals(point.ref()))
-                        .allMatch(p -> p.gridCurrent() < GRID_CURRENT)));
+                            .filter(p -> p.ref().equals(point.ref()))
+                            .allMatch(p -> p.gridCurrent() < GRID_CURRENT)
+                        && v.clean().outputPeak() > KEPT * context.answer().clean().outputPeak()));
+  }
+
+  /** Before the valves warm, a grid wired straight to an anode stands at the whole supply. */
+  private void coldGrid(DevicePoint point) {
+    double volts =
+        context.cold().map(dc -> dc.valve(point.ref()).voltage(ElectrodeCurrents.GRID)).orElse(0.0);
+    if (volts > COLD_GRID) {
+      add(
+          Finding.of(
+                  BiasMessage.COLD_START_GRID,
+                  Severity.CAUTION,
+                  context.ref(),
+                  point.ref(),
+                  Words.of(volts, Unit.VOLT))
+              .withValue(volts, COLD_GRID, Unit.VOLT),
+          point,
+          Optional.of(
+              Remedy.byHand(
+                  "A diode or a neon lamp from cathode to grid holds them together until the"
+                      + " valves conduct.")));
+    }
   }
 
   /** A band so wide that only measurement sets the current, as with a fixed bias. */
@@ -128,8 +158,7 @@ final class BiasFindings {
     Optional<DevicePoint> point =
         context.answer().points().stream().filter(p -> p.ref().equals(view.ref())).findFirst();
     double open = view.anode() + view.current() * view.dcResistance();
-    boolean resistive = view.dcResistance() * view.current() > 0.02 * open;
-    if (point.isEmpty() || !resistive || !(open > 0)) {
+    if (point.isEmpty() || !resistive(view)) {
       return;
     }
     if (view.anode() > NEAR_SUPPLY * open) {
@@ -156,6 +185,14 @@ final class BiasFindings {
     }
   }
 
+  /** Whether a resistor feeds the anode, and not a winding or a current source. */
+  static boolean resistive(LoadLineView view) {
+    double drop = view.dcResistance() * view.current();
+    return drop > 0.02 * (view.anode() + drop)
+        && view.acResistance() < 3 * view.dcResistance()
+        && view.dcResistance() < 5e6;
+  }
+
   private Optional<Remedy> moreSwing() {
     Remedies remedies = context.remedies();
     double now = context.answer().clean().outputPeak();
@@ -170,12 +207,18 @@ final class BiasFindings {
     return biasParts(context);
   }
 
+  /** A load or a tail makes the signal and not only the bias. */
+  private static boolean carriesSignal(Part part) {
+    return part.role().contains("load") || part.role().contains("tail");
+  }
+
   static List<Part> biasParts(FindingContext context) {
     List<Part> found = new ArrayList<>();
     for (Part part : context.remedies().resistors()) {
       for (DevicePoint point : context.answer().points()) {
         Valve valve = context.model().valve(point.ref());
         if (valve.cathode() != 0
+            && !carriesSignal(part)
             && PartRoles.touches(context.model(), part, valve.cathode())
             && !found.contains(part)) {
           found.add(part);

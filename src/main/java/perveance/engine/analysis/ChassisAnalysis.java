@@ -55,7 +55,7 @@ public final class ChassisAnalysis {
     for (StageModel stage : model.models()) {
       StageAnswer answer = answers.answer(stage);
       boolean judged = options.details() && !progress.cancelled();
-      stages.add(judged ? judged(answer, stage, model) : answer);
+      stages.add(judged ? judged(answer, stage, model, cold) : answer);
     }
     List<Discharge> discharges = dc.map(p -> discharges(model, p, cold)).orElse(List.of());
     HighestVoltage highest = HighestVoltage.of(model, cold);
@@ -77,13 +77,15 @@ public final class ChassisAnalysis {
         Findings.worstFirst(findings));
   }
 
-  private StageAnswer judged(StageAnswer answer, StageModel stage, ChassisModel model) {
+  private StageAnswer judged(
+      StageAnswer answer, StageModel stage, ChassisModel model, Optional<DcSolution> cold) {
     FindingContext context =
         new FindingContext(
             answer,
             stage,
             model.circuits().values(answer.ref()),
             model.chassis().conditions(),
+            cold,
             new ChassisRetry(model, devices));
     List<Finding> findings = new ArrayList<>();
     findings.addAll(RatingFindings.of(context));

@@ -75,7 +75,9 @@ final class ChassisFindings {
       finding =
           Finding.of(
                   HazardMessage.NO_DISCHARGE_PATH,
-                  Severity.DANGER,
+                  d.where().startsWith(ChassisNames.supply(""))
+                      ? Severity.DANGER
+                      : Severity.CAUTION,
                   d.where(),
                   Words.place(d.where()),
                   Words.of(d.voltage(), Unit.VOLT))

@@ -3,11 +3,11 @@ package perveance.engine.analysis;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import perveance.engine.analysis.Band.Share;
 import perveance.engine.base.DataMessage;
 import perveance.engine.base.Finding;
+import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.base.Unit;
@@ -73,39 +73,42 @@ final class DataFindings {
 
   /** The part or supply behind most of the doubt in the anode voltage: worth measuring. */
   private void cause(DevicePoint point) {
+    boolean fed =
+        context
+            .answer()
+            .loadLine()
+            .filter(l -> l.ref().equals(point.ref()) && BiasFindings.resistive(l))
+            .isPresent();
     Band band = point.bands().get("anodeChassis");
-    Optional<Share> most =
-        band == null
-            ? Optional.empty()
-            : band.shares().stream().max(Comparator.comparingDouble(Share::fraction));
-    if (band == null
-        || most.isEmpty()
-        || most.get().fraction() < MOST
-        || most.get().cause().startsWith("valve")) {
+    if (!fed || band == null) {
       return;
     }
-    String cause = most.get().cause();
+    band.shares().stream()
+        .max(Comparator.comparingDouble(Share::fraction))
+        .filter(s -> s.fraction() >= MOST && !s.cause().startsWith("valve"))
+        .ifPresent(s -> findings.add(worthMeasuring(point, band, s)));
+  }
+
+  private Finding worthMeasuring(DevicePoint point, Band band, Share most) {
     Optional<Part> part =
         context.answer().circuit().parts().stream()
-            .filter(p -> p.element().equals(context.ref() + "." + cause))
+            .filter(p -> p.element().equals(context.ref() + "." + most.cause()))
             .findFirst();
-    String named = part.map(context::named).orElse(cause);
-    double left = Math.sqrt(1 - most.get().fraction());
+    String named = part.map(context::named).orElse(most.cause());
     double middle = 0.5 * (band.low() + band.high());
-    double half = 0.5 * (band.high() - band.low()) * left;
+    double half = 0.5 * (band.high() - band.low()) * Math.sqrt(1 - most.fraction());
     Finding finding =
         Finding.of(
                 DataMessage.BAND_CAUSE,
                 Severity.NOTE,
-                context.ref(),
+                part.isPresent() ? context.ref() : most.cause().replace(' ', '.'),
                 point.ref(),
-                Words.percent(most.get().fraction()),
+                Words.percent(most.fraction()),
                 "anode voltage",
                 named,
-                perveance.engine.base.QuantityFormat.TYPESET.range(
-                    middle - half, middle + half, Unit.VOLT))
-            .withValue(most.get().fraction(), Unit.RATIO)
-            .withRemedy(new Remedy("Measure " + named + " and state what you find.", Map.of()));
-    findings.add(part.map(p -> finding.onPart(p.element())).orElse(finding));
+                QuantityFormat.TYPESET.range(middle - half, middle + half, Unit.VOLT))
+            .withValue(most.fraction(), Unit.RATIO)
+            .withRemedy(Remedy.byHand("Measure " + named + " and state what you find."));
+    return part.map(p -> finding.onPart(p.element())).orElse(finding);
   }
 }

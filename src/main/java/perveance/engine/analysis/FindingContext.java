@@ -1,6 +1,7 @@
 package perveance.engine.analysis;
 
-import perveance.engine.base.QuantityFormat;
+import java.util.Optional;
+import perveance.engine.circuit.DcSolution;
 import perveance.engine.stage.Conditions;
 import perveance.engine.stage.StageCircuit.Part;
 import perveance.engine.stage.StageValues;
@@ -12,10 +13,16 @@ import perveance.engine.stage.StageValues;
  * @param model the solved stage
  * @param values what the stage states
  * @param conditions what the chassis states
+ * @param cold the whole chassis with cold valves
  * @param retry works the stage out again with changed keys
  */
 record FindingContext(
-    StageAnswer answer, StageModel model, StageValues values, Conditions conditions, Retry retry) {
+    StageAnswer answer,
+    StageModel model,
+    StageValues values,
+    Conditions conditions,
+    Optional<DcSolution> cold,
+    Retry retry) {
   Remedies remedies() {
     return new Remedies(answer, retry);
   }
@@ -27,10 +34,5 @@ record FindingContext(
   /** A part as the sheet names it. */
   String named(Part part) {
     return remedies().designator(part);
-  }
-
-  /** A part's value as text that a chassis file takes. */
-  static String text(Part part, double value) {
-    return QuantityFormat.PLAIN.part(value, Remedies.unit(part));
   }
 }

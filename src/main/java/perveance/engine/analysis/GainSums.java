@@ -67,12 +67,23 @@ final class GainSums {
     } else if (rk > 0) {
       return gain(
           "A = -mu RL / (ra + RL + (mu + 1) Rk)",
-          "-" + m + " x " + l + " / (" + a + " + " + l + " + " + m1 + " x " + Sum.ohms(rk) + ")",
+          Sum.plain(-mu)
+              + " x "
+              + l
+              + " / ("
+              + a
+              + " + "
+              + l
+              + " + "
+              + m1
+              + " x "
+              + Sum.ohms(rk)
+              + ")",
           -mu * load / (ra + load + (mu + 1) * rk));
     }
     return gain(
         "A = -mu RL / (ra + RL)",
-        "-" + m + " x " + l + " / (" + a + " + " + l + ")",
+        Sum.plain(-mu) + " x " + l + " / (" + a + " + " + l + ")",
         -mu * load / (ra + load));
   }
 

@@ -19,7 +19,7 @@ final class GridCircuit {
   private GridCircuit() {}
 
   /**
-   * Resistance from grid to chassis with the valves taken as cold and all sources dead.
+   * Resistance from grid to cathode with the valves taken as cold and all sources dead.
    *
    * @param circuit whole circuit
    * @param ref valve
@@ -31,10 +31,13 @@ final class GridCircuit {
     for (Element element : circuit.elements()) {
       elements.add(quiet(element));
     }
-    elements.add(new CurrentSource(ref + ".grid_test", 0, valve.grid(), TEST_CURRENT));
+    elements.add(
+        new CurrentSource(ref + ".grid_test", valve.cathode(), valve.grid(), TEST_CURRENT));
     return new DcSolver(new Circuit(circuit.nodes(), elements)).solve()
             instanceof DcOutcome.Converged solved
-        ? OptionalDouble.of(solved.solution().voltage(valve.grid()) / TEST_CURRENT)
+        ? OptionalDouble.of(
+            (solved.solution().voltage(valve.grid()) - solved.solution().voltage(valve.cathode()))
+                / TEST_CURRENT)
         : OptionalDouble.empty();
   }
 

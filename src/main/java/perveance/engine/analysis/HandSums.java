@@ -9,7 +9,7 @@ final class HandSums {
   private HandSums() {}
 
   static List<HandSum> of(
-      StageModel model, List<DevicePoint> points, SmallSignalAnswer small, CleanSwing clean) {
+      StageModel model, List<DevicePoint> points, SmallSignalAnswer small, double peak) {
     List<HandSum> sums = new ArrayList<>(new PointSums(model).of(points));
     Optional<SignalPath> path = SignalPath.of(model);
     if (path.isPresent()) {
@@ -23,7 +23,7 @@ final class HandSums {
                 .all(points.get(0), load.get() - path.get().cathodeResistance()));
       }
     }
-    sums.addAll(SwingSums.of(clean));
+    sums.addAll(SwingSums.of(new StageCurve(model), peak, model.inputShare()));
     return sums;
   }
 

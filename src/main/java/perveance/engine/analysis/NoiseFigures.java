@@ -25,11 +25,20 @@ record NoiseFigures(double input, List<Share> shares) {
     NoiseAnswer noise =
         new Noise(model.dc())
             .between(model.source(), model.mainOutput().plus(), model.mainOutput().minus(), AUDIO);
+    List<NoiseAnswer.Share> own =
+        noise.shares().stream().filter(s -> owned(model, s.element())).toList();
+    double fraction = own.stream().mapToDouble(NoiseAnswer.Share::fraction).sum();
     List<Share> shares =
-        noise.shares().stream()
-            .filter(s -> s.fraction() >= LEAST_SHARE)
-            .map(s -> new Share(s.element(), s.fraction()))
+        own.stream()
+            .filter(s -> s.fraction() >= LEAST_SHARE * fraction)
+            .map(s -> new Share(s.element(), s.fraction() / fraction))
             .toList();
-    return new NoiseFigures(noise.input() * model.inputShare(), shares);
+    double input = noise.input() * Math.sqrt(fraction) * Math.abs(model.inputShare());
+    return new NoiseFigures(Double.isFinite(input) ? input : 0, shares);
+  }
+
+  /** Noise of a stage wired straight to this one is that stage's own. */
+  private static boolean owned(StageModel model, String element) {
+    return model.owns(model.circuit().elements().get(model.circuit().element(element)));
   }
 }

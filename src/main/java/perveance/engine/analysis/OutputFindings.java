@@ -62,11 +62,15 @@ final class OutputFindings {
   private Optional<Remedy> balance(double now) {
     Remedies remedies = context.remedies();
     return remedies.smallest(
-        remedies.resistors().stream().filter(p -> p.role().contains("load")).toList(),
+        remedies.resistors().stream()
+            .filter(p -> p.role().contains("load") || p.role().contains("divider"))
+            .toList(),
         v ->
             v.secondGain().isPresent()
                 && difference(v.gain(), v.secondGain().getAsDouble())
-                    < Math.min(UNBALANCED, 0.8 * now));
+                    < Math.min(UNBALANCED, 0.8 * now)
+                && v.clean().outputPeak()
+                    > BiasFindings.KEPT * context.answer().clean().outputPeak());
   }
 
   private void screens() {

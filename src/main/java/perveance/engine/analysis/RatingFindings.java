@@ -17,6 +17,9 @@ final class RatingFindings {
   /** From this share of a limit on a caution is given, common practice [1]. */
   static final double NEAR = 0.9;
 
+  /** A leak of just the limit stays within it, whatever the cathode resistor adds [1]. */
+  private static final double ROUNDING = 0.01;
+
   private record Codes(RatingMessage over, Optional<RatingMessage> near) {
     Codes(RatingMessage over, RatingMessage near) {
       this(over, Optional.of(near));
@@ -90,7 +93,7 @@ final class RatingFindings {
 
   private void judge(LimitUse use) {
     Codes codes = codes(use);
-    if (use.share() > 1) {
+    if (use.share() > (codes.equals(LEAK) ? 1 + ROUNDING : 1)) {
       Finding over =
           Finding.of(
                   codes.over(),

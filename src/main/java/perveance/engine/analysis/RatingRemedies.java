@@ -82,7 +82,13 @@ final class RatingRemedies {
                 text));
       }
     }
-    return Optional.empty();
+    return Optional.of(
+        Remedy.byHand(
+            "Feed the heater of "
+                + use.ref()
+                + " from a winding of its own that is lifted to about "
+                + Words.roughly(cathode, Unit.VOLT)
+                + "."));
   }
 
   private static boolean heatersWithin(Variant variant, LimitUse use) {

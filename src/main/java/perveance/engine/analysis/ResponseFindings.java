@@ -26,6 +26,9 @@ final class ResponseFindings {
   /** Input noise above this is told of where the source makes less than half of it [V]. */
   private static final double NOISY = 5e-6;
 
+  /** A clean input so many times the noise leaves it without meaning: 100 dB [1]. */
+  private static final double QUIET = 1e5;
+
   private final FindingContext context;
   private final SmallSignalAnswer small;
   private final List<Finding> findings = new ArrayList<>();
@@ -127,7 +130,8 @@ final class ResponseFindings {
   private void noise() {
     Optional<Band.Share> most = small.noiseShares().stream().findFirst();
     boolean source = most.filter(s -> s.cause().endsWith(".source")).isPresent();
-    if (small.noiseInput() > NOISY && most.isPresent() && !source) {
+    double room = context.answer().clean().inputPeak() / small.noiseInput();
+    if (small.noiseInput() > NOISY && room < QUIET && most.isPresent() && !source) {
       String cause = most.get().cause();
       findings.add(
           Finding.of(

@@ -69,7 +69,9 @@ final class StageAnswers {
         options.details() ? parts(model, atDrive) : List.of(),
         readings(model, points, bands),
         loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak()))),
-        options.details() ? HandSums.of(model, points, small, clean) : List.of(),
+        options.details()
+            ? HandSums.of(model, points, small, drive.orElse(clean.inputPeak()))
+            : List.of(),
         model.stage().assumptions(),
         List.of());
   }

@@ -122,7 +122,12 @@ final class SwingFindings {
   private static Optional<Remedy> enough(FindingContext context) {
     return context
         .remedies()
-        .smallest(BiasFindings.biasParts(context), v -> v.clean().headroom().orElse(-1) >= 0);
+        .smallest(
+            BiasFindings.biasParts(context),
+            v ->
+                v.clean().headroom().orElse(-1) >= 0
+                    && v.clean().outputPeak()
+                        > BiasFindings.KEPT * context.answer().clean().outputPeak());
   }
 
   private static Optional<Finding> distortion(FindingContext context) {

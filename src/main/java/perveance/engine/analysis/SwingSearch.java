@@ -7,7 +7,8 @@ import perveance.engine.analysis.CleanSwing.Limit;
  * Follows the mid-band characteristic outward from idle until the swing stops being clean:
  *
  * <ul>
- *   <li>grid current: a grid reaches the onset that its law states (0.3 uA);
+ *   <li>grid current: a grid reaches the onset that its law states (0.3 uA); a grid that conducts
+ *       at idle already, as in a follower wired straight to an anode, ends nothing by that;
  *   <li>cut-off: a section is down to a tenth of its idle current. A pair in push-pull may lose one
  *       section while the other goes on, so there this does not count;
  *   <li>knee: the gain has fallen to half of that at idle, and not because a section cuts off.
@@ -32,6 +33,10 @@ final class SwingSearch {
   private final StageCurve curve;
   private final boolean composite;
   private final double[] idleCurrent;
+
+  /** Whether grid current flows at idle already, so that its onset ends nothing. */
+  private final boolean[] conducting;
+
   private final double scale;
   private double idleGain;
 
@@ -45,8 +50,12 @@ final class SwingSearch {
     this.curve = curve;
     this.composite = composite;
     this.idleCurrent = new double[curve.valves()];
+    this.conducting = new boolean[curve.valves()];
     curve.move(0);
     readIdle();
+    for (int v = 0; v < conducting.length; v++) {
+      conducting[v] = curve.gridVoltage(v) > curve.gridOnset(v);
+    }
     this.scale = scale();
     this.idleGain = slope(0);
   }
@@ -61,6 +70,7 @@ final class SwingSearch {
     this.curve = specimen;
     this.composite = nominal.composite;
     this.idleCurrent = new double[specimen.valves()];
+    this.conducting = nominal.conducting;
     readIdle();
     this.scale = nominal.scale;
     this.idleGain = knee ? slope(0) : nominal.idleGain;
@@ -214,7 +224,9 @@ final class SwingSearch {
   private double gridRoom() {
     double least = Double.POSITIVE_INFINITY;
     for (int v = 0; v < idleCurrent.length; v++) {
-      least = Math.min(least, curve.gridOnset(v) - curve.gridVoltage(v));
+      if (!conducting[v]) {
+        least = Math.min(least, curve.gridOnset(v) - curve.gridVoltage(v));
+      }
     }
     return least;
   }

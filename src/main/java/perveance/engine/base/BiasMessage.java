@@ -8,6 +8,7 @@ public enum BiasMessage implements MessageCode {
   ANODE_BOTTOMED("{0} idles bottomed: only {1} from anode to cathode."),
   LOW_CURRENT("{0} idles at {1}, below {2}: the published data say little there."),
   GRID_LEAK_VOLTAGE("{0}: grid current through {1} moves the grid by {2}."),
+  COLD_START_GRID("{0}: before the valves warm its grid stands {1} above its cathode."),
   FIXED_BIAS_SPREAD("{0}: idle current may lie anywhere from {1} to {2}; set it by measurement.");
 
   private final String template;

@@ -80,6 +80,12 @@ public final class HeldCurve {
     equations.take(solver.values());
     newton.prepare();
     equations.holdsAt(solver, at, hold);
+    int[] row = equations.topology.row;
+    for (int node = 0; node < row.length; node++) {
+      if (row[node] >= 0) {
+        rest[row[node]] = solver.voltage(node);
+      }
+    }
     toRest();
     boolean found = settle(0);
     if (found) {

@@ -61,8 +61,7 @@ public final class ChassisAnalysis {
     HighestVoltage highest = HighestVoltage.of(model, cold);
     List<Finding> findings = new ArrayList<>();
     if (options.details()) {
-      findings.addAll(
-          new ChassisFindings(model).all(highest.voltage(), highest.node(), discharges));
+      findings.addAll(new ChassisFindings(model).all(discharges));
     }
     stages.forEach(s -> findings.addAll(s.findings()));
     progress.report(1, "done");

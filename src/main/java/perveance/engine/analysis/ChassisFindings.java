@@ -43,7 +43,7 @@ final class ChassisFindings {
     this.conditions = model.chassis().conditions();
   }
 
-  List<Finding> all(double highest, String where, List<Discharge> discharges) {
+  List<Finding> all(List<Discharge> discharges) {
     for (Failure failure : model.failures()) {
       findings.add(
           Finding.of(
@@ -52,16 +52,6 @@ final class ChassisFindings {
               failure.ref(),
               failure.ref(),
               failure.reason()));
-    }
-    if (highest > conditions.threshold()) {
-      findings.add(
-          Finding.of(
-                  HazardMessage.LETHAL_VOLTAGE,
-                  Severity.DANGER,
-                  where,
-                  Words.place(where),
-                  Words.of(highest, Unit.VOLT))
-              .withValue(highest, conditions.threshold(), Unit.VOLT));
     }
     discharges.forEach(this::discharge);
     mains();
@@ -75,9 +65,7 @@ final class ChassisFindings {
       finding =
           Finding.of(
                   HazardMessage.NO_DISCHARGE_PATH,
-                  d.where().startsWith(ChassisNames.supply(""))
-                      ? Severity.DANGER
-                      : Severity.CAUTION,
+                  Severity.CAUTION,
                   d.where(),
                   Words.place(d.where()),
                   Words.of(d.voltage(), Unit.VOLT))

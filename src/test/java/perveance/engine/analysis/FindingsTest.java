@@ -31,14 +31,14 @@ class FindingsTest {
     return find(bench.answer(AnalysisOptions.FULL), code).orElseThrow();
   }
 
+  /** The cautions say it on every output; a finding is a fault of this file. */
   @Test
-  void aLethalVoltageIsADangerAndComesFirst() {
+  void aLethalVoltageIsTheCautionsConcernAndNoFault() {
     ChassisAnswer answer = Bench.on(310).standardWith().answer(AnalysisOptions.FULL);
-    Finding first = answer.findings().get(0);
-    assertEquals(HazardMessage.LETHAL_VOLTAGE, first.code());
-    assertEquals(Severity.DANGER, first.severity());
-    assertEquals(310, first.value().orElseThrow(), 1e-9);
-    assertEquals(60, first.limit().orElseThrow());
+    assertEquals(310, answer.highestVoltage(), 1e-9);
+    answer
+        .findings()
+        .forEach(f -> assertTrue(f.severity().compareTo(Severity.OVER_LIMIT) < 0, f.text()));
   }
 
   @Test
@@ -161,7 +161,7 @@ class FindingsTest {
                     OptionalDouble.empty()))
             .standardWith();
     Finding finding = expect(bench, HazardMessage.NO_DISCHARGE_PATH);
-    assertEquals(Severity.DANGER, finding.severity());
+    assertEquals(Severity.CAUTION, finding.severity());
     assertEquals("68k", finding.remedy().orElseThrow().edits().get("bleeder"));
   }
 

@@ -72,7 +72,7 @@ final class SpreadCathode {
    * @param out receives the current and slopes
    */
   void evaluate(double grid, double pull, ElectrodeCurrents out) {
-    double reach = Math.max(pull, 0);
+    double reach = pull > 0 ? pull : 0;
     double upper = grid + highOffset + reach * highPenetration;
     if (upper <= 0) {
       out.set(ElectrodeCurrents.ANODE, 0, 0, 0, 0);

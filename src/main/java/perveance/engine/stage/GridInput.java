@@ -166,9 +166,9 @@ final class GridInput {
       sketch.wire(joint - 4, y, joint, y);
     } else if (values.has(INPUT_COUPLING.key())) {
       sketch.input(joint - 12, y, Optional.of(SOURCE), "in");
-      sketch.wire(joint - 12, y, joint - 6, y);
-      sketch.lying(SymbolType.CAPACITOR, joint - 4, y, INPUT_COUPLING.key(), Side.ABOVE);
-      sketch.wire(joint - 2, y, joint, y);
+      sketch.wire(joint - 12, y, joint - 7, y);
+      sketch.lying(SymbolType.CAPACITOR, joint - 5, y, INPUT_COUPLING.key(), Side.ABOVE);
+      sketch.wire(joint - 3, y, joint, y);
     } else {
       sketch.input(joint - 4, y, Optional.of(SOURCE), "in");
       sketch.wire(joint - 4, y, joint, y);
@@ -184,8 +184,13 @@ final class GridInput {
 
   /** Draws the foot of the grid leak: a bias or chassis. */
   static void foot(Sketch sketch, int x, int y) {
+    foot(sketch, x, y, Side.LEFT);
+  }
+
+  /** Draws the foot of a grid leak with its text on a side. */
+  static void foot(Sketch sketch, int x, int y, Side side) {
     if (sketch.values().has(GRID_BIAS.key())) {
-      sketch.source(SymbolType.BIAS, x, y, GRID_BIAS, Side.BELOW, "bias");
+      sketch.source(SymbolType.BIAS, x, y, GRID_BIAS, side, "bias");
     } else {
       sketch.ground(x, y);
     }

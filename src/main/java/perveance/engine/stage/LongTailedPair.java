@@ -103,6 +103,7 @@ final class LongTailedPair implements StageKind {
     int left = Tail.LEFT;
     int right = Tail.RIGHT;
     int y = Tail.VALVES;
+    int joint = Tail.joint(values);
     sketch.supply((left + right) / 2, AnodeLoad.RAIL, SUPPLY, Side.ABOVE);
     sketch.wire(left, AnodeLoad.RAIL, right, AnodeLoad.RAIL);
     AnodeLoad.hanging(sketch, left, ANODE_LOAD.key(), "anode", Side.RIGHT);
@@ -113,11 +114,11 @@ final class LongTailedPair implements StageKind {
     ValvePair.sketch(sketch, values.secondDevice(), right, y, true, ValvePair.second(values));
     Tail.sketch(sketch);
     if (Tail.selfBiased(values)) {
-      GridInput.sketchTo(sketch, Tail.JOINT, y, Tail.MIDDLE, Tail.FOOT);
+      GridInput.sketchTo(sketch, joint, y, Tail.MIDDLE, Tail.FOOT);
     } else {
-      GridInput.sketch(sketch, Tail.JOINT, y);
+      GridInput.sketch(sketch, joint, y);
     }
-    GridInput.sketchStopper(sketch, Tail.JOINT, left - 4, y, "");
+    GridInput.sketchStopper(sketch, joint, left - 4, y, "");
     SecondGrid.sketch(sketch);
     OutputCoupling.sketchLeft(sketch, left, AnodeLoad.ANODE, LOAD, "");
     OutputCoupling.sketch(sketch, right, AnodeLoad.ANODE, LOAD2, "2");

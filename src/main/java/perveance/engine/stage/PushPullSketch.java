@@ -121,7 +121,7 @@ final class PushPullSketch {
   }
 
   private int core() {
-    return last + (screened ? 30 : 26);
+    return last + (screened ? 30 : 28);
   }
 
   private void transformer() {
@@ -172,11 +172,19 @@ final class PushPullSketch {
 
   private void screenRail(int first, int right) {
     if (OutputFeed.ownScreenRail(values)) {
-      sketch.wire(first, CORE + 4, right, CORE + 4);
+      rungs(first, right, CORE + 4);
       sketch.wire(first, CORE + 4, first - 6, CORE + 4);
       SingleEndedSketch.screenSupply(sketch, first - 6, CORE + 4);
     } else {
-      sketch.wire(first, CORE, core() - 8, CORE);
+      rungs(first, right, CORE);
+      sketch.wire(right, CORE, core() - 8, CORE);
+    }
+  }
+
+  /** Joins the upright leads of the screens at a height. */
+  private void rungs(int first, int right, int y) {
+    for (int x = first; x < right; x += step) {
+      sketch.wire(x, y, x + step, y);
     }
   }
 }

@@ -59,12 +59,13 @@ final class SecondGrid {
     int y = Tail.VALVES;
     if (tied(values)) {
       sketch.wire(GRID, y, LEAK, y, LEAK, y + 2);
-      GridInput.foot(sketch, LEAK, y + 2);
+      GridInput.foot(sketch, LEAK, y + 2, Side.RIGHT);
       return;
     }
     if (GridInput.direct(values)) {
       int above = y - 5;
-      sketch.wire(Tail.JOINT, y, Tail.JOINT, above, Tail.MIDDLE - 2, above);
+      int joint = Tail.joint(values);
+      sketch.wire(joint, y, joint, above, Tail.MIDDLE - 2, above);
       sketch.lying(SymbolType.RESISTOR, Tail.MIDDLE, above, SECOND_GRID_LEAK.key(), Side.ABOVE);
       sketch.wire(Tail.MIDDLE + 2, above, GRID + 4, above, GRID + 4, y);
     } else {
@@ -73,7 +74,7 @@ final class SecondGrid {
       if (Tail.selfBiased(values)) {
         sketch.wire(LEAK, y + 7, LEAK, Tail.FOOT, Tail.MIDDLE, Tail.FOOT);
       } else {
-        GridInput.foot(sketch, LEAK, y + 7);
+        GridInput.foot(sketch, LEAK, y + 7, Side.RIGHT);
       }
     }
     bypass(sketch, y);

@@ -28,7 +28,6 @@ final class Tail {
 
   static final int RIGHT = 44;
   static final int MIDDLE = 32;
-  static final int JOINT = 9;
   static final int VALVES = 21;
   static final int CATHODES = VALVES + 6;
   static final int FOOT = CATHODES + 7;
@@ -36,6 +35,11 @@ final class Tail {
   static final int SHUNT = END + 2;
 
   private Tail() {}
+
+  /** Where the leak hangs; further left where the second grid is fed from there. */
+  static int joint(StageValues values) {
+    return GridInput.direct(values) ? LEFT - 14 : LEFT - 11;
+  }
 
   /** Whether the grids rest at the joint of a bias resistor and the tail. */
   static boolean selfBiased(StageValues values) {

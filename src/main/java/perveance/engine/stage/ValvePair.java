@@ -85,13 +85,13 @@ final class ValvePair {
    */
   record Triode(int anode, int grid, int cathode) {}
 
-  /** Draws a valve; a tied screen goes to the anode's lead one unit above its terminal. */
+  /** Draws a valve; a tied screen goes round to the anode's terminal. */
   static void sketch(Sketch sketch, Device device, int x, int y, boolean mirrored, String ref) {
     sketch.valve(
         ValveWiring.symbol(device), x, y, mirrored, ref, mirrored ? Side.LEFT : Side.RIGHT);
     if (device.law().kind() == LawKind.PENTODE) {
       int side = mirrored ? -1 : 1;
-      sketch.wire(x + 4 * side, y, x + 5 * side, y, x + 5 * side, y - 5, x, y - 5);
+      sketch.wire(x + 4 * side, y, x + 5 * side, y, x + 5 * side, y - 4, x, y - 4);
     }
   }
 }

@@ -13,7 +13,7 @@ final class HandSums {
     List<HandSum> sums = new ArrayList<>(new PointSums(model).of(points));
     Optional<SignalPath> path = SignalPath.of(model);
     if (path.isPresent()) {
-      LoadSeen seen = new LoadSeen(model, points.get(0).ref());
+      LoadSeen seen = new LoadSeen(model, points.get(0).ref(), false);
       Optional<Double> load = seen.acResistance();
       if (load.isPresent()) {
         sums.addAll(

@@ -7,7 +7,9 @@ import java.util.List;
  *
  * @param ref valve section
  * @param dc dc load line, anode to cathode volts against anode current
- * @param ac ac load line through the operating point
+ * @param ac ac load line through the operating point; of a pair in push-pull the composite line,
+ *     the difference of the two currents against one valve's anode voltage, from the resting
+ *     voltage on
  * @param excursion path of the driven or clean swing
  * @param anode operating point [V]
  * @param current operating point [A]

@@ -43,7 +43,7 @@ final class LoadLines {
         new LoadLineView(
             ref,
             dc,
-            straight(anode, current, ac.get()),
+            straight(anode, seen.composite() ? 0 : current, ac.get()),
             excursion,
             anode,
             current,
@@ -54,7 +54,7 @@ final class LoadLines {
   /** A straight line through the point, from no current to no voltage. */
   private static List<Point> straight(double anode, double current, double resistance) {
     Point foot = new Point(anode + current * resistance, 0);
-    double reach = STEEP_REACH * current;
+    double reach = current > 0 ? STEEP_REACH * current : anode / STEEP;
     if (resistance < STEEP || current + anode / resistance > 1e3 * reach) {
       return List.of(foot, new Point(foot.voltage() - reach * resistance, reach));
     }

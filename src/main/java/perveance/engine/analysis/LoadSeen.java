@@ -18,7 +18,10 @@ import perveance.engine.device.LawKind;
 
 /**
  * What a valve sees from its anode and cathode: the same circuit with the valve taken out and its
- * currents put in by sources. Sections in parallel with it carry the same current each.
+ * currents put in by sources. Sections in parallel with it carry the same current each. For the
+ * composite view of a pair all its valves are taken out, and the load is what the difference of the
+ * currents sees: a quarter of the load from anode to anode (B. J. Thompson, Proc. IRE 21, 591,
+ * 1933).
  */
 final class LoadSeen {
   private static final String SCREEN_SUFFIX = ".screen_current";
@@ -29,14 +32,16 @@ final class LoadSeen {
   private final List<Integer> anodeSources = new ArrayList<>();
   private final ValvePoint point;
   private final boolean straight;
+  private final boolean composite;
 
-  LoadSeen(StageModel model, String ref) {
+  LoadSeen(StageModel model, String ref, boolean composite) {
+    this.composite = composite;
     this.valve = model.valve(ref);
     this.point = model.dc().valve(ref);
     List<Element> elements = new ArrayList<>();
     boolean onlyLinear = true;
     for (Element element : model.circuit().elements()) {
-      if (element instanceof Valve other && besideIt(other)) {
+      if (element instanceof Valve other && (besideIt(other) || (composite && model.owns(other)))) {
         addSources(elements, other, model.dc().valve(other.name()));
       } else {
         elements.add(element);
@@ -81,6 +86,11 @@ final class LoadSeen {
     return point;
   }
 
+  /** Whether this is the view of a pair. */
+  boolean composite() {
+    return composite;
+  }
+
   /** Whether everything else is linear, so that the dc line is straight. */
   boolean straight() {
     return straight;
@@ -114,7 +124,8 @@ final class LoadSeen {
     }
     double sum = 0;
     for (int source : anodeSources) {
-      sum -= signal.midbandGain(source, valve.anode(), valve.cathode());
+      boolean counted = !composite || circuit.elements().get(source).name().equals(valve.name());
+      sum -= !counted ? 0 : signal.midbandGain(source, valve.anode(), valve.cathode());
     }
     return Optional.of(sum);
   }

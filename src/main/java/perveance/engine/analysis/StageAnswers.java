@@ -122,6 +122,7 @@ final class StageAnswers {
 
   private static Optional<LoadLineView> loadLine(
       StageModel model, Optional<MidbandSolution> cycle) {
+    boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
     return model
         .stage()
         .loadLine()
@@ -129,7 +130,7 @@ final class StageAnswers {
         .flatMap(
             ref -> {
               List<Point> path = cycle.map(c -> DrivenLevels.path(model, c, ref)).orElse(List.of());
-              return LoadLines.of(new LoadSeen(model, ref), ref, path);
+              return LoadLines.of(new LoadSeen(model, ref, composite), ref, path);
             });
   }
 }

@@ -24,6 +24,7 @@ final class Bench {
   /** The devices that come with the program. */
   static final DeviceLibrary LIBRARY = new DeviceFiles(List.of());
 
+  private DeviceLibrary library = LIBRARY;
   private Conditions conditions = Conditions.USUAL;
   private final List<Supply> supplies = new ArrayList<>();
   private final List<StageEntry> stages = new ArrayList<>();
@@ -66,6 +67,12 @@ final class Bench {
 
   Bench supply(Supply supply) {
     supplies.add(supply);
+    return this;
+  }
+
+  /** Other devices than those that come with the program. */
+  Bench devices(DeviceLibrary others) {
+    library = others;
     return this;
   }
 
@@ -136,7 +143,7 @@ final class Bench {
   }
 
   ChassisAnswer answer(AnalysisOptions options) {
-    return new ChassisAnalysis(LIBRARY).answer(chassis(), options, Progress.none());
+    return new ChassisAnalysis(library).answer(chassis(), options, Progress.none());
   }
 
   /** The first stage's answer without bands. */

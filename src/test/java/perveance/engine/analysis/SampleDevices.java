@@ -13,72 +13,59 @@ import perveance.engine.device.FitSummary;
 import perveance.engine.device.Heater;
 import perveance.engine.device.RatingSystem;
 import perveance.engine.device.Ratings;
-import perveance.engine.device.SpreadTriodeLaw;
-import perveance.engine.device.SpreadTriodeParameters;
 import perveance.engine.device.Validity;
 
-/** A drawer of devices for tests that need no file. */
+/** A drawer with one type of valve, for tests that state the law themselves. */
 final class SampleDevices implements DeviceLibrary {
-  static final DeviceLaw LAW_12AX7 =
-      new SpreadTriodeLaw(
-          new SpreadTriodeParameters(
-              1.16123e-3, 0.618048, 9.2964e-3, 0.406786, 4, 4.0643e-4, -0.6, 0.0862));
+  private final String type;
+  private final Device device;
 
-  private final Map<String, Device> devices;
-
-  SampleDevices() {
-    this(Map.of());
-  }
-
-  SampleDevices(Map<String, Device> more) {
-    devices = new java.util.LinkedHashMap<>(more);
-    devices.putIfAbsent("12ax7", triode("12AX7", LAW_12AX7));
-  }
-
-  static Device triode(String type, DeviceLaw law) {
-    return new Device(
-        type,
-        List.of(),
-        2,
-        "B9A",
-        Map.of("1", "a2", "2", "g2", "3", "k2", "6", "a1", "7", "g1", "8", "k1"),
-        List.of(new Heater(12.6, 0.15, "4-5", false)),
-        List.of(ratings(type)),
-        new Capacitances(1.7e-12, 1.6e-12, 0.46e-12),
-        List.of(),
-        law,
-        new FitSummary("stated", 0, 0, List.of(), List.of()),
-        new Validity(50, 300, 1e-4, 4e-3, -4, 0),
-        List.of());
+  SampleDevices(String type, DeviceLaw law) {
+    this.type = type.toLowerCase(Locale.ROOT);
+    this.device =
+        new Device(
+            type,
+            List.of(),
+            1,
+            "B9A",
+            Map.of("1", "a", "2", "g", "3", "k"),
+            List.of(new Heater(6.3, 0.3, "4-5", false)),
+            List.of(ratings(type)),
+            new Capacitances(1.7e-12, 1.6e-12, 0.46e-12),
+            List.of(),
+            law,
+            new FitSummary("stated", 0, 0, List.of(), List.of()),
+            new Validity(0, 1000, 0, 1, -100, 10),
+            List.of());
   }
 
   private static Ratings ratings(String type) {
     OptionalDouble none = OptionalDouble.empty();
     return new Ratings(
         type,
-        RatingSystem.DESIGN_CENTRE,
-        "RCA Receiving Tube Manual",
-        "memory",
-        OptionalDouble.of(300),
+        RatingSystem.UNSTATED,
+        "stated for the test",
+        "stated",
+        OptionalDouble.of(1000),
         none,
-        OptionalDouble.of(1),
+        OptionalDouble.of(10),
         none,
         none,
         none,
-        OptionalDouble.of(8e-3),
-        OptionalDouble.of(1e6),
-        OptionalDouble.of(2.2e6),
-        OptionalDouble.of(180),
-        OptionalDouble.of(180));
+        none,
+        none,
+        none,
+        none,
+        none);
   }
 
   @Override
   public Optional<Device> find(String name) {
-    return Optional.ofNullable(devices.get(name.toLowerCase(Locale.ROOT)));
+    return name.toLowerCase(Locale.ROOT).equals(type) ? Optional.of(device) : Optional.empty();
   }
 
   @Override
   public List<String> names() {
-    return List.copyOf(devices.keySet());
+    return List.of(device.type());
   }
 }

@@ -61,6 +61,24 @@ final class MidbandCycle {
     return true;
   }
 
+  /** Largest change of a node's voltage at any sample for a change of the held quantities [V]. */
+  double reach(double[] change) {
+    double largest = 0;
+    for (double[][] sample : byHold) {
+      for (int i = 0; i < equations.topology.unknownNodes; i++) {
+        double moved = 0;
+        for (int h = 0; h < change.length; h++) {
+          moved += change[h] * sample[h][i];
+        }
+        // written so that what is no number counts as large
+        if (!(Math.abs(moved) <= largest)) {
+          largest = Math.abs(moved);
+        }
+      }
+    }
+    return largest;
+  }
+
   /** Moves all points along with a small change of the held quantities. */
   void shift(double[] change, double factor) {
     for (int k = 0; k < points.length; k++) {

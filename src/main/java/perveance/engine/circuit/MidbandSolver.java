@@ -18,11 +18,14 @@ import perveance.engine.numeric.DenseLu;
 public final class MidbandSolver {
   private static final int MOST_PASSES = 40;
 
-  /** A change so small that its square no longer matters: the cycle moves along by its slopes. */
-  private static final double CLOSE = 1e3;
+  /** A move so small that its square no longer matters: the cycle moves along by its slopes [V]. */
+  private static final double CLOSE = 1e-5;
 
-  /** A change so small that the last cycle, moved along, is a good start for the next. */
-  private static final double NEAR = 3e7;
+  /** A move so small that the last cycle, moved along, is a good start for the next [V]. */
+  private static final double NEAR = 1;
+
+  /** What the sum of the currents at any node and sample of an answer is below [A]. */
+  private static final double RESIDUAL = 1e-9;
 
   private static final double SMALLEST_DAMPING = 1.0 / 64;
   private static final double SMALLEST_STRIDE = 1.0 / 256;
@@ -89,10 +92,22 @@ public final class MidbandSolver {
   }
 
   private MidbandOutcome found(double peak) {
+    MidbandSolution solution = solution(peak);
+    if (!(solution.residual() < RESIDUAL) && pass(peak, hold, true)) {
+      solution = solution(peak);
+    }
+    if (!(solution.residual() < RESIDUAL)) {
+      reset();
+      return new MidbandOutcome.NotConverged(
+          "the currents of the cycle do not balance", peak, solvedPeak);
+    }
     warm = true;
     solvedPeak = peak;
-    return new MidbandOutcome.Converged(
-        new MidbandSolution(equations, drive.waveform(), cycle.points, hold, peak), passes);
+    return new MidbandOutcome.Converged(solution, passes);
+  }
+
+  private MidbandSolution solution(double peak) {
+    return new MidbandSolution(equations, drive.waveform(), cycle.points, hold, peak);
   }
 
   /** Raises the level from nothing in strides that shrink where a stride fails. */
@@ -135,7 +150,7 @@ public final class MidbandSolver {
           break;
         }
         solveFor(step);
-        double length = norm(step, hold);
+        double length = cycle.reach(step);
         if (length <= CLOSE) {
           add(step, 1, hold);
           cycle.shift(step, 1);
@@ -160,7 +175,7 @@ public final class MidbandSolver {
       }
       if (pass(peak, trial, close)) {
         solveFor(correction);
-        if (norm(correction, trial) <= (1 - damping / 4) * length) {
+        if (cycle.reach(correction) <= (1 - damping / 4) * length) {
           System.arraycopy(trial, 0, hold, 0, hold.length);
           return true;
         }
@@ -186,16 +201,5 @@ public final class MidbandSolver {
       out[h] = -cycle.mean[h];
     }
     lu.solve(out);
-  }
-
-  /** Largest change of a held quantity, 1 where it no longer matters. */
-  private double norm(double[] change, double[] at) {
-    int capacitors = equations.plan.holdingCapacitors.length;
-    double largest = 0;
-    for (int h = 0; h < change.length; h++) {
-      double floor = h < capacitors ? 1e-8 : 1e-11;
-      largest = Math.max(largest, Math.abs(change[h]) / (floor + 1e-10 * Math.abs(at[h])));
-    }
-    return largest;
   }
 }

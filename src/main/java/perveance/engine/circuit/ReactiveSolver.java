@@ -6,7 +6,8 @@ import perveance.engine.numeric.DenseLu;
 /**
  * Large signals at a stated frequency, with every capacitor, inductor and transformer as it is: the
  * elliptical load line of a reactive load, the bypass that does not quite hold. All samples of the
- * period are solved together by harmonic balance.
+ * period are solved together by harmonic balance. What a waveform has at half the samples and above
+ * is folded; how much of the currents that leaves over is told by {@link PeriodicState#residual}.
  *
  * <p>The work grows with the cube of samples times device nodes: 64 samples serve one or two
  * valves, 32 a push-pull pair. Not for use by two threads at once.

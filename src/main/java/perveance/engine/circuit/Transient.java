@@ -18,6 +18,7 @@ public final class Transient {
   private static final double SHORTEST = 1e-12;
 
   private static final double SAFETY = 0.9;
+  private static final double SMALLEST_STRIDE = 1e-5;
 
   private final TransientSetup setup;
   private final TransientEquations equations;
@@ -69,7 +70,7 @@ public final class Transient {
   private TransientOutcome run() {
     double first = FIRST * setup.endTime();
     // an instant so short that nothing stored can change shows the voltages at time zero
-    if (!step(first, false)) {
+    if (!step(first, false) && !raiseSources(first)) {
       return stopped("the circuit has no state to start from");
     }
     settle(0, first);
@@ -127,7 +128,7 @@ public final class Transient {
   private boolean step(double length, boolean trapezoidal) {
     System.arraycopy(x, 0, trial, 0, x.length);
     equations.setTime(time + length);
-    equations.stamp(length, trapezoidal);
+    equations.stamp(length, trapezoidal, 1);
     newton.prepare();
     if (newton.solve(trial) != Newton.End.CONVERGED) {
       System.arraycopy(before, 0, trial, 0, trial.length);
@@ -136,6 +137,31 @@ public final class Transient {
       }
     }
     equations.read(trial, length, trapezoidal);
+    return true;
+  }
+
+  /** A first step that Newton's method does not find at once: sources are raised by degrees. */
+  private boolean raiseSources(double length) {
+    java.util.Arrays.fill(trial, 0);
+    double reached = 0;
+    double stride = 0.1;
+    while (reached < 1) {
+      System.arraycopy(trial, 0, before, 0, trial.length);
+      double next = Math.min(1, reached + stride);
+      equations.stamp(length, false, next);
+      newton.prepare();
+      if (newton.solve(trial) == Newton.End.CONVERGED) {
+        reached = next;
+        stride *= 2;
+      } else {
+        System.arraycopy(before, 0, trial, 0, trial.length);
+        stride /= 4;
+        if (stride < SMALLEST_STRIDE) {
+          return false;
+        }
+      }
+    }
+    equations.read(trial, length, false);
     return true;
   }
 

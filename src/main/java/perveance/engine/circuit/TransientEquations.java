@@ -50,14 +50,14 @@ final class TransientEquations {
   /** Conduction that stands for a cold cathode: laws want a factor above zero. */
   private static final double COLD = 1e-12;
 
-  /** Writes the equations of a step of a length [s]. */
-  void stamp(double step, boolean trapezoidal) {
+  /** Writes the equations of a step of a length [s], all sources scaled. */
+  void stamp(double step, boolean trapezoidal, double sourceScale) {
     system.clear();
-    topology.writeKnown(values, 1, system.voltage);
+    topology.writeKnown(values, sourceScale, system.voltage);
     system.valves.take(values);
     Circuit circuit = topology.circuit;
     for (int i = 0; i < restingValue.length; i++) {
-      stampPlain(i, circuit.elements().get(i), values.value[i]);
+      stampPlain(i, circuit.elements().get(i), values.value[i], sourceScale);
     }
     double rate = StorageBank.rate(step, trapezoidal);
     for (int s = 0; s < stores.count; s++) {
@@ -65,13 +65,13 @@ final class TransientEquations {
     }
   }
 
-  private void stampPlain(int i, Element element, double value) {
+  private void stampPlain(int i, Element element, double value, double sourceScale) {
     if (element instanceof Resistor e) {
       system.conductance(e.a(), e.b(), 1 / value);
     } else if (element instanceof CurrentSource e) {
-      system.current(e.from(), e.to(), value);
+      system.current(e.from(), e.to(), sourceScale * value);
     } else if (element instanceof VoltageSource e && plan.branchOf[i] >= 0) {
-      system.branch(plan.branchOf[i], e.plus(), e.minus(), 0, value);
+      system.branch(plan.branchOf[i], e.plus(), e.minus(), 0, sourceScale * value);
     }
   }
 

@@ -77,6 +77,55 @@ class RandomCircuitsTest {
     assertTrue(Double.isFinite(signals.outputImpedance(last, 0, 1000).magnitude()), which);
   }
 
+  /** Cycles and courses of solved circuits: an answer in finite numbers, or a reason. */
+  @Test
+  void cyclesAndCoursesAreFiniteOrRefused() {
+    RandomCircuits circuits = new RandomCircuits(SEED + 1);
+    int found = 0;
+    for (int i = 0; i < 300; i++) {
+      Circuit circuit = circuits.next();
+      if (new DcSolver(circuit).solve() instanceof Converged point) {
+        String which = "circuit " + i + " of seed " + (SEED + 1);
+        Drive drive = Drive.of(Waveform.cosine(16), circuit.element("supply"));
+        double peak = Math.pow(10, i % 4 - 1);
+        if (new MidbandSolver(point.solution(), drive).solve(peak)
+            instanceof MidbandOutcome.Converged cycle) {
+          found++;
+          checkCycle(circuit, cycle.solution(), which);
+          assertTrue(cycle.solution().residual() < 1e-9, which);
+        }
+        if (new ReactiveSolver(point.solution(), drive, 1000).solve(peak)
+            instanceof ReactiveOutcome.Converged cycle) {
+          checkCycle(circuit, cycle.solution(), which);
+        }
+        checkCourse(circuit, which);
+      }
+    }
+    assertTrue(found > 100, "found " + found);
+  }
+
+  private static void checkCycle(Circuit circuit, PeriodicState state, String which) {
+    for (int node = 0; node < circuit.nodes().size(); node++) {
+      for (double v : state.voltage(node, 0)) {
+        assertTrue(Double.isFinite(v), which);
+      }
+    }
+    assertTrue(Double.isFinite(state.powerBalance()), which);
+  }
+
+  private static void checkCourse(Circuit circuit, String which) {
+    TransientOutcome outcome = Transient.fromCold(circuit, TransientSetup.until(1e-3));
+    TransientSolution course =
+        outcome instanceof TransientOutcome.Completed done
+            ? done.solution()
+            : ((TransientOutcome.Stopped) outcome).soFar();
+    for (int node = 0; node < circuit.nodes().size(); node++) {
+      for (double v : course.voltage(node)) {
+        assertTrue(Double.isFinite(v), which);
+      }
+    }
+  }
+
   /** The same point is found from a neighbour's as from nothing. */
   @Test
   void startDoesNotMatterForAStage() {

@@ -157,7 +157,7 @@ class BuildSheetTest {
       first.setEndPage(1);
       String page = first.getText(document);
       assertTrue(page.indexOf("Build sheet") < page.indexOf("Readings"), page);
-      assertTrue(page.indexOf("Readings") < page.indexOf("What it should do"), page);
+      assertTrue(text.indexOf("Readings") < text.indexOf("What it should do"), page);
     }
   }
 }

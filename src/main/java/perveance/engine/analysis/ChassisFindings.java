@@ -15,7 +15,6 @@ import perveance.engine.base.Severity;
 import perveance.engine.base.SupplyMessage;
 import perveance.engine.base.Unit;
 import perveance.engine.circuit.DcSolution;
-import perveance.engine.stage.ChassisNames;
 import perveance.engine.stage.Conditions;
 import perveance.engine.stage.StageCircuit.StageDevice;
 import perveance.engine.stage.Supply;
@@ -99,7 +98,7 @@ final class ChassisFindings {
   private Optional<Remedy> bleeder(Discharge d) {
     Optional<Supply> supply =
         model.chassis().supplies().stream()
-            .filter(s -> d.where().startsWith(ChassisNames.supply(s.name()) + "."))
+            .filter(s -> d.where().equals("supply " + s.name()))
             .findFirst();
     if (supply.isEmpty()) {
       return Optional.empty();

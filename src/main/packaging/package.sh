@@ -21,7 +21,7 @@ jpackage --type app-image --name perveance --app-version "$version" \
 jpackage --type deb --name perveance --app-version "$version" \
   --description "Design assistant for valve amplifier stages" \
   --app-image "$work/perveance" \
-  --file-associations "$here/chassis-file.properties" \
+  --file-associations "$here/chassis-file.properties" --resource-dir "$here/resources" \
   --linux-shortcut --linux-menu-group "Electronics;Education" --linux-app-category electronics \
   --linux-package-deps "libgtk-3-0, libxtst6" \
   --dest "$work"

@@ -28,8 +28,9 @@ public final class CommandLines {
      * Opens the window and returns when it is closed.
      *
      * @param file chassis file to open, empty for the first example
+     * @throws BadInputException when there is no display for a window
      */
-    void open(Optional<Path> file);
+    void open(Optional<Path> file) throws BadInputException;
   }
 
   /** The command line with its error handling, ready to execute. */

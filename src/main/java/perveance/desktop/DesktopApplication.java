@@ -3,6 +3,7 @@ package perveance.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
@@ -20,6 +21,8 @@ import org.jspecify.annotations.Nullable;
 import perveance.desktop.view.DialogAsking;
 import perveance.desktop.view.MainWindow;
 import perveance.desktop.viewmodel.Desk;
+import perveance.engine.base.BadInputException;
+import perveance.engine.base.Problem;
 import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.DocumentException;
 import perveance.desktop.viewmodel.Settings;
@@ -38,9 +41,21 @@ public final class DesktopApplication extends Application {
    * Opens the window and returns when it is closed.
    *
    * @param args at most one chassis file
+   * @throws BadInputException when there is no display for a window
    */
-  public static void open(List<String> args) {
-    launch(DesktopApplication.class, args.toArray(new String[0]));
+  public static void open(List<String> args) throws BadInputException {
+    try {
+      launch(DesktopApplication.class, args.toArray(new String[0]));
+    } catch (UnsupportedOperationException e) {
+      throw new BadInputException(
+          new Problem(
+              "desktop",
+              OptionalInt.empty(),
+              "",
+              "no display (" + e.getMessage() + ")",
+              "a graphical session; without one, use check and sheet",
+              Optional.empty()));
+    }
   }
 
   private static Thread thread(Runnable work, String name) {

@@ -1,7 +1,7 @@
 package perveance.launch;
 
-import java.util.List;
-import perveance.desktop.DesktopApplication;
+import java.util.stream.Stream;
+import perveance.cli.CommandLines;
 
 /** Starts the window directly: what the installed program's menu entry runs. */
 public final class DesktopMain {
@@ -13,6 +13,7 @@ public final class DesktopMain {
    * @param args at most one chassis file
    */
   public static void main(String[] args) {
-    DesktopApplication.open(List.of(args));
+    String[] line = Stream.concat(Stream.of("desktop"), Stream.of(args)).toArray(String[]::new);
+    System.exit(CommandLines.run(Main::desktop, line));
   }
 }

@@ -5,12 +5,13 @@ import java.util.List;
 import java.util.Optional;
 import perveance.cli.CommandLines;
 import perveance.desktop.DesktopApplication;
+import perveance.engine.base.BadInputException;
 
 /** Starts Perveance. */
 public final class Main {
   private Main() {}
 
-  private static void desktop(Optional<Path> file) {
+  static void desktop(Optional<Path> file) throws BadInputException {
     DesktopApplication.open(file.map(f -> List.of(f.toString())).orElse(List.of()));
   }
 

@@ -21,11 +21,11 @@ import org.jspecify.annotations.Nullable;
 import perveance.desktop.view.DialogAsking;
 import perveance.desktop.view.MainWindow;
 import perveance.desktop.viewmodel.Desk;
-import perveance.engine.base.BadInputException;
-import perveance.engine.base.Problem;
 import perveance.desktop.viewmodel.Desks;
 import perveance.desktop.viewmodel.DocumentException;
 import perveance.desktop.viewmodel.Settings;
+import perveance.engine.base.BadInputException;
+import perveance.engine.base.Problem;
 
 /** The desktop program. */
 public final class DesktopApplication extends Application {
@@ -53,7 +53,7 @@ public final class DesktopApplication extends Application {
               OptionalInt.empty(),
               "",
               "no display (" + e.getMessage() + ")",
-              "a graphical session; without one, use check and sheet",
+              "a display; without one, use check and sheet",
               Optional.empty()));
     }
   }

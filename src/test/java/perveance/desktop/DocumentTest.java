@@ -69,8 +69,7 @@ class DocumentTest {
     try (var files = Files.list(folder.resolve("home").resolve("recovery"))) {
       assertEquals(0, files.count());
     }
-    assertEquals(
-        List.of(folder.resolve("a.toml")), desk.document().documents().recent());
+    assertEquals(List.of(folder.resolve("a.toml")), desk.document().documents().recent());
   }
 
   @Test

@@ -38,10 +38,7 @@ class NearbyTest {
     assertEquals(whole.stages().size(), near.stages().size());
     for (String ref : List.of("V1", "V2", "V5")) {
       assertEquals(
-          stage(whole, ref).smallSignal().gain(),
-          stage(near, ref).smallSignal().gain(),
-          1e-6,
-          ref);
+          stage(whole, ref).smallSignal().gain(), stage(near, ref).smallSignal().gain(), 1e-6, ref);
     }
     assertEquals(
         stage(whole, "V2").parts().get(0).designator(),

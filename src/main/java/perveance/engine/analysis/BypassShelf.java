@@ -41,7 +41,9 @@ final class BypassShelf {
   }
 
   private static Optional<Shelf> shelf(StageModel model, Capacitor capacitor) {
-    return WithoutCapacitor.signal(model, capacitor).map(open -> shelf(model, capacitor, open));
+    return WithoutCapacitor.signal(model, capacitor)
+        .map(open -> shelf(model, capacitor, open))
+        .filter(shelf -> Double.isFinite(shelf.step()) && Double.isFinite(shelf.pole()));
   }
 
   private static Shelf shelf(StageModel model, Capacitor capacitor, SmallSignal open) {

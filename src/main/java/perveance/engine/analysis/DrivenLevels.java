@@ -36,7 +36,7 @@ final class DrivenLevels {
 
   /** The steady cycle at a peak input; empty for no drive and where there is none. */
   Optional<MidbandSolution> cycle(double peak) {
-    if (!(peak > 0)) {
+    if (!(peak > 0) || !model.reached()) {
       return Optional.empty();
     }
     return solver.solve(peak / Math.abs(model.inputShare()))

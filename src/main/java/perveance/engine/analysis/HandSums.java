@@ -6,13 +6,16 @@ import java.util.Optional;
 
 /** All hand sums of a stage. */
 final class HandSums {
+  /** A valve with less mutual conductance than this is cut off and has no sums [S]. */
+  private static final double LEAST = 1e-9;
+
   private HandSums() {}
 
   static List<HandSum> of(
       StageModel model, List<DevicePoint> points, SmallSignalAnswer small, double peak) {
     List<HandSum> sums = new ArrayList<>(new PointSums(model).of(points));
     Optional<SignalPath> path = SignalPath.of(model);
-    if (path.isPresent()) {
+    if (path.isPresent() && points.get(0).mutualConductance() > LEAST) {
       LoadSeen seen = new LoadSeen(model, points.get(0).ref(), false);
       Optional<Double> load = seen.acResistance();
       if (load.isPresent()) {

@@ -19,6 +19,9 @@ final class InputAdmittance {
 
   /** Input capacitance [F]. */
   static double capacitance(StageModel model) {
+    if (!model.signal().answers(FREQUENCY)) {
+      return 0;
+    }
     double susceptance =
         model.stage().input().isPresent() ? behindSource(model) : intoOwnParts(model);
     return susceptance / (2 * Math.PI * FREQUENCY);

@@ -22,6 +22,9 @@ record NoiseFigures(double input, List<Share> shares) {
   }
 
   static NoiseFigures of(StageModel model) {
+    if (!model.signal().answers(AUDIO.lowest()) || !model.signal().answers(AUDIO.highest())) {
+      return new NoiseFigures(0, List.of());
+    }
     NoiseAnswer noise =
         new Noise(model.dc())
             .between(model.source(), model.mainOutput().plus(), model.mainOutput().minus(), AUDIO);

@@ -18,6 +18,11 @@ import perveance.engine.stage.StageCircuit.StageDevice;
  * supply nodes that stand still for signals. Node and element numbers are those of that circuit.
  */
 final class StageModel {
+  private static final double LEAST_SHARE = 1e-9;
+
+  /** A source that would have to swing more than 10,000 times the input drives nothing [1]. */
+  private static final double REACHED = 1e-4;
+
   private final StageCircuit stage;
   private final DcSolution dc;
   private final SmallSignal signal;
@@ -43,7 +48,17 @@ final class StageModel {
             .map(group.circuit()::element)
             .orElseThrow(() -> new IllegalArgumentException("group has no source"));
     this.inputShare =
-        stage.input().isPresent() ? 1 : signal.midbandGain(source, stage.inputNode(), 0);
+        stage.input().isPresent() ? 1 : audible(signal.midbandGain(source, stage.inputNode(), 0));
+  }
+
+  /** A stage before that is cut off lets nothing through; keeps what is divided by it finite. */
+  private static double audible(double share) {
+    return Math.abs(share) < LEAST_SHARE ? Math.copySign(LEAST_SHARE, share) : share;
+  }
+
+  /** Whether a signal can reach the input without absurd volts at the source. */
+  boolean reached() {
+    return Math.abs(inputShare) > REACHED;
   }
 
   StageCircuit stage() {

@@ -92,7 +92,7 @@ final class SwingSearch {
     return switch (limit) {
       case GRID_CURRENT -> curve.move(source) ? gridRoom() : -1;
       case CUT_OFF -> curve.move(source) ? cutOffRoom() : -1;
-      case KNEE -> slope(source) / idleGain - KNEE_SHARE;
+      case KNEE -> idleGain == 0 ? -1 : slope(source) / idleGain - KNEE_SHARE;
       case NONE -> 1;
     };
   }

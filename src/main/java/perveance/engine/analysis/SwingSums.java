@@ -25,7 +25,7 @@ final class SwingSums {
     }
     double second = Math.abs(curve.output(0));
     double difference = Math.abs(first - second);
-    if (difference < 1e-6 * first) {
+    if (!(difference > 1e-6 * first)) {
       return List.of();
     }
     return List.of(

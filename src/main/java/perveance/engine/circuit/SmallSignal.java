@@ -212,8 +212,22 @@ public final class SmallSignal {
    */
   public Corners corners(int source, int plus, int minus) {
     double reference = Math.abs(midbandGain(source, plus, minus));
+    // where values many decades apart leave no digit, nothing speaks for a corner
     return Corners.search(
-        frequency -> transfer(source, plus, minus, frequency).magnitude(), reference);
+        frequency ->
+            factor(frequency) ? transfer(source, plus, minus, frequency).magnitude() : reference,
+        reference);
+  }
+
+  /**
+   * Whether the equations have a single answer at a frequency; values many decades apart may leave
+   * none at the ends of the range.
+   *
+   * @param frequency above zero [Hz]
+   * @return whether transfers and impedances can be asked for there
+   */
+  public boolean answers(double frequency) {
+    return factor(frequency);
   }
 
   /** Effect of every node current and branch voltage on an output, at a frequency. */

@@ -21,6 +21,7 @@ import java.util.Optional;
  * @param validity region covered by evidence
  * @param notes published disagreements, assumptions
  * @param rectifier what is published of a rectifier beside its law; empty for other kinds
+ * @param beam whether it is a beam tetrode, which has its own symbol but the law of a pentode
  */
 public record Device(
     String type,
@@ -36,7 +37,8 @@ public record Device(
     FitSummary fit,
     Validity validity,
     List<String> notes,
-    Optional<RectifierRatings> rectifier) {
+    Optional<RectifierRatings> rectifier,
+    boolean beam) {
   /** Copies what could change. */
   public Device {
     aliases = List.copyOf(aliases);
@@ -48,7 +50,7 @@ public record Device(
   }
 
   /**
-   * A device that is no rectifier.
+   * A device that is neither a rectifier nor a beam tetrode.
    *
    * @param type type designation
    * @param aliases other names of the same device
@@ -92,7 +94,8 @@ public record Device(
         fit,
         validity,
         notes,
-        Optional.empty());
+        Optional.empty(),
+        false);
   }
 
   /**

@@ -49,7 +49,7 @@ final class ValveWiring {
 
   static SymbolType symbol(Device device) {
     if (device.law().kind() == LawKind.PENTODE) {
-      return SymbolType.PENTODE;
+      return device.beam() ? SymbolType.BEAM_TETRODE : SymbolType.PENTODE;
     }
     boolean filament = !device.heaters().isEmpty() && device.heaters().get(0).directlyHeated();
     return filament ? SymbolType.DIRECTLY_HEATED_TRIODE : SymbolType.TRIODE;

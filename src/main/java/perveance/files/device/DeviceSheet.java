@@ -77,6 +77,7 @@ public record DeviceSheet(
         fit,
         validity,
         notes,
-        rectifier);
+        rectifier,
+        kind.equals("beam"));
   }
 }

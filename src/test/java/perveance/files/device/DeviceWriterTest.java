@@ -53,7 +53,8 @@ class DeviceWriterTest {
             found.fit(),
             found.validity(),
             found.notes(),
-            found.rectifier());
+            found.rectifier(),
+            found.beam());
     assertEquals(expected, sameLaw, text);
     assertEquals(List.copyOf(expected.pins().keySet()), List.copyOf(found.pins().keySet()), text);
   }

@@ -237,6 +237,31 @@ class MidbandSolverTest {
   }
 
   /**
+   * derived: 60 and 7000 Hz, 4 to 1, through i = x + c x^2 with x = 0.8 cos a + 0.2 cos b: 2 c 0.8
+   * 0.2 cos a cos b are side tones of c 0.16 each at 347 and 353, none at 344 and 356.
+   */
+  @Test
+  void sideTonesOfASquareLaw() {
+    Circuit c =
+        new CircuitSketch()
+            .source("in", "g", "0", 0)
+            .source("supply", "a", "0", 250)
+            .triode("V1", new PolynomialValve(List.of(1e-3, 1e-3, 0.1e-3)), "a", "g", "0")
+            .build();
+    Converged rest = assertInstanceOf(Converged.class, new DcSolver(c).solve());
+    MidbandSolver solver =
+        new MidbandSolver(rest.solution(), Drive.of(Waveform.smpte(), c.element("in")));
+    MidbandSolution cycle =
+        assertInstanceOf(MidbandOutcome.Converged.class, solver.solve(1)).solution();
+    Harmonics h = Harmonics.of(cycle.current(c.element("V1")));
+    assertEquals(0.2e-3, h.amplitude(350), 1e-14);
+    assertEquals(0.016e-3, h.amplitude(347), 1e-14);
+    assertEquals(0.016e-3, h.amplitude(353), 1e-14);
+    assertEquals(0, h.amplitude(344), 1e-14);
+    assertEquals(0, h.amplitude(356), 1e-14);
+  }
+
+  /**
    * A sweep gives at each level what the level gives by itself. Tolerance: held voltages are found
    * to 1e-8 V, which the stage's gain of 60 shows as 1e-6 V.
    */

@@ -61,7 +61,7 @@ final class StageStrip {
     List<Artwork> pictures = new ArrayList<>(List.of(schematic));
     plot.ifPresent(pictures::add);
     double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.58, 0.42};
-    return new PicturePair(pictures, shares, 206);
+    return new PicturePair(pictures, shares, 188);
   }
 
   /** Beside the characteristics a schematic wider than this would have text too small to read. */
@@ -97,7 +97,7 @@ final class StageStrip {
     Block head = headline("Parts to buy");
     if (!wide()) {
       rows.add(0, head);
-      return List.of(List.of(new Columns(new double[] {0.47, 0.53}, List.of(figures, rows))));
+      return List.of(List.of(new Columns(new double[] {0.53, 0.47}, List.of(figures, rows))));
     }
     int half = (rows.size() + 1) / 2;
     List<List<Block>> groups = new ArrayList<>();

@@ -76,7 +76,9 @@ public final class StageFigures {
     rows.add(
         new FigureRow(
             "noise at the grid",
-            Figures.reading(small.noiseInput(), Unit.VOLT, 2) + " rms",
+            small.noiseInput().isPresent()
+                ? Figures.reading(small.noiseInput().getAsDouble(), Unit.VOLT, 2) + " rms"
+                : "not determined",
             "",
             "20 Hz to 20 kHz"));
     return rows;

@@ -101,7 +101,7 @@ final class DataFindings {
         Finding.of(
                 DataMessage.BAND_CAUSE,
                 Severity.NOTE,
-                part.isPresent() ? context.ref() : most.cause().replace(' ', '.'),
+                part.isPresent() ? context.ref() : most.cause(),
                 point.ref(),
                 Words.percent(most.fraction()),
                 "anode voltage",

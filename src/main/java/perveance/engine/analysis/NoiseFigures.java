@@ -1,6 +1,7 @@
 package perveance.engine.analysis;
 
 import java.util.List;
+import java.util.OptionalDouble;
 import perveance.engine.analysis.Band.Share;
 import perveance.engine.circuit.Noise;
 import perveance.engine.circuit.NoiseAnswer;
@@ -10,10 +11,11 @@ import perveance.engine.circuit.NoiseBand;
  * Noise of a stage over the audio band, referred to its input. Flicker noise of the valves is not
  * in it: it differs too much from one specimen to the next.
  *
- * @param input equivalent input noise, 20 Hz to 20 kHz, rms [V]
+ * @param input equivalent input noise, 20 Hz to 20 kHz, rms; empty where the circuit leaves it
+ *     undetermined [V]
  * @param shares share of the noise power by element, largest first
  */
-record NoiseFigures(double input, List<Share> shares) {
+record NoiseFigures(OptionalDouble input, List<Share> shares) {
   private static final NoiseBand AUDIO = NoiseBand.of(20, 20e3);
   private static final double LEAST_SHARE = 0.01;
 
@@ -23,7 +25,7 @@ record NoiseFigures(double input, List<Share> shares) {
 
   static NoiseFigures of(StageModel model) {
     if (!model.signal().answers(AUDIO.lowest()) || !model.signal().answers(AUDIO.highest())) {
-      return new NoiseFigures(0, List.of());
+      return new NoiseFigures(OptionalDouble.empty(), List.of());
     }
     NoiseAnswer noise =
         new Noise(model.dc())
@@ -37,7 +39,9 @@ record NoiseFigures(double input, List<Share> shares) {
             .map(s -> new Share(s.element(), s.fraction() / fraction))
             .toList();
     double input = noise.input() * Math.sqrt(fraction) * Math.abs(model.inputShare());
-    return new NoiseFigures(Double.isFinite(input) ? input : 0, shares);
+    return Double.isFinite(input)
+        ? new NoiseFigures(OptionalDouble.of(input), shares)
+        : new NoiseFigures(OptionalDouble.empty(), List.of());
   }
 
   /** Noise of a stage wired straight to this one is that stage's own. */

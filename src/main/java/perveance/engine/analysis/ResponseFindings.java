@@ -130,8 +130,12 @@ final class ResponseFindings {
   private void noise() {
     Optional<Band.Share> most = small.noiseShares().stream().findFirst();
     boolean source = most.filter(s -> s.cause().endsWith(".source")).isPresent();
-    double room = context.answer().clean().inputPeak() / small.noiseInput();
-    if (small.noiseInput() > NOISY && room < QUIET && most.isPresent() && !source) {
+    if (small.noiseInput().isEmpty() || most.isEmpty() || source) {
+      return;
+    }
+    double input = small.noiseInput().getAsDouble();
+    double room = context.answer().clean().inputPeak() / input;
+    if (input > NOISY && room < QUIET) {
       String cause = most.get().cause();
       findings.add(
           Finding.of(
@@ -139,9 +143,9 @@ final class ResponseFindings {
                   Severity.NOTE,
                   context.ref(),
                   context.ref(),
-                  Words.roughly(small.noiseInput(), Unit.VOLT),
+                  Words.roughly(input, Unit.VOLT),
                   PartRoles.part(stage(), cause).map(context::named).orElse(cause))
-              .withValue(small.noiseInput(), Unit.VOLT));
+              .withValue(input, Unit.VOLT));
     }
   }
 

@@ -17,7 +17,8 @@ import java.util.OptionalDouble;
  * @param shelf corners of the cathode bypass, empty when there is none
  * @param couplingCorner corner of the coupling capacitor with its true source and load, empty when
  *     there is none [Hz]
- * @param noiseInput equivalent input noise, 20 Hz to 20 kHz, rms [V]
+ * @param noiseInput equivalent input noise, 20 Hz to 20 kHz, rms; empty where the circuit leaves it
+ *     undetermined [V]
  * @param noiseShares share of the noise power by element, largest first
  * @param bands bands by component name
  * @param response magnitude and phase against frequency, rising frequency
@@ -31,7 +32,7 @@ public record SmallSignalAnswer(
     OptionalDouble highCorner,
     Optional<Shelf> shelf,
     OptionalDouble couplingCorner,
-    double noiseInput,
+    OptionalDouble noiseInput,
     List<Band.Share> noiseShares,
     Map<String, Band> bands,
     List<ResponsePoint> response) {

@@ -211,10 +211,16 @@ class PartQuestionsTest {
   void noiseOfAStopper(String stopper, double resistance, double volts) {
     SmallSignalAnswer bare = Bench.on(310).standardWith().full().smallSignal();
     double with =
-        Bench.on(310).standardWith("grid_stopper", stopper).full().smallSignal().noiseInput();
+        Bench.on(310)
+            .standardWith("grid_stopper", stopper)
+            .full()
+            .smallSignal()
+            .noiseInput()
+            .orElseThrow();
     double corner = 1 / (2 * Math.PI * resistance * bare.inputCapacitance());
     double left = Math.sqrt(corner / 20e3 * Math.atan(20e3 / corner));
-    double own = Math.sqrt(with * with - bare.noiseInput() * bare.noiseInput());
+    double own =
+        Math.sqrt(with * with - bare.noiseInput().orElseThrow() * bare.noiseInput().orElseThrow());
     assertEquals(volts * left, own, 0.05 * volts);
   }
 }

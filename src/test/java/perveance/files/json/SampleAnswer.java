@@ -181,7 +181,7 @@ final class SampleAnswer {
         OptionalDouble.of(1.1e5),
         Optional.of(new SmallSignalAnswer.Shelf(4.8, 12, 6)),
         OptionalDouble.of(0.7),
-        2e-6,
+        OptionalDouble.of(2e-6),
         List.of(),
         Map.of("gain", band(-62, -54)),
         List.of());

@@ -4,19 +4,20 @@ import java.util.ArrayList;
 import java.util.List;
 import perveance.app.wording.FigureRow;
 import perveance.app.wording.Figures;
+import perveance.app.wording.FindingLine;
+import perveance.app.wording.FindingLines;
 import perveance.app.wording.LimitRows;
+import perveance.app.wording.PointRows;
 import perveance.app.wording.SafetyBox;
 import perveance.app.wording.StageFigures;
 import perveance.app.wording.Vocabulary;
 import perveance.engine.analysis.ChassisAnswer;
-import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.HandSum;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.analysis.SupplyAnswer;
 import perveance.engine.base.Finding;
 import perveance.engine.base.QuantityFormat;
-import perveance.engine.base.Severity;
 import perveance.engine.base.Unit;
 
 /** The answer for a terminal: read in half a minute, worst first. */
@@ -59,9 +60,8 @@ final class TerminalReport {
 
   private void findings(List<Finding> findings) {
     TextTable table = new TextTable(0, WIDTH);
-    for (Finding finding : findings) {
-      String remedy = finding.remedy().map(r -> " Remedy: " + r.text()).orElse("");
-      table.row(word(finding.severity()), finding.where(), say(finding.text() + remedy));
+    for (FindingLine line : FindingLines.of(findings)) {
+      table.row(line.word(), line.where(), say(line.told()));
     }
     for (String line : table.lines()) {
       lines.add(
@@ -74,10 +74,6 @@ final class TerminalReport {
     }
   }
 
-  private static String word(Severity severity) {
-    return severity.name().replace('_', ' ');
-  }
-
   private void stage(StageAnswer stage) {
     lines.add("");
     String types =
@@ -86,13 +82,9 @@ final class TerminalReport {
             stage.circuit().devices().stream().map(d -> d.device().type()).distinct().toList());
     lines.add(ansi.bold(stage.ref() + "  " + stage.kind().replace('-', ' ') + ", " + types));
     TextTable table = new TextTable(2, WIDTH);
-    for (DevicePoint point : stage.points()) {
-      String prefix = stage.points().size() > 1 ? point.ref() + " " : "";
-      StageFigures.point(point).forEach(row -> figure(table, prefix, row));
-      point.outsideEvidence().ifPresent(t -> table.row(prefix + "outside data", "", "", say(t)));
-    }
-    StageFigures.signal(stage).forEach(row -> figure(table, "", row));
-    limits(stage, table);
+    PointRows.of(stage).forEach(row -> figure(table, row));
+    StageFigures.signal(stage).forEach(row -> figure(table, row));
+    LimitRows.of(stage).forEach(row -> figure(table, row));
     lines.addAll(table.lines());
     parts(stage);
     if (explain) {
@@ -100,14 +92,8 @@ final class TerminalReport {
     }
   }
 
-  private void figure(TextTable table, String prefix, FigureRow row) {
-    table.row(prefix + say(row.label()), row.value(), row.band(), say(row.note()));
-  }
-
-  private void limits(StageAnswer stage, TextTable table) {
-    for (FigureRow row : LimitRows.of(stage)) {
-      table.row(say(row.label()), row.value(), row.band(), row.note());
-    }
+  private void figure(TextTable table, FigureRow row) {
+    table.row(say(row.label()), row.value(), row.band(), say(row.note()));
   }
 
   private void parts(StageAnswer stage) {

@@ -18,6 +18,9 @@ import perveance.engine.stage.StageCircuit;
  * white, vector throughout, PDF/A-2b.
  */
 public final class BuildSheet {
+  /** Room that the rows for other readings take [1]. */
+  private static final double SPARE_ROWS = 130;
+
   private final SheetOptions options;
 
   /**
@@ -69,12 +72,15 @@ public final class BuildSheet {
     if (answer.stages().size() > 1) {
       opening.add(strip.heading());
     }
-    opening.add(strip.pictures());
+    opening.add(strip.pictures(0));
+    List<List<Block>> groups = strip.groups();
+    double slack = sheet.slack(opening, groups) - (sheet.fits(opening, groups) ? SPARE_ROWS : 0);
+    opening.set(opening.size() - 1, strip.pictures(Math.max(0, slack)));
     sheet.addTogether(opening);
-    for (List<Block> group : strip.groups()) {
+    for (List<Block> group : groups) {
       sheet.addTogether(group);
     }
-    if (sheet.room() > 130) {
+    if (sheet.room() > SPARE_ROWS) {
       sheet.addTogether(strip.spareRows());
     }
   }

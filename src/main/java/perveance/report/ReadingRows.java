@@ -105,7 +105,7 @@ final class ReadingRows {
   /** Rows without expectation for what else is measured. */
   List<Block> spare() {
     List<Block> rows = new ArrayList<>();
-    rows.add(new TextBlock(faces, "", "Other readings", 9, Ink.BLACK, true, 2));
+    rows.add(new Spaced(6, new TextBlock(faces, "", "Other readings", 10.5, Ink.BLACK, true, 3)));
     for (int i = 0; i < 4; i++) {
       rows.add(row("", "__________________", "record only", ""));
     }
@@ -144,7 +144,7 @@ final class ReadingRows {
                 + " measure %1$s and %2$s cold.",
             load.get(),
             cathode.get());
-    return List.of(new TextBlock(faces, "Then", text, 8.5, Ink.BLACK, false, 8));
+    return List.of(new Spaced(5, new TextBlock(faces, "Then", text, 8.5, Ink.BLACK, false, 4)));
   }
 
   private Optional<String> designator(String key) {

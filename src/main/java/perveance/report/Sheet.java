@@ -70,19 +70,36 @@ final class Sheet implements AutoCloseable {
     y += height;
   }
 
+  /** Height of blocks under each other in points. */
+  private double height(List<Block> blocks) {
+    return blocks.stream().mapToDouble(b -> b.height(width())).sum();
+  }
+
+  /** Room that stays empty on this page in points once all groups that fit here are added. */
+  double slack(List<Block> opening, List<List<Block>> groups) {
+    double left = room() - height(opening);
+    for (List<Block> group : groups) {
+      if (height(group) > left) {
+        return left;
+      }
+      left -= height(group);
+    }
+    return left;
+  }
+
+  /** Whether opening and all groups stand on this page. */
+  boolean fits(List<Block> opening, List<List<Block>> groups) {
+    return height(opening) + groups.stream().mapToDouble(this::height).sum() <= room();
+  }
+
   /** Adds blocks that belong together, on a new page when they do not fit here together. */
   void addTogether(List<Block> blocks) throws IOException {
-    double height = blocks.stream().mapToDouble(b -> b.height(width())).sum();
-    if (height > room() && y > TOP) {
+    if (height(blocks) > room() && y > TOP) {
       newPage();
     }
     for (Block block : blocks) {
       add(block);
     }
-  }
-
-  void gap(double points) {
-    y += points;
   }
 
   /** Prints the feet, closes all pages and returns the file. */

@@ -6,11 +6,12 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import perveance.app.wording.FigureRow;
+import perveance.app.wording.FindingLine;
+import perveance.app.wording.FindingLines;
 import perveance.app.wording.LimitRows;
 import perveance.app.wording.StageFigures;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.StageAnswer;
-import perveance.engine.base.Finding;
 import perveance.plot.Artwork;
 import perveance.plot.ChartFactory;
 import perveance.plot.Look;
@@ -23,6 +24,7 @@ import perveance.plot.StagePlots;
 /** Everything the sheet says about one stage, in measuring order. */
 final class StageStrip {
   private static final double SIZE = 9;
+  private static final double TALLEST = 250;
 
   private final Typeface faces;
   private final SheetOptions options;
@@ -52,16 +54,20 @@ final class StageStrip {
         faces, stage.ref(), say(stage.kind().replace('-', ' ')), 12, Ink.BLACK, false, 4);
   }
 
-  /** Schematic with the characteristics beside it; a wide schematic stands alone. */
-  Block pictures() {
+  /**
+   * Schematic with the characteristics beside it; a wide schematic stands alone.
+   *
+   * @param slack height that the page has to spare, used for larger pictures in points [1]
+   */
+  Block pictures(double slack) {
     if (wide()) {
-      double tall = Math.min(250, 500 * extent.getHeight() / extent.getWidth() + 8);
+      double tall = Math.min(250 + slack, 500 * extent.getHeight() / extent.getWidth() + 8);
       return new PicturePair(List.of(schematic), new double[] {1}, tall);
     }
     List<Artwork> pictures = new ArrayList<>(List.of(schematic));
     plot.ifPresent(pictures::add);
     double[] shares = pictures.size() == 1 ? new double[] {1} : new double[] {0.58, 0.42};
-    return new PicturePair(pictures, shares, 188);
+    return new PicturePair(pictures, shares, Math.min(TALLEST, 188 + slack));
   }
 
   /** Beside the characteristics a schematic wider than this would have text too small to read. */
@@ -126,26 +132,28 @@ final class StageStrip {
         0);
   }
 
-  /** Limits in two columns. */
+  /** Limits in two columns, the rating system once where all share it. */
   private List<Block> limits() {
-    List<Block> rows = LimitRows.of(stage).stream().map(this::limit).toList();
+    List<FigureRow> found = LimitRows.of(stage);
+    if (found.isEmpty()) {
+      return List.of(new TextBlock(faces, "Limits", "none known for this valve", SIZE, Ink.BLACK));
+    }
+    boolean shared = found.stream().map(FigureRow::note).distinct().count() == 1;
+    String system = shared ? ", " + found.get(0).note() : "";
+    List<Block> rows = found.stream().map(r -> limit(r, shared ? "" : " " + r.note())).toList();
     int half = (rows.size() + 1) / 2;
-    return rows.isEmpty()
-        ? List.of(new TextBlock(faces, "Limits", "none known for this valve", SIZE, Ink.BLACK))
-        : List.of(
-            headline("Limits, the maker's"),
-            new Columns(
-                new double[] {0.5, 0.5},
-                List.of(rows.subList(0, half), rows.subList(half, rows.size()))));
+    return List.of(
+        headline("Limits, the maker's" + system),
+        new Columns(
+            new double[] {0.5, 0.5},
+            List.of(rows.subList(0, half), rows.subList(half, rows.size()))));
   }
 
-  private Block limit(FigureRow row) {
+  private Block limit(FigureRow row, String system) {
     return new RowBlock(
         faces,
-        new double[] {0.4, 0.6},
-        List.of(
-            Cell.soft(say(row.label())),
-            Cell.bold(row.value() + ", " + row.band() + " (" + row.note() + ")")),
+        new double[] {0.52, 0.48},
+        List.of(Cell.soft(say(row.label())), Cell.bold(row.value() + ", " + row.band() + system)),
         8.5,
         12,
         0);
@@ -158,15 +166,8 @@ final class StageStrip {
       return List.of(
           List.of(head, new TextBlock(faces, "", "None within this file.", SIZE, Ink.BLACK)));
     }
-    for (Finding finding : stage.findings()) {
-      String remedy = finding.remedy().map(r -> " Remedy: " + r.text()).orElse("");
-      Block text =
-          new TextBlock(
-              faces,
-              finding.severity().name().replace('_', ' '),
-              say(finding.text() + remedy),
-              SIZE,
-              Ink.BLACK);
+    for (FindingLine line : FindingLines.of(stage.findings())) {
+      Block text = new TextBlock(faces, line.word(), say(line.told()), SIZE, Ink.BLACK);
       groups.add(groups.isEmpty() ? List.of(head, text) : List.of(text));
     }
     return groups;
@@ -182,7 +183,7 @@ final class StageStrip {
   }
 
   private Block headline(String text) {
-    return new TextBlock(faces, "", text, 10.5, Ink.BLACK, true, 3);
+    return new Spaced(6, new TextBlock(faces, "", text, 10.5, Ink.BLACK, true, 3));
   }
 
   private String say(String text) {

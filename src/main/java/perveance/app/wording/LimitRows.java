@@ -1,6 +1,5 @@
 package perveance.app.wording;
 
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -20,7 +19,7 @@ public final class LimitRows {
    * Limits of a stage.
    *
    * @param answer the stage's answer
-   * @return one row for each valve and kind of limit, as the answer orders them
+   * @return one row for each valve and kind of limit, as the answer orders them; twins share one
    */
   public static List<FigureRow> of(StageAnswer answer) {
     Map<String, LimitUse> worst = new LinkedHashMap<>();
@@ -29,13 +28,13 @@ public final class LimitRows {
         worst.merge(use.ref() + use.what(), use, (a, b) -> a.share() >= b.share() ? a : b);
       }
     }
-    List<FigureRow> rows = new ArrayList<>();
+    Twins twins = new Twins();
     for (LimitUse use : worst.values()) {
       if (use.share() >= LEAST) {
-        rows.add(row(use));
+        twins.add(use.ref(), row(use));
       }
     }
-    return rows;
+    return twins.rows();
   }
 
   private static boolean usual(StageAnswer answer, LimitUse use) {
@@ -55,7 +54,7 @@ public final class LimitRows {
   private static FigureRow row(LimitUse use) {
     String when = use.when().equals("idle") ? "" : " at " + use.when();
     return new FigureRow(
-        use.ref() + " " + use.what() + when,
+        use.what() + when,
         Figures.reading(use.value(), use.unit()) + " of " + Figures.part(use.limit(), use.unit()),
         Math.round(100 * use.share()) + " %",
         use.system().word());

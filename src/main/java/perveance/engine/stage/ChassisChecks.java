@@ -113,10 +113,10 @@ public final class ChassisChecks {
       String known = String.join(", ", StageKinds.all().stream().map(StageKind::name).toList());
       Optional<String> near = StageKinds.nearest(entry.kind());
       add(index, "kind", "\"" + entry.kind() + "\"", "one of " + known, near);
+      near.flatMap(StageKinds::find).ifPresent(meant -> names(index, entry, meant));
       return;
     }
-    Map<String, Device> devices = devices(index, entry, kind.get());
-    supplies(index, entry, kind.get());
+    Map<String, Device> devices = names(index, entry, kind.get());
     if (devices.containsKey(StageKeys.DEVICE.key())
         && KeyChecks.complaints(index, entry, kind.get()).isEmpty()) {
       StageValues values = new StageValues(entry, devices, ChassisWiring.roughly(chassis, entry));
@@ -127,6 +127,13 @@ public final class ChassisChecks {
         valves.put(index, valves(kind.get(), values));
       }
     }
+  }
+
+  /** Checks the names of devices and supplies. */
+  private Map<String, Device> names(int index, StageEntry entry, StageKind kind) {
+    Map<String, Device> devices = devices(index, entry, kind);
+    supplies(index, entry, kind);
+    return devices;
   }
 
   private Map<String, Device> devices(int index, StageEntry entry, StageKind kind) {

@@ -64,7 +64,7 @@ final class CrossChecks {
       return true;
     }
     boolean name =
-        StageKinds.find(chassis.stages().get(complaint.index()).kind()).stream()
+        StageKinds.all().stream()
             .flatMap(kind -> kind.keys().stream())
             .anyMatch(spec -> spec.key().equals(key) && NAMES.contains(spec.form()));
     return name ? !incomplete : read.sound();

@@ -7,7 +7,6 @@ import java.util.OptionalDouble;
 import perveance.engine.base.BadInputException;
 import perveance.engine.stage.KeySpec;
 import perveance.engine.stage.Setting;
-import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.StageKind;
 import perveance.files.device.DeviceFiles;
 import perveance.files.toml.Problems;
@@ -33,7 +32,8 @@ final class StageReader {
     this.problems = problems;
   }
 
-  StageEntry read(String ref) {
+  /** The settings that could be read, in the order of the file. */
+  Map<String, Setting> read() {
     int before = problems.count();
     Map<String, Setting> settings = new LinkedHashMap<>();
     for (KeySpec spec : kind.keys()) {
@@ -54,7 +54,7 @@ final class StageReader {
     if (problems.count() > before || table.table().damaged()) {
       read.unsound();
     }
-    return new StageEntry(ref, kind.name(), inOrderOfFile(settings));
+    return inOrderOfFile(settings);
   }
 
   private Map<String, Setting> inOrderOfFile(Map<String, Setting> settings) {

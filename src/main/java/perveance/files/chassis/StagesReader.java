@@ -35,13 +35,17 @@ final class StagesReader {
     if (name.isEmpty()) {
       read.told("kind");
     }
-    Optional<StageKind> kind = StageKinds.find(name);
+    // a kind that is misspelt is told with the other names; the keys are judged by what was meant
+    Optional<StageKind> kind =
+        StageKinds.find(name).or(() -> StageKinds.nearest(name).flatMap(StageKinds::find));
     tables.add(read);
-    // the keys of a stage of unknown kind cannot be judged; its kind is told with the other names
     stages.add(
-        kind.isPresent()
-            ? new StageReader(kind.get(), read, library, problems).read(ref)
-            : new StageEntry(ref, name, Map.of()));
+        new StageEntry(
+            ref,
+            name,
+            kind.isPresent()
+                ? new StageReader(kind.get(), read, library, problems).read()
+                : Map.of()));
   }
 
   private void checkRef(String ref, ReadTable read) {

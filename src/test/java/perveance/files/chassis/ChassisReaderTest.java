@@ -173,6 +173,22 @@ class ChassisReaderTest {
   }
 
   @Test
+  void theKeysOfAMisspeltKindAreJudgedByWhatWasMeant() {
+    String wrong =
+        SOUND
+            .replaceFirst("kind = \"common-cathode\"", "kind = \"common-catode\"")
+            .replaceFirst("device = \"12AX7\"", "device = \"12AX8\"")
+            .replaceFirst("supply = \"B\"", "supply = \"Z\"")
+            .replaceFirst("anode_load = ", "anode_lod = ");
+    List<String> keys = List.of("kind", "device", "supply", "anode_lod");
+    List<String> told = problems(wrong);
+    assertEquals(keys.size(), told.size(), String.join("\n", told));
+    for (String key : keys) {
+      assertTrue(told.stream().anyMatch(t -> t.contains("stage V1a " + key + ":")), key);
+    }
+  }
+
+  @Test
   void contradictionsBetweenKeysAreToldByTheKind() {
     List<String> told = problems(SOUND.replaceFirst("anode_load = \"100k\"\n", ""));
     assertTrue(

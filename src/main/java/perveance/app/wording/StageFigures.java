@@ -70,7 +70,7 @@ public final class StageFigures {
   public static List<FigureRow> signal(StageAnswer answer) {
     List<FigureRow> rows = new ArrayList<>();
     smallSignal(answer.smallSignal(), rows);
-    clean(answer.clean(), rows);
+    clean(answer, rows);
     answer.driven().ifPresent(d -> driven(d, rows));
     SmallSignalAnswer small = answer.smallSignal();
     rows.add(
@@ -132,13 +132,14 @@ public final class StageFigures {
                 .orElse("")));
   }
 
-  private static void clean(CleanSwing clean, List<FigureRow> rows) {
+  private static void clean(StageAnswer answer, List<FigureRow> rows) {
+    CleanSwing clean = answer.clean();
     rows.add(
         new FigureRow(
             "clean input",
             Figures.value(clean.inputPeak(), Unit.VOLT, clean.bands(), "inputPeak") + " peak",
             Figures.band(clean.bands(), "inputPeak", Unit.VOLT),
-            "ended by " + clean.limitedBy().word().replace('-', ' ')));
+            ending(answer)));
     rows.add(
         new FigureRow(
             "clean output",
@@ -149,6 +150,16 @@ public final class StageFigures {
                     h -> "headroom " + perveance.engine.base.QuantityFormat.TYPESET.level(h, 1))
                 .findFirst()
                 .orElse("")));
+  }
+
+  /** What ends the clean swing, and the valve where it does when the stage has several or none. */
+  private static String ending(StageAnswer answer) {
+    CleanSwing clean = answer.clean();
+    boolean only =
+        answer.points().size() == 1 && answer.points().get(0).ref().equals(clean.limitedAt());
+    return "ended by "
+        + clean.limitedBy().word().replace('-', ' ')
+        + (only || clean.limitedAt().isEmpty() ? "" : " at " + clean.limitedAt());
   }
 
   private static void driven(DrivenAnswer driven, List<FigureRow> rows) {

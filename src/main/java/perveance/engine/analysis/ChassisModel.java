@@ -148,7 +148,9 @@ final class ChassisModel {
         return;
       }
       for (StageCircuit stage : built.stages()) {
-        models.put(stage.ref(), new StageModel(stage, built, solved.solution(), signal));
+        models.put(
+            stage.ref(),
+            new StageModel(stage, group.drivenBy().isPresent(), built, solved.solution(), signal));
       }
     }
   }

@@ -9,6 +9,8 @@ import java.util.OptionalDouble;
  * @param inputPeak largest symmetrical peak input, source behind its resistance [V]
  * @param outputPeak peak output at that input, the smaller side [V]
  * @param limitedBy what ends it first
+ * @param limitedAt valve section where that happens, which may be one of a stage wired straight to
+ *     this one; empty where nothing ends it
  * @param positivePeak input peak to the end on the positive side [V]
  * @param positiveLimit what ends the positive side
  * @param negativePeak input peak to the end on the negative side [V]
@@ -23,6 +25,7 @@ public record CleanSwing(
     double inputPeak,
     double outputPeak,
     Limit limitedBy,
+    String limitedAt,
     double positivePeak,
     Limit positiveLimit,
     double negativePeak,
@@ -48,6 +51,7 @@ public record CleanSwing(
         inputPeak,
         outputPeak,
         limitedBy,
+        limitedAt,
         positivePeak,
         positiveLimit,
         negativePeak,
@@ -65,8 +69,10 @@ public record CleanSwing(
     GRID_CURRENT("grid-current"),
     /** The valve cuts off. */
     CUT_OFF("cut-off"),
-    /** The anode reaches the knee. */
+    /** The anode of a pentode or beam tetrode reaches the knee. */
     KNEE("knee"),
+    /** The anode of a triode has no voltage left to fall. */
+    BOTTOMING("bottoming"),
     /** Nothing within the range tried. */
     NONE("none");
 

@@ -26,6 +26,7 @@ final class CleanSwings {
         peak,
         smallerOutput(dynamic, Math.abs(nearer.source())),
         nearer.limit(),
+        nearer.at(),
         Math.abs(up.input()),
         up.limit(),
         Math.abs(down.input()),
@@ -65,7 +66,7 @@ final class CleanSwings {
     double least = Double.POSITIVE_INFINITY;
     for (SwingEnd end : new SwingEnd[] {up, down}) {
       double step = 0.01 * end.source();
-      for (int v = 0; v < dynamic.valves() && step != 0; v++) {
+      for (int v = 0; v < dynamic.own() && step != 0; v++) {
         if (!dynamic.move(end.source() - step)) {
           continue;
         }

@@ -3,20 +3,26 @@ package perveance.engine.analysis;
 import java.util.ArrayList;
 import java.util.List;
 import perveance.engine.circuit.DcSolver;
+import perveance.engine.circuit.Element;
 import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.HeldCurve;
 import perveance.engine.device.ElectrodeCurrents;
+import perveance.engine.device.LawKind;
 import perveance.engine.stage.StageCircuit.Output;
-import perveance.engine.stage.StageCircuit.StageDevice;
 
-/** A stage's characteristic at mid-band, read at its input, its outputs and its valves. */
+/**
+ * A stage's characteristic at mid-band, read at its input, its outputs and its valves: its own
+ * first, then those of stages that are wired straight to it.
+ */
 final class StageCurve {
   private final StageModel model;
   private final HeldCurve curve;
   private final int[] element;
   private final double[] onset;
+  private final int own;
   private final List<Valve> valves = new ArrayList<>();
   private final double[] idleOutput;
+  private final double[] idleGridToChassis;
   private double idleInput;
   private double level;
 
@@ -29,12 +35,18 @@ final class StageCurve {
   private StageCurve(StageModel model, HeldCurve curve) {
     this.model = model;
     this.curve = curve;
-    List<StageDevice> devices = model.stage().devices();
-    this.element = new int[devices.size()];
-    this.onset = new double[devices.size()];
+    model.stage().devices().forEach(d -> valves.add(model.valve(d.ref())));
+    this.own = valves.size();
+    for (Element other : model.circuit().elements()) {
+      if (other instanceof Valve v && !valves.contains(v)) {
+        valves.add(v);
+      }
+    }
+    this.element = new int[valves.size()];
+    this.onset = new double[valves.size()];
+    this.idleGridToChassis = new double[valves.size()];
     for (int v = 0; v < element.length; v++) {
-      element[v] = model.circuit().element(devices.get(v).ref());
-      valves.add(model.valve(devices.get(v).ref()));
+      element[v] = model.circuit().element(valves.get(v).name());
       onset[v] = valves.get(v).law().gridCurrentOnset();
     }
     this.idleOutput = new double[model.stage().outputs().size()];
@@ -54,14 +66,14 @@ final class StageCurve {
   /**
    * Takes the next specimen.
    *
-   * @param contactShift how far each valve's contact potential lies above the nominal one, by which
-   *     the onset of grid current comes earlier [V]
+   * @param contactShift how far the contact potential of each own valve lies above the nominal one,
+   *     by which the onset of grid current comes earlier [V]
    */
   boolean take(DcSolver solver, double[] point, double[] contactShift) {
     if (!curve.take(solver, point)) {
       return false;
     }
-    for (int v = 0; v < onset.length; v++) {
+    for (int v = 0; v < own; v++) {
       onset[v] = valves.get(v).law().gridCurrentOnset() - contactShift[v];
     }
     readIdle();
@@ -74,6 +86,9 @@ final class StageCurve {
     idleInput = curve.voltage(model.stage().inputNode());
     for (int o = 0; o < idleOutput.length; o++) {
       idleOutput[o] = absolute(o);
+    }
+    for (int v = 0; v < idleGridToChassis.length; v++) {
+      idleGridToChassis[v] = curve.voltage(valves.get(v).grid());
     }
   }
 
@@ -95,9 +110,7 @@ final class StageCurve {
 
   /** Voltage at the stage's input above idle, in the last state [V]. */
   double input() {
-    return model.stage().input().isPresent()
-        ? level
-        : curve.voltage(model.stage().inputNode()) - idleInput;
+    return model.atSource() ? level : curve.voltage(model.stage().inputNode()) - idleInput;
   }
 
   /** Voltage of an output above idle, in the last state [V]. */
@@ -105,7 +118,34 @@ final class StageCurve {
     return absolute(index) - idleOutput[index];
   }
 
-  /** Number of valve sections. */
+  /** Whether the input is told by the voltage of a source. */
+  boolean atSource() {
+    return model.atSource();
+  }
+
+  /** Whether another stage's output is wired straight to the input. */
+  boolean wired() {
+    return model.stage().input().isEmpty();
+  }
+
+  /** Number of the stage's own valve sections, which come first. */
+  int own() {
+    return own;
+  }
+
+  /** Name of a section. */
+  String ref(int valve) {
+    return valves.get(valve).name();
+  }
+
+  /** Whether a section works as a pentode, which has a knee. */
+  boolean screened(int valve) {
+    boolean pentode = valves.get(valve).law().kind() == LawKind.PENTODE;
+    return pentode
+        && (valve >= own || !model.stage().devices().get(valve).connection().equals("triode"));
+  }
+
+  /** Number of valve sections, those of stages wired straight to this one included. */
   int valves() {
     return element.length;
   }
@@ -119,6 +159,17 @@ final class StageCurve {
   double gridVoltage(int valve) {
     Valve v = valves.get(valve);
     return curve.voltage(v.grid()) - curve.voltage(v.cathode());
+  }
+
+  /** Anode to cathode voltage of a section in the last state [V]. */
+  double anodeVoltage(int valve) {
+    Valve v = valves.get(valve);
+    return curve.voltage(v.anode()) - curve.voltage(v.cathode());
+  }
+
+  /** Grid to chassis voltage of a section above idle, in the last state [V]. */
+  double gridToChassis(int valve) {
+    return curve.voltage(valves.get(valve).grid()) - idleGridToChassis[valve];
   }
 
   /** Grid voltage at which a section's grid current begins; infinite for none [V]. */

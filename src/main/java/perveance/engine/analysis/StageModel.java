@@ -28,16 +28,18 @@ final class StageModel {
   private final SmallSignal signal;
   private final int source;
   private final double inputShare;
+  private final boolean atSource;
 
   /**
    * A stage of a group.
    *
    * @param stage the stage
+   * @param driven whether another stage drives the group through a capacitor
    * @param group its group, whose first stage has the source
    * @param dc dc point of the group's circuit
    * @param signal small signals about that point
    */
-  StageModel(StageCircuit stage, Built group, DcSolution dc, SmallSignal signal) {
+  StageModel(StageCircuit stage, boolean driven, Built group, DcSolution dc, SmallSignal signal) {
     this.stage = stage;
     this.dc = dc;
     this.signal = signal;
@@ -47,8 +49,8 @@ final class StageModel {
             .findFirst()
             .map(group.circuit()::element)
             .orElseThrow(() -> new IllegalArgumentException("group has no source"));
-    this.inputShare =
-        stage.input().isPresent() ? 1 : audible(signal.midbandGain(source, stage.inputNode(), 0));
+    this.atSource = stage.input().isPresent() && !driven;
+    this.inputShare = atSource ? 1 : audible(signal.midbandGain(source, stage.inputNode(), 0));
   }
 
   /** A stage before that is cut off lets nothing through; keeps what is divided by it finite. */
@@ -112,6 +114,15 @@ final class StageModel {
         || stage.devices().stream()
             .map(StageDevice::ref)
             .anyMatch(ref -> name.equals(ref) || name.startsWith(ref + "."));
+  }
+
+  /**
+   * Whether the stage's input is a source of its own, told by its voltage before the source
+   * resistance. The input of a stage that another one drives is the node where it begins, so that
+   * the loading of the driver is counted once, in the driver's gain.
+   */
+  boolean atSource() {
+    return atSource;
   }
 
   /** Share of the source's voltage that reaches the input; 1 where the stage has its own. */

@@ -137,7 +137,7 @@ final class StageSpread {
   private double gain(SmallSignal signal, Output output) {
     int source = model.source();
     double gain = signal.midbandGain(source, output.plus(), output.minus());
-    return model.stage().input().isPresent()
+    return model.atSource()
         ? gain
         : gain / signal.midbandGain(source, model.stage().inputNode(), 0);
   }

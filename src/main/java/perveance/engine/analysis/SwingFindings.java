@@ -41,31 +41,34 @@ final class SwingFindings {
     if (clean.limitedBy() == Limit.NONE || !(clean.inputPeak() > 0)) {
       return Optional.empty();
     }
-    double other = Math.max(clean.positivePeak(), clean.negativePeak());
+    String name = place(context, clean);
     String at = Words.of(clean.inputPeak(), Unit.VOLT);
-    String ref = context.ref();
-    Finding finding =
+    SignalMessage code =
         switch (clean.limitedBy()) {
-          case GRID_CURRENT ->
-              Finding.of(
-                  SignalMessage.GRID_CURRENT_FIRST,
-                  Severity.NOTE,
-                  ref,
-                  ref,
-                  at,
-                  Words.of(other, Unit.VOLT));
-          case CUT_OFF ->
-              Finding.of(
-                  SignalMessage.CUT_OFF_FIRST,
-                  Severity.NOTE,
-                  ref,
-                  ref,
-                  at,
-                  Words.of(other, Unit.VOLT));
-          default -> Finding.of(SignalMessage.KNEE_FIRST, Severity.NOTE, ref, ref, at);
+          case GRID_CURRENT -> SignalMessage.GRID_CURRENT_FIRST;
+          case CUT_OFF -> SignalMessage.CUT_OFF_FIRST;
+          case BOTTOMING -> SignalMessage.BOTTOMING_FIRST;
+          default -> SignalMessage.KNEE_FIRST;
         };
-    Finding told = finding.withValue(clean.inputPeak(), Unit.VOLT);
-    return Optional.of(moreOutput(context).map(told::withRemedy).orElse(told));
+    String other = Words.of(Math.max(clean.positivePeak(), clean.negativePeak()), Unit.VOLT);
+    String[] parts =
+        code.partCount() > 2 ? new String[] {name, at, other} : new String[] {name, at};
+    Finding told =
+        Finding.of(code, Severity.NOTE, context.ref(), parts)
+            .withValue(clean.inputPeak(), Unit.VOLT);
+    return Optional.of(
+        own(context, clean) ? moreOutput(context).map(told::withRemedy).orElse(told) : told);
+  }
+
+  private static boolean own(FindingContext context, CleanSwing clean) {
+    return context.answer().points().stream().anyMatch(p -> p.ref().equals(clean.limitedAt()));
+  }
+
+  /** The stage, and the one wired to it when that one's valve is what ends the swing. */
+  private static String place(FindingContext context, CleanSwing clean) {
+    return own(context, clean)
+        ? context.ref()
+        : context.ref() + ", wired straight to " + clean.limitedAt() + ",";
   }
 
   /** The bias that gives the most clean output, where it gives more than now. */

@@ -3,31 +3,33 @@ package perveance.engine.analysis;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.Map;
-import perveance.engine.analysis.CleanSwing.Limit;
+import perveance.engine.analysis.SwingEnd.Sign;
 import perveance.engine.circuit.DcSolver;
 
 /**
  * The clean swing over specimens: starts from where the nominal stage ends each way and follows the
- * same limit to where the specimen meets it. One specimen in four is followed, since a swing costs
- * as much as all the rest.
+ * same sign to where the specimen meets it, or to where its grid current or cut-off comes earlier.
+ * One specimen in four is followed, since a swing costs as much as all the rest.
  */
 final class SwingSpread {
   /** One specimen in so many is followed. */
   static final int STRIDE = 4;
 
-  private static final int STEPS = 4;
-  private static final double ACCURACY = 1e-3;
+  private static final int STEPS = 8;
+  private static final double ACCURACY = 2e-3;
+
+  /** A step of the search goes no further than by this factor, either way [1]. */
+  private static final double FURTHEST = 1.6;
 
   private final StageModel model;
   private final int samples;
-  private final SwingSearch nominal;
+  private final SwingMargins nominal;
   private final SwingEnd up;
   private final SwingEnd down;
-  private final double upSlope;
-  private final double downSlope;
+  private final boolean slopes;
   private final Map<String, double[]> figures = new LinkedHashMap<>();
   private StageCurve curve;
-  private SwingSearch margins;
+  private SwingMargins margins;
 
   /**
    * Finds the nominal ends.
@@ -40,26 +42,16 @@ final class SwingSpread {
     this.model = model;
     this.samples = samples;
     this.curve = new StageCurve(model);
-    this.nominal = new SwingSearch(curve, composite);
+    SwingSearch search = new SwingSearch(curve, composite);
+    this.nominal = search.margins();
     this.margins = nominal;
-    this.up = nominal.end(1);
-    this.down = nominal.end(-1);
-    this.upSlope = slope(up);
-    this.downSlope = slope(down);
+    this.up = search.end(1);
+    this.down = search.end(-1);
+    this.slopes = bySlope(up.sign()) || bySlope(down.sign());
   }
 
-  /** Change of a margin for a change of the source, around a nominal end [1/V]. */
-  private double slope(SwingEnd end) {
-    double step = 0.02 * end.source();
-    if (step == 0 || end.limit() == Limit.NONE) {
-      return 0;
-    }
-    double inside = margin(end, end.source() - step);
-    return (margin(end, end.source()) - inside) / step;
-  }
-
-  private double margin(SwingEnd end, double source) {
-    return margins.margin(end.limit(), source);
+  private static boolean bySlope(Sign sign) {
+    return sign == Sign.OUTPUT || sign == Sign.INPUT;
   }
 
   /** Prepares to follow specimens of a solver. */
@@ -72,11 +64,11 @@ final class SwingSpread {
     if (!curve.take(solver, point, contactShift)) {
       return;
     }
-    margins = nominal.on(curve, up.limit() == Limit.KNEE || down.limit() == Limit.KNEE);
-    double above = end(up, upSlope);
+    margins = nominal.on(curve, slopes);
+    double above = end(up);
     double outputDown = at(above);
     double inputUp = Math.abs(curve.input());
-    double below = end(down, downSlope);
+    double below = end(down);
     double outputUp = at(below);
     double inputDown = Math.abs(curve.input());
     put("positivePeak", sample, inputUp);
@@ -94,26 +86,62 @@ final class SwingSpread {
     return curve.move(source) ? curve.output(0) : Double.NaN;
   }
 
-  /** Follows a limit from its nominal place, by the secant through the last two points. */
-  private double end(SwingEnd from, double slope) {
-    if (from.limit() == Limit.NONE || slope == 0) {
+  /** Where a specimen ends: by the nominal sign, or by one that comes earlier. */
+  private double end(SwingEnd from) {
+    if (from.sign() == Sign.NONE || from.source() == 0) {
       return from.source();
     }
-    double x = from.source();
-    double at = margin(from, x);
-    double rate = slope;
-    for (int i = 0; i < STEPS && Math.abs(at / rate) > ACCURACY * Math.abs(x); i++) {
-      double next = x - at / rate;
-      if (!(Math.signum(next) == Math.signum(from.source()))) {
-        return 0;
-      }
-      double reached = margin(from, next);
-      double newRate = (reached - at) / (next - x);
-      rate = newRate != 0 && Double.isFinite(newRate) ? newRate : rate;
-      x = next;
-      at = reached;
+    double x = cross(from.sign(), from.source());
+    if (bySlope(from.sign()) && curve.move(x)) {
+      x = margins.gridRoom() < 0 ? cross(Sign.GRID, x) : x;
+      x = margins.cutOffRoom() < 0 ? cross(Sign.CUT_OFF, x) : x;
     }
     return x;
+  }
+
+  /**
+   * Where a margin falls through zero, by false position. It is positive at idle; where it is not,
+   * the specimen has no clean swing that way.
+   */
+  private double cross(Sign sign, double start) {
+    double inside = 0;
+    double marginInside = margins.margin(sign, 0);
+    if (!(marginInside > 0)) {
+      return 0;
+    }
+    double outside = Double.NaN;
+    double marginOutside = Double.NaN;
+    double x = start;
+    for (int i = 0; i < STEPS; i++) {
+      double reached = margins.margin(sign, x);
+      if (reached > 0) {
+        double rate = (reached - marginInside) / (x - inside);
+        boolean open = Double.isNaN(outside);
+        inside = x;
+        marginInside = reached;
+        x = open ? outward(x, reached, rate) : between(inside, reached, outside, marginOutside);
+      } else {
+        outside = x;
+        marginOutside = reached;
+        x = between(inside, marginInside, outside, reached);
+      }
+      if (Math.abs(x - inside) < ACCURACY * Math.abs(x)
+          || Math.abs(x - outside) < ACCURACY * Math.abs(x)) {
+        break;
+      }
+    }
+    return x;
+  }
+
+  private static double outward(double x, double margin, double rate) {
+    double next = x - margin / rate;
+    boolean further = next / x > 1;
+    return further ? Math.min(next / x, FURTHEST) * x : FURTHEST * x;
+  }
+
+  private static double between(double a, double atA, double b, double atB) {
+    double share = atA / (atA - atB);
+    return a + Math.max(0.02, Math.min(0.98, share)) * (b - a);
   }
 
   private void put(String figure, int sample, double value) {

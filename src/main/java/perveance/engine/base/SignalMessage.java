@@ -6,6 +6,8 @@ public enum SignalMessage implements MessageCode {
       "{0} overloads by grid current first, at {1} peak in; the other side ends at {2}."),
   CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; the other side ends at {2}."),
   KNEE_FIRST("{0} overloads at the anode knee first, at {1} peak in."),
+  BOTTOMING_FIRST(
+      "{0} overloads by bottoming first, at {1} peak in: its anode can fall no further."),
   NO_HEADROOM("{0} is driven with {1} peak but is clean only to {2}."),
   LITTLE_HEADROOM("{0} has only {1} of headroom over the stated drive."),
   HIGH_DISTORTION("{0} distorts {1} at the stated drive."),

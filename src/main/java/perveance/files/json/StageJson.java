@@ -97,6 +97,7 @@ final class StageJson {
     sink.number("input_peak_V", clean.inputPeak());
     sink.number("output_peak_V", clean.outputPeak());
     sink.text("limited_by", clean.limitedBy().word());
+    sink.someText("limited_at", clean.limitedAt());
     sink.number("positive_peak_V", clean.positivePeak());
     sink.text("positive_limit", clean.positiveLimit().word());
     sink.number("negative_peak_V", clean.negativePeak());

@@ -138,6 +138,7 @@ final class SampleAnswer {
             1.5,
             60,
             CleanSwing.Limit.GRID_CURRENT,
+            "V1a",
             1.5,
             CleanSwing.Limit.GRID_CURRENT,
             2.5,

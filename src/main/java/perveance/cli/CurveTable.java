@@ -10,7 +10,8 @@ final class CurveTable {
   static String csv(CurveFamily family) {
     StringBuilder out = new StringBuilder("anode_V");
     for (CurveFamily.Curve curve : family.curves()) {
-      out.append(String.format(Locale.ROOT, ",anode_A at grid %s V", plain(curve.grid())));
+      String grid = family.gridless() ? "" : " at grid " + plain(curve.grid()) + " V";
+      out.append(",anode_A").append(grid);
     }
     out.append('\n');
     int points = family.curves().get(0).points().size();

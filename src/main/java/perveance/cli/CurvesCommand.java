@@ -4,7 +4,9 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalInt;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import perveance.engine.base.BadInputException;
@@ -12,9 +14,9 @@ import perveance.engine.base.Problem;
 import perveance.engine.device.CurveFamily;
 import perveance.engine.device.Device;
 import perveance.engine.device.LawKind;
-import perveance.engine.device.Ratings;
 import perveance.files.WholeFile;
 import perveance.plot.CurvePictures;
+import perveance.plot.DevicePlots;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -31,9 +33,12 @@ import picocli.CommandLine.ParentCommand;
       "Examples:",
       "  perveance curves 12AX7",
       "  perveance curves ECC83 -o ecc83.svg",
-      "  perveance curves EL84 --screen 250 -o el84.png"
+      "  perveance curves EL84 --screen 250 -o el84.png",
+      "  perveance curves EL34 --triode --volts 500 -o el34.svg"
     })
 final class CurvesCommand implements Callable<Integer> {
+  private static final double LARGEST = 1e5;
+
   @ParentCommand private PerveanceCommand parent = new PerveanceCommand();
 
   @Mixin private CommonOptions common = new CommonOptions();
@@ -50,8 +55,11 @@ final class CurvesCommand implements Callable<Integer> {
   @Option(
       names = "--screen",
       paramLabel = "VOLTS",
-      description = "Screen voltage of a pentode; tied to the anode if not given.")
+      description = "Screen voltage of a pentode; that of its published point if not given.")
   private @Nullable Double screen;
+
+  @Option(names = "--triode", description = "Tie the screen of a pentode to the anode.")
+  private boolean triode;
 
   @Option(names = "--volts", paramLabel = "VOLTS", description = "End of the voltage axis.")
   private @Nullable Double volts;
@@ -67,7 +75,7 @@ final class CurvesCommand implements Callable<Integer> {
             .devices()
             .load(name)
             .orElseThrow(() -> new BadInputException(List.of(unknown(workshop))));
-    CurveFamily family = family(device);
+    CurveFamily family = family(device, options(device));
     if (output == null) {
       parent.out().print(CurveTable.csv(family));
       parent.out().flush();
@@ -84,18 +92,55 @@ final class CurvesCommand implements Callable<Integer> {
     return UnknownDevice.problem(name, workshop.devices().names());
   }
 
-  private CurveFamily family(Device device) {
-    double toVolts = volts != null ? volts : device.validity().highestAnodeVoltage() * 1.2;
-    double toAmperes =
-        milliamperes != null ? milliamperes * 1e-3 : device.validity().highestCurrent() * 1.6;
+  /** Where the axes end and what the screen does, each checked. */
+  private Axes options(Device device) throws BadInputException {
     boolean pentode = device.law().kind() == LawKind.PENTODE;
-    double screenVolts = !pentode ? 0 : screen != null ? screen : CurveFamily.SCREEN_TIED;
-    return CurveFamily.of(device, screenVolts, toVolts, toAmperes);
+    if (!pentode && (triode || screen != null)) {
+      throw refused(
+          triode ? "--triode" : "--screen", device.type() + ", which has no screen", "a pentode");
+    }
+    if (triode && screen != null) {
+      throw refused("--screen", "a screen voltage as well as --triode", "one or the other");
+    }
+    OptionalDouble tied =
+        triode ? OptionalDouble.of(CurveFamily.SCREEN_TIED) : positive("--screen", screen, "V");
+    return new Axes(
+        tied.orElse(DevicePlots.usualScreen(device)),
+        positive("--volts", volts, "V"),
+        positive("--milliamperes", milliamperes, "mA"));
   }
 
+  private static OptionalDouble positive(String option, @Nullable Double value, String unit)
+      throws BadInputException {
+    if (value == null) {
+      return OptionalDouble.empty();
+    }
+    if (!(value > 0 && value <= LARGEST)) {
+      throw refused(option, value + "", "a figure above 0 and up to 100000 " + unit);
+    }
+    return OptionalDouble.of(value);
+  }
+
+  private static BadInputException refused(String option, String found, String expected) {
+    return new BadInputException(
+        List.of(
+            new Problem(
+                "command line", OptionalInt.empty(), option, found, expected, Optional.empty())));
+  }
+
+  private static CurveFamily family(Device device, Axes axes) {
+    OptionalDouble amperes =
+        axes.milliamperes.isPresent()
+            ? OptionalDouble.of(1e-3 * axes.milliamperes.getAsDouble())
+            : OptionalDouble.empty();
+    return DevicePlots.family(device, axes.screen, axes.volts, amperes);
+  }
+
+  /** What the options ask for: screen [V], ends of the axes [V], [mA]. */
+  private record Axes(double screen, OptionalDouble volts, OptionalDouble milliamperes) {}
+
   private static byte[] content(Device device, CurveFamily family, Path target) {
-    OptionalDouble watts =
-        device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
+    OptionalDouble watts = DevicePlots.dissipation(device);
     String ending = target.getFileName().toString().toLowerCase(Locale.ROOT);
     if (ending.endsWith(".svg")) {
       return CurvePictures.svg(family, watts);

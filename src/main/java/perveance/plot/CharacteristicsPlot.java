@@ -51,7 +51,7 @@ public final class CharacteristicsPlot {
     dissipation.ifPresent(watts -> addLimit(family, watts, series, labels));
     lines.ifPresent(view -> addLines(family, view, series, labels));
     return new PlotDescription(
-        family.type(),
+        family.title(),
         new PlotAxis("anode to cathode, V", 0, family.highestVoltage(), false),
         new PlotAxis("anode current, mA", 0, family.highestCurrent() / MILLI, false),
         series,
@@ -69,7 +69,7 @@ public final class CharacteristicsPlot {
     String name = gridLabel(curve.grid());
     series.add(
         new PlotSeries(name, major ? PlotSeries.Role.CURVE : PlotSeries.Role.MINOR_CURVE, points));
-    if (major) {
+    if (major && !family.gridless()) {
       labels.add(endLabel(name, points, family.highestVoltage(), family.highestCurrent() / MILLI));
     }
   }

@@ -9,6 +9,8 @@ import org.jfree.chart.axis.NumberTickUnit;
 import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.DatasetRenderingOrder;
 import org.jfree.chart.plot.XYPlot;
+import org.jfree.chart.title.TextTitle;
+import org.jfree.chart.ui.HorizontalAlignment;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.data.xy.XYSeries;
 import org.jfree.data.xy.XYSeriesCollection;
@@ -61,6 +63,24 @@ public final class ChartFactory {
     JFreeChart chart = new JFreeChart(null, fonts.regular(textSize), plot, false);
     chart.setBackgroundPaint(look.paper());
     chart.setPadding(new RectangleInsets(4, 4, 4, 10));
+    return chart;
+  }
+
+  /**
+   * The chart under its title, for a picture that stands alone.
+   *
+   * @param description what to draw
+   * @return a chart without legend
+   */
+  public JFreeChart titled(PlotDescription description) {
+    JFreeChart chart = chart(description);
+    if (!description.title().isEmpty()) {
+      TextTitle title = new TextTitle(description.title(), fonts.bold(1.2 * textSize));
+      title.setPaint(look.ink());
+      title.setHorizontalAlignment(HorizontalAlignment.LEFT);
+      title.setPadding(new RectangleInsets(4, 8, 8, 4));
+      chart.setTitle(title);
+    }
     return chart;
   }
 

@@ -40,7 +40,7 @@ public final class CurvePictures {
    * @return the file
    */
   public static byte[] of(PlotDescription plot, boolean vector) {
-    Artwork artwork = Artwork.of(new ChartFactory(Look.LIGHT, new PlotFonts(), 12).chart(plot));
+    Artwork artwork = Artwork.of(new ChartFactory(Look.LIGHT, new PlotFonts(), 12).titled(plot));
     return vector
         ? Pictures.svg(artwork, Look.LIGHT, WIDTH, HEIGHT)
         : Pictures.png(artwork, Look.LIGHT, WIDTH, HEIGHT, 2);

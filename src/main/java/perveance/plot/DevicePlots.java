@@ -20,14 +20,44 @@ public final class DevicePlots {
    * @return description; of a pentode at the screen voltage of its first published point
    */
   public static PlotDescription characteristics(Device device) {
-    double volts = StagePlots.roundUp(device.validity().highestAnodeVoltage() * 1.2);
-    double amperes = 1e-3 * StagePlots.roundUp(1e3 * device.validity().highestCurrent() * 1.6);
-    OptionalDouble watts =
-        device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
-    return CharacteristicsPlot.of(CurveFamily.of(device, screen(device), volts, amperes), watts);
+    CurveFamily family =
+        family(device, usualScreen(device), OptionalDouble.empty(), OptionalDouble.empty());
+    return CharacteristicsPlot.of(family, dissipation(device));
   }
 
-  private static double screen(Device device) {
+  /**
+   * The curves of a device to stated or usual ends of the axes.
+   *
+   * @param device the device
+   * @param screen screen voltage, {@link CurveFamily#SCREEN_TIED}, or zero for a triode [V]
+   * @param volts end of the voltage axis; empty for a little past the evidence [V]
+   * @param amperes end of the current axis; empty for a little past the evidence [A]
+   * @return the family
+   */
+  public static CurveFamily family(
+      Device device, double screen, OptionalDouble volts, OptionalDouble amperes) {
+    double usualVolts = StagePlots.roundUp(device.validity().highestAnodeVoltage() * 1.2);
+    double usualAmperes = 1e-3 * StagePlots.roundUp(1e3 * device.validity().highestCurrent() * 1.6);
+    return CurveFamily.of(device, screen, volts.orElse(usualVolts), amperes.orElse(usualAmperes));
+  }
+
+  /**
+   * The anode's limit, which a family carries as a hyperbola.
+   *
+   * @param device the device
+   * @return anode dissipation of its usual rating, empty when not known [W]
+   */
+  public static OptionalDouble dissipation(Device device) {
+    return device.defaultRatings().map(Ratings::anodeDissipation).orElse(OptionalDouble.empty());
+  }
+
+  /**
+   * The screen voltage at which a device is usually shown.
+   *
+   * @param device the device
+   * @return that of its first published point; zero for a triode [V]
+   */
+  public static double usualScreen(Device device) {
     if (device.law().kind() != LawKind.PENTODE) {
       return 0;
     }

@@ -12,6 +12,8 @@ import java.util.List;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 
 /** Curves, sheet, example, completion and help. */
 class OtherCommandsTest {
@@ -28,6 +30,39 @@ class OtherCommandsTest {
     long columns = lines.get(0).chars().filter(c -> c == ',').count();
     assertTrue(columns >= 4);
     lines.forEach(l -> assertEquals(columns, l.chars().filter(c -> c == ',').count(), l));
+  }
+
+  @Test
+  void curvesOfARectifierIsOneColumn() {
+    String table = CommandTrial.of("curves", "GZ34").out();
+    assertTrue(table.startsWith("anode_V,anode_A\n0,"), table.lines().findFirst().orElse(""));
+  }
+
+  @Test
+  void curvesOfAPentodeKeepsTheScreenWhereItsSheetHasItUnlessTied() {
+    String pentode = CommandTrial.of("curves", "EL84", "--volts", "300").out();
+    String triode = CommandTrial.of("curves", "EL84", "--volts", "300", "--triode").out();
+    // tied, the current at a low anode voltage is a small part of that with 250 V on the screen
+    assertTrue(atZeroBias(pentode, "30,") > 3 * atZeroBias(triode, "30,"));
+  }
+
+  private static double atZeroBias(String table, String start) {
+    String line = table.lines().filter(l -> l.startsWith(start)).findFirst().orElseThrow();
+    return Double.parseDouble(line.split(",", -1)[1]);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "EL34, --volts=0, a figure above 0",
+    "EL34, --milliamperes=-3, a figure above 0",
+    "EL34, --screen=-5, a figure above 0",
+    "6SN7, --screen=100, a pentode",
+    "6SN7, --triode, a pentode"
+  })
+  void curvesRefusesWhatCannotBeDrawn(String device, String option, String expected) {
+    CommandTrial trial = CommandTrial.of("curves", device, option);
+    assertEquals(2, trial.status());
+    assertTrue(trial.err().contains("expected " + expected), trial.err());
   }
 
   @Test

@@ -48,6 +48,7 @@ final class CheckCommand implements Callable<Integer> {
   @Override
   public Integer call() throws BadInputException, IOException {
     Workshop workshop = common.workshop();
+    workshop.warn(parent.err());
     ChassisAnswer answer =
         workshop.analysis().answer(workshop.read(file), AnalysisOptions.FULL, Progress.none());
     if (json) {

@@ -58,6 +58,7 @@ final class SheetCommand implements Callable<Integer> {
   @Override
   public Integer call() throws BadInputException, IOException {
     Workshop workshop = common.workshop();
+    workshop.warn(parent.err());
     ChassisAnswer answer =
         workshop.analysis().answer(workshop.read(file), AnalysisOptions.FULL, Progress.none());
     Path target = output == null ? beside(file) : output;

@@ -1,5 +1,6 @@
 package perveance.cli;
 
+import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -21,7 +22,7 @@ final class Workshop {
   /** Folders named on the command line first, then the user's own folder where there is one. */
   private static List<Path> withUsualFolder(List<Path> folders) {
     List<Path> all = new ArrayList<>(folders);
-    Path usual = Path.of(System.getProperty("user.home", "."), ".perveance", "device-curves");
+    Path usual = DeviceFiles.usualFolder();
     if (Files.isDirectory(usual)) {
       all.add(usual);
     }
@@ -30,6 +31,12 @@ final class Workshop {
 
   DeviceFiles devices() {
     return devices;
+  }
+
+  /** Says what is wrong with the user's own device files, a line each; the others still serve. */
+  void warn(PrintWriter err) {
+    devices.warnings().forEach(line -> err.println("Device files: " + line));
+    err.flush();
   }
 
   Chassis read(Path file) throws BadInputException {

@@ -34,9 +34,11 @@ final class Wiring {
       ObjectProperty<Settings> settings,
       Asking asking,
       Desks desks) {
-    DeviceFiles devices = new DeviceFiles(List.of(home.resolve("devices")));
+    DeviceFiles devices =
+        new DeviceFiles(List.of(home.resolve("devices"), DeviceFiles.usualFolder()));
     Chassis first = Starters.example(settings.get());
     Workbench bench = new Workbench(first, around.apply(new EngineRoom(devices)), desks);
+    keepSaying(bench, String.join("; ", devices.warnings()));
     Documents documents = new FileDocuments(devices, home);
     Documents.Opened opened = new Documents.Opened(Optional.empty(), "", false, first);
     return new Desk(
@@ -46,6 +48,19 @@ final class Wiring {
         new SheetPress(),
         asking,
         new PointDrag(bench, desks.quick(), desks.foreground()));
+  }
+
+  /** Says something at the foot whenever nothing else is said there. */
+  private static void keepSaying(Workbench bench, String notice) {
+    bench.say(notice);
+    bench
+        .message()
+        .addListener(
+            (o, was, is) -> {
+              if (is.isEmpty() && !notice.isEmpty()) {
+                bench.say(notice);
+              }
+            });
   }
 
   static ObjectProperty<Settings> settings(Path home) {

@@ -33,6 +33,22 @@ class CheckCommandTest {
         () -> assertEquals("", trial.err()));
   }
 
+  /** A folder of the user's in which two files claim one name, and one has a fault. */
+  @Test
+  void faultsOfTheUsersOwnDeviceFilesAreToldAndHarmNothing() throws IOException {
+    String sound = Files.readString(Path.of("device-curves", "12au7.toml"));
+    Files.writeString(folder.resolve("a.toml"), sound.replace("12AU7", "A1"));
+    Files.writeString(folder.resolve("b.toml"), sound.replace("12AU7", "B1"));
+    Files.writeString(folder.resolve("c.toml"), "perveance_device = 1\ntype = \"C1\"\nkind = 7\n");
+    CommandTrial trial = CommandTrial.of("check", "--devices", folder.toString(), EXAMPLE);
+    assertEquals(0, trial.status(), trial.err());
+    assertTrue(trial.err().lines().allMatch(l -> l.startsWith("Device files: ")), trial.err());
+    assertTrue(
+        trial.err().contains("b.toml:3: aliases: found \"ECC82\" a second time"), trial.err());
+    assertTrue(trial.err().contains("c.toml:3: kind: found"), trial.err());
+    assertTrue(trial.out().startsWith("Line stage"), trial.out());
+  }
+
   @Test
   void noLineIsWiderThanAHundredColumns() {
     CommandTrial trial = CommandTrial.of("check", "--explain", EXAMPLE);

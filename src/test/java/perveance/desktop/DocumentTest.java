@@ -59,6 +59,18 @@ class DocumentTest {
     assertFalse(second.bench().modified().get());
   }
 
+  /** Device files of the user's that claim one name twice are told at the foot, until mended. */
+  @Test
+  void faultsOfTheUsersDeviceFilesStandAtTheFoot() throws IOException {
+    Path devices = Files.createDirectories(folder.resolve("home").resolve("devices"));
+    Files.writeString(devices.resolve("a.toml"), "type = \"A1\"\naliases = [\"X\"]\n");
+    Files.writeString(devices.resolve("b.toml"), "type = \"B1\"\naliases = [\"x\"]\n");
+    Desk desk = desk();
+    assertTrue(desk.bench().message().get().contains("b.toml:2: aliases: found \"x\""));
+    desk.bench().edit(new Edit.SetTitle("Another"));
+    assertTrue(desk.bench().message().get().contains("b.toml:2: aliases: found \"x\""));
+  }
+
   @Test
   void savingForgetsWhatWasKept() throws DocumentException, IOException {
     Desk desk = desk();

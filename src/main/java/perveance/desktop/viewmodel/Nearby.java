@@ -144,11 +144,13 @@ final class Nearby {
         names.getOrDefault(p.part().element(), p.designator()),
         p.idleVoltage(),
         p.idlePower(),
+        p.workingPower(),
         p.worstVoltage(),
         p.worstPower(),
         p.worstCase(),
         p.coldVoltage(),
         p.nearest(),
-        p.buy());
+        p.buy(),
+        p.rated());
   }
 }

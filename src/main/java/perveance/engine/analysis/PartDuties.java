@@ -10,15 +10,18 @@ import perveance.engine.base.PreferredSeries;
 import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Unit;
 import perveance.engine.circuit.DcSolution;
+import perveance.engine.stage.PartRatings;
 import perveance.engine.stage.StageCircuit;
 import perveance.engine.stage.StageCircuit.Part;
 import perveance.engine.stage.StageCircuit.StageDevice;
+import perveance.engine.stage.StageValues;
 
 /** Works out what each part of a stage has to stand and which rating to buy. */
 final class PartDuties {
   private static final String AT_DRIVE = "at the stated drive";
 
   private final StageCircuit stage;
+  private final StageValues values;
   private final DcSolution idle;
   private final Optional<DcSolution> cold;
   private final List<State> worst = new ArrayList<>();
@@ -26,8 +29,14 @@ final class PartDuties {
   /** A state that stresses parts, and its name. */
   private record State(String name, Map<String, PartStress> stress) {}
 
-  PartDuties(StageCircuit stage, DcSolution idle, FaultCircuits faults, Optional<DcSolution> cold) {
-    this.stage = stage;
+  PartDuties(
+      StageModel model,
+      StageValues values,
+      DcSolution idle,
+      FaultCircuits faults,
+      Optional<DcSolution> cold) {
+    this.stage = model.stage();
+    this.values = values;
     this.idle = idle;
     this.cold = cold;
     for (StageDevice device : stage.devices()) {
@@ -76,17 +85,20 @@ final class PartDuties {
     }
     double power = hardest == null ? now.power() : stress(hardest, part).power();
     double coldVoltage = cold.map(dc -> PartStress.of(dc, part.element()).voltage()).orElse(0.0);
+    double working = Math.max(now.power(), driven(part));
     return new PartDuty(
         part,
         designator,
         now.voltage(),
         now.power(),
+        working,
         voltage,
         Math.max(power, now.power()),
         hardest == null ? LimitShares.IDLE : hardest.name(),
         coldVoltage,
         nearest(part),
-        buy(part, Math.max(now.power(), driven(part)), power, Math.max(voltage, coldVoltage)));
+        buy(part, working, power, Math.max(voltage, coldVoltage)),
+        PartRatings.of(values, part.key()));
   }
 
   private static PartStress stress(State state, Part part) {
@@ -111,6 +123,9 @@ final class PartDuties {
   }
 
   private static Optional<String> buy(Part part, double working, double fault, double highest) {
+    if (PartRoles.isLoad(part) && working > 0 && part.key().startsWith("secondary")) {
+      return Optional.of("takes " + text(working, Unit.WATT) + " at the stated drive");
+    }
     return switch (part.type()) {
       case RESISTOR -> Optional.of(resistor(working, fault, highest));
       case CAPACITOR -> Optional.of(capacitor(RatingToBuy.filmVoltage(highest), highest));

@@ -21,6 +21,7 @@ final class PartFindings {
     for (PartDuty duty : context.answer().parts()) {
       coldStart(context, duty).ifPresent(findings::add);
       notPreferred(context, duty).ifPresent(findings::add);
+      findings.addAll(PartRatingFindings.of(context, duty));
     }
     return findings;
   }
@@ -50,6 +51,7 @@ final class PartFindings {
             .orElse(finding));
   }
 
+  /** A value that nobody sells; what the stage drives, a speaker say, is not chosen by series. */
   private static Optional<Finding> notPreferred(FindingContext context, PartDuty duty) {
     Part part = duty.part();
     PreferredSeries series =
@@ -59,6 +61,7 @@ final class PartFindings {
           default -> null;
         };
     if (series == null
+        || PartRoles.isLoad(part)
         || series.contains(part.value())
         || PreferredSeries.E24.contains(part.value())
         || Math.abs(duty.nearest() / part.value() - 1) < 1e-3) {

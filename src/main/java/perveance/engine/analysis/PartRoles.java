@@ -21,6 +21,11 @@ final class PartRoles {
     return part(model.stage(), element.name()).isPresent();
   }
 
+  /** Whether a part is what the stage drives: a speaker, headphones, the next grid leak. */
+  static boolean isLoad(Part part) {
+    return part.role().equals("load");
+  }
+
   static Optional<Part> part(StageCircuit stage, String element) {
     return stage.parts().stream().filter(p -> p.element().equals(element)).findFirst();
   }

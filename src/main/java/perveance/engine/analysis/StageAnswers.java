@@ -66,7 +66,7 @@ final class StageAnswers {
         bands.map(b -> withBands(clean, b)).orElse(clean),
         driven,
         options.levels() ? levels.ladder(clean.inputPeak(), drive) : List.of(),
-        options.details() ? parts(model, atDrive) : List.of(),
+        options.details() ? parts(model, values, atDrive) : List.of(),
         readings(model, points, bands),
         loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak()))),
         options.details()
@@ -94,12 +94,13 @@ final class StageAnswers {
     return clean.withBands(bands.swingBands());
   }
 
-  private List<PartDuty> parts(StageModel model, Optional<MidbandSolution> driven) {
+  private List<PartDuty> parts(
+      StageModel model, StageValues values, Optional<MidbandSolution> driven) {
     Optional<DcSolution> idle = chassis.dc();
     if (idle.isEmpty()) {
       return List.of();
     }
-    PartDuties duties = new PartDuties(model.stage(), idle.get(), faults, cold);
+    PartDuties duties = new PartDuties(model, values, idle.get(), faults, cold);
     driven.ifPresent(cycle -> duties.addDriven(DrivenLevels.stress(model, cycle)));
     return duties.all(designators);
   }

@@ -105,6 +105,36 @@ public final class DeviceFiles implements DeviceLibrary {
   }
 
   /**
+   * The user's own folder of device files, searched without being named.
+   *
+   * @return {@code .perveance/device-curves} in the home folder; it need not exist
+   */
+  public static Path usualFolder() {
+    return Path.of(System.getProperty("user.home", "."), ".perveance", "device-curves");
+  }
+
+  /**
+   * What is wrong with the user's folders, as in {@link #problems}, and with the files in them. The
+   * program's own files are not looked into for that.
+   *
+   * @return one line each, none when all is well
+   */
+  public synchronized List<String> warnings() {
+    Set<String> lines = new LinkedHashSet<>();
+    for (ShelfIndex shelf : shelves.subList(0, shelves.size() - 1)) {
+      shelf.names().problems().forEach(problem -> lines.add(problem.message()));
+      for (String name : shelf.names().names()) {
+        try {
+          load(name);
+        } catch (BadInputException e) {
+          e.problems().forEach(problem -> lines.add(problem.message()));
+        }
+      }
+    }
+    return List.copyOf(lines);
+  }
+
+  /**
    * What is wrong with the library as a whole: folders and files that cannot be read, names that
    * two files of one folder claim. That a user's file takes a name of the program's own is
    * intended.

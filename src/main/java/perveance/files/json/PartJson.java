@@ -41,6 +41,8 @@ final class PartJson {
     sink.number("cold_V", duty.coldVoltage());
     sink.number("nearest", duty.nearest());
     sink.text("buy", duty.buy());
+    sink.number("rated_W", duty.rated().power());
+    sink.number("rated_V", duty.rated().voltage());
   }
 
   private static void reading(ExpectedReading reading, JsonSink sink) throws IOException {

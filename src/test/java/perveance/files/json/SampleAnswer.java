@@ -25,6 +25,7 @@ import perveance.engine.device.RatingSystem;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
 import perveance.engine.stage.Drawing;
+import perveance.engine.stage.PartRatings;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageCircuit;
 import perveance.engine.stage.StageEntry;
@@ -152,7 +153,18 @@ final class SampleAnswer {
         List.of(driven(0.1), driven(0.5)),
         List.of(
             new PartDuty(
-                part, "R1", 120, 0.144, 300, 0.9, "valve shorted", 300, 100e3, Optional.of("1 W"))),
+                part,
+                "R1",
+                120,
+                0.144,
+                0.144,
+                300,
+                0.9,
+                "valve shorted",
+                300,
+                100e3,
+                Optional.of("1 W"),
+                PartRatings.NONE)),
         List.of(
             new ExpectedReading(
                 1,

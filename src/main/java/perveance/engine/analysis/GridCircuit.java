@@ -8,6 +8,7 @@ import perveance.engine.circuit.DcOutcome;
 import perveance.engine.circuit.DcSolver;
 import perveance.engine.circuit.Element;
 import perveance.engine.circuit.Element.CurrentSource;
+import perveance.engine.circuit.Element.Resistor;
 import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.Element.VoltageSource;
 
@@ -16,10 +17,14 @@ final class GridCircuit {
   /** The grid current that is sent through it, about what a gassy valve draws [A]. */
   private static final double TEST_CURRENT = 1e-6;
 
+  private static final double TIE = 0.01;
+
   private GridCircuit() {}
 
   /**
-   * Resistance from grid to cathode with the valves taken as cold and all sources dead.
+   * Resistance from grid to cathode with the valves taken as cold and all sources dead. The cathode
+   * is tied to chassis: a diode or a valve below it holds it there in use, and lets nothing through
+   * when cold; what a cathode resistor adds to a grid leak is too little to count.
    *
    * @param circuit whole circuit
    * @param ref valve
@@ -33,6 +38,9 @@ final class GridCircuit {
     }
     elements.add(
         new CurrentSource(ref + ".grid_test", valve.cathode(), valve.grid(), TEST_CURRENT));
+    if (valve.cathode() != 0) {
+      elements.add(new Resistor(ref + ".cathode_test", valve.cathode(), 0, TIE));
+    }
     return new DcSolver(new Circuit(circuit.nodes(), elements)).solve()
             instanceof DcOutcome.Converged solved
         ? OptionalDouble.of(

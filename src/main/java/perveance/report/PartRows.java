@@ -11,7 +11,7 @@ import perveance.engine.stage.StageCircuit;
 
 /** The parts list: value, rating to buy, what it stands. */
 final class PartRows {
-  private static final double[] SHARES = {0.09, 0.15, 0.36, 0.40};
+  private static final double[] SHARES = {0.09, 0.175, 0.345, 0.39};
 
   private PartRows() {}
 

@@ -15,6 +15,9 @@ final class ReadingRows {
   private static final double[] SHARES = {0.05, 0.21, 0.16, 0.11, 0.145, 0.145, 0.18};
   private static final double ROW = 23.5;
 
+  /** A limit is left out above this multiple of the highest voltage [1]. */
+  private static final double UNREACHABLE = 1.5;
+
   private final Typeface faces;
   private final SheetOptions options;
   private final ChassisAnswer chassis;
@@ -90,12 +93,19 @@ final class ReadingRows {
               Integer.toString(r.testPoint()),
               where,
               Figures.meterRange(r.low(), r.high()),
-              r.stop().isPresent()
-                  ? "\u2265 " + Figures.reading(r.stop().getAsDouble(), Unit.VOLT)
-                  : "record only"));
+              stop(r)));
     }
     rows.addAll(new OtherPoints(options, chassis, stage).rows().stream().map(this::row).toList());
     return rows;
+  }
+
+  /** The limit as a reading; one far above every voltage in the chassis stops nobody. */
+  private String stop(ExpectedReading reading) {
+    return reading.stop().stream()
+        .filter(v -> v < UNREACHABLE * chassis.highestVoltage())
+        .mapToObj(v -> "\u2265 " + Figures.reading(v, Unit.VOLT))
+        .findFirst()
+        .orElse("record only");
   }
 
   private Block row(OtherPoints.Point point) {

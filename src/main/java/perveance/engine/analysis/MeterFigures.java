@@ -105,7 +105,8 @@ final class MeterFigures {
   }
 
   /**
-   * Cathode volts at which the current reaches a limit, where a resistor turns one into the other.
+   * Cathode volts at which the current of every valve on the resistor reaches a limit, where a
+   * resistor turns one into the other.
    */
   private static OptionalDouble cathodeStop(Ratings r, DevicePoint point, StageModel model) {
     int cathode = model.valve(point.ref()).cathode();
@@ -114,11 +115,17 @@ final class MeterFigures {
       return OptionalDouble.empty();
     }
     double current = r.cathodeCurrent().orElse(Double.POSITIVE_INFINITY);
-    if (r.anodeDissipation().isPresent()) {
-      current = Math.min(current, r.anodeDissipation().getAsDouble() / point.anode());
+    if (r.anodeDissipation().isPresent() && point.anodeCurrent() > 0) {
+      double screenShare = point.screenCurrent().orElse(0) / point.anodeCurrent();
+      double anodeCurrent = r.anodeDissipation().getAsDouble() / point.anode();
+      current = Math.min(current, anodeCurrent * (1 + screenShare));
     }
+    long sharing =
+        model.stage().devices().stream()
+            .filter(d -> model.valve(d.ref()).cathode() == cathode)
+            .count();
     return Double.isFinite(current)
-        ? OptionalDouble.of(current * resistance.getAsDouble())
+        ? OptionalDouble.of(sharing * current * resistance.getAsDouble())
         : OptionalDouble.empty();
   }
 }

@@ -1,9 +1,8 @@
 package perveance.engine.stage;
 
-import java.util.ArrayList;
-import java.util.LinkedHashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Set;
+import java.util.Map;
 
 /**
  * Puts the keys of the parts of a stage into one list, each key once, in the order of the parts,
@@ -13,9 +12,14 @@ final class KeyList {
   private KeyList() {}
 
   static List<KeySpec> of(List<List<KeySpec>> groups) {
-    Set<KeySpec> keys = new LinkedHashSet<>();
-    groups.forEach(keys::addAll);
-    keys.addAll(PartRatings.keys(new ArrayList<>(keys)));
-    return List.copyOf(keys);
+    // by name: hashing a record sets up its methods at run time, which a cold start feels
+    Map<String, KeySpec> keys = new LinkedHashMap<>();
+    groups.forEach(group -> add(keys, group));
+    add(keys, PartRatings.keys(List.copyOf(keys.values())));
+    return List.copyOf(keys.values());
+  }
+
+  private static void add(Map<String, KeySpec> keys, List<KeySpec> group) {
+    group.forEach(spec -> keys.putIfAbsent(spec.key(), spec));
   }
 }

@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import perveance.engine.base.Unit;
 import perveance.engine.stage.KeySpec.Form;
 
@@ -24,27 +26,29 @@ public record PartRatings(OptionalDouble power, OptionalDouble voltage) {
   private static final String VOLTAGE = "_voltage";
 
   /** What is no part of the stage, or no resistor or capacitor to buy. */
-  private static final Set<KeySpec> NO_PARTS =
-      Set.of(
-          StageKeys.SOURCE,
-          StageKeys.LOAD,
-          StageKeys.LOAD2,
-          StageKeys.LOAD_CAPACITANCE,
-          StageKeys.PRIMARY,
-          StageKeys.WINDING_RESISTANCE,
-          StageKeys.CHOKE_RESISTANCE,
-          StageKeys.SECONDARY_RESISTANCE,
-          StageKeys.SECONDARY_LOAD,
-          StageKeys.CURRENT_SOURCE_RESISTANCE,
-          StageKeys.STRAY_GRID_ANODE,
-          StageKeys.STRAY_GRID,
-          StageKeys.STRAY_ANODE);
+  private static final Set<String> NO_PARTS =
+      Stream.of(
+              StageKeys.SOURCE,
+              StageKeys.LOAD,
+              StageKeys.LOAD2,
+              StageKeys.LOAD_CAPACITANCE,
+              StageKeys.PRIMARY,
+              StageKeys.WINDING_RESISTANCE,
+              StageKeys.CHOKE_RESISTANCE,
+              StageKeys.SECONDARY_RESISTANCE,
+              StageKeys.SECONDARY_LOAD,
+              StageKeys.CURRENT_SOURCE_RESISTANCE,
+              StageKeys.STRAY_GRID_ANODE,
+              StageKeys.STRAY_GRID,
+              StageKeys.STRAY_ANODE)
+          .map(KeySpec::key)
+          .collect(Collectors.toUnmodifiableSet());
 
   /** The keys for the ratings of all parts among some keys. */
   static List<KeySpec> keys(List<KeySpec> parts) {
     List<KeySpec> ratings = new ArrayList<>();
     for (KeySpec part : parts) {
-      boolean bought = part.form() == Form.QUANTITY && !NO_PARTS.contains(part);
+      boolean bought = part.form() == Form.QUANTITY && !NO_PARTS.contains(part.key());
       String name = part.key().replace('_', ' ');
       if (bought && part.unit() == Unit.OHM) {
         ratings.add(

@@ -100,6 +100,8 @@ public final class ConditionsForm {
       }
     }
     return bench.edit(
-        new Edit.SetConditions(new Conditions(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7])));
+        new Edit.SetConditions(
+            new Conditions(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7])
+                .with(bench.chassis().conditions().heaters())));
   }
 }

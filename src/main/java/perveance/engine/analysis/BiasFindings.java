@@ -17,6 +17,9 @@ final class BiasFindings {
   /** Below this a receiving valve is as good as cut off [A]. */
   private static final double CUT_OFF = 20e-6;
 
+  /** Published points end well above this; common practice to mark what lies below [A]. */
+  private static final double LOW = 100e-6;
+
   /** Grid current that counts, the makers' criterion [A]. */
   private static final double GRID_CURRENT = 0.3e-6;
 
@@ -46,6 +49,7 @@ final class BiasFindings {
     BiasFindings all = new BiasFindings(context);
     for (DevicePoint point : context.answer().points()) {
       all.cutOff(point);
+      all.lowCurrent(point);
       all.gridCurrent(point);
       all.spread(point);
       all.coldGrid(point);
@@ -75,6 +79,25 @@ final class BiasFindings {
         finding,
         point,
         context.remedies().smallest(biasParts(), v -> current(v, point.ref()) > 5 * CUT_OFF));
+  }
+
+  private void lowCurrent(DevicePoint point) {
+    if (point.anodeCurrent() < CUT_OFF || point.anodeCurrent() >= LOW) {
+      return;
+    }
+    Finding finding =
+        Finding.of(
+                BiasMessage.LOW_CURRENT,
+                Severity.NOTE,
+                context.ref(),
+                point.ref(),
+                Words.of(point.anodeCurrent(), Unit.AMPERE),
+                Words.of(LOW, Unit.AMPERE))
+            .withValue(point.anodeCurrent(), LOW, Unit.AMPERE);
+    add(
+        finding,
+        point,
+        context.remedies().smallest(biasParts(), v -> current(v, point.ref()) >= LOW));
   }
 
   private static double current(Variant variant, String ref) {

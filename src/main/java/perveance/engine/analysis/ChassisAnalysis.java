@@ -62,6 +62,7 @@ public final class ChassisAnalysis {
     List<Finding> findings = new ArrayList<>();
     if (options.details()) {
       findings.addAll(new ChassisFindings(model).all(discharges));
+      dc.ifPresent(idle -> findings.addAll(answers.drain().findings(model, idle)));
     }
     stages.forEach(s -> findings.addAll(s.findings()));
     progress.report(1, "done");
@@ -84,13 +85,16 @@ public final class ChassisAnalysis {
             stage,
             model.circuits().values(answer.ref()),
             model.chassis().conditions(),
+            InputCapacitor.of(model.chassis(), answer.ref()),
             cold,
             new ChassisRetry(model, devices));
     List<Finding> findings = new ArrayList<>();
     findings.addAll(RatingFindings.of(context));
     findings.addAll(BiasFindings.of(context));
+    findings.addAll(GridFindings.of(context));
     findings.addAll(SwingFindings.of(context));
     findings.addAll(OutputFindings.of(context));
+    findings.addAll(OutputLoadFindings.of(context));
     findings.addAll(ResponseFindings.of(context));
     findings.addAll(PartFindings.of(context));
     findings.addAll(DataFindings.of(context));

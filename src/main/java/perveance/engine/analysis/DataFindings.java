@@ -11,7 +11,10 @@ import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.base.Unit;
+import perveance.engine.device.Device;
+import perveance.engine.device.Evidence;
 import perveance.engine.device.FitSummary;
+import perveance.engine.device.LawParameter;
 import perveance.engine.stage.StageCircuit.Part;
 import perveance.engine.stage.StageCircuit.StageDevice;
 
@@ -38,7 +41,11 @@ final class DataFindings {
     context.answer().circuit().devices().stream()
         .map(StageDevice::device)
         .distinct()
-        .forEach(d -> all.fit(d.type(), d.fit()));
+        .forEach(
+            d -> {
+              all.fit(d.type(), d.fit());
+              all.spreadOfGrid(d);
+            });
     context.answer().points().stream().findFirst().ifPresent(all::cause);
     return all.findings;
   }
@@ -68,6 +75,22 @@ final class DataFindings {
                   type,
                   Words.percent(fit.worstError()))
               .withValue(fit.worstError(), LOOSE, Unit.RATIO));
+    }
+  }
+
+  /** With one published point nothing tells how uneven the grid is; its class does. */
+  private void spreadOfGrid(Device device) {
+    List<Evidence> fitted = device.evidence().stream().filter(Evidence::fit).toList();
+    Optional<LawParameter> spread =
+        device.law().parameters().stream().filter(p -> p.key().equals("spread")).findFirst();
+    if (fitted.size() == 1 && spread.isPresent()) {
+      findings.add(
+          Finding.of(
+              DataMessage.SPREAD_ASSUMED,
+              Severity.NOTE,
+              context.ref(),
+              device.type(),
+              Words.roughly(spread.get().value(), Unit.RATIO)));
     }
   }
 

@@ -4,6 +4,7 @@ package perveance.engine.analysis;
  * Stored charge of one capacitor that can hurt.
  *
  * @param where supply node or part
+ * @param element name of the capacitor in the circuit, such as {@code supply.A.reservoir}
  * @param capacitance [F]
  * @param voltage worst at switch-off, cold or unloaded [V]
  * @param energy stored [J]
@@ -14,6 +15,7 @@ package perveance.engine.analysis;
  */
 public record Discharge(
     String where,
+    String element,
     double capacitance,
     double voltage,
     double energy,

@@ -103,6 +103,7 @@ final class Discharges {
     double together = drained ? capacitanceAlong(capacitor) : capacitor.capacitance();
     return new Discharge(
         place(capacitor.name()),
+        capacitor.name(),
         capacitor.capacitance(),
         voltage,
         0.5 * capacitor.capacitance() * voltage * voltage,

@@ -3,6 +3,7 @@ package perveance.engine.analysis;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import perveance.engine.circuit.Circuit;
 import perveance.engine.circuit.DcOutcome;
 import perveance.engine.circuit.DcSolution;
@@ -33,12 +34,12 @@ final class FaultCircuits {
     return solve(elements);
   }
 
-  /** One valve out of its socket, the others hot. */
-  Optional<DcSolution> pulled(String ref) {
+  /** The sections of one valve out of its socket, the others hot. */
+  Optional<DcSolution> pulled(Set<String> refs) {
     List<Element> elements = new ArrayList<>();
     for (Element element : circuit.elements()) {
       elements.add(
-          element instanceof Valve valve && valve.name().equals(ref) ? cold(valve) : element);
+          element instanceof Valve valve && refs.contains(valve.name()) ? cold(valve) : element);
     }
     return solve(elements);
   }

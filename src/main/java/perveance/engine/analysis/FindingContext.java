@@ -13,6 +13,7 @@ import perveance.engine.stage.StageValues;
  * @param model the solved stage
  * @param values what the stage states
  * @param conditions what the chassis states
+ * @param inputCapacitor capacitor through which the stage is driven, where one is stated
  * @param cold the whole chassis with cold valves
  * @param retry works the stage out again with changed keys
  */
@@ -21,6 +22,7 @@ record FindingContext(
     StageModel model,
     StageValues values,
     Conditions conditions,
+    Optional<InputCapacitor> inputCapacitor,
     Optional<DcSolution> cold,
     Retry retry) {
   Remedies remedies() {

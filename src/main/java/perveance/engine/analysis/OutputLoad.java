@@ -66,6 +66,14 @@ final class OutputLoad {
         : OptionalDouble.empty();
   }
 
+  /** Power of a sine of a given peak in what takes the output power; empty without one [W]. */
+  static OptionalDouble cleanPower(StageModel model, double peak) {
+    OptionalDouble taker = powerTaker(model, model.mainOutput());
+    return taker.isPresent()
+        ? OptionalDouble.of(0.5 * peak * peak / taker.getAsDouble())
+        : OptionalDouble.empty();
+  }
+
   /** Mid-band resistance of an output with its load lifted off [ohm]. */
   static double sourceResistance(StageModel model, SmallSignal signal, Output output) {
     double loaded = signal.midbandOutputResistance(output.plus(), output.minus());

@@ -21,6 +21,7 @@ final class StageAnswers {
   private final Optional<ChassisSpread> spread;
   private final AnalysisOptions options;
   private final Designators designators = new Designators();
+  private final SupplyDrain drain = new SupplyDrain();
   private final Optional<MeterFigures> meters;
 
   StageAnswers(
@@ -51,6 +52,7 @@ final class StageAnswers {
     DrivenLevels levels = new DrivenLevels(model);
     Optional<MidbandSolution> atDrive =
         drive.isPresent() ? levels.cycle(drive.getAsDouble()) : Optional.empty();
+    atDrive.ifPresent(cycle -> drain.add(model, cycle));
     Optional<DrivenAnswer> driven =
         atDrive.map(c -> new DrivenFigures(model, c).answer(drive.getAsDouble()));
     SmallSignalAnswer small =
@@ -74,6 +76,11 @@ final class StageAnswers {
             : List.of(),
         model.stage().assumptions(),
         List.of());
+  }
+
+  /** What the stages answered so far take at their drives beyond idle. */
+  SupplyDrain drain() {
+    return drain;
   }
 
   private static List<DevicePoint> withBands(

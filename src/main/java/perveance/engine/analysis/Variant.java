@@ -56,6 +56,11 @@ final class Variant {
     return clean.get();
   }
 
+  /** Power into the load at the clean output, zero for a stage that gives none [W]. */
+  double cleanPower() {
+    return OutputLoad.cleanPower(model, clean().outputPeak()).orElse(0);
+  }
+
   SmallSignalAnswer small() {
     if (small.isEmpty()) {
       small = Optional.of(new SmallSignalFigures(model).answer(false));

@@ -34,6 +34,11 @@ final class Words {
     return name.replace('.', ' ');
   }
 
+  /** The start of a sentence. */
+  static String start(String text) {
+    return text.substring(0, 1).toUpperCase(java.util.Locale.ROOT) + text.substring(1);
+  }
+
   /** A time as a person would say it. */
   static String time(double seconds) {
     if (seconds < 120) {

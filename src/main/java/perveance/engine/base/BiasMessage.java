@@ -6,7 +6,7 @@ public enum BiasMessage implements MessageCode {
   GRID_CURRENT_IDLE("{0} draws grid current at idle: {1} at {2} on the grid."),
   ANODE_NEAR_SUPPLY("{0} idles with the anode at {1}, close to its supply of {2}."),
   ANODE_BOTTOMED("{0} idles bottomed: only {1} from anode to cathode."),
-  LOW_CURRENT("{0} idles at {1}, below {2}: the published data say little there."),
+  LOW_CURRENT("{0} idles at {1}; below {2} the law, and so the gain, is less certain."),
   GRID_LEAK_VOLTAGE("{0}: grid current through {1} moves the grid by {2}."),
   COLD_START_GRID("{0}: before the valves warm its grid stands {1} above its cathode."),
   FIXED_BIAS_SPREAD("{0}: idle current may lie anywhere from {1} to {2}; set it by measurement.");

@@ -3,11 +3,11 @@ package perveance.engine.base;
 /** Findings about how far the answer can be trusted. */
 public enum DataMessage implements MessageCode {
   OUTSIDE_EVIDENCE("{0} works outside its published data: {1}."),
-  SPREAD_ASSUMED("{0}: one published point only; the grid's spread is the usual value of {1}."),
+  SPREAD_ASSUMED(
+      "{0}: one published point only; the spread of its grid is the usual one of its class, {1}."),
   BAND_CAUSE("{0}: {1} of the doubt in the {2} comes from {3}; measured, the band is {4}."),
   FIT_LOOSE("{0}: the law misses its published data by up to {1}."),
-  NOT_SOLVED("{0}: no operating point was found: {1}."),
-  ASSUMED("{0}: {1} is not stated; assumed {2}.");
+  NOT_SOLVED("{0}: no operating point was found: {1}.");
 
   private final String template;
 

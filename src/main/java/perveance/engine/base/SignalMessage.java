@@ -14,7 +14,9 @@ public enum SignalMessage implements MessageCode {
   LOW_CORNER_HIGH("{0}: the low corner is {1}."),
   HIGH_CORNER_LOW("{0}: the high corner is {1}, set by {2} and the input capacitance of {3}."),
   BYPASS_SHELF("{0}: below {1} the gain falls by {2} because {3} stops bypassing."),
-  BLOCKING("{0}: after overload the bias takes {1} to recover."),
+  BLOCKING("{0}: twice the clean input charges {1} by {2}; the bias then takes {3} to recover."),
+  DRIVER_THIN("{0} has only {1} in hand over what drives {2} to its limit."),
+  DRIVER_SHORT("{0} overloads before {1} does: it gives {2} peak where {1} takes {3}."),
   HIGH_NOISE("{0}: noise at the input is {1}, most of it from {2}.");
 
   private final String template;

@@ -2,6 +2,7 @@ package perveance.files.chassis;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
 import perveance.files.toml.SourceText;
@@ -54,11 +55,11 @@ public final class ChassisWriter {
     Optional<TomlTable> table = editor.root().table("conditions");
     var added = new java.util.LinkedHashMap<String, String>();
     for (ConditionKey key : ConditionKey.values()) {
-      double value = key.of(after);
+      OptionalDouble value = key.of(after);
       boolean there = table.isPresent() && table.get().find(key.key()).isPresent();
-      double silent = there ? key.of(before) : key.usual(after);
-      if (value != silent) {
-        added.put(key.key(), SupplyText.quantity(value, key.range().unit()));
+      OptionalDouble silent = there ? key.of(before) : key.usual(after);
+      if (value.isPresent() && !value.equals(silent)) {
+        added.put(key.key(), SupplyText.quantity(value.getAsDouble(), key.range().unit()));
       }
     }
     if (table.isPresent()) {

@@ -2,6 +2,7 @@ package perveance.files.chassis;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import perveance.engine.base.Unit;
 import perveance.engine.stage.Conditions;
 import perveance.files.toml.Range;
@@ -15,7 +16,10 @@ enum ConditionKey {
   RESISTOR_TOLERANCE("resistor_tolerance", new Range(Unit.RATIO, 0, 0.5)),
   CAPACITOR_TOLERANCE("capacitor_tolerance", new Range(Unit.RATIO, 0, 1)),
   SUPPLY_TOLERANCE("supply_tolerance", new Range(Unit.RATIO, 0, 0.5)),
-  THRESHOLD("threshold", new Range(Unit.VOLT, 1, 1000));
+  THRESHOLD("threshold", new Range(Unit.VOLT, 1, 1000)),
+  HEATER_VOLTAGE("heater_voltage", new Range(Unit.VOLT, 1, 150)),
+  HEATER_WINDING("heater_winding", new Range(Unit.AMPERE, 0.01, 1000)),
+  HEATER_OTHER("heater_other", new Range(Unit.AMPERE, 0, 1000));
 
   private final String key;
   private final Range range;
@@ -41,7 +45,14 @@ enum ConditionKey {
     return order;
   }
 
-  double of(Conditions conditions) {
+  /** What conditions say under the key; empty where they say nothing. */
+  OptionalDouble of(Conditions conditions) {
+    return this == HEATER_WINDING
+        ? conditions.heaters().winding()
+        : OptionalDouble.of(number(conditions));
+  }
+
+  private double number(Conditions conditions) {
     return switch (this) {
       case MAINS -> conditions.mains();
       case MAINS_ACTUAL -> conditions.mainsActual();
@@ -51,11 +62,14 @@ enum ConditionKey {
       case CAPACITOR_TOLERANCE -> conditions.capacitorTolerance();
       case SUPPLY_TOLERANCE -> conditions.supplyTolerance();
       case THRESHOLD -> conditions.threshold();
+      case HEATER_VOLTAGE -> conditions.heaters().voltage();
+      case HEATER_WINDING -> conditions.heaters().winding().orElse(0);
+      case HEATER_OTHER -> conditions.heaters().other();
     };
   }
 
   /** What is taken where the file is silent; mains is as nominal unless measured. */
-  double usual(Conditions stated) {
-    return this == MAINS_ACTUAL ? stated.mains() : of(Conditions.USUAL);
+  OptionalDouble usual(Conditions stated) {
+    return this == MAINS_ACTUAL ? OptionalDouble.of(stated.mains()) : of(Conditions.USUAL);
   }
 }

@@ -1,6 +1,7 @@
 package perveance.files.chassis;
 
 import perveance.engine.stage.Conditions;
+import perveance.engine.stage.HeaterSupply;
 import perveance.files.toml.StrictTable;
 
 /** Reads the table of conditions. */
@@ -20,12 +21,21 @@ final class ConditionsReader {
             value(table, ConditionKey.RESISTOR_TOLERANCE),
             value(table, ConditionKey.CAPACITOR_TOLERANCE),
             value(table, ConditionKey.SUPPLY_TOLERANCE),
-            value(table, ConditionKey.THRESHOLD));
+            value(table, ConditionKey.THRESHOLD),
+            heaters(table));
     table.refuseOthers();
     return conditions;
   }
 
+  private static HeaterSupply heaters(StrictTable table) {
+    ConditionKey winding = ConditionKey.HEATER_WINDING;
+    return new HeaterSupply(
+        value(table, ConditionKey.HEATER_VOLTAGE),
+        table.quantity(winding.key(), winding.range()),
+        value(table, ConditionKey.HEATER_OTHER));
+  }
+
   private static double value(StrictTable table, ConditionKey key) {
-    return table.quantity(key.key(), key.range()).orElse(key.of(Conditions.USUAL));
+    return table.quantity(key.key(), key.range()).orElse(key.of(Conditions.USUAL).orElseThrow());
   }
 }

@@ -26,7 +26,7 @@ class FindingsTest {
   @Test
   void sortsWorstFirstAndKeepsTheOrderWithin() {
     Finding danger =
-        Finding.of(HazardMessage.LETHAL_VOLTAGE, Severity.DANGER, "A", "Supply A", "300 V");
+        Finding.of(HazardMessage.NO_DISCHARGE_PATH, Severity.DANGER, "A", "Supply A", "300 V");
     Finding over = resistor(Severity.OVER_LIMIT, "V1b", 0.7);
     List<Finding> sorted = Findings.worstFirst(List.of(note("V1a"), over, note("V1b"), danger));
     assertEquals(List.of(danger, over, note("V1a"), note("V1b")), sorted);

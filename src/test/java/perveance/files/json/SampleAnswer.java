@@ -233,7 +233,8 @@ final class SampleAnswer {
         List.of(new ChassisAnswer.Failure("V3", "no operating point")),
         List.of(
             new Discharge(
-                "A",
+                "supply A",
+                "supply.A.reservoir",
                 22e-6,
                 330,
                 1.2,

@@ -18,6 +18,7 @@ import picocli.CommandLine.Spec;
       SheetCommand.class,
       CurvesCommand.class,
       FitCommand.class,
+      GeometryCommand.class,
       DesktopCommand.class,
       ExampleCommand.class,
       CompletionCommand.class

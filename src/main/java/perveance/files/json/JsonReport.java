@@ -29,12 +29,17 @@ public final class JsonReport {
    * @throws IOException when it cannot be written
    */
   public static void write(ChassisAnswer answer, OutputStream out) throws IOException {
+    write(out, sink -> write(answer, sink));
+  }
+
+  /** Writes one object in UTF-8 with a line end behind it. */
+  static void write(OutputStream out, JsonSink.MembersOf<JsonSink> members) throws IOException {
     DefaultIndenter indent = new DefaultIndenter("  ", "\n");
     try (JsonGenerator generator = new JsonFactory().createGenerator(out)) {
       generator.disable(JsonGenerator.Feature.AUTO_CLOSE_TARGET);
       generator.setPrettyPrinter(new DefaultPrettyPrinter().withObjectIndenter(indent));
       JsonSink sink = new JsonSink(generator);
-      sink.root(() -> write(answer, sink));
+      sink.root(() -> members.write(sink));
       generator.writeRaw('\n');
     }
   }

@@ -2,6 +2,7 @@ package perveance.cli;
 
 import java.util.ArrayList;
 import java.util.List;
+import perveance.app.wording.ChainFigures;
 import perveance.app.wording.FigureRow;
 import perveance.app.wording.Figures;
 import perveance.app.wording.FindingLine;
@@ -14,6 +15,7 @@ import perveance.app.wording.Vocabulary;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.HandSum;
 import perveance.engine.analysis.PartDuty;
+import perveance.engine.analysis.SignalChain;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.analysis.SupplyAnswer;
 import perveance.engine.base.Finding;
@@ -45,6 +47,7 @@ final class TerminalReport {
     findings(answer.findings());
     answer.failures().forEach(f -> lines.add(f.ref() + " not solved: " + f.reason()));
     answer.stages().forEach(this::stage);
+    answer.chains().forEach(this::chain);
     supplies(answer);
     lines.add("");
     for (String line :
@@ -134,6 +137,17 @@ final class TerminalReport {
     }
     lines.addAll(table.lines());
     stage.assumptions().forEach(a -> lines.addAll(TextTable.wrap("  " + say(a), WIDTH)));
+  }
+
+  private void chain(SignalChain chain) {
+    lines.add("");
+    lines.add(ansi.bold("Signal path"));
+    lines.addAll(TextTable.wrap("  " + say(ChainFigures.sentence(chain)), WIDTH));
+    TextTable table = new TextTable(2, WIDTH);
+    for (FigureRow row : ChainFigures.rows(chain)) {
+      table.row(row.label(), row.value(), row.band(), row.note());
+    }
+    lines.addAll(table.lines());
   }
 
   private void supplies(ChassisAnswer answer) {

@@ -35,6 +35,7 @@ record GridLeakWarner(Engine engine) implements Engine {
         a.failures(),
         a.discharges(),
         a.highestVoltage(),
+        a.chains(),
         findings);
   }
 

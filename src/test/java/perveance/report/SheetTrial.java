@@ -36,6 +36,7 @@ final class SheetTrial {
         answer.failures(),
         answer.discharges(),
         answer.highestVoltage(),
+        answer.chains(),
         answer.findings());
   }
 

@@ -45,7 +45,8 @@ public final class FindingLines {
   private static FindingLine line(Kind kind, List<Told> group) {
     TreeSet<String> places = new TreeSet<>();
     group.forEach(t -> places.add(t.where));
-    List<String> others = group.stream().skip(1).map(t -> t.name).distinct().toList();
+    List<String> others =
+        group.stream().skip(1).map(t -> t.name).filter(n -> !n.isEmpty()).distinct().toList();
     String text = group.get(0).name + kind.rest;
     return new FindingLine(
         kind.severity,

@@ -158,7 +158,7 @@ public final class StageFigures {
     boolean only =
         answer.points().size() == 1 && answer.points().get(0).ref().equals(clean.limitedAt());
     return "ended by "
-        + clean.limitedBy().word().replace('-', ' ')
+        + clean.limitedBy().told()
         + (only || clean.limitedAt().isEmpty() ? "" : " at " + clean.limitedAt());
   }
 
@@ -175,5 +175,15 @@ public final class StageFigures {
             ? ""
             : ", third " + Figures.percent(driven.harmonics().get(1));
     rows.add(new FigureRow("distortion", Figures.percent(driven.distortion()), "", second + third));
+    driven
+        .intermodulation()
+        .ifPresent(
+            i ->
+                rows.add(
+                    new FigureRow(
+                        "intermodulation",
+                        Figures.percent(i.smpte()),
+                        "",
+                        "SMPTE 4 to 1; CCIF " + Figures.percent(i.ccif()))));
   }
 }

@@ -86,7 +86,7 @@ final class FootBar extends HBox {
             "clean to "
                 + Figures.reading(clean.inputPeak(), Unit.VOLT)
                 + ", then "
-                + clean.limitedBy().word().replace('-', ' ')));
+                + clean.limitedBy().told()));
     output.setText(
         driven.map(d -> Figures.reading(d.output(), Unit.VOLT) + " rms").orElse("\u2013"));
     power.setText(
@@ -101,7 +101,7 @@ final class FootBar extends HBox {
         clean.headroom().isPresent()
             ? QuantityFormat.TYPESET.level(clean.headroom().getAsDouble(), 1)
             : "\u2013");
-    headroomNote.setText("to " + clean.limitedBy().word().replace('-', ' '));
+    headroomNote.setText("to " + clean.limitedBy().told());
   }
 
   private static String harmonics(DrivenAnswer driven) {

@@ -113,6 +113,7 @@ final class Nearby {
         near.failures(),
         last.discharges(),
         Math.max(last.highestVoltage(), near.highestVoltage()),
+        last.chains(),
         last.findings());
   }
 

@@ -59,10 +59,12 @@ public final class ChassisAnalysis {
     }
     List<Discharge> discharges = dc.map(p -> discharges(model, p, cold)).orElse(List.of());
     HighestVoltage highest = HighestVoltage.of(model, cold);
+    List<SignalChain> chains = SignalChains.of(chassis, stages);
     List<Finding> findings = new ArrayList<>();
     if (options.details()) {
       findings.addAll(new ChassisFindings(model).all(discharges));
       dc.ifPresent(idle -> findings.addAll(answers.drain().findings(model, idle)));
+      findings.addAll(ChainFindings.of(chains, stages));
     }
     stages.forEach(s -> findings.addAll(s.findings()));
     progress.report(1, "done");
@@ -74,6 +76,7 @@ public final class ChassisAnalysis {
         model.failures(),
         discharges,
         highest.voltage(),
+        chains,
         Findings.worstFirst(findings));
   }
 

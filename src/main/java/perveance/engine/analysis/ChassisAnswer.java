@@ -14,6 +14,7 @@ import perveance.engine.stage.Chassis;
  * @param failures stages that could not be solved and why
  * @param discharges stored charge, largest energy first
  * @param highestVoltage highest voltage to chassis anywhere, cold start included [V]
+ * @param chains stages in a row, with their levels and which of them overloads first
  * @param findings of the whole chassis, worst first, those of its stages included
  */
 public record ChassisAnswer(
@@ -23,6 +24,7 @@ public record ChassisAnswer(
     List<Failure> failures,
     List<Discharge> discharges,
     double highestVoltage,
+    List<SignalChain> chains,
     List<Finding> findings) {
   /** Copies the lists. */
   public ChassisAnswer {
@@ -30,6 +32,7 @@ public record ChassisAnswer(
     stages = List.copyOf(stages);
     failures = List.copyOf(failures);
     discharges = List.copyOf(discharges);
+    chains = List.copyOf(chains);
     findings = List.copyOf(findings);
   }
 

@@ -66,24 +66,35 @@ public record CleanSwing(
   /** What ends a swing. */
   public enum Limit {
     /** Grid current begins. */
-    GRID_CURRENT("grid-current"),
+    GRID_CURRENT("grid-current", "grid current"),
     /** The valve cuts off. */
-    CUT_OFF("cut-off"),
+    CUT_OFF("cut-off", "cut-off"),
     /** The anode of a pentode or beam tetrode reaches the knee. */
-    KNEE("knee"),
+    KNEE("knee", "the knee"),
     /** The anode of a triode has no voltage left to fall. */
-    BOTTOMING("bottoming"),
+    BOTTOMING("bottoming", "bottoming"),
     /** Nothing within the range tried. */
-    NONE("none");
+    NONE("none", "nothing found");
 
     private final String word;
+    private final String told;
 
-    Limit(String word) {
+    Limit(String word, String told) {
       this.word = word;
+      this.told = told;
     }
 
     /**
-     * Word used in reports and files.
+     * What ends the swing, in a sentence behind "by".
+     *
+     * @return for example {@code the knee}
+     */
+    public String told() {
+      return told;
+    }
+
+    /**
+     * Word used in files.
      *
      * @return for example {@code grid-current}
      */

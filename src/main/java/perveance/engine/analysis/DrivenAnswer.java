@@ -1,6 +1,7 @@
 package perveance.engine.analysis;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /**
@@ -16,6 +17,7 @@ import java.util.OptionalDouble;
  * @param anodeDissipation mean, of each section in order [W]
  * @param screenDissipation mean, of each section in order, empty for triodes [W]
  * @param peakAnodeCurrent largest anode current of any section [A]
+ * @param intermodulation of two tones at this level, empty where not worked out
  * @param gridCurrentFlows whether grid current beyond its onset flows in the cycle
  */
 public record DrivenAnswer(
@@ -29,11 +31,34 @@ public record DrivenAnswer(
     List<Double> anodeDissipation,
     List<Double> screenDissipation,
     double peakAnodeCurrent,
+    Optional<Intermodulation> intermodulation,
     boolean gridCurrentFlows) {
   /** Copies the lists. */
   public DrivenAnswer {
     harmonics = List.copyOf(harmonics);
     anodeDissipation = List.copyOf(anodeDissipation);
     screenDissipation = List.copyOf(screenDissipation);
+  }
+
+  /**
+   * The same with what two tones make at this level.
+   *
+   * @param twoTones of two tones, empty where not worked out
+   * @return the changed answer
+   */
+  public DrivenAnswer with(Optional<Intermodulation> twoTones) {
+    return new DrivenAnswer(
+        inputPeak,
+        output,
+        power,
+        distortion,
+        harmonics,
+        meanAnodeCurrent,
+        meanScreenCurrent,
+        anodeDissipation,
+        screenDissipation,
+        peakAnodeCurrent,
+        twoTones,
+        gridCurrentFlows);
   }
 }

@@ -3,6 +3,7 @@ package perveance.engine.analysis;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.MidbandSolution;
@@ -53,6 +54,7 @@ final class DrivenFigures {
         meanPower(valves(), ElectrodeCurrents.ANODE),
         meanPower(screened, ElectrodeCurrents.SCREEN),
         peakCurrent(),
+        Optional.empty(),
         gridCurrent());
   }
 

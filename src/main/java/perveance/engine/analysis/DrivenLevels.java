@@ -24,6 +24,9 @@ final class DrivenLevels {
     0.1, 0.15, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.8, 0.9, 1.0, 1.2, 1.4
   };
 
+  /** Levels of the ladder at which two tones are tried as well, relative to the same [1]. */
+  private static final List<Double> TWO_TONES = List.of(0.2, 0.5, 1.0);
+
   private static final Waveform SINE = Waveform.cosine(64);
 
   private final StageModel model;
@@ -50,7 +53,7 @@ final class DrivenLevels {
     return cycle(peak).map(c -> new DrivenFigures(model, c).answer(peak));
   }
 
-  /** The ladder of levels, the stated drive among them, rising. */
+  /** The ladder of levels, the stated drive among them, rising; some with two tones. */
   List<DrivenAnswer> ladder(double clean, OptionalDouble drive) {
     List<Double> peaks = new ArrayList<>();
     for (double step : LADDER) {
@@ -58,9 +61,11 @@ final class DrivenLevels {
     }
     drive.ifPresent(peaks::add);
     peaks.sort(Comparator.naturalOrder());
+    TwoTones tones = new TwoTones(model);
     List<DrivenAnswer> levels = new ArrayList<>();
     for (double peak : peaks) {
-      answer(peak).ifPresent(levels::add);
+      boolean both = TWO_TONES.stream().anyMatch(step -> step * clean == peak);
+      answer(peak).map(a -> both ? a.with(tones.at(peak)) : a).ifPresent(levels::add);
     }
     return levels;
   }

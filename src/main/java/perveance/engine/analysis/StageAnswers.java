@@ -53,8 +53,7 @@ final class StageAnswers {
     Optional<MidbandSolution> atDrive =
         drive.isPresent() ? levels.cycle(drive.getAsDouble()) : Optional.empty();
     atDrive.ifPresent(cycle -> drain.add(model, cycle));
-    Optional<DrivenAnswer> driven =
-        atDrive.map(c -> new DrivenFigures(model, c).answer(drive.getAsDouble()));
+    Optional<DrivenAnswer> driven = atDrive.map(c -> driven(model, c, drive.getAsDouble()));
     SmallSignalAnswer small =
         withBands(new SmallSignalFigures(model).answer(options.details()), bands);
     return new StageAnswer(
@@ -76,6 +75,11 @@ final class StageAnswers {
             : List.of(),
         model.stage().assumptions(),
         List.of());
+  }
+
+  private DrivenAnswer driven(StageModel model, MidbandSolution cycle, double drive) {
+    DrivenAnswer answer = new DrivenFigures(model, cycle).answer(drive);
+    return options.levels() ? answer.with(new TwoTones(model).at(drive)) : answer;
   }
 
   /** What the stages answered so far take at their drives beyond idle. */

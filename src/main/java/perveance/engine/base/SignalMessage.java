@@ -16,7 +16,7 @@ public enum SignalMessage implements MessageCode {
   BYPASS_SHELF("{0}: below {1} the gain falls by {2} because {3} stops bypassing."),
   BLOCKING("{0}: twice the clean input charges {1} by {2}; the bias then takes {3} to recover."),
   DRIVER_THIN("{0} has only {1} in hand over what drives {2} to its limit."),
-  DRIVER_SHORT("{0} overloads before {1} does: it gives {2} peak where {1} takes {3}."),
+  DRIVER_SHORT("{0} overloads before {1}: it gives {2} peak cleanly where {1} wants {3} of it."),
   HIGH_NOISE("{0}: noise at the input is {1}, most of it from {2}.");
 
   private final String template;
@@ -32,6 +32,10 @@ public enum SignalMessage implements MessageCode {
 
   @Override
   public boolean lowerIsWorse() {
-    return this == LITTLE_HEADROOM || this == NO_HEADROOM || this == HIGH_CORNER_LOW;
+    return this == LITTLE_HEADROOM
+        || this == NO_HEADROOM
+        || this == HIGH_CORNER_LOW
+        || this == DRIVER_THIN
+        || this == DRIVER_SHORT;
   }
 }

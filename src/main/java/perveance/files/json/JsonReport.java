@@ -64,6 +64,7 @@ public final class JsonReport {
           sink.text("reason", failure.reason());
         });
     sink.objects("findings", answer.findings(), finding -> FindingJson.write(finding, sink));
+    sink.someObjects("chains", answer.chains(), chain -> ChainJson.write(chain, sink));
     sink.someObjects("stored", answer.discharges(), one -> FindingJson.write(one, sink));
     sink.number("highest_V", answer.highestVoltage());
   }

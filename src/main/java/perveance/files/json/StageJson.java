@@ -114,10 +114,18 @@ final class StageJson {
     for (int i = 0; i < driven.harmonics().size(); i++) {
       sink.number("h" + (i + 2), driven.harmonics().get(i));
     }
+    twoTones(driven);
     sink.number("anode_A", driven.meanAnodeCurrent());
     sink.number("screen_A", driven.meanScreenCurrent());
     sink.number("peak_anode_A", driven.peakAnodeCurrent());
     sink.flag("grid_current", driven.gridCurrentFlows());
+  }
+
+  private void twoTones(DrivenAnswer driven) throws IOException {
+    if (driven.intermodulation().isPresent()) {
+      sink.number("imd_smpte", driven.intermodulation().get().smpte());
+      sink.number("imd_ccif", driven.intermodulation().get().ccif());
+    }
   }
 
   private void level(DrivenAnswer level) throws IOException {
@@ -126,5 +134,6 @@ final class StageJson {
     sink.number("output_W", level.power());
     sink.number("thd", level.distortion());
     sink.numbers("h", level.harmonics());
+    twoTones(level);
   }
 }

@@ -11,6 +11,7 @@ import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.Discharge;
 import perveance.engine.analysis.DrivenAnswer;
 import perveance.engine.analysis.ExpectedReading;
+import perveance.engine.analysis.Intermodulation;
 import perveance.engine.analysis.LimitUse;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.SmallSignalAnswer;
@@ -212,6 +213,7 @@ final class SampleAnswer {
         List.of(0.12),
         List.of(),
         2e-3,
+        Optional.of(new Intermodulation(0.05, 0.02)),
         true);
   }
 
@@ -243,6 +245,7 @@ final class SampleAnswer {
                 Double.POSITIVE_INFINITY,
                 "nothing")),
         330,
+        List.of(),
         List.of(FINDING));
   }
 }

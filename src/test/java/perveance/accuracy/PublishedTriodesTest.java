@@ -67,8 +67,9 @@ class PublishedTriodesTest {
   /**
    * Cut-off points (RCA Receiving Tube Manual, memory): "approximate" grid voltage for 10 uA (50 uA
    * for the 12BH7A). 6 % of the printed voltage: it is rounded to a volt or half a volt and called
-   * approximate. 30 % for the 12AT7, whose tail is longer than one tapering spread gives: -5 V and
-   * -12 V are printed where mu 60 alone would give -1.7 V and -4.2 V. These points are in the fit.
+   * approximate. A tenth for the 12AT7, whose two points are met by a share of the cathode behind
+   * loose places of the grid: -5 V and -12 V are printed where mu 60 alone would give -1.7 V and
+   * -4.2 V. These points are in the fit.
    */
   @ParameterizedTest
   @ValueSource(strings = {"12AU7", "12AT7", "6SN7GT", "6J5", "6CG7", "12BH7A"})
@@ -81,7 +82,7 @@ class PublishedTriodesTest {
         continue;
       }
       points++;
-      double tolerance = type.equals("12AT7") ? 0.3 : 0.06;
+      double tolerance = type.equals("12AT7") ? 0.1 : 0.06;
       assertEquals(0, residual.relativeError(), tolerance, type + " " + residual);
     }
     assertTrue(points > 0, type);

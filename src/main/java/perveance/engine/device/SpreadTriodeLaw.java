@@ -19,6 +19,10 @@ import java.util.List;
  * Shockley, Bell System Tech. J. 17, 49, 1938). They return to the cathode while the grid is
  * negative and end on the grid when it is positive. Vt is small against any working anode voltage.
  *
+ * <p>A small part of the cathode may lie behind loose places of the grid, its ends and the gaps
+ * beside its supports: there the same holds with a larger penetration factor, and a little current
+ * flows long after the rest is cut off.
+ *
  * <p>Validity: the region that the device's evidence covers ({@link Validity}). Outside it the law
  * still follows the three-halves law but nobody has checked it there. Emission is unlimited.
  * Voltages beyond one megavolt are taken as one megavolt.
@@ -31,6 +35,8 @@ public final class SpreadTriodeLaw implements DeviceLaw {
 
   private final SpreadTriodeParameters parameters;
   private final SpreadCathode cathode;
+  private final SpreadCathode remote;
+  private final boolean loose;
   private final GridCurrent gridCurrent;
   private final double turnBackSquared;
   private final double inverseTurnBackSquared;
@@ -42,18 +48,23 @@ public final class SpreadTriodeLaw implements DeviceLaw {
    */
   public SpreadTriodeLaw(SpreadTriodeParameters parameters) {
     this.parameters = parameters;
-    this.cathode =
-        new SpreadCathode(
-            parameters.perveance(),
-            parameters.contactPotential(),
-            parameters.penetration(),
-            parameters.spread(),
-            parameters.cathodeSpread());
+    this.cathode = part(parameters, 1 - parameters.remoteShare(), 1);
+    this.remote = part(parameters, parameters.remoteShare(), parameters.remotePenetration());
+    this.loose = parameters.remoteShare() > 0;
     this.gridCurrent =
         new GridCurrent(
             parameters.gridPerveance(), parameters.gridOnset(), parameters.thermalVoltage());
     this.turnBackSquared = parameters.turnBack() * parameters.turnBack();
     this.inverseTurnBackSquared = 1 / turnBackSquared;
+  }
+
+  private static SpreadCathode part(SpreadTriodeParameters p, double share, double ratio) {
+    return new SpreadCathode(
+        share * p.perveance(),
+        p.contactPotential(),
+        ratio * p.penetration(),
+        p.spread(),
+        p.cathodeSpread());
   }
 
   /**
@@ -81,6 +92,12 @@ public final class SpreadTriodeLaw implements DeviceLaw {
     double emitted = out.current(ElectrodeCurrents.ANODE);
     double byAnode = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
     double byGrid = out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
+    if (loose) {
+      remote.evaluate(vg, va, out);
+      emitted += out.current(ElectrodeCurrents.ANODE);
+      byAnode += out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.ANODE);
+      byGrid += out.slope(ElectrodeCurrents.ANODE, ElectrodeCurrents.GRID);
+    }
     double turned = emitted;
     double turnedByAnode = byAnode;
     double turnedByGrid = byGrid;
@@ -118,6 +135,8 @@ public final class SpreadTriodeLaw implements DeviceLaw {
             parameters.penetration(),
             parameters.spread(),
             parameters.cathodeSpread(),
+            parameters.remoteShare(),
+            parameters.remotePenetration(),
             parameters.turnBack(),
             parameters.gridPerveance() * conduction,
             parameters.gridOnset() - contactShift,

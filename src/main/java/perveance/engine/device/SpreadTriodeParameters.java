@@ -1,5 +1,6 @@
 package perveance.engine.device;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 
@@ -12,6 +13,8 @@ import java.util.Map;
  * @param spread s, sqrt 3 times the standard deviation of D over D0 (the half width, were the
  *     spread even), 0 to 1 [1]
  * @param cathodeSpread c, the same of the cathode's potential, 0 or above [V]
+ * @param remoteShare part of the cathode that the grid's loose places control, 0 to 1 [1]
+ * @param remotePenetration penetration factor there over D0, 1 to 100 [1]
  * @param turnBack anode voltage at which a quarter of the electrons turns back, above 0 [V]
  * @param gridPerveance Gg of the grid, above 0 [A V^-1.5]
  * @param gridOnset grid voltage at 0.3 uA of grid current [V]
@@ -23,6 +26,8 @@ public record SpreadTriodeParameters(
     double penetration,
     double spread,
     double cathodeSpread,
+    double remoteShare,
+    double remotePenetration,
     double turnBack,
     double gridPerveance,
     double gridOnset,
@@ -32,17 +37,54 @@ public record SpreadTriodeParameters(
     above0("perveance", perveance);
     finite("contactPotential", contactPotential);
     above0("penetration", penetration);
-    if (!(spread >= 0 && spread <= 1)) {
-      throw new IllegalArgumentException("spread is not between 0 and 1: " + spread);
-    }
+    within("spread", spread, 0, 1);
     if (!(cathodeSpread >= 0) || Double.isInfinite(cathodeSpread)) {
       throw new IllegalArgumentException(
           "cathodeSpread is not 0 or above and finite: " + cathodeSpread);
     }
+    within("remoteShare", remoteShare, 0, 1);
+    within("remotePenetration", remotePenetration, 1, 100);
     above0("turnBack", turnBack);
     above0("gridPerveance", gridPerveance);
     finite("gridOnset", gridOnset);
     above0("thermalVoltage", thermalVoltage);
+  }
+
+  /**
+   * Constants of a valve whose grid is wound alike throughout.
+   *
+   * @param perveance G of the cathode, above 0 [A V^-1.5]
+   * @param contactPotential Vc, added to the grid voltage [V]
+   * @param penetration mean penetration factor, above 0 [1]
+   * @param spread of the penetration factor, 0 to 1 [1]
+   * @param cathodeSpread c, spread of the cathode's potential, 0 or above [V]
+   * @param turnBack anode voltage at which a quarter of the electrons turns back, above 0 [V]
+   * @param gridPerveance Gg of the grid, above 0 [A V^-1.5]
+   * @param gridOnset grid voltage at 0.3 uA of grid current [V]
+   * @param thermalVoltage k T / e of the cathode, above 0 [V]
+   */
+  public SpreadTriodeParameters(
+      double perveance,
+      double contactPotential,
+      double penetration,
+      double spread,
+      double cathodeSpread,
+      double turnBack,
+      double gridPerveance,
+      double gridOnset,
+      double thermalVoltage) {
+    this(
+        perveance,
+        contactPotential,
+        penetration,
+        spread,
+        cathodeSpread,
+        0,
+        1,
+        turnBack,
+        gridPerveance,
+        gridOnset,
+        thermalVoltage);
   }
 
   /**
@@ -91,6 +133,9 @@ public record SpreadTriodeParameters(
           "grid_onset",
           "thermal_voltage");
 
+  /** Keys of a grid with loose places, absent in the file of a valve without. */
+  public static final List<String> REMOTE_KEYS = List.of("remote_share", "remote_penetration");
+
   /**
    * Reads the constants by the keys of a device file.
    *
@@ -107,15 +152,42 @@ public record SpreadTriodeParameters(
       }
       v[i] = value;
     }
-    return new SpreadTriodeParameters(v[0], v[1], v[2], v[3], v[4], v[5], v[6], v[7], v[8]);
+    return new SpreadTriodeParameters(
+        v[0],
+        v[1],
+        v[2],
+        v[3],
+        v[4],
+        values.getOrDefault(REMOTE_KEYS.get(0), 0.0),
+        values.getOrDefault(REMOTE_KEYS.get(1), 1.0),
+        v[5],
+        v[6],
+        v[7],
+        v[8]);
   }
 
   /**
    * The constants with keys, units and meaning.
    *
-   * @return in the order of the record
+   * @return those that every triode has, then those of loose places in the grid, if any
    */
   public List<LawParameter> list() {
+    List<LawParameter> list = new ArrayList<>(common());
+    if (remoteShare > 0) {
+      list.add(
+          new LawParameter(
+              REMOTE_KEYS.get(0), remoteShare, "1", "part of the cathode behind loose places"));
+      list.add(
+          new LawParameter(
+              REMOTE_KEYS.get(1),
+              remotePenetration,
+              "1",
+              "penetration factor there over the mean"));
+    }
+    return List.copyOf(list);
+  }
+
+  private List<LawParameter> common() {
     return List.of(
         parameter(0, perveance, "A V^-1.5", "perveance of the cathode"),
         parameter(1, contactPotential, "V", "contact potential, added to the grid voltage"),
@@ -130,6 +202,13 @@ public record SpreadTriodeParameters(
 
   private static LawParameter parameter(int index, double value, String unit, String meaning) {
     return new LawParameter(KEYS.get(index), value, unit, meaning);
+  }
+
+  private static void within(String name, double value, double low, double high) {
+    if (!(value >= low && value <= high)) {
+      throw new IllegalArgumentException(
+          name + " is not between " + low + " and " + high + ": " + value);
+    }
   }
 
   private static void above0(String name, double value) {

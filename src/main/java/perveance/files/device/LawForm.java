@@ -13,7 +13,8 @@ import perveance.engine.device.SpreadTriodeParameters;
 
 /** The device laws that a file may name, with the keys that each one takes. */
 enum LawForm {
-  SPREAD_TRIODE(SpreadTriodeLaw.NAME, SpreadTriodeParameters.KEYS) {
+  SPREAD_TRIODE(
+      SpreadTriodeLaw.NAME, SpreadTriodeParameters.KEYS, SpreadTriodeParameters.REMOTE_KEYS) {
     @Override
     DeviceLaw make(Map<String, Double> values) {
       return new SpreadTriodeLaw(SpreadTriodeParameters.of(values));
@@ -24,7 +25,7 @@ enum LawForm {
       return law instanceof SpreadTriodeLaw;
     }
   },
-  SPREAD_PENTODE(SpreadPentodeLaw.NAME, SpreadPentodeParameters.KEYS) {
+  SPREAD_PENTODE(SpreadPentodeLaw.NAME, SpreadPentodeParameters.KEYS, List.of()) {
     @Override
     DeviceLaw make(Map<String, Double> values) {
       return new SpreadPentodeLaw(SpreadPentodeParameters.of(values));
@@ -35,7 +36,7 @@ enum LawForm {
       return law instanceof SpreadPentodeLaw;
     }
   },
-  SPACE_CHARGE_DIODE(SpaceChargeDiodeLaw.NAME, SpaceChargeDiodeLaw.KEYS) {
+  SPACE_CHARGE_DIODE(SpaceChargeDiodeLaw.NAME, SpaceChargeDiodeLaw.KEYS, List.of()) {
     @Override
     DeviceLaw make(Map<String, Double> values) {
       return SpaceChargeDiodeLaw.of(values);
@@ -49,10 +50,12 @@ enum LawForm {
 
   private final String word;
   private final List<String> keys;
+  private final List<String> further;
 
-  LawForm(String word, List<String> keys) {
+  LawForm(String word, List<String> keys, List<String> further) {
     this.word = word;
     this.keys = keys;
+    this.further = further;
   }
 
   /** Makes the law; refuses values that have no meaning with an IllegalArgumentException. */
@@ -68,6 +71,11 @@ enum LawForm {
   /** The keys of the law, all of them required, in SI units. */
   List<String> keys() {
     return keys;
+  }
+
+  /** Keys that the law takes besides, for what few devices have. */
+  List<String> further() {
+    return further;
   }
 
   static List<String> words() {

@@ -24,13 +24,11 @@ final class LawReader {
     Map<String, Double> values = new LinkedHashMap<>();
     for (String key : form.get().keys()) {
       table.require(key, "a number in SI units");
-      OptionalDouble value = table.quantity(key, Ranges.NUMBER);
-      if (value.isPresent()) {
-        values.put(key, value.getAsDouble());
-      }
+      read(table, key, values);
     }
+    form.get().further().forEach(key -> read(table, key, values));
     table.refuseOthers();
-    if (values.size() < form.get().keys().size()) {
+    if (!values.keySet().containsAll(form.get().keys())) {
       return Optional.empty();
     }
     try {
@@ -38,6 +36,13 @@ final class LawReader {
     } catch (IllegalArgumentException e) {
       table.complain("name", String.valueOf(e.getMessage()), "values with a meaning");
       return Optional.empty();
+    }
+  }
+
+  private static void read(StrictTable table, String key, Map<String, Double> values) {
+    OptionalDouble value = table.quantity(key, Ranges.NUMBER);
+    if (value.isPresent()) {
+      values.put(key, value.getAsDouble());
     }
   }
 

@@ -121,7 +121,7 @@ class DeviceReaderTest {
         "\"6.3 V\" | 1e400 | 10: found 1e400, which is too large, expected a smaller number",
         "\"1 a2\" | \"1\" | 7: pins: found \"1\", expected a pin and its electrode, such as \"1"
             + " a2\"",
-        "spread = 0.4 | spread = 2 | 30: law name: found spread is not between 0 and 1: 2.0,"
+        "spread = 0.4 | spread = 2 | 30: law name: found spread is not between 0.0 and 1.0: 2.0,"
             + " expected values with a meaning",
         "turn_back = 4 | turn_bak = 4 | 29: law turn_back: found nothing, expected a number in SI"
             + " units",

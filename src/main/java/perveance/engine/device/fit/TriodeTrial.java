@@ -29,13 +29,27 @@ final class TriodeTrial {
   /** Part of the cut-off voltage by which contact potentials differ besides. */
   private static final double CONTACT_SHARE = 0.04;
 
+  /**
+   * Penetration factor behind loose places of the grid over the mean: about the least with which
+   * both cut-off points of the 12AT7, the one type that asks for such places, come within a tenth.
+   */
+  static final double REMOTE_PENETRATION = 2.2;
+
+  /** Largest share of the cathode that such places are taken to have [1]. */
+  private static final double LARGEST_REMOTE_SHARE = 0.05;
+
+  private static final double REMOTE_START = 0.001;
+  private static final double REMOTE_DEVIATION = 0.01;
+  private static final int REMOTE = 4;
+
   private static final List<String> FITTED =
-      List.of("perveance", "contact_potential", "penetration", "spread");
+      List.of("perveance", "contact_potential", "penetration", "spread", "remote_share");
 
   private final List<Evidence> used;
   private final List<Observation> observations;
   private final FitConditions conditions;
   private final GridClass gridClass;
+  private final boolean remote;
   private final FitOutcome outcome;
 
   TriodeTrial(
@@ -44,14 +58,16 @@ final class TriodeTrial {
       FitConditions conditions,
       GridClass gridClass,
       double mu,
-      double spread) {
+      double spread,
+      boolean remote) {
     this.used = used;
     this.observations = observations;
     this.conditions = conditions;
     this.gridClass = gridClass;
+    this.remote = remote;
     int count = observations.size();
-    double[] observed = new double[count + 2];
-    double[] deviation = new double[count + 2];
+    double[] observed = new double[count + (remote ? 3 : 2)];
+    double[] deviation = new double[observed.length];
     for (int i = 0; i < count; i++) {
       observed[i] = observations.get(i).target();
       deviation[i] = observations.get(i).deviation();
@@ -61,6 +77,9 @@ final class TriodeTrial {
     observed[count + 1] = gridClass.contactPotential();
     deviation[count + 1] =
         Math.hypot(gridClass.contactDeviation(), CONTACT_SHARE * highestVoltage() / mu);
+    if (remote) {
+      deviation[count + 2] = REMOTE_DEVIATION;
+    }
     List<FitParameter> start = start(mu, spread);
     this.outcome =
         conditions.robust()
@@ -87,11 +106,20 @@ final class TriodeTrial {
         perveance = perUnit > 0 ? current / perUnit : perveance;
       }
     }
-    return List.of(
-        new FitParameter("perveance", perveance, new ParameterDomain.Positive()),
-        new FitParameter("contact potential", contact, new ParameterDomain.Free(0.1)),
-        new FitParameter("penetration", penetration, new ParameterDomain.Positive()),
-        new FitParameter("spread", spread, new ParameterDomain.Between(0, 1)));
+    List<FitParameter> start = new ArrayList<>();
+    if (remote) {
+      start.add(
+          new FitParameter(
+              "remote share", REMOTE_START, new ParameterDomain.Between(0, LARGEST_REMOTE_SHARE)));
+    }
+    start.addAll(
+        0,
+        List.of(
+            new FitParameter("perveance", perveance, new ParameterDomain.Positive()),
+            new FitParameter("contact potential", contact, new ParameterDomain.Free(0.1)),
+            new FitParameter("penetration", penetration, new ParameterDomain.Positive()),
+            new FitParameter("spread", spread, new ParameterDomain.Between(0, 1))));
+    return start;
   }
 
   private SpreadTriodeLaw law(double[] p) {
@@ -104,6 +132,8 @@ final class TriodeTrial {
             p[2],
             p[3],
             cathodeSpread,
+            p.length > REMOTE ? p[REMOTE] : 0,
+            p.length > REMOTE ? REMOTE_PENETRATION : 1,
             gridClass.turnBack(),
             GRID_SHARE * p[0],
             conditions.gridOnset().orElse(gridClass.gridOnset()),
@@ -118,6 +148,9 @@ final class TriodeTrial {
     }
     predicted[count] = parameters[3];
     predicted[count + 1] = parameters[1];
+    if (remote) {
+      predicted[count + 2] = parameters[REMOTE];
+    }
   }
 
   FitOutcome outcome() {
@@ -150,7 +183,7 @@ final class TriodeTrial {
         FitReport.summary(observations, residuals, fitted, assumptions(fitted)),
         EvidenceRange.of(used),
         residuals,
-        FITTED,
+        remote ? FITTED : FITTED.subList(0, REMOTE),
         fitted.covariance(),
         distrusted);
   }
@@ -165,29 +198,37 @@ final class TriodeTrial {
                   + " %.2f +- %.2f",
               gridClass.words(), gridClass.spread(), gridClass.spreadDeviation()));
     }
-    assumptions.add(
-        conditions
-            .filament()
-            .map(
-                filament ->
-                    FitReport.text(
-                        "voltages refer to the filament's middle (%s); cathode spread half of"
-                            + " %.1f V and %.1f V",
-                        filament.heating() == Heating.ALTERNATING
-                            ? "heated with alternating current"
-                            : "evidence taken to the negative end of a filament heated with"
-                                + " direct current",
-                        filament.voltage(),
-                        CATHODE_SPREAD))
-            .orElse(
-                FitReport.text("cathode spread %.1f V: common to oxide cathodes", CATHODE_SPREAD)));
+    assumptions.add(cathodeSpread());
     if (conditions.gridOnset().isEmpty()) {
       assumptions.add(
           FitReport.text(
               "onset of grid current at %.1f V: value of its class, not published",
               gridClass.gridOnset()));
     }
+    if (remote) {
+      assumptions.add(
+          FitReport.text(
+              "behind loose places of the grid the penetration factor is %.1f times the mean",
+              REMOTE_PENETRATION));
+    }
     assumptions.add("grid perveance 0.35 of the cathode's, cathode at 1000 K: common values");
     return assumptions;
+  }
+
+  private String cathodeSpread() {
+    return conditions
+        .filament()
+        .map(
+            filament ->
+                FitReport.text(
+                    "voltages refer to the filament's middle (%s); cathode spread half of"
+                        + " %.1f V and %.1f V",
+                    filament.heating() == Heating.ALTERNATING
+                        ? "heated with alternating current"
+                        : "evidence taken to the negative end of a filament heated with"
+                            + " direct current",
+                    filament.voltage(),
+                    CATHODE_SPREAD))
+        .orElse(FitReport.text("cathode spread %.1f V: common to oxide cathodes", CATHODE_SPREAD));
   }
 }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -35,6 +36,7 @@ public final class DesktopApplication extends Application {
   private final ExecutorService quick = Executors.newSingleThreadExecutor(r -> thread(r, "quick"));
   private final ExecutorService thorough =
       Executors.newSingleThreadExecutor(r -> thread(r, "thorough"));
+  private final CountDownLatch shown = new CountDownLatch(1);
   private @Nullable String keepingFailed;
 
   /**
@@ -44,6 +46,9 @@ public final class DesktopApplication extends Application {
    * @throws BadInputException when there is no display for a window
    */
   public static void open(List<String> args) throws BadInputException {
+    // drawing into memory needs no second connection to the display
+    System.setProperty("java.awt.headless", "true");
+    WarmUp.begin(Home.folder());
     try {
       launch(DesktopApplication.class, args.toArray(new String[0]));
     } catch (UnsupportedOperationException e) {
@@ -71,6 +76,7 @@ public final class DesktopApplication extends Application {
     DialogAsking asking = new DialogAsking(settings::get);
     Executor afterPause =
         CompletableFuture.delayedExecutor(PAUSE_MILLISECONDS, TimeUnit.MILLISECONDS, thorough);
+    thorough.execute(this::waitForWindow);
     Desk desk =
         Wiring.desk(home, settings, asking, new Desks(quick, afterPause, Platform::runLater));
     MainWindow window = new MainWindow(desk);
@@ -92,7 +98,17 @@ public final class DesktopApplication extends Application {
     Platform.runLater(() -> begin(window));
   }
 
+  /** The thorough answer would take from the window the core on which it is built. */
+  private void waitForWindow() {
+    try {
+      shown.await();
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+  }
+
   private void begin(MainWindow window) {
+    shown.countDown();
     window.offerRecovery();
     List<String> files = getParameters().getUnnamed();
     if (!files.isEmpty()) {

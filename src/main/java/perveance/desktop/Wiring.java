@@ -34,8 +34,7 @@ final class Wiring {
       ObjectProperty<Settings> settings,
       Asking asking,
       Desks desks) {
-    DeviceFiles devices =
-        new DeviceFiles(List.of(home.resolve("devices"), DeviceFiles.usualFolder()));
+    DeviceFiles devices = devices(home);
     Chassis first = Starters.example(settings.get());
     Workbench bench = new Workbench(first, around.apply(new EngineRoom(devices)), desks);
     keepSaying(bench, String.join("; ", devices.warnings()));
@@ -48,6 +47,11 @@ final class Wiring {
         new SheetPress(),
         asking,
         new PointDrag(bench, desks.quick(), desks.foreground()));
+  }
+
+  /** The person's own device files, then those of the program. */
+  static DeviceFiles devices(Path home) {
+    return new DeviceFiles(List.of(home.resolve("devices"), DeviceFiles.usualFolder()));
   }
 
   /** Says something at the foot whenever nothing else is said there. */

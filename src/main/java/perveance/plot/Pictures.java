@@ -82,6 +82,18 @@ public final class Pictures {
   }
 
   /**
+   * Draws where nobody sees it, so that a later drawing finds its classes loaded.
+   *
+   * @param artwork what to draw
+   * @param side width and height in pixels
+   */
+  public static void tryOut(Artwork artwork, int side) {
+    Graphics2D g = new BufferedImage(side, side, BufferedImage.TYPE_INT_RGB).createGraphics();
+    artwork.draw(g, new Rectangle2D.Double(0, 0, side, side));
+    g.dispose();
+  }
+
+  /**
    * Turns on everything that makes lines and text smooth.
    *
    * @param g graphics

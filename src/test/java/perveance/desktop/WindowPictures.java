@@ -47,6 +47,8 @@ public final class WindowPictures {
    * @throws IOException when a picture cannot be written
    */
   public static void main(String[] args) throws IOException {
+    // the usual screen in memory is smaller than the larger pictures
+    System.setProperty("headless.geometry", "1920x1200-32");
     Toolkit.start();
     WindowPictures pictures = new WindowPictures(Path.of(args[0]));
     Files.createDirectories(pictures.folder);

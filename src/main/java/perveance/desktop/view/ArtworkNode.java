@@ -3,8 +3,10 @@ package perveance.desktop.view;
 import java.awt.geom.AffineTransform;
 import java.awt.geom.Point2D;
 import java.awt.geom.Rectangle2D;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import javafx.geometry.Bounds;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
@@ -31,7 +33,10 @@ final class ArtworkNode extends Region {
 
   /** The library rounds sizes to whole units and does not see that a loaded face is bold. */
   private static final class SharpText extends FXGraphics2D {
+    private static final int MOST_FACES = 64;
+
     private final GraphicsContext context;
+    private final Map<java.awt.Font, Font> faces = new HashMap<>();
 
     SharpText(GraphicsContext context) {
       super(context);
@@ -56,15 +61,10 @@ final class ArtworkNode extends Region {
         return;
       }
       Point2D at = now.transform(new Point2D.Double(x, y), null);
-      Font here = face(getFont());
+      java.awt.Font font = getFont();
       context.save();
       context.setTransform(1, 0, 0, 1, 0, 0);
-      context.setFont(
-          Font.font(
-              here.getFamily(),
-              weight(getFont()),
-              posture(getFont()),
-              getFont().getSize2D() * now.getScaleX()));
+      context.setFont(face(font.deriveFont((float) (font.getSize2D() * now.getScaleX()))));
       context.fillText(text, at.getX(), at.getY());
       context.restore();
     }
@@ -79,8 +79,13 @@ final class ArtworkNode extends Region {
           : FontPosture.REGULAR;
     }
 
-    private static Font face(java.awt.Font font) {
-      return Font.font(font.getFamily(Locale.ROOT), weight(font), posture(font), font.getSize2D());
+    /** The names of a face are read from its file, so they are asked for once. */
+    private Font face(java.awt.Font font) {
+      if (faces.size() > MOST_FACES) {
+        faces.clear();
+      }
+      return faces.computeIfAbsent(
+          font, f -> Font.font(f.getFamily(Locale.ROOT), weight(f), posture(f), f.getSize2D()));
     }
   }
 

@@ -19,6 +19,8 @@ final class TopBar extends HBox {
   private final Label edited = Bits.label("", "soft");
   private final Button undo;
   private final Button redo;
+  private final Tooltip undoHint = new Tooltip();
+  private final Tooltip redoHint = new Tooltip();
   private final SearchField search;
 
   TopBar(Desk desk, FileActions files, SearchField search) {
@@ -27,6 +29,8 @@ final class TopBar extends HBox {
     getStyleClass().add("top-bar");
     undo = Bits.button("Undo", bench::undo, "plain-button");
     redo = Bits.button("Redo", bench::redo, "plain-button");
+    undo.setTooltip(undoHint);
+    redo.setTooltip(redoHint);
     undo.setId("undo");
     redo.setId("redo");
     Button sheet = Bits.button("Print the sheet", files::sheet, "main-button");
@@ -78,8 +82,8 @@ final class TopBar extends HBox {
     edited.setText(history.now().equals(bench.savedChassis()) ? "" : "edited");
     undo.setDisable(history.past().isEmpty());
     redo.setDisable(history.future().isEmpty());
-    undo.setTooltip(history.undoLabel().map(l -> new Tooltip("Undo: " + l)).orElse(null));
-    redo.setTooltip(history.redoLabel().map(l -> new Tooltip("Redo: " + l)).orElse(null));
+    undoHint.setText(history.undoLabel().map(l -> "Undo: " + l).orElse("Nothing to undo"));
+    redoHint.setText(history.redoLabel().map(l -> "Redo: " + l).orElse("Nothing to redo"));
     undo.setAccessibleText("Undo " + history.undoLabel().orElse(""));
     redo.setAccessibleText("Redo " + history.redoLabel().orElse(""));
   }

@@ -73,6 +73,8 @@ public record CleanSwing(
     KNEE("knee", "the knee"),
     /** The anode of a triode has no voltage left to fall. */
     BOTTOMING("bottoming", "bottoming"),
+    /** The anode rises no further: what feeds it has no voltage left. */
+    SUPPLY("supply", "the end of its supply"),
     /** Nothing within the range tried. */
     NONE("none", "nothing found");
 

@@ -17,8 +17,8 @@ final class CleanSwings {
    */
   static CleanSwing of(StageCurve dynamic, boolean composite, OptionalDouble drive) {
     SwingSearch search = new SwingSearch(dynamic, composite);
-    SwingEnd up = search.end(1);
-    SwingEnd down = search.end(-1);
+    SwingEnd up = search.end(dynamic.sense());
+    SwingEnd down = search.end(-dynamic.sense());
     boolean upFirst = first(up, down);
     SwingEnd nearer = upFirst ? up : down;
     double peak = Math.abs(nearer.input());

@@ -20,6 +20,9 @@ final class ResponseFindings {
   /** Highest [Hz]. */
   private static final double HIGH = 20e3;
 
+  /** A corner that the grid alone makes within this of the whole is the grid's [1]. */
+  private static final double NEARBY = 2;
+
   /** A shelf of less than this is not heard as one [dB]. */
   private static final double SLIGHT_STEP = 1;
 
@@ -100,7 +103,16 @@ final class ResponseFindings {
       return;
     }
     double corner = small.highCorner().getAsDouble();
-    double source = 1 / (2 * Math.PI * corner * small.inputCapacitance());
+    StageModel model = context.model();
+    int grid = model.valve(context.answer().points().get(0).ref()).grid();
+    double before = model.signal().midbandOutputResistance(grid, 0);
+    boolean input = 1 / (2 * Math.PI * before * small.inputCapacitance()) < NEARBY * corner;
+    double resistance =
+        input
+            ? before
+            : model
+                .signal()
+                .midbandOutputResistance(model.mainOutput().plus(), model.mainOutput().minus());
     Finding finding =
         Finding.of(
                 SignalMessage.HIGH_CORNER_LOW,
@@ -108,23 +120,25 @@ final class ResponseFindings {
                 context.ref(),
                 context.ref(),
                 Words.of(corner, Unit.HERTZ),
-                Words.roughly(source, Unit.OHM) + " before the grid",
-                Words.roughly(small.inputCapacitance(), Unit.FARAD))
+                Words.roughly(resistance, Unit.OHM)
+                    + (input ? " before the grid" : " at the output"),
+                "about "
+                    + Words.roughly(1 / (2 * Math.PI * corner * resistance), Unit.FARAD)
+                    + (input ? " at it" : " there"))
             .withValue(corner, HIGH, Unit.HERTZ);
-    Optional<Part> stopper =
-        context.remedies().resistors().stream()
-            .filter(p -> p.role().contains("stopper"))
-            .findFirst();
-    if (stopper.isPresent()) {
-      Remedies remedies = context.remedies();
-      findings.add(
-          remedies
-              .smallest(List.of(stopper.get()), v -> v.small().highCorner().orElse(HIGH) >= HIGH)
-              .map(finding::withRemedy)
-              .orElse(finding));
-    } else {
-      findings.add(finding);
-    }
+    findings.add(input ? stopper(finding) : finding);
+  }
+
+  /** The stopper that restores the top, where it is what costs it. */
+  private Finding stopper(Finding finding) {
+    Remedies remedies = context.remedies();
+    return remedies.resistors().stream()
+        .filter(p -> p.role().contains("stopper"))
+        .findFirst()
+        .flatMap(
+            p -> remedies.smallest(List.of(p), v -> v.small().highCorner().orElse(HIGH) >= HIGH))
+        .map(finding::withRemedy)
+        .orElse(finding);
   }
 
   private void noise() {

@@ -36,7 +36,7 @@ final class SmallSignalFigures {
   }
 
   SmallSignalAnswer answer(boolean response) {
-    Corners corners = model.signal().corners(model.source(), plus, minus);
+    Corners corners = corners();
     NoiseFigures noise = NoiseFigures.of(model);
     return new SmallSignalAnswer(
         model.gain(main),
@@ -55,6 +55,13 @@ final class SmallSignalFigures {
         response ? response() : List.of());
   }
 
+  /** Corners from the stage's input on; where nothing reaches it, from the source on. */
+  private Corners corners() {
+    return model.atSource() || !model.reached()
+        ? model.signal().corners(model.source(), plus, minus)
+        : model.signal().corners(model.source(), model.stage().inputNode(), plus, minus);
+  }
+
   /** Whether anything a person has put in limits the low end; stand-ins do not count. */
   private boolean limitedBelow() {
     for (Element element : model.circuit().elements()) {
@@ -67,6 +74,19 @@ final class SmallSignalFigures {
       }
     }
     return false;
+  }
+
+  private ResponsePoint point(double frequency, Complex gain) {
+    if (model.atSource()) {
+      return new ResponsePoint(frequency, gain.magnitude(), gain.phase());
+    }
+    Complex input =
+        model.signal().transfer(model.source(), model.stage().inputNode(), 0, frequency);
+    double magnitude = gain.magnitude() / input.magnitude();
+    double phase = Math.IEEEremainder(gain.phase() - input.phase(), 2 * Math.PI);
+    return Double.isFinite(magnitude)
+        ? new ResponsePoint(frequency, magnitude, phase)
+        : new ResponsePoint(frequency, 0, 0);
   }
 
   private OptionalDouble couplingCorner() {
@@ -86,7 +106,7 @@ final class SmallSignalFigures {
     for (int i = 0; i <= count; i++) {
       double frequency = LOWEST * Math.pow(10, (double) i / PER_DECADE);
       Complex gain = model.signal().transfer(model.source(), plus, minus, frequency);
-      points.add(new ResponsePoint(frequency, gain.magnitude() / model.inputShare(), gain.phase()));
+      points.add(point(frequency, gain));
     }
     return points;
   }

@@ -123,6 +123,11 @@ final class StageCurve {
     return model.atSource();
   }
 
+  /** Direction of the source in which the input rises: 1, or -1 behind a stage that inverts. */
+  int sense() {
+    return model.inputShare() < 0 ? -1 : 1;
+  }
+
   /** Whether another stage's output is wired straight to the input. */
   boolean wired() {
     return model.stage().input().isEmpty();

@@ -45,8 +45,14 @@ record SwingCause(Limit limit, String at) {
     for (int v = from; v < to; v++) {
       lowest = curve.anodeVoltage(v) < curve.anodeVoltage(lowest) ? v : lowest;
     }
-    Limit limit = curve.screened(lowest) ? Limit.KNEE : Limit.BOTTOMING;
-    return new SwingCause(limit, curve.ref(lowest));
+    return new SwingCause(fallen(curve, margins, lowest), curve.ref(lowest));
+  }
+
+  private static Limit fallen(StageCurve curve, SwingMargins margins, int valve) {
+    if (margins.risen(valve)) {
+      return Limit.SUPPLY;
+    }
+    return curve.screened(valve) ? Limit.KNEE : Limit.BOTTOMING;
   }
 
   /** The section whose grid is furthest beyond its onset; the stage's own where count is 0. */

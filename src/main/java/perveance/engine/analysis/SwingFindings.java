@@ -47,6 +47,7 @@ final class SwingFindings {
         switch (clean.limitedBy()) {
           case GRID_CURRENT -> SignalMessage.GRID_CURRENT_FIRST;
           case CUT_OFF -> SignalMessage.CUT_OFF_FIRST;
+          case SUPPLY -> SignalMessage.SUPPLY_FIRST;
           case BOTTOMING -> SignalMessage.BOTTOMING_FIRST;
           default -> SignalMessage.KNEE_FIRST;
         };

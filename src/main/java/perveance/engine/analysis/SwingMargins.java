@@ -34,6 +34,7 @@ final class SwingMargins {
   private final boolean composite;
   private final double[] idleCurrent;
   private final double[] idleGrid;
+  private final double[] idleAnode;
 
   /** Whether a grid's onset of current ends a swing. */
   private final boolean[] watched;
@@ -53,6 +54,7 @@ final class SwingMargins {
     this.composite = composite;
     this.idleCurrent = new double[curve.valves()];
     this.idleGrid = new double[curve.valves()];
+    this.idleAnode = new double[curve.valves()];
     this.watched = new boolean[curve.own()];
     curve.move(0);
     readIdle();
@@ -67,6 +69,7 @@ final class SwingMargins {
     this.composite = nominal.composite;
     this.idleCurrent = new double[specimen.valves()];
     this.idleGrid = new double[specimen.valves()];
+    this.idleAnode = new double[specimen.valves()];
     this.watched = nominal.watched;
     readIdle();
     this.scale = nominal.scale;
@@ -91,6 +94,7 @@ final class SwingMargins {
     for (int v = 0; v < idleCurrent.length; v++) {
       idleCurrent[v] = curve.anodeCurrent(v);
       idleGrid[v] = curve.gridVoltage(v);
+      idleAnode[v] = curve.anodeVoltage(v);
     }
   }
 
@@ -170,7 +174,7 @@ final class SwingMargins {
 
   /** Whether the output has fallen behind the input over a step. */
   boolean outputFell(double outputChange, double inputChange) {
-    return ratio(outputChange, inputChange) / idleGain < SLOPE_SHARE && (composite || !fading());
+    return ratio(outputChange, inputChange) / idleGain < SLOPE_SHARE;
   }
 
   /** Whether the input has fallen behind the source over a step. */
@@ -198,14 +202,19 @@ final class SwingMargins {
     return least;
   }
 
-  /** Whether a section is near cut-off, which then explains a fall of the gain. */
-  private boolean fading() {
-    for (int v = 0; v < watched.length; v++) {
+  /** Whether no section is near cut-off, which would explain a fall of the gain. */
+  boolean whole() {
+    for (int v = 0; v < watched.length && !composite; v++) {
       if (curve.anodeCurrent(v) < NEAR_CUT_OFF * idleCurrent[v]) {
-        return true;
+        return false;
       }
     }
-    return false;
+    return true;
+  }
+
+  /** Whether a section's anode stands higher than at idle. */
+  boolean risen(int valve) {
+    return curve.anodeVoltage(valve) > idleAnode[valve];
   }
 
   /** Anode current of a section over that at idle [1]. */

@@ -56,7 +56,11 @@ final class SwingSearch {
       boolean outputFell = margins.outputFell(reached - output, entered - input);
       boolean inputFell = margins.inputFell(entered - input, sign * step);
       if (margins.gridRoom() <= 0 || margins.cutOffRoom() <= 0 || outputFell || inputFell) {
-        return nearest(sign, new Stretch(before, clean, next, outputFell, inputFell));
+        SwingEnd end = nearest(sign, new Stretch(before, clean, next, outputFell, inputFell));
+        if (end.sign() != Sign.NONE) {
+          return end;
+        }
+        curve.move(sign * next);
       }
       before = clean;
       clean = next;
@@ -85,11 +89,13 @@ final class SwingSearch {
           };
       if (!Double.isNaN(from)) {
         double at = zero(from, stretch.next(), x -> margins.margin(candidate, sign * x));
-        first = at < end ? candidate : first;
-        end = Math.min(at, end);
+        // near cut-off the gain falls by that, and cut-off is what ends the swing
+        boolean counts = candidate != Sign.OUTPUT || (curve.move(sign * at) && margins.whole());
+        first = counts && at < end ? candidate : first;
+        end = counts ? Math.min(at, end) : end;
       }
     }
-    return at(sign * end, first);
+    return at(first == Sign.NONE ? 0 : sign * end, first);
   }
 
   /** Where a margin falls through zero: false position, Illinois variant. */

@@ -45,8 +45,8 @@ final class SwingSpread {
     SwingSearch search = new SwingSearch(curve, composite);
     this.nominal = search.margins();
     this.margins = nominal;
-    this.up = search.end(1);
-    this.down = search.end(-1);
+    this.up = search.end(curve.sense());
+    this.down = search.end(-curve.sense());
     this.slopes = bySlope(up.sign()) || bySlope(down.sign());
   }
 

@@ -8,11 +8,14 @@ public enum SignalMessage implements MessageCode {
   KNEE_FIRST("{0} overloads at the anode knee first, at {1} peak in."),
   BOTTOMING_FIRST(
       "{0} overloads by bottoming first, at {1} peak in: its anode can fall no further."),
+  SUPPLY_FIRST(
+      "{0} overloads first by the end of its supply, at {1} peak in: its anode can rise no"
+          + " further."),
   NO_HEADROOM("{0} is driven with {1} peak but is clean only to {2}."),
   LITTLE_HEADROOM("{0} has only {1} of headroom over the stated drive."),
   HIGH_DISTORTION("{0} distorts {1} at the stated drive."),
   LOW_CORNER_HIGH("{0}: the low corner is {1}."),
-  HIGH_CORNER_LOW("{0}: the high corner is {1}, set by {2} and the input capacitance of {3}."),
+  HIGH_CORNER_LOW("{0}: the high corner is {1}, set by {2} and {3}."),
   BYPASS_SHELF("{0}: below {1} the gain falls by {2} because {3} stops bypassing."),
   BLOCKING("{0}: twice the clean input charges {1} by {2}; the bias then takes {3} to recover."),
   DRIVER_THIN("{0} has only {1} in hand over what drives {2} to its limit."),

@@ -220,6 +220,30 @@ public final class SmallSignal {
   }
 
   /**
+   * Frequencies at which the gain from a node inside the circuit has fallen by 3 dB from its
+   * mid-band value: what stands between the source and that node does not count.
+   *
+   * @param source element index of a voltage or current source
+   * @param input node from which the gain is counted
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @return corners either side of the flattest part
+   */
+  public Corners corners(int source, int input, int plus, int minus) {
+    double before = Math.abs(midbandGain(source, input, 0));
+    double reference = Math.abs(midbandGain(source, plus, minus)) / before;
+    return Corners.search(
+        frequency -> {
+          if (!factor(frequency)) {
+            return reference;
+          }
+          double output = transfer(source, plus, minus, frequency).magnitude();
+          return output / transfer(source, input, 0, frequency).magnitude();
+        },
+        reference);
+  }
+
+  /**
    * Whether the equations have a single answer at a frequency; values many decades apart may leave
    * none at the ends of the range.
    *

@@ -21,6 +21,16 @@ final class SampleDevices implements DeviceLibrary {
   private final Device device;
 
   SampleDevices(String type, DeviceLaw law) {
+    this(type, law, List.of(ratings(type, OptionalDouble.of(10))));
+  }
+
+  /** A known type whose file states no anode dissipation. */
+  static SampleDevices unrated(String type) {
+    DeviceLaw law = Bench.LIBRARY.find(type).orElseThrow().law();
+    return new SampleDevices(type, law, List.of(ratings(type, OptionalDouble.empty())));
+  }
+
+  private SampleDevices(String type, DeviceLaw law, List<Ratings> ratings) {
     this.type = type.toLowerCase(Locale.ROOT);
     this.device =
         new Device(
@@ -30,7 +40,7 @@ final class SampleDevices implements DeviceLibrary {
             "B9A",
             Map.of("1", "a", "2", "g", "3", "k"),
             List.of(new Heater(6.3, 0.3, "4-5", false)),
-            List.of(ratings(type)),
+            ratings,
             new Capacitances(1.7e-12, 1.6e-12, 0.46e-12),
             List.of(),
             law,
@@ -39,7 +49,7 @@ final class SampleDevices implements DeviceLibrary {
             List.of());
   }
 
-  private static Ratings ratings(String type) {
+  private static Ratings ratings(String type, OptionalDouble dissipation) {
     OptionalDouble none = OptionalDouble.empty();
     return new Ratings(
         type,
@@ -48,7 +58,7 @@ final class SampleDevices implements DeviceLibrary {
         "stated",
         OptionalDouble.of(1000),
         none,
-        OptionalDouble.of(10),
+        dissipation,
         none,
         none,
         none,

@@ -54,8 +54,9 @@ class PublishedPentodesTest {
   private static double allowed(String type, Residual residual) {
     Evidence evidence = residual.evidence();
     if (type.equals("EF86") && evidence.gridVoltage().orElse(0) == -2) {
-      // the same 3.0 mA is printed at -2.2 V and at -2.0 V: 2.1 mA/V times 0.2 V is 14 %
-      return 0.14;
+      // a check, not in the fit: the same 3.0 mA is printed at -2.2 V and at -2.0 V, where 2.2 mA/V
+      // times 0.2 V is 15 %; and 2.0 mA/V beside 2.2 mA/V, which rises by 8 % on the way
+      return 0.19;
     }
     if (type.equals("EL34") && evidence.anodeVoltage() == 375) {
       // 70 mA at 250 V, -15.5 V and mu 10.5 make 87 mA at 375 V, -25.9 V, not the printed 70

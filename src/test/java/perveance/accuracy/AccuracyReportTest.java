@@ -42,9 +42,16 @@ class AccuracyReportTest {
     return """
     Errors of the laws in `device-curves/` against published figures. "Fitted" figures took
     part in the fit; "predicted" ones never did. Chart errors are told against the reading or
-    a tenth of the chart's highest current, whichever is more.
+    a tenth of the chart's highest current, whichever is more. Over all types (median of the
+    types' medians):
 
     %s
+    <details>
+    <summary>Every type by itself, with its sources</summary>
+
+    %s
+    </details>
+
     Published laws with their published parameters, at the tabulated points of the library
     (second opinions: fitted by their authors to other evidence):
 
@@ -54,7 +61,11 @@ class AccuracyReportTest {
 
     %s\
     """
-        .formatted(table, LawComparison.secondOpinions(), LawComparison.lowCurrent());
+        .formatted(
+            AccuracySummary.of(lines),
+            table,
+            LawComparison.secondOpinions(),
+            LawComparison.lowCurrent());
   }
 
   @Test

@@ -116,11 +116,9 @@ public final class StageFigures {
   private static void response(SmallSignalAnswer small, List<FigureRow> rows) {
     rows.add(
         new FigureRow(
-            "\u22123 dB",
-            Figures.frequency(small.lowCorner(), "dc")
-                + " to "
-                + Figures.frequency(small.highCorner(), "no limit found"),
-            "",
+            "\u22123 dB below",
+            Figures.frequency(small.lowCorner(), "down to dc"),
+            Figures.band(small.bands(), "lowCorner", Unit.HERTZ),
             small
                 .shelf()
                 .map(
@@ -130,6 +128,12 @@ public final class StageFigures {
                             + " to "
                             + Figures.reading(s.pole(), Unit.HERTZ, 2))
                 .orElse("")));
+    rows.add(
+        new FigureRow(
+            "\u22123 dB above",
+            Figures.frequency(small.highCorner(), "no limit found"),
+            Figures.band(small.bands(), "highCorner", Unit.HERTZ),
+            ""));
   }
 
   private static void clean(StageAnswer answer, List<FigureRow> rows) {

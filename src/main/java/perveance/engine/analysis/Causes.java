@@ -31,6 +31,7 @@ final class Causes {
   private final List<String> elements = new ArrayList<>();
   private final double resistor;
   private final double supply;
+  private final double capacitor;
 
   /**
    * Lists the causes of a whole circuit.
@@ -42,6 +43,7 @@ final class Causes {
   Causes(Circuit circuit, List<StageCircuit> stages, Conditions conditions) {
     this.resistor = conditions.resistorTolerance() / 2;
     this.supply = conditions.supplyTolerance() / 2;
+    this.capacitor = conditions.capacitorTolerance() / 2;
     Set<String> parts = new java.util.HashSet<>();
     for (StageCircuit stage : stages) {
       stage.parts().stream().map(Part::element).forEach(parts::add);
@@ -79,6 +81,11 @@ final class Causes {
 
   double resistorDeviation() {
     return resistor;
+  }
+
+  /** Of the logarithm of a capacitor, which moves corners and nothing at mid-band [1]. */
+  double capacitorDeviation() {
+    return capacitor;
   }
 
   double supplyDeviation() {

@@ -32,6 +32,26 @@ final class SampleDraws {
     }
   }
 
+  private SampleDraws(int samples, double[] deviate) {
+    this.samples = samples;
+    this.deviate = deviate;
+  }
+
+  /**
+   * One cause at a time: in each sample the cause of its number is one standard deviation up and no
+   * other moves; in one sample more nothing does.
+   *
+   * @param causes number of causes
+   */
+  static SampleDraws oneByOne(int causes) {
+    int samples = causes + 1;
+    double[] deviate = new double[samples * causes];
+    for (int cause = 0; cause < causes; cause++) {
+      deviate[cause * samples + cause] = 1;
+    }
+    return new SampleDraws(samples, deviate);
+  }
+
   private void shuffleInto(double[] slice, SeededNormal random, int first) {
     for (int i = 0; i < samples; i++) {
       int j = (int) (random.nextUniform() * (i + 1));

@@ -98,7 +98,12 @@ final class StageAnswers {
 
   private static SmallSignalAnswer withBands(
       SmallSignalAnswer answer, Optional<StageSpread> bands) {
-    return bands.map(b -> answer.withBands(b.bands())).orElse(answer);
+    if (bands.isEmpty()) {
+      return answer;
+    }
+    Map<String, Band> all = new HashMap<>(bands.get().bands());
+    all.putAll(bands.get().cornerBands(answer));
+    return answer.withBands(all);
   }
 
   private static CleanSwing withBands(CleanSwing clean, StageSpread bands) {

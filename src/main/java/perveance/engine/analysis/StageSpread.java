@@ -163,6 +163,11 @@ final class StageSpread {
     return bands(figures);
   }
 
+  /** Bands of the corners that the stage has. */
+  Map<String, Band> cornerBands(SmallSignalAnswer small) {
+    return new CornerSpread(model, causes, rails.computed()).bands(small);
+  }
+
   /** Bands of the clean swing. */
   Map<String, Band> swingBands() {
     return bands(swings.figures());

@@ -8,6 +8,7 @@ import perveance.engine.circuit.DcOutcome.Cause;
 import perveance.engine.circuit.DcOutcome.Converged;
 import perveance.engine.circuit.DcOutcome.Method;
 import perveance.engine.circuit.DcOutcome.NotConverged;
+import perveance.engine.circuit.Element.Capacitor;
 import perveance.engine.circuit.Element.CurrentSource;
 import perveance.engine.circuit.Element.Resistor;
 import perveance.engine.circuit.Element.VoltageSource;
@@ -70,6 +71,18 @@ public final class DcSolver {
     ElementChecks.positive("resistance", resistance);
     revision++;
     values.set(element, Resistor.class, resistance);
+  }
+
+  /**
+   * Changes a capacitor, for small signals about the point found.
+   *
+   * @param element element index
+   * @param capacitance above zero [F]
+   */
+  public void setCapacitance(int element, double capacitance) {
+    ElementChecks.positive("capacitance", capacitance);
+    revision++;
+    values.set(element, Capacitor.class, capacitance);
   }
 
   /**

@@ -34,8 +34,8 @@ class BandQuestionsTest {
    * Derived. The usual stage on 310 V, conduction 13 %, contact potential 0.08 V, parts and supply
    * as said; 95 % bands worked out with a plain three-halves law (mu 100, 1.006 mA/V^1.5, 0.625 V)
    * by 40,000 independent samples, in which mu does not vary: a spread of mu of 5 % besides would
-   * make the gain of the first row 50.7 to 61.3. Tolerance: a fifth of the band's width
-   * at either end, since the law differs.
+   * make the gain of the first row 50.7 to 61.3. Tolerance: a fifth of the band's width at either
+   * end, since the law differs.
    */
   @ParameterizedTest
   @CsvSource({

@@ -12,14 +12,14 @@ import perveance.engine.circuit.SmallSignal;
  * (J. M. Miller, Bur. Stand. Sci. Pap. 351, 1919).
  */
 final class InputAdmittance {
-  /** High enough for a coupling capacitor to be a short, low enough for a stopper to be none. */
+  /** Low enough for a stopper to be none; coupling capacitors are shorts whatever it is. */
   private static final double FREQUENCY = 2e3;
 
   private InputAdmittance() {}
 
   /** Input capacitance [F]. */
   static double capacitance(StageModel model) {
-    if (!model.signal().answers(FREQUENCY)) {
+    if (model.signal().refusal().isPresent()) {
       return 0;
     }
     double susceptance =
@@ -29,14 +29,14 @@ final class InputAdmittance {
 
   private static double behindSource(StageModel model) {
     SmallSignal signal = model.signal();
-    Complex current = signal.inputAdmittance(model.source(), FREQUENCY);
-    Complex voltage = signal.transfer(model.source(), model.stage().inputNode(), 0, FREQUENCY);
+    Complex current = signal.strayInputAdmittance(model.source(), FREQUENCY);
+    Complex voltage = signal.strayTransfer(model.source(), model.stage().inputNode(), 0, FREQUENCY);
     return imaginaryOfRatio(current, voltage);
   }
 
   private static double intoOwnParts(StageModel model) {
     int input = model.stage().inputNode();
-    Complex at = model.signal().transfer(model.source(), input, 0, FREQUENCY);
+    Complex at = model.signal().strayTransfer(model.source(), input, 0, FREQUENCY);
     double sum = 0;
     for (Element element : model.circuit().elements()) {
       if (model.owns(element) && element instanceof Capacitor c && c.a() != c.b()) {
@@ -62,7 +62,7 @@ final class InputAdmittance {
   }
 
   private static Complex other(StageModel model, int input, int a, int b) {
-    return model.signal().transfer(model.source(), a == input ? b : a, 0, FREQUENCY);
+    return model.signal().strayTransfer(model.source(), a == input ? b : a, 0, FREQUENCY);
   }
 
   private static double realOfRatio(Complex up, Complex down) {

@@ -51,7 +51,7 @@ final class LinearStamper {
     } else if (element instanceof Capacitor e) {
       if (branch >= 0) {
         frame.branch(branch, e.a(), e.b(), 0, 0);
-      } else if (!midband) {
+      } else {
         frame.capacitance(e.a(), e.b(), value);
       }
     } else if (element instanceof VoltageSource e && branch >= 0) {

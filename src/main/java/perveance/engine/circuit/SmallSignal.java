@@ -190,6 +190,45 @@ public final class SmallSignal {
   }
 
   /**
+   * Admittance that a source sees where capacitors that hold and inductors count as at mid-band and
+   * stray capacitances as at a frequency: what an input's own capacitance adds, without the phase
+   * of the coupling behind it.
+   *
+   * @param source element index of a voltage source
+   * @param frequency above zero [Hz]
+   * @return admittance [S]
+   */
+  public Complex strayInputAdmittance(int source, double frequency) {
+    factorStrays(frequency);
+    atMidband.respondTo(source);
+    return atMidband.delivered(source);
+  }
+
+  /**
+   * Voltage between two nodes for one unit of a source, counted as {@link #strayInputAdmittance}
+   * does.
+   *
+   * @param source element index of a voltage or current source
+   * @param plus node number
+   * @param minus node number, 0 for chassis
+   * @param frequency above zero [Hz]
+   * @return transfer, without unit for a voltage source, in ohm for a current source
+   */
+  public Complex strayTransfer(int source, int plus, int minus, double frequency) {
+    factorStrays(frequency);
+    atMidband.respondTo(source);
+    return new Complex(
+        atMidband.re(plus) - atMidband.re(minus), atMidband.im(plus) - atMidband.im(minus));
+  }
+
+  /** The mid-band's factors are made anew when they are next wanted. */
+  private void factorStrays(double frequency) {
+    ElementChecks.positive("frequency", frequency);
+    midbandFactored = false;
+    require(atMidband.factor(2 * Math.PI * frequency));
+  }
+
+  /**
    * Resistance between two nodes at mid-band, all sources dead.
    *
    * @param plus node number

@@ -47,33 +47,27 @@ public interface Artwork {
    * @param drawing geometry
    * @param text words
    * @param largest largest size of one grid unit, in units of the area [1]
+   * @param readable size of type that is aimed at where the drawing is small, in units of the area
+   *     [1]
    * @return artwork
    */
-  static Artwork of(SchematicPainter painter, Drawing drawing, SchematicText text, double largest) {
-    Rectangle2D extent = painter.extent(drawing, text);
+  static Artwork of(
+      SchematicPainter painter,
+      Drawing drawing,
+      SchematicText text,
+      double largest,
+      double readable) {
     return (g, area) -> {
-      double scale =
-          Math.min(
-              largest,
-              Math.min(area.getWidth() / extent.getWidth(), area.getHeight() / extent.getHeight()));
-      double x = area.getCenterX() - scale * extent.getCenterX();
-      double y = area.getCenterY() - scale * extent.getCenterY();
+      SchematicLayout layout = painter.layout(drawing, text, area, largest, readable);
+      double scale = layout.scale(area, largest);
+      double x = area.getCenterX() - scale * layout.extent().getCenterX();
+      double y = area.getCenterY() - scale * layout.extent().getCenterY();
       AffineTransform before = g.getTransform();
       g.translate(x, y);
       g.scale(scale, scale);
-      List<Hotspot> spots = painter.paint(g, drawing, text);
+      List<Hotspot> spots = painter.paint(g, layout);
       g.setTransform(before);
-      return spots.stream()
-          .map(
-              s ->
-                  new Hotspot(
-                      s.name(),
-                      s.node(),
-                      x + scale * s.x(),
-                      y + scale * s.y(),
-                      scale * s.width(),
-                      scale * s.height()))
-          .toList();
+      return spots.stream().map(s -> s.scaled(x, y, scale)).toList();
     };
   }
 }

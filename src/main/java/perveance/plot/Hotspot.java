@@ -21,4 +21,10 @@ public record Hotspot(String name, boolean node, double x, double y, double widt
   public boolean contains(double px, double py) {
     return px >= x && py >= y && px <= x + width && py <= y + height;
   }
+
+  /** The same in the units of an area into which the drawing is put. */
+  Hotspot scaled(double left, double top, double scale) {
+    return new Hotspot(
+        name, node, left + scale * x, top + scale * y, scale * width, scale * height);
+  }
 }

@@ -3,8 +3,8 @@ package perveance.plot;
 import java.awt.Graphics2D;
 import java.awt.Shape;
 import java.awt.geom.AffineTransform;
+import java.awt.geom.Ellipse2D;
 import java.awt.geom.Rectangle2D;
-import java.awt.image.BufferedImage;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -18,8 +18,14 @@ import perveance.engine.stage.SymbolShape;
 public final class SchematicPainter {
   private static final double MARGIN = 0.6;
 
+  /** Sizes of type that are tried when the usual one would be too small to read. */
+  private static final double[] FACTORS = {1, 1.15, 1.3, 1.5, 1.7, 1.9, 2.2};
+
   private final Look look;
   private final SchematicLabels labels;
+  private final TextWidths bold;
+  private final TextWidths regular;
+  private int usual;
 
   /**
    * A painter.
@@ -30,6 +36,8 @@ public final class SchematicPainter {
   public SchematicPainter(Look look, PlotFonts fonts) {
     this.look = look;
     this.labels = new SchematicLabels(look, fonts);
+    this.bold = new TextWidths(fonts.bold(1));
+    this.regular = new TextWidths(fonts.regular(1));
   }
 
   /**
@@ -41,26 +49,104 @@ public final class SchematicPainter {
    * @return where parts and nodes are, in grid units
    */
   public List<Hotspot> paint(Graphics2D g, Drawing drawing, SchematicText text) {
-    List<Hotspot> spots = new ArrayList<>();
+    return paint(g, layout(drawing, text, 1));
+  }
+
+  List<Hotspot> paint(Graphics2D g, SchematicLayout layout) {
+    Drawing drawing = layout.drawing();
     g.setPaint(look.ink());
     g.setStroke(ValveShapes.stroke(false));
     for (Drawing.Wire wire : drawing.wires()) {
       g.draw(SymbolShapes.line(wire.x1(), wire.y1(), wire.x2(), wire.y2()));
     }
     for (Drawing.Symbol symbol : drawing.symbols()) {
-      paintTaps(g, drawing, symbol);
-      paintSymbol(g, symbol, text);
-      labels.symbol(g, symbol, text).ifPresent(spots::add);
+      taps(drawing, symbol).forEach(g::draw);
+      paintSymbol(g, symbol, layout.text());
     }
-    for (Drawing.NodeMark mark : drawing.marks()) {
-      paintDot(g, mark.x(), mark.y());
-      labels.node(g, mark, text).ifPresent(spots::add);
+    g.setPaint(look.ink());
+    drawing.marks().forEach(mark -> g.fill(dot(mark)));
+    List<Hotspot> spots = new ArrayList<>();
+    for (int i = 0; i < layout.labels().size(); i++) {
+      labels.draw(g, layout.labels().get(i), layout.placed().places().get(i)).ifPresent(spots::add);
     }
     return List.copyOf(spots);
   }
 
-  /** Takes a wire that ends at a tap on to the winding. */
-  private static void paintTaps(Graphics2D g, Drawing drawing, Drawing.Symbol symbol) {
+  /** Finds a place for every text. */
+  SchematicLayout layout(Drawing drawing, SchematicText text, double factor) {
+    Obstacles obstacles = obstacles(drawing, text.zigzag());
+    List<SchematicLabel> all = new LabelPlaces(bold, regular, factor).all(drawing, text);
+    LabelPlacement.Placed placed = LabelPlacement.place(all, obstacles);
+    Rectangle2D extent = obstacles.extent();
+    for (SchematicLabel.Place place : placed.places()) {
+      extent = extent.createUnion(place.box());
+    }
+    Rectangle2D airy =
+        new Rectangle2D.Double(
+            extent.getX() - MARGIN,
+            extent.getY() - MARGIN,
+            extent.getWidth() + 2 * MARGIN,
+            extent.getHeight() + 2 * MARGIN);
+    return new SchematicLayout(drawing, text, all, placed, factor, airy);
+  }
+
+  /**
+   * The layout with the smallest type that can still be read in an area; where the texts would then
+   * cover something, the largest with which they do not.
+   */
+  SchematicLayout layout(
+      Drawing drawing, SchematicText text, Rectangle2D area, double largest, double readable) {
+    SchematicLayout best = layout(drawing, text, FACTORS[usual]);
+    if (best.isClear() && best.smallest(area, largest) >= readable && usual > 0) {
+      SchematicLayout smaller = layout(drawing, text, FACTORS[usual - 1]);
+      if (smaller.smallest(area, largest) < readable) {
+        return best;
+      }
+    }
+    best = layout(drawing, text, FACTORS[0]);
+    usual = 0;
+    for (int i = 1; i < FACTORS.length && best.smallest(area, largest) < readable; i++) {
+      SchematicLayout next = layout(drawing, text, FACTORS[i]);
+      boolean larger = next.smallest(area, largest) > best.smallest(area, largest);
+      if (larger && (next.isClear() || !best.isClear())) {
+        best = next;
+        usual = i;
+      }
+    }
+    return best;
+  }
+
+  private static Obstacles obstacles(Drawing drawing, boolean zigzag) {
+    Obstacles obstacles = new Obstacles();
+    for (Drawing.Wire wire : drawing.wires()) {
+      obstacles.add(SymbolShapes.line(wire.x1(), wire.y1(), wire.x2(), wire.y2()));
+    }
+    for (Drawing.Symbol symbol : drawing.symbols()) {
+      taps(drawing, symbol).forEach(obstacles::add);
+      AffineTransform place = place(symbol);
+      SymbolShapes.Strokes strokes = shapes(symbol.type(), zigzag);
+      for (List<Shape> some : List.of(strokes.lines(), strokes.solids(), strokes.heavy())) {
+        some.forEach(s -> obstacles.add(placed(s, place)));
+      }
+    }
+    drawing.marks().forEach(mark -> obstacles.add(dot(mark)));
+    return obstacles;
+  }
+
+  /** A circle stays a circle, so that text may stand in the corners of its box. */
+  private static Shape placed(Shape stroke, AffineTransform place) {
+    return stroke instanceof Ellipse2D e
+        ? new Ellipse2D.Double(
+            place.getTranslateX() + e.getX(),
+            place.getTranslateY() + e.getY(),
+            e.getWidth(),
+            e.getHeight())
+        : place.createTransformedShape(stroke);
+  }
+
+  /** What takes a wire that ends at a tap on to the winding. */
+  private static List<Shape> taps(Drawing drawing, Drawing.Symbol symbol) {
+    List<Shape> lines = new ArrayList<>();
     for (SymbolShape.Point tap : SymbolShape.taps(symbol)) {
       boolean wired =
           drawing.wires().stream()
@@ -69,9 +155,10 @@ public final class SchematicPainter {
                       (w.x1() == tap.x() && w.y1() == tap.y())
                           || (w.x2() == tap.x() && w.y2() == tap.y()));
       if (wired) {
-        g.draw(SymbolShapes.line(tap.x(), tap.y(), tap.x() + 0.6, tap.y()));
+        lines.add(SymbolShapes.line(tap.x(), tap.y(), tap.x() + 0.6, tap.y()));
       }
     }
+    return lines;
   }
 
   /**
@@ -82,40 +169,14 @@ public final class SchematicPainter {
    * @return rectangle in grid units, with a small margin
    */
   public Rectangle2D extent(Drawing drawing, SchematicText text) {
-    Graphics2D blind = new BufferedImage(1, 1, BufferedImage.TYPE_INT_RGB).createGraphics();
-    List<Rectangle2D> boxes = new ArrayList<>();
-    for (Hotspot s : paint(blind, drawing, text)) {
-      boxes.add(new Rectangle2D.Double(s.x(), s.y(), s.width(), s.height()));
-    }
-    blind.dispose();
-    for (Drawing.Wire w : drawing.wires()) {
-      Rectangle2D box = new Rectangle2D.Double(w.x1(), w.y1(), 0, 0);
-      box.add(w.x2(), w.y2());
-      boxes.add(box);
-    }
-    for (Drawing.Symbol symbol : drawing.symbols()) {
-      boxes.add(new Rectangle2D.Double(symbol.x() - 0.5, symbol.y() - 0.5, 1, 1));
-      if (symbol.part().isPresent()) {
-        boxes.add(SchematicLabels.body(symbol));
-      }
-      if (!symbol.text().isEmpty()) {
-        boxes.add(labels.fixedBox(symbol, SchematicLabels.fixed(symbol, text)));
-      }
-    }
-    Rectangle2D all = boxes.stream().reduce(Rectangle2D::createUnion).orElseThrow();
-    return new Rectangle2D.Double(
-        all.getX() - MARGIN,
-        all.getY() - MARGIN,
-        all.getWidth() + 2 * MARGIN,
-        all.getHeight() + 2 * MARGIN);
+    return layout(drawing, text, 1).extent();
   }
 
-  private void paintDot(Graphics2D g, double x, double y) {
-    g.setPaint(look.ink());
-    g.fill(new java.awt.geom.Ellipse2D.Double(x - 0.24, y - 0.24, 0.48, 0.48));
+  private static Shape dot(Drawing.NodeMark mark) {
+    return new Ellipse2D.Double(mark.x() - 0.24, mark.y() - 0.24, 0.48, 0.48);
   }
 
-  private void paintSymbol(Graphics2D g, Drawing.Symbol symbol, SchematicText text) {
+  private static AffineTransform place(Drawing.Symbol symbol) {
     AffineTransform place = AffineTransform.getTranslateInstance(symbol.x(), symbol.y());
     if (symbol.turned()) {
       place.rotate(-Math.PI / 2);
@@ -123,6 +184,11 @@ public final class SchematicPainter {
     if (symbol.mirrored()) {
       place.scale(-1, 1);
     }
+    return place;
+  }
+
+  private void paintSymbol(Graphics2D g, Drawing.Symbol symbol, SchematicText text) {
+    AffineTransform place = place(symbol);
     Optional<String> part = symbol.part();
     boolean chosen = part.isPresent() && text.chosen().contains(part.get());
     SymbolShapes.Strokes strokes = shapes(symbol.type(), text.zigzag());

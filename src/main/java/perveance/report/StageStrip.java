@@ -26,6 +26,9 @@ final class StageStrip {
   private static final double SIZE = 9;
   private static final double TALLEST = 250;
 
+  /** Smallest type that is aimed at on paper, in points. */
+  private static final double READABLE = 6.2;
+
   private final Typeface faces;
   private final SheetOptions options;
   private final ChassisAnswer chassis;
@@ -43,7 +46,7 @@ final class StageStrip {
     SchematicPainter painter = new SchematicPainter(Look.PAPER, fonts);
     SchematicText text = new SchematicWords(chassis, stage, true).text(Set.of(), options.zigzag());
     this.extent = painter.extent(stage.drawing(), text);
-    this.schematic = Artwork.of(painter, stage.drawing(), text, 8.6);
+    this.schematic = Artwork.of(painter, stage.drawing(), text, 8.6, READABLE);
     this.plot =
         StagePlots.characteristics(stage)
             .map(p -> Artwork.of(new ChartFactory(Look.PAPER, fonts, 8).chart(p)));

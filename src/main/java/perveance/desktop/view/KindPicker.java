@@ -70,7 +70,8 @@ final class KindPicker {
             new SchematicPainter(Skin.look(desk.settings().get()), fonts),
             kind.draw(starter.values(entry, kind)),
             bare,
-            12));
+            12,
+            0));
     Button card = Bits.button(desk.say(kind.title()), () -> take(kind), "kind-card");
     card.setGraphic(new VBox(picture));
     card.setId("kind-" + kind.name());

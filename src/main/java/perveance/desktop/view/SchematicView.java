@@ -13,6 +13,7 @@ import javafx.scene.input.MouseEvent;
 import javafx.scene.input.ScrollEvent;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.StackPane;
+import org.jspecify.annotations.Nullable;
 import perveance.app.Edit;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.KeyEditor;
@@ -23,6 +24,7 @@ import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageCircuit;
 import perveance.plot.Artwork;
 import perveance.plot.Hotspot;
+import perveance.plot.Look;
 import perveance.plot.PlotFonts;
 import perveance.plot.SchematicPainter;
 import perveance.plot.SchematicWords;
@@ -30,6 +32,9 @@ import perveance.plot.SchematicWords;
 /** The drawn schematic; every value is edited where it stands. */
 final class SchematicView extends StackPane {
   private static final double LARGEST_UNIT = 21;
+
+  /** Smallest type that is aimed at, in pixels. */
+  private static final double READABLE = 10.5;
 
   private final Desk desk;
   private final Workbench bench;
@@ -40,6 +45,8 @@ final class SchematicView extends StackPane {
   private final ValueEditor editor;
   private Optional<StageAnswer> shown = Optional.empty();
   private Runnable pickDevice = () -> {};
+  private @Nullable SchematicPainter painter;
+  private @Nullable Look painted;
   private double lastX;
   private double lastY;
 
@@ -80,15 +87,25 @@ final class SchematicView extends StackPane {
 
   private Artwork artwork(StageAnswer answer) {
     ChassisAnswer whole = Objects.requireNonNull(bench.answer().get());
-    SchematicPainter painter = new SchematicPainter(Skin.look(desk.settings().get()), fonts);
     Set<String> chosen =
         bench.chosenPart().get().isEmpty() ? Set.of() : Set.of(bench.chosenPart().get());
     boolean zigzag = desk.settings().get().zigzag();
     return Artwork.of(
-        painter,
+        painter(),
         answer.drawing(),
         new SchematicWords(whole, answer, false).text(chosen, zigzag),
-        LARGEST_UNIT * art.zoom());
+        LARGEST_UNIT * art.zoom(),
+        READABLE * desk.settings().get().textSize());
+  }
+
+  /** One painter as long as the colours stay, so that it measures each text once. */
+  private SchematicPainter painter() {
+    Look look = Skin.look(desk.settings().get());
+    if (painter == null || look != painted) {
+      painter = new SchematicPainter(look, fonts);
+      painted = look;
+    }
+    return painter;
   }
 
   void fit() {

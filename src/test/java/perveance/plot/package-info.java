@@ -1,0 +1,3 @@
+/** Tests of charts and drawings. */
+@org.jspecify.annotations.NullMarked
+package perveance.plot;

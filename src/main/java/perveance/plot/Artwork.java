@@ -10,8 +10,11 @@ import perveance.engine.stage.Drawing;
 
 /** Something that draws itself into a rectangle: a chart or a schematic. */
 public interface Artwork {
-  /** Name of the one spot that a chart reports. */
+  /** Name of the spot that a chart reports for the area between its axes. */
   String BETWEEN_AXES = "between the axes";
+
+  /** Name of the spots where a chart has drawn texts. */
+  String TEXT = "text";
 
   /**
    * Draws, filling the rectangle as far as the proportions allow.
@@ -34,9 +37,7 @@ public interface Artwork {
       ChartRenderingInfo info = new ChartRenderingInfo(null);
       chart.draw(g, area, info);
       Rectangle2D data = info.getPlotInfo().getDataArea();
-      return List.of(
-          new Hotspot(
-              BETWEEN_AXES, false, data.getX(), data.getY(), data.getWidth(), data.getHeight()));
+      return List.of(Hotspot.of(BETWEEN_AXES, data));
     };
   }
 

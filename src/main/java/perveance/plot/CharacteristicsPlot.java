@@ -15,6 +15,12 @@ import perveance.engine.device.CurveFamily;
 public final class CharacteristicsPlot {
   private static final double MILLI = 1e-3;
 
+  /** Which of the points of the dissipation limit carries its label. */
+  private static final int LIMIT_LABEL = 24;
+
+  /** Lower than this part of the picture a curve is too near to its neighbours for a label. */
+  private static final double LEAST_HEIGHT = 0.03;
+
   private CharacteristicsPlot() {}
 
   /**
@@ -74,21 +80,30 @@ public final class CharacteristicsPlot {
     }
   }
 
-  /** The label stands where the curve leaves the picture: at the top, or at the right. */
+  /**
+   * The label stands where the curve leaves the picture, at the top or at the right; where another
+   * stands there already it moves back along the curve.
+   */
   private static PlotDescription.Label endLabel(
       String name, List<PlotPoint> points, double right, double top) {
+    List<PlotPoint> back = new ArrayList<>();
     for (int i = 1; i < points.size(); i++) {
       if (points.get(i).y() > top) {
         PlotPoint a = points.get(i - 1);
         PlotPoint b = points.get(i);
         double x = a.x() + (b.x() - a.x()) * (top - a.y()) / (b.y() - a.y());
         return new PlotDescription.Label(
-            name, new PlotPoint(x, top), PlotDescription.Anchor.TOP_RIGHT, false);
+            name, new PlotPoint(x, top), PlotDescription.Anchor.TOP_RIGHT, false, back);
+      }
+      if (points.get(i).y() > LEAST_HEIGHT * top) {
+        back.add(0, points.get(i));
       }
     }
-    PlotPoint last = points.get(points.size() - 1);
+    PlotPoint end = new PlotPoint(right, points.get(points.size() - 1).y());
+    List<PlotPoint> elsewhere =
+        back.isEmpty() ? List.of(end) : back.subList(0, (back.size() + 1) / 2);
     return new PlotDescription.Label(
-        name, new PlotPoint(right, last.y()), PlotDescription.Anchor.BOTTOM_RIGHT, false);
+        name, end, PlotDescription.Anchor.BOTTOM_RIGHT, false, elsewhere);
   }
 
   private static void addLimit(
@@ -109,7 +124,23 @@ public final class CharacteristicsPlot {
     series.add(new PlotSeries(watts + " W limit", PlotSeries.Role.LIMIT, points));
     labels.add(
         new PlotDescription.Label(
-            trim(watts) + " W limit", points.get(24), PlotDescription.Anchor.BOTTOM_LEFT, false));
+            trim(watts) + " W limit",
+            points.get(LIMIT_LABEL),
+            PlotDescription.Anchor.BOTTOM_LEFT,
+            false,
+            aroundLimitLabel(points)));
+  }
+
+  /** Outward from the middle of the hyperbola, to both sides in turn. */
+  private static List<PlotPoint> aroundLimitLabel(List<PlotPoint> points) {
+    List<PlotPoint> around = new ArrayList<>();
+    for (int i = 2; i < points.size() - LIMIT_LABEL; i += 2) {
+      around.add(points.get(LIMIT_LABEL + i));
+      if (i < LIMIT_LABEL) {
+        around.add(points.get(LIMIT_LABEL - i));
+      }
+    }
+    return around;
   }
 
   private static void addLines(

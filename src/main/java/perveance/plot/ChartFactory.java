@@ -2,6 +2,8 @@ package perveance.plot;
 
 import java.awt.BasicStroke;
 import java.awt.Font;
+import java.util.ArrayList;
+import java.util.List;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.LogAxis;
 import org.jfree.chart.axis.NumberAxis;
@@ -41,6 +43,14 @@ public final class ChartFactory {
    * @return a chart without legend: lines are labelled where they run
    */
   public JFreeChart chart(PlotDescription description) {
+    return chart(description, labels(description));
+  }
+
+  private ChartLabels labels(PlotDescription description) {
+    return new ChartLabels(description, look, fonts, textSize);
+  }
+
+  private JFreeChart chart(PlotDescription description, ChartLabels labels) {
     XYPlot plot = new XYPlot();
     plot.setDomainAxis(axis(description.x()));
     plot.setRangeAxis(axis(description.y()));
@@ -57,9 +67,7 @@ public final class ChartFactory {
       plot.setDataset(i, dataset(series));
       plot.setRenderer(i, new SeriesStyle(look).renderer(series.role()));
     }
-    for (PlotDescription.Label label : description.labels()) {
-      plot.addAnnotation(new LabelAnnotation(label, look, fonts, textSize));
-    }
+    plot.addAnnotation(labels);
     JFreeChart chart = new JFreeChart(null, fonts.regular(textSize), plot, false);
     chart.setBackgroundPaint(look.paper());
     chart.setPadding(new RectangleInsets(4, 4, 4, 10));
@@ -88,10 +96,16 @@ public final class ChartFactory {
    * The chart as something that draws itself.
    *
    * @param description what to draw
-   * @return artwork that reports the area between its axes
+   * @return artwork that reports the area between its axes and where its texts stand
    */
   public Artwork artwork(PlotDescription description) {
-    return Artwork.of(chart(description));
+    ChartLabels labels = labels(description);
+    Artwork chart = Artwork.of(chart(description, labels));
+    return (g, area) -> {
+      List<Hotspot> spots = new ArrayList<>(chart.draw(g, area));
+      labels.boxes().forEach(box -> spots.add(Hotspot.of(Artwork.TEXT, box)));
+      return spots;
+    };
   }
 
   private static XYSeriesCollection dataset(PlotSeries series) {

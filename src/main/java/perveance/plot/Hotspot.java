@@ -1,5 +1,7 @@
 package perveance.plot;
 
+import java.awt.geom.Rectangle2D;
+
 /**
  * Where a part or a node was drawn, in grid units: what a window needs to answer a click.
  *
@@ -20,6 +22,10 @@ public record Hotspot(String name, boolean node, double x, double y, double widt
    */
   public boolean contains(double px, double py) {
     return px >= x && py >= y && px <= x + width && py <= y + height;
+  }
+
+  static Hotspot of(String name, Rectangle2D box) {
+    return new Hotspot(name, false, box.getX(), box.getY(), box.getWidth(), box.getHeight());
   }
 
   /** The same in the units of an area into which the drawing is put. */

@@ -26,8 +26,28 @@ public record PlotDescription(
    * @param at where, in axis units
    * @param anchor which corner of the text stands there
    * @param emphasis bold when true
+   * @param along where else it may stand, the best first; where nothing of it is free it is left
+   *     out. Empty for a text that has to stand
    */
-  public record Label(String text, PlotPoint at, Anchor anchor, boolean emphasis) {}
+  public record Label(
+      String text, PlotPoint at, Anchor anchor, boolean emphasis, List<PlotPoint> along) {
+    /** Copies the list. */
+    public Label {
+      along = List.copyOf(along);
+    }
+
+    /**
+     * A text that has to stand.
+     *
+     * @param text the words
+     * @param at where, in axis units
+     * @param anchor which corner of the text stands there
+     * @param emphasis bold when true
+     */
+    public Label(String text, PlotPoint at, Anchor anchor, boolean emphasis) {
+      this(text, at, anchor, emphasis, List.of());
+    }
+  }
 
   /** Which corner of a label stands at its point. */
   public enum Anchor {

@@ -2,26 +2,18 @@ package perveance.plot;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
-import static org.junit.jupiter.api.Assertions.fail;
 
 import java.awt.geom.Rectangle2D;
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
-import java.util.stream.Stream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import perveance.engine.analysis.AnalysisOptions;
-import perveance.engine.analysis.ChassisAnalysis;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.base.BadInputException;
-import perveance.engine.base.Progress;
-import perveance.files.chassis.ChassisReader;
-import perveance.files.device.DeviceFiles;
 
 /**
  * Texts of a schematic cover no wire, no symbol and no other text, on the page and on the screen.
@@ -34,14 +26,14 @@ class SchematicLayoutTest {
   private static final double READABLE = 10.5;
   private static final PlotFonts FONTS = new PlotFonts();
 
-  static Stream<Path> examples() throws IOException {
-    return Files.list(Path.of("examples")).filter(p -> p.toString().endsWith(".toml")).sorted();
+  static List<Path> examples() throws IOException {
+    return Examples.all();
   }
 
   @ParameterizedTest
   @MethodSource("examples")
   void noTextCoversAnything(Path example) throws BadInputException {
-    ChassisAnswer chassis = answer(example);
+    ChassisAnswer chassis = Examples.answer(example);
     List<String> collisions = new ArrayList<>();
     for (StageAnswer stage : chassis.stages()) {
       for (boolean zigzag : new boolean[] {false, true}) {
@@ -82,7 +74,7 @@ class SchematicLayoutTest {
   @ParameterizedTest
   @MethodSource("examples")
   void typeOnTheScreenCanBeRead(Path example) throws BadInputException {
-    ChassisAnswer chassis = answer(example);
+    ChassisAnswer chassis = Examples.answer(example);
     for (StageAnswer stage : chassis.stages()) {
       SchematicText text = new SchematicWords(chassis, stage, false).text(Set.of(), false);
       SchematicLayout layout =
@@ -91,19 +83,5 @@ class SchematicLayoutTest {
       double size = layout.smallest(CARD, LARGEST);
       assertTrue(size >= 9, stage.ref() + " " + stage.kind() + ": type of " + size + " pixels");
     }
-  }
-
-  private static ChassisAnswer answer(Path example) throws BadInputException {
-    DeviceFiles devices = new DeviceFiles(List.of());
-    ChassisAnswer answer =
-        new ChassisAnalysis(devices)
-            .answer(
-                new ChassisReader(devices).read(example),
-                AnalysisOptions.FULL.withSamples(40),
-                Progress.none());
-    if (answer.stages().isEmpty()) {
-      fail("no stage of " + example + " was answered");
-    }
-    return answer;
   }
 }

@@ -6,6 +6,7 @@ import java.util.Optional;
 import javafx.geometry.Bounds;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
+import javafx.geometry.Rectangle2D;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
@@ -19,6 +20,9 @@ import perveance.desktop.viewmodel.PointDrag;
 import perveance.desktop.viewmodel.Workbench;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.analysis.StageAnswer;
+import perveance.engine.base.QuantityFormat;
+import perveance.engine.base.Unit;
+import perveance.plot.Artwork;
 import perveance.plot.ChartFactory;
 import perveance.plot.PlotDescription;
 import perveance.plot.PlotFonts;
@@ -37,6 +41,7 @@ final class CharacteristicsView extends StackPane {
   private final ArtworkNode family = new ArtworkNode();
   private final LoadLineLayer lines;
   private final Pane words = new Pane();
+  private final Label loads = Bits.label("", "small");
   private final Label readout = Bits.label("", "readout");
   private Optional<PlotDescription> frame = Optional.empty();
   private String drawnFor = "";
@@ -82,8 +87,10 @@ final class CharacteristicsView extends StackPane {
           });
       bar.getChildren().add(choice);
     }
-    bar.setAlignment(Pos.CENTER_RIGHT);
-    bar.setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
+    loads.setId("load-lines");
+    bar.getChildren().addAll(Bits.gap(), loads);
+    bar.setAlignment(Pos.CENTER_LEFT);
+    bar.setMaxHeight(USE_PREF_SIZE);
     StackPane.setAlignment(bar, Pos.BOTTOM_LEFT);
     getChildren().add(bar);
   }
@@ -115,6 +122,20 @@ final class CharacteristicsView extends StackPane {
     Bounds data = family.data();
     return new PlotScale(
         data.getMinX(), data.getMinY(), data.getWidth(), data.getHeight(), d.x(), d.y());
+  }
+
+  private List<Rectangle2D> texts() {
+    return family.spots().stream()
+        .filter(s -> s.name().equals(Artwork.TEXT))
+        .map(s -> new Rectangle2D(s.x(), s.y(), s.width(), s.height()))
+        .toList();
+  }
+
+  /** What the full and the dashed line stand for. */
+  private String loads(LoadLineView view) {
+    String dc = QuantityFormat.TYPESET.part(view.dcResistance(), Unit.OHM, 3);
+    String ac = QuantityFormat.TYPESET.part(view.acResistance(), Unit.OHM, 3);
+    return "dc " + dc + ", ac " + ac;
   }
 
   /** Draws what has changed. */
@@ -151,10 +172,12 @@ final class CharacteristicsView extends StackPane {
     Optional<LoadLineView> view = answer.flatMap(StageAnswer::loadLine);
     if (frame.isEmpty() || view.isEmpty() || family.data().getWidth() < 10) {
       lines.clear();
+      loads.setText("");
       setAccessibleText(desk.say("No load line for this stage"));
       return;
     }
-    lines.draw(answer.get(), view.get(), frame.get(), scale());
+    lines.draw(answer.get(), view.get(), frame.get(), scale(), texts());
+    loads.setText(loads(view.get()));
     setAccessibleText(
         desk.say(
             String.format(

@@ -2,9 +2,9 @@ package perveance.desktop.view;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import javafx.geometry.Rectangle2D;
 import javafx.geometry.VPos;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
@@ -31,6 +31,7 @@ final class LoadLineLayer extends Region {
 
   private final Desk desk;
   private final Canvas canvas = new Canvas();
+  private final TextWidth widths = new TextWidth();
   private final List<Grip> grips = new ArrayList<>();
   private PlotScale scale = new PlotScale(0, 0, 1, 1, NONE, NONE);
   private static final perveance.plot.PlotAxis NONE = new perveance.plot.PlotAxis("", 0, 1, false);
@@ -77,7 +78,12 @@ final class LoadLineLayer extends Region {
     canvas.getGraphicsContext2D().clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
   }
 
-  void draw(StageAnswer answer, LoadLineView view, PlotDescription frame, PlotScale newScale) {
+  void draw(
+      StageAnswer answer,
+      LoadLineView view,
+      PlotDescription frame,
+      PlotScale newScale,
+      List<Rectangle2D> texts) {
     scale = newScale;
     clear();
     canvas.setWidth(getWidth());
@@ -88,7 +94,8 @@ final class LoadLineLayer extends Region {
     g.beginPath();
     g.rect(scale.left(), scale.top(), scale.width(), scale.height());
     g.clip();
-    gridCurrent(g, StagePlots.gridCurrentEdge(answer, frame), settings);
+    List<PlotPoint> edge = StagePlots.gridCurrentEdge(answer, frame);
+    gridCurrent(g, edge, settings);
     evidence(g, answer, view, settings);
     line(g, view.dc(), Skin.ink(settings), 1.6, false);
     line(g, view.ac(), Skin.accent(settings), 1.5, true);
@@ -97,7 +104,12 @@ final class LoadLineLayer extends Region {
     g.restore();
     grips(view);
     paintGrips(g, settings);
-    label(g, view, settings);
+    List<Rectangle2D> taken = new ArrayList<>(texts);
+    grips.forEach(grip -> taken.add(new Rectangle2D(grip.x() - 8, grip.y() - 9, 16, 18)));
+    taken.add(label(g, view, settings, taken));
+    if (edge.size() > 1) {
+      gridCurrentWords(g, settings, taken);
+    }
   }
 
   private void gridCurrent(GraphicsContext g, List<PlotPoint> edge, Settings settings) {
@@ -117,10 +129,25 @@ final class LoadLineLayer extends Region {
         Math.min(scale.top(), scale.y(edge.get(edge.size() - 1).y())));
     g.closePath();
     g.fill();
-    g.setFill(Skin.amber(settings));
-    g.setFont(font(11, false));
-    g.setTextBaseline(VPos.TOP);
-    g.fillText(desk.say("grid current"), scale.left() + 6, scale.top() + 18);
+  }
+
+  /** In the corner, or as far down the axis as something else stands there. */
+  private void gridCurrentWords(GraphicsContext g, Settings settings, List<Rectangle2D> taken) {
+    String words = desk.say("grid current");
+    Font font = font(11, false);
+    double width = widths.width(words, font);
+    double height = 15 * settings.textSize();
+    double x = scale.left() + 7;
+    for (double y = scale.top() + 3; y < scale.top() + scale.height() / 2; y += 5) {
+      Rectangle2D box = new Rectangle2D(x, y, width, height);
+      if (taken.stream().noneMatch(box::intersects)) {
+        g.setFill(Skin.amber(settings));
+        g.setFont(font);
+        g.setTextBaseline(VPos.TOP);
+        g.fillText(words, x, y);
+        return;
+      }
+    }
   }
 
   /** The region that published evidence covers. */
@@ -221,6 +248,9 @@ final class LoadLineLayer extends Region {
     double top = scale.vertical().high() * MILLI;
     double share =
         head.current() > top ? (top - foot.current()) / (head.current() - foot.current()) : 1;
+    if (head.voltage() < 0) {
+      share = Math.min(share, foot.voltage() / (foot.voltage() - head.voltage()));
+    }
     add(
         handle,
         foot.voltage() + share * (head.voltage() - foot.voltage()),
@@ -247,31 +277,48 @@ final class LoadLineLayer extends Region {
     }
   }
 
-  private void label(GraphicsContext g, LoadLineView view, Settings settings) {
+  /** The operating point in words, on the side of it where nothing else stands. */
+  private Rectangle2D label(
+      GraphicsContext g, LoadLineView view, Settings settings, List<Rectangle2D> taken) {
     QuantityFormat format = QuantityFormat.TYPESET;
     String text =
         format.reading(view.anode(), Unit.VOLT, 3)
             + ", "
             + format.reading(view.current(), Unit.AMPERE, 3);
-    double x = scale.x(view.anode()) + 12;
-    double y = scale.y(view.current() / MILLI) - 20;
-    g.setFont(font(13, true));
+    Font font = font(13, true);
+    Rectangle2D box =
+        besidePoint(view, widths.width(text, font) + 4, 16 * settings.textSize(), taken);
+    g.setFont(font);
     g.setTextBaseline(VPos.TOP);
-    double width = text.length() * 7.2 * settings.textSize();
-    x = Math.min(x, scale.left() + scale.width() - width);
     g.setFill(Skin.paper(settings).deriveColor(0, 1, 1, 0.8));
-    g.fillRect(x - 2, y, width, 16 * settings.textSize());
+    g.fillRect(box.getMinX(), box.getMinY(), box.getWidth(), box.getHeight());
     g.setFill(Skin.accent(settings));
-    g.fillText(text, x, y);
-    g.setFont(font(11, false));
-    g.setFill(Skin.ink(settings));
-    String loads =
-        String.format(
-            Locale.ROOT,
-            "dc %s, ac %s",
-            format.part(view.dcResistance(), Unit.OHM, 3),
-            format.part(view.acResistance(), Unit.OHM, 3));
-    g.fillText(loads, scale.left() + 6, scale.top() + 3);
+    g.fillText(text, box.getMinX() + 2, box.getMinY());
+    return box;
+  }
+
+  private Rectangle2D besidePoint(
+      LoadLineView view, double width, double height, List<Rectangle2D> taken) {
+    double x = scale.x(view.anode());
+    double y = scale.y(view.current() / MILLI);
+    Rectangle2D first = null;
+    for (double away : new double[] {10, 18, 30, 44}) {
+      for (double[] side : new double[][] {{1, -1}, {-1, 1}, {1, 1}, {-1, -1}, {1, 0}, {-1, 0}}) {
+        double left = side[0] > 0 ? x + away : x - away - width;
+        double top = y - height / 2 + side[1] * (height / 2 + away / 3);
+        Rectangle2D box = new Rectangle2D(inside(left, width), top, width, height);
+        first = first == null ? box : first;
+        boolean within = top > scale.top() && top + height < scale.top() + scale.height();
+        if (within && taken.stream().noneMatch(box::intersects)) {
+          return box;
+        }
+      }
+    }
+    return java.util.Objects.requireNonNull(first);
+  }
+
+  private double inside(double left, double width) {
+    return Math.max(scale.left() + 1, Math.min(left, scale.left() + scale.width() - width));
   }
 
   private Font font(double size, boolean bold) {

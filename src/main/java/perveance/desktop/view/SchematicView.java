@@ -101,7 +101,7 @@ final class SchematicView extends StackPane {
   /** One painter as long as the colours stay, so that it measures each text once. */
   private SchematicPainter painter() {
     Look look = Skin.look(desk.settings().get());
-    if (painter == null || look != painted) {
+    if (painter == null || !look.equals(painted)) {
       painter = new SchematicPainter(look, fonts);
       painted = look;
     }

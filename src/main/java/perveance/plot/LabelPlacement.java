@@ -32,7 +32,7 @@ final class LabelPlacement {
    * Where the labels stand.
    *
    * @param places one for each label
-   * @param collision area of text that covers something, in square grid units; 0 when none does
+   * @param collision area of text that covers something, in square grid units, 0 when none does [1]
    */
   record Placed(List<SchematicLabel.Place> places, double collision) {}
 

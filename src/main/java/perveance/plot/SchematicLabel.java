@@ -42,7 +42,13 @@ record SchematicLabel(
    */
   record Place(Rectangle2D box, double align, List<Line> lines) {}
 
-  /** Lines with the room that they need together. */
+  /**
+   * Lines with the room that they need together.
+   *
+   * @param lines from the top
+   * @param width in grid units [1]
+   * @param height in grid units [1]
+   */
   record Block(List<Line> lines, double width, double height) {
     private static final double ASCENT = 0.76;
     private static final double LEADING = 1.08;

@@ -4,7 +4,9 @@ import perveance.engine.circuit.Complex;
 import perveance.engine.circuit.Element;
 import perveance.engine.circuit.Element.Capacitor;
 import perveance.engine.circuit.Element.Resistor;
+import perveance.engine.circuit.Element.Valve;
 import perveance.engine.circuit.SmallSignal;
+import perveance.engine.circuit.ValvePoint;
 
 /**
  * Capacitance that the stage shows at its input: the current into the stage's own parts at the
@@ -36,16 +38,42 @@ final class InputAdmittance {
 
   private static double intoOwnParts(StageModel model) {
     int input = model.stage().inputNode();
-    Complex at = model.signal().strayTransfer(model.source(), input, 0, FREQUENCY);
+    Complex at = transfer(model, input);
     double sum = 0;
     for (Element element : model.circuit().elements()) {
       if (model.owns(element) && element instanceof Capacitor c && c.a() != c.b()) {
         sum += 2 * Math.PI * FREQUENCY * c.capacitance() * real(model, at, input, c.a(), c.b());
       } else if (model.owns(element) && element instanceof Resistor r) {
         sum += imaginary(model, at, input, r.a(), r.b()) / r.resistance();
+      } else if (model.owns(element) && element instanceof Valve v) {
+        sum += intoValve(model, at, v);
       }
     }
     return sum;
+  }
+
+  /**
+   * Imaginary part of the current that one volt at the input sends into a valve's electrodes there,
+   * as into the cathode of a grounded grid whose anode turns the phase.
+   */
+  private static double intoValve(StageModel model, Complex at, Valve valve) {
+    int input = model.stage().inputNode();
+    int[] node = {valve.anode(), valve.grid(), valve.screen()};
+    ValvePoint point = model.dc().valve(valve.name());
+    double cathode = imaginaryOfRatio(transfer(model, valve.cathode()), at);
+    double sum = 0;
+    for (int by = 0; by < node.length; by++) {
+      double swing = imaginaryOfRatio(transfer(model, node[by]), at) - cathode;
+      for (int e = 0; e < node.length; e++) {
+        double current = point.slope(e, by) * swing;
+        sum += (node[e] == input ? current : 0) - (valve.cathode() == input ? current : 0);
+      }
+    }
+    return sum;
+  }
+
+  private static Complex transfer(StageModel model, int node) {
+    return model.signal().strayTransfer(model.source(), node, 0, FREQUENCY);
   }
 
   /** Real part of (v(input) - v(other)) / v(input), zero for an element elsewhere. */
@@ -62,7 +90,7 @@ final class InputAdmittance {
   }
 
   private static Complex other(StageModel model, int input, int a, int b) {
-    return model.signal().strayTransfer(model.source(), a == input ? b : a, 0, FREQUENCY);
+    return transfer(model, a == input ? b : a);
   }
 
   private static double realOfRatio(Complex up, Complex down) {

@@ -22,6 +22,7 @@ public final class SmallSignal {
   private final FrameSolver atMidband;
   private double factoredFrequency = -1;
   private boolean midbandFactored;
+  private double strayFrequency = -1;
   private final Optional<DcSolver> source;
   private boolean restWanted;
   private long takenRevision;
@@ -80,6 +81,7 @@ public final class SmallSignal {
     NodalSystem system = solver.system();
     held.stamp(solver.values(), system.valves, system.junctions);
     midbandFactored = false;
+    strayFrequency = -1;
     restWanted = true;
     takenRevision = solver.revision();
   }
@@ -224,8 +226,12 @@ public final class SmallSignal {
   /** The mid-band's factors are made anew when they are next wanted. */
   private void factorStrays(double frequency) {
     ElementChecks.positive("frequency", frequency);
-    midbandFactored = false;
-    require(atMidband.factor(2 * Math.PI * frequency));
+    if (frequency != strayFrequency) {
+      midbandFactored = false;
+      strayFrequency = -1;
+      require(atMidband.factor(2 * Math.PI * frequency));
+      strayFrequency = frequency;
+    }
   }
 
   /**
@@ -312,6 +318,7 @@ public final class SmallSignal {
 
   private boolean factorMidband() {
     if (!midbandFactored) {
+      strayFrequency = -1;
       midbandFactored = atMidband.factor(0);
     }
     return midbandFactored;

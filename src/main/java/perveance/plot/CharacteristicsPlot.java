@@ -1,10 +1,13 @@
 package perveance.plot;
 
+import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 import perveance.engine.analysis.LoadLineView;
 import perveance.engine.device.CurveFamily;
 
@@ -14,6 +17,14 @@ import perveance.engine.device.CurveFamily;
  */
 public final class CharacteristicsPlot {
   private static final double MILLI = 1e-3;
+
+  /** A label nearer to the operating point than this part of the picture is in its way. */
+  private static final double NEAR = 0.08;
+
+  /** Room that a limit's label takes, in parts of the picture. */
+  private static final double WORDS_WIDE = 0.2;
+
+  private static final double WORDS_HIGH = 0.06;
 
   /** Which of the points of the dissipation limit carries its label. */
   private static final int LIMIT_LABEL = 24;
@@ -31,7 +42,19 @@ public final class CharacteristicsPlot {
    * @return description
    */
   public static PlotDescription of(CurveFamily family, OptionalDouble dissipation) {
-    return describe(family, dissipation, Optional.empty());
+    return describe(family, dissipation, Optional.empty(), Optional.empty());
+  }
+
+  /**
+   * The family alone, with room left for an operating point that is drawn over it.
+   *
+   * @param family characteristics
+   * @param dissipation anode limit drawn as a hyperbola, empty for none [W]
+   * @param over what will be drawn over it
+   * @return description
+   */
+  static PlotDescription under(CurveFamily family, OptionalDouble dissipation, LoadLineView over) {
+    return describe(family, dissipation, Optional.empty(), Optional.of(over));
   }
 
   /**
@@ -44,17 +67,20 @@ public final class CharacteristicsPlot {
    */
   public static PlotDescription of(
       CurveFamily family, OptionalDouble dissipation, LoadLineView lines) {
-    return describe(family, dissipation, Optional.of(lines));
+    return describe(family, dissipation, Optional.of(lines), Optional.of(lines));
   }
 
   private static PlotDescription describe(
-      CurveFamily family, OptionalDouble dissipation, Optional<LoadLineView> lines) {
+      CurveFamily family,
+      OptionalDouble dissipation,
+      Optional<LoadLineView> lines,
+      Optional<LoadLineView> spared) {
     List<PlotSeries> series = new ArrayList<>();
     List<PlotDescription.Label> labels = new ArrayList<>();
     for (int i = 0; i < family.curves().size(); i++) {
       addCurve(family, i, series, labels);
     }
-    dissipation.ifPresent(watts -> addLimit(family, watts, series, labels));
+    dissipation.ifPresent(watts -> addLimit(family, watts, spared, series, labels));
     lines.ifPresent(view -> addLines(family, view, series, labels));
     return new PlotDescription(
         family.title(),
@@ -109,6 +135,7 @@ public final class CharacteristicsPlot {
   private static void addLimit(
       CurveFamily family,
       double watts,
+      Optional<LoadLineView> spared,
       List<PlotSeries> series,
       List<PlotDescription.Label> labels) {
     double top = family.highestCurrent();
@@ -122,25 +149,55 @@ public final class CharacteristicsPlot {
       points.add(new PlotPoint(v, watts / v / MILLI));
     }
     series.add(new PlotSeries(watts + " W limit", PlotSeries.Role.LIMIT, points));
+    List<PlotPoint> places = new ArrayList<>(limitPlaces(points));
+    spared.ifPresent(view -> places.sort(Comparator.comparing(p -> isNear(p, view, family))));
     labels.add(
         new PlotDescription.Label(
             trim(watts) + " W limit",
-            points.get(LIMIT_LABEL),
+            places.get(0),
             PlotDescription.Anchor.BOTTOM_LEFT,
             false,
-            aroundLimitLabel(points)));
+            places));
   }
 
-  /** Outward from the middle of the hyperbola, to both sides in turn. */
-  private static List<PlotPoint> aroundLimitLabel(List<PlotPoint> points) {
-    List<PlotPoint> around = new ArrayList<>();
-    for (int i = 2; i < points.size() - LIMIT_LABEL; i += 2) {
-      around.add(points.get(LIMIT_LABEL + i));
+  /** From the middle of the hyperbola outward, to both sides in turn. */
+  private static List<PlotPoint> limitPlaces(List<PlotPoint> points) {
+    List<PlotPoint> places = new ArrayList<>();
+    for (int i = 0; i < points.size() - LIMIT_LABEL; i += 2) {
+      places.add(points.get(LIMIT_LABEL + i));
       if (i < LIMIT_LABEL) {
-        around.add(points.get(LIMIT_LABEL - i));
+        places.add(points.get(LIMIT_LABEL - i));
       }
     }
-    return around;
+    return places;
+  }
+
+  /** Whether the words would stand on the operating point or on a line, in parts of the picture. */
+  private static boolean isNear(PlotPoint place, LoadLineView view, CurveFamily family) {
+    double x = place.x() / family.highestVoltage();
+    double y = place.y() * MILLI / family.highestCurrent();
+    double px = view.anode() / family.highestVoltage();
+    double py = view.current() / family.highestCurrent();
+    Rectangle2D words = new Rectangle2D.Double(x, y, WORDS_WIDE, WORDS_HIGH);
+    return words.intersects(px - NEAR, py - NEAR, 2 * NEAR + WORDS_WIDE, 2 * NEAR)
+        || Stream.of(view.dc(), view.ac(), view.excursion())
+            .anyMatch(line -> crosses(line, words, family));
+  }
+
+  private static boolean crosses(
+      List<LoadLineView.Point> line, Rectangle2D words, CurveFamily family) {
+    for (int i = 1; i < line.size(); i++) {
+      LoadLineView.Point a = line.get(i - 1);
+      LoadLineView.Point b = line.get(i);
+      if (words.intersectsLine(
+          a.voltage() / family.highestVoltage(),
+          a.current() / family.highestCurrent(),
+          b.voltage() / family.highestVoltage(),
+          b.current() / family.highestCurrent())) {
+        return true;
+      }
+    }
+    return false;
   }
 
   private static void addLines(

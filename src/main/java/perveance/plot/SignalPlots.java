@@ -117,7 +117,7 @@ public final class SignalPlots {
     answer
         .clean()
         .headroom()
-        .ifPresent(h -> vertical(series, answer.clean().inputPeak(), most, "clean input"));
+        .ifPresent(h -> cleanInput(series, labels, answer.clean().inputPeak(), most));
     return Optional.of(
         new PlotDescription(
             "Distortion",
@@ -127,10 +127,12 @@ public final class SignalPlots {
             labels));
   }
 
-  private static void vertical(List<PlotSeries> series, double x, double top, String name) {
-    series.add(
-        new PlotSeries(
-            name, Role.LIMIT, List.of(new PlotPoint(x, LEAST_PERCENT), new PlotPoint(x, top))));
+  private static void cleanInput(
+      List<PlotSeries> series, List<Label> labels, double x, double top) {
+    PlotPoint foot = new PlotPoint(x, LEAST_PERCENT);
+    PlotPoint head = new PlotPoint(x, decadeAbove(top));
+    series.add(new PlotSeries("clean input", Role.LIMIT, List.of(foot, head)));
+    labels.add(new Label("clean to here", head, Anchor.TOP_RIGHT, false));
   }
 
   private static void add(

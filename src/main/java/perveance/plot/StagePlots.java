@@ -61,8 +61,8 @@ public final class StagePlots {
                 section(answer, view.ref())
                     .map(
                         section ->
-                            CharacteristicsPlot.of(
-                                family(answer, view, section), limit(section.device()))));
+                            CharacteristicsPlot.under(
+                                family(answer, view, section), limit(section.device()), view)));
   }
 
   /**

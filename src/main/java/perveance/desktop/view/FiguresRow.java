@@ -17,6 +17,9 @@ import perveance.engine.analysis.StageAnswer;
 final class FiguresRow extends VBox {
   private static final int COLUMNS = 4;
 
+  /** So many figures still fill two rows of the usual columns. */
+  private static final int TWO_ROWS = 8;
+
   /** Shown at the foot of the window. */
   private static final Set<String> ELSEWHERE = Set.of("output", "power", "distortion");
 
@@ -31,11 +34,6 @@ final class FiguresRow extends VBox {
     setSpacing(6);
     grid.setHgap(14);
     grid.setVgap(8);
-    for (int i = 0; i < COLUMNS; i++) {
-      ColumnConstraints column = new ColumnConstraints();
-      column.setPercentWidth(100.0 / COLUMNS);
-      grid.getColumnConstraints().add(column);
-    }
     getChildren().addAll(grid, basis);
   }
 
@@ -45,7 +43,7 @@ final class FiguresRow extends VBox {
       Label name = Bits.label("", "figure-label");
       Label value = Bits.label("", "figure-value");
       Label band = Bits.label("", "figure-note");
-      Label note = Bits.label("", "figure-note");
+      Label note = Bits.wrapped("", "figure-note");
       return new Cell(new VBox(name, value, band, note), name, value, band, note);
     }
   }
@@ -57,18 +55,30 @@ final class FiguresRow extends VBox {
             .flatMap(a -> StageFigures.signal(a).stream())
             .filter(r -> !ELSEWHERE.contains(r.label()))
             .toList();
-    while (cells.size() > rows.size()) {
-      grid.getChildren().remove(cells.remove(cells.size() - 1).box());
-    }
-    while (cells.size() < rows.size()) {
-      Cell cell = Cell.empty();
-      grid.add(cell.box(), cells.size() % COLUMNS, cells.size() / COLUMNS);
-      cells.add(cell);
+    if (cells.size() != rows.size()) {
+      layOut(rows.size());
     }
     for (int i = 0; i < rows.size(); i++) {
       show(cells.get(i), rows.get(i));
     }
     basis.setText(answer.isEmpty() ? "" : desk.say(basis()));
+  }
+
+  private void layOut(int figures) {
+    int columns = figures > TWO_ROWS ? COLUMNS + 1 : COLUMNS;
+    grid.getChildren().clear();
+    grid.getColumnConstraints().clear();
+    for (int i = 0; i < columns; i++) {
+      ColumnConstraints column = new ColumnConstraints();
+      column.setPercentWidth(100.0 / columns);
+      grid.getColumnConstraints().add(column);
+    }
+    cells.clear();
+    for (int i = 0; i < figures; i++) {
+      Cell cell = Cell.empty();
+      grid.add(cell.box(), i % columns, i / columns);
+      cells.add(cell);
+    }
   }
 
   private String basis() {

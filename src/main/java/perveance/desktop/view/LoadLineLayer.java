@@ -108,7 +108,7 @@ final class LoadLineLayer extends Region {
     grips.forEach(grip -> taken.add(new Rectangle2D(grip.x() - 8, grip.y() - 9, 16, 18)));
     taken.add(label(g, view, settings, taken));
     if (edge.size() > 1) {
-      gridCurrentWords(g, settings, taken);
+      gridCurrentWords(g, settings, edge, taken);
     }
   }
 
@@ -131,8 +131,9 @@ final class LoadLineLayer extends Region {
     g.fill();
   }
 
-  /** In the corner, or as far down the axis as something else stands there. */
-  private void gridCurrentWords(GraphicsContext g, Settings settings, List<Rectangle2D> taken) {
+  /** In the corner, or as far down the axis as something else stands there; only if they fit. */
+  private void gridCurrentWords(
+      GraphicsContext g, Settings settings, List<PlotPoint> edge, List<Rectangle2D> taken) {
     String words = desk.say("grid current");
     Font font = font(11, false);
     double width = widths.width(words, font);
@@ -140,7 +141,7 @@ final class LoadLineLayer extends Region {
     double x = scale.left() + 7;
     for (double y = scale.top() + 3; y < scale.top() + scale.height() / 2; y += 5) {
       Rectangle2D box = new Rectangle2D(x, y, width, height);
-      if (taken.stream().noneMatch(box::intersects)) {
+      if (taken.stream().noneMatch(box::intersects) && shaded(edge, x + width, y + height)) {
         g.setFill(Skin.amber(settings));
         g.setFont(font);
         g.setTextBaseline(VPos.TOP);
@@ -148,6 +149,11 @@ final class LoadLineLayer extends Region {
         return;
       }
     }
+  }
+
+  /** Whether the curve at which grid current begins runs to the right of a point or below it. */
+  private boolean shaded(List<PlotPoint> edge, double x, double y) {
+    return edge.stream().noneMatch(p -> scale.x(p.x()) < x && scale.y(p.y()) < y);
   }
 
   /** The region that published evidence covers. */

@@ -56,7 +56,7 @@ final class PlotCard extends VBox {
     this.desk = desk;
     this.fonts = fonts;
     characteristics = new CharacteristicsView(desk, fonts);
-    spread = new SpreadView(desk);
+    spread = new SpreadView(desk, fonts);
     getStyleClass().add("card");
     HBox bar = new HBox(9);
     ToggleGroup group = new ToggleGroup();
@@ -112,7 +112,9 @@ final class PlotCard extends VBox {
   }
 
   Optional<PlotDescription> description() {
-    return desk.bench().stageAnswer().flatMap(view.plot);
+    return view == View.SPREAD
+        ? spread.description()
+        : desk.bench().stageAnswer().flatMap(view.plot);
   }
 
   String title() {

@@ -5,152 +5,157 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import javafx.geometry.HPos;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
-import javafx.scene.layout.Region;
-import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import perveance.app.wording.Figures;
 import perveance.desktop.viewmodel.Desk;
+import perveance.desktop.viewmodel.SpreadFigure;
 import perveance.engine.analysis.Band;
-import perveance.engine.analysis.DevicePoint;
-import perveance.engine.analysis.StageAnswer;
-import perveance.engine.base.Unit;
+import perveance.plot.ChartFactory;
+import perveance.plot.PlotDescription;
+import perveance.plot.PlotFonts;
+import perveance.plot.SpreadPlot;
 
-/** The 95 % bands and what they come from. */
-final class SpreadView extends ScrollPane {
+/** How a figure spreads over valves and parts; beneath it all figures with what widens them. */
+final class SpreadView extends VBox {
   private static final int MOST_CAUSES = 4;
+  private static final double PICTURE_SHARE = 0.55;
 
   private final Desk desk;
-  private final VBox content = new VBox(10);
+  private final PlotFonts fonts;
+  private final ArtworkNode picture = new ArtworkNode();
+  private final Label causes = Bits.wrapped("", "soft", "small");
+  private final VBox rows = new VBox();
+  private String chosen = "";
 
-  SpreadView(Desk desk) {
+  SpreadView(Desk desk, PlotFonts fonts) {
+    super(4);
     this.desk = desk;
-    setContent(content);
-    setFitToWidth(true);
+    this.fonts = fonts;
+    ScrollPane scroll = new ScrollPane(rows);
+    scroll.setFitToWidth(true);
+    picture.setId("spread-picture");
+    causes.setId("spread-causes");
+    picture.minHeightProperty().bind(heightProperty().multiply(PICTURE_SHARE));
+    getChildren().addAll(picture, causes, Bits.growing(scroll));
+    scroll.setMinHeight(60);
+    scroll.setPrefHeight(60);
   }
-
-  private record Row(String name, double value, Unit unit, Band band) {}
 
   void refresh() {
-    content.getChildren().clear();
-    Optional<StageAnswer> answer = desk.bench().stageAnswer();
-    if (answer.isEmpty()) {
-      return;
+    rows.getChildren().clear();
+    for (SpreadFigure figure : figures()) {
+      rows.getChildren().add(row(figure));
     }
-    List<Row> rows = rows(answer.get());
-    if (rows.isEmpty()) {
-      content.getChildren().add(Bits.wrapped("The bands are being worked out.", "soft"));
-      return;
-    }
-    content
-        .getChildren()
-        .add(
-            Bits.wrapped(
-                desk.say(
-                    "95 of 100 such chassis lie in the band; beneath it, what the width comes"
-                        + " from. Measuring the first cause and typing it in narrows the band"
-                        + " most."),
-                "soft",
-                "small"));
-    rows.forEach(row -> content.getChildren().add(row(row)));
+    draw();
   }
 
-  private static List<Row> rows(StageAnswer answer) {
-    List<Row> rows = new java.util.ArrayList<>();
-    for (DevicePoint p : answer.points()) {
-      add(
-          rows,
-          p.ref() + " anode to chassis",
-          p.anodeChassis(),
-          Unit.VOLT,
-          p.bands(),
-          "anodeChassis");
-      add(
-          rows,
-          p.ref() + " anode current",
-          p.anodeCurrent(),
-          Unit.AMPERE,
-          p.bands(),
-          "anodeCurrent");
-      add(
-          rows,
-          p.ref() + " cathode to chassis",
-          p.cathodeChassis(),
-          Unit.VOLT,
-          p.bands(),
-          "cathodeChassis");
-    }
-    Map<String, Band> small = answer.smallSignal().bands();
-    add(rows, "gain", answer.smallSignal().gain(), Unit.RATIO, small, "gain");
-    add(
-        rows,
-        "output resistance",
-        answer.smallSignal().outputResistance(),
-        Unit.OHM,
-        small,
-        "outputResistance");
-    Map<String, Band> clean = answer.clean().bands();
-    add(rows, "clean input, peak", answer.clean().inputPeak(), Unit.VOLT, clean, "inputPeak");
-    add(rows, "clean output, peak", answer.clean().outputPeak(), Unit.VOLT, clean, "outputPeak");
-    return rows;
+  private List<SpreadFigure> figures() {
+    return desk.bench().stageAnswer().map(SpreadFigure::all).orElse(List.of());
   }
 
-  private static void add(
-      List<Row> rows, String name, double value, Unit unit, Map<String, Band> bands, String key) {
-    Band band = bands.get(key);
-    if (band != null && band.high() > band.low()) {
-      rows.add(new Row(name, value, unit, band));
-    }
+  /** The figure that is shown: the chosen one, or the first where this stage has no such. */
+  private Optional<SpreadFigure> shown() {
+    List<SpreadFigure> figures = figures();
+    return figures.stream()
+        .filter(f -> f.name().equals(chosen))
+        .findFirst()
+        .or(() -> figures.stream().findFirst());
   }
 
-  private Region row(Row row) {
-    GridPane grid = new GridPane();
-    grid.setHgap(12);
-    grid.setVgap(2);
-    javafx.scene.layout.ColumnConstraints name = new javafx.scene.layout.ColumnConstraints();
-    name.setPercentWidth(46);
-    grid.getColumnConstraints().add(name);
-    Label value =
-        Bits.label(
-            Figures.value(row.value(), row.unit(), new TreeMap<>(Map.of("v", row.band())), "v"),
-            "strong");
-    Label band = Bits.label(Figures.band(Map.of("v", row.band()), "v", row.unit()), "soft");
-    grid.add(Bits.wrapped(desk.say(row.name())), 0, 0);
-    grid.add(value, 1, 0);
-    grid.add(band, 2, 0);
-    GridPane.setHalignment(value, HPos.RIGHT);
-    return new VBox(3, grid, bar(row), causes(row));
+  Optional<PlotDescription> description() {
+    return shown()
+        .flatMap(f -> SpreadPlot.of(desk.say(f.name()), f.unit(), f.band(), f.value(), f.limit()));
   }
 
-  /** The band as a bar with the value in it. */
-  private static Region bar(Row row) {
-    StackPane bar = new StackPane();
-    bar.setMinHeight(8);
-    bar.setStyle("-fx-background-color: -wash; -fx-background-radius: 3;");
-    Region mark = new Region();
-    mark.setMaxSize(3, 12);
-    mark.setMinSize(3, 12);
-    mark.setStyle("-fx-background-color: -accent;");
-    double share = (row.value() - row.band().low()) / (row.band().high() - row.band().low());
-    bar.getChildren().add(mark);
-    StackPane.setAlignment(mark, javafx.geometry.Pos.CENTER_LEFT);
-    mark.translateXProperty().bind(bar.widthProperty().multiply(Math.max(0, Math.min(1, share))));
-    return bar;
-  }
-
-  private Label causes(Row row) {
-    StringBuilder text = new StringBuilder();
-    for (Band.Share share : row.band().shares().stream().limit(MOST_CAUSES).toList()) {
-      if (share.fraction() > 0.01) {
-        text.append(text.isEmpty() ? "" : ", ")
-            .append(share.cause().replace('_', ' '))
-            .append(' ')
-            .append(Math.round(100 * share.fraction()))
-            .append(" %");
+  private void draw() {
+    double size = 11 * desk.settings().get().textSize();
+    picture.show(
+        description()
+            .map(d -> new ChartFactory(Skin.look(desk.settings().get()), fonts, size).artwork(d))
+            .orElse((g, area) -> List.of()));
+    String name = shown().map(SpreadFigure::name).orElse("");
+    for (Node row : rows.getChildren()) {
+      row.getStyleClass().remove("chosen");
+      if (("spread-" + name).equals(row.getId())) {
+        row.getStyleClass().add("chosen");
       }
     }
-    return Bits.wrapped(desk.say(text.toString()), "soft", "small");
+    causes.setText(desk.say(shown().map(f -> causes(f.band())).orElse(absent())));
+    picture.setAccessibleText(desk.say("How " + name + " spreads"));
+  }
+
+  private String absent() {
+    return desk.bench().settled().get()
+        ? "Nothing of this stage spreads."
+        : "The bands are being worked out.";
+  }
+
+  private Button row(SpreadFigure figure) {
+    GridPane numbers = numbers(figure);
+    numbers.prefWidthProperty().bind(rows.widthProperty().subtract(24));
+    Button row = new Button();
+    row.getStyleClass().setAll("chassis-row", "spread-row");
+    row.setId("spread-" + figure.name());
+    row.setMaxWidth(Double.MAX_VALUE);
+    row.setGraphic(numbers);
+    row.setAccessibleText(
+        desk.say(figure.name() + " " + value(figure) + ", band " + band(figure) + limit(figure)));
+    row.setOnAction(
+        e -> {
+          chosen = figure.name();
+          draw();
+        });
+    return row;
+  }
+
+  private GridPane numbers(SpreadFigure figure) {
+    GridPane grid = new GridPane();
+    grid.setHgap(8);
+    for (double percent : new double[] {45, 18, 37}) {
+      ColumnConstraints column = new ColumnConstraints();
+      column.setPercentWidth(percent);
+      grid.getColumnConstraints().add(column);
+    }
+    Label value = Bits.label(value(figure), "strong");
+    grid.add(Bits.label(desk.say(figure.name())), 0, 0);
+    grid.add(value, 1, 0);
+    grid.add(Bits.label(band(figure) + limit(figure), "soft", "small"), 2, 0);
+    GridPane.setHalignment(value, HPos.RIGHT);
+    return grid;
+  }
+
+  private static String value(SpreadFigure f) {
+    return Figures.value(f.value(), f.unit(), new TreeMap<>(Map.of("v", f.band())), "v");
+  }
+
+  private static String band(SpreadFigure f) {
+    return Figures.band(Map.of("v", f.band()), "v", f.unit());
+  }
+
+  private static String limit(SpreadFigure f) {
+    return f.limit().isPresent()
+        ? " of " + Figures.reading(f.limit().getAsDouble(), f.unit(), 2)
+        : "";
+  }
+
+  private static String causes(Band band) {
+    StringBuilder text =
+        new StringBuilder("95 of 100 lie between the dashed lines. It comes from ");
+    boolean first = true;
+    for (Band.Share share : band.shares().stream().limit(MOST_CAUSES).toList()) {
+      text.append(first ? "" : ", ")
+          .append(share.cause().replace('_', ' '))
+          .append(' ')
+          .append(Math.round(100 * share.fraction()))
+          .append(" %");
+      first = false;
+    }
+    return text + ".";
   }
 }

@@ -6,6 +6,7 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import perveance.engine.analysis.Band.Share;
 import perveance.engine.numeric.Statistics;
 
@@ -18,6 +19,8 @@ import perveance.engine.numeric.Statistics;
 final class BandBuilder {
   /** Shares below this are noise of the sampling and are left out. */
   private static final double LEAST_SHARE = 0.01;
+
+  private static final double LEAST_SPREAD = 1e-9;
 
   /** Fewer answers than this make no band. */
   static final int LEAST_SAMPLES = 10;
@@ -43,10 +46,15 @@ final class BandBuilder {
     }
     double mean = Statistics.mean(sorted);
     Arrays.sort(sorted);
+    double low = Statistics.percentileOfSorted(sorted, 0.025);
+    double high = Statistics.percentileOfSorted(sorted, 0.975);
+    // a spread that is lost in rounding has no shape
+    boolean spread = high - low > LEAST_SPREAD * Math.max(Math.abs(low), Math.abs(high));
     return new Band(
-        Statistics.percentileOfSorted(sorted, 0.025),
-        Statistics.percentileOfSorted(sorted, 0.975),
-        shares(figure, mean));
+        low,
+        high,
+        shares(figure, mean),
+        spread ? Optional.of(Histogram.of(sorted)) : Optional.empty());
   }
 
   /** The samples that have an answer. */

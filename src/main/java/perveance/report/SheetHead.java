@@ -2,8 +2,11 @@ package perveance.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import perveance.app.wording.ChainFigures;
 import perveance.app.wording.Figures;
 import perveance.engine.analysis.ChassisAnswer;
+import perveance.engine.analysis.SignalChain;
 import perveance.engine.analysis.SupplyAnswer;
 import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Unit;
@@ -76,6 +79,12 @@ final class SheetHead {
                         Math.round(100 * c.resistorTolerance()) + " %")),
             9,
             Ink.BLACK));
+    supply().ifPresent(blocks::add);
+    answer.chains().forEach(chain -> blocks.add(path(chain)));
+    return blocks;
+  }
+
+  private Optional<Block> supply() {
     StringBuilder supply = new StringBuilder();
     for (SupplyAnswer s : answer.supplies()) {
       supply
@@ -89,10 +98,14 @@ final class SheetHead {
         supply.append(", cold ").append(Figures.reading(s.coldVoltage(), Unit.VOLT));
       }
     }
-    if (!supply.isEmpty()) {
-      blocks.add(new TextBlock(faces, "Supply", supply.toString(), 9, Ink.BLACK, false, 6));
-    }
-    return blocks;
+    return supply.isEmpty()
+        ? Optional.empty()
+        : Optional.of(new TextBlock(faces, "Supply", supply.toString(), 9, Ink.BLACK, false, 6));
+  }
+
+  private Block path(SignalChain chain) {
+    String told = options.vocabulary().say(ChainFigures.inOneLine(chain));
+    return new TextBlock(faces, "Signal", told, 9, Ink.BLACK, false, 6);
   }
 
   /** Stages that could not be solved, said on paper too. */

@@ -49,6 +49,18 @@ class CheckCommandTest {
     assertTrue(trial.out().startsWith("Line stage"), trial.out());
   }
 
+  /** Stages in a row are told with their levels, in words and for machines. */
+  @Test
+  void theSignalPathIsTold() {
+    String out = CommandTrial.of("check", "examples/phono-stage.toml").out();
+    assertTrue(out.contains("V1b overloads first, by grid current"), out);
+    assertTrue(out.contains("V1a  gain \u221269.3  31.6 mV in, 2.19 V out"), out);
+    String json = CommandTrial.of("check", "--json", "examples/phono-stage.toml").out();
+    assertTrue(json.contains("\"clips_first\" : \"V1b\""), json);
+    assertTrue(json.contains("\"imd_smpte\""), json);
+    assertTrue(json.contains("\"low_3dB_Hz\" : ["), json);
+  }
+
   @Test
   void noLineIsWiderThanAHundredColumns() {
     CommandTrial trial = CommandTrial.of("check", "--explain", EXAMPLE);

@@ -72,6 +72,18 @@ class BuildSheetTest {
     }
   }
 
+  /** Stages in a row: levels between them, and which overloads first, stand with the conditions. */
+  @Test
+  void theSignalPathIsPrinted() throws BadInputException, IOException {
+    ChassisAnswer row = SheetTrial.answer("examples/phono-stage.toml");
+    String printed =
+        SheetTrial.text(
+            new BuildSheet(SheetTrial.options(PaperSize.A4, Vocabulary.BRITISH)).render(row));
+    int path = printed.indexOf("V1b overloads first, by grid current");
+    assertTrue(path > 0 && path < printed.indexOf("Readings"), printed);
+    assertTrue(printed.contains("\u2192 V1a \u00d769 \u2192"), printed);
+  }
+
   @Test
   void theWordSafeIsNeverPrinted() {
     assertFalse(

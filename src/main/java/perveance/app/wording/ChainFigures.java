@@ -35,6 +35,48 @@ public final class ChainFigures {
   }
 
   /**
+   * The whole path for a line of text: levels between the stages, then what limits it.
+   *
+   * @param chain stages in a row
+   * @return for example "37 mV → V1a ×36 → 1.4 V → V2 ×26 → 35 V peak. V2 overloads first ..."
+   */
+  public static String inOneLine(SignalChain chain) {
+    StringBuilder path = new StringBuilder(level(chain.inputPeak()));
+    for (SignalChain.Link link : chain.links()) {
+      path.append(" \u2192 ")
+          .append(link.ref())
+          .append(" \u00d7")
+          .append(Figures.reading(Math.abs(link.gain()), Unit.RATIO, 2))
+          .append(" \u2192 ")
+          .append(level(link.outputPeak()));
+    }
+    return path + " peak. " + sentence(chain);
+  }
+
+  /**
+   * What a stage's own headroom is worth in its row.
+   *
+   * @param chains all rows of the chassis
+   * @param ref a stage
+   * @return for example "V3 overloads before it"; empty for a stage in no row
+   */
+  public static String beside(List<SignalChain> chains, String ref) {
+    return chains.stream()
+        .filter(c -> c.links().stream().anyMatch(l -> l.ref().equals(ref)))
+        .findFirst()
+        .map(
+            c ->
+                c.clipsFirst().equals(ref)
+                    ? "the first of its row to overload"
+                    : c.clipsFirst() + " overloads before it")
+        .orElse("");
+  }
+
+  private static String level(double volts) {
+    return Figures.reading(volts, Unit.VOLT, 2);
+  }
+
+  /**
    * One row for each stage: its gain, the levels before and behind it when the first one overloads,
    * and what it has to spare then.
    *

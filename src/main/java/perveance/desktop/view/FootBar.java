@@ -7,10 +7,12 @@ import javafx.scene.control.Slider;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import perveance.app.Edit;
+import perveance.app.wording.ChainFigures;
 import perveance.app.wording.Figures;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.KeyEditor;
 import perveance.desktop.viewmodel.Workbench;
+import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.CleanSwing;
 import perveance.engine.analysis.DrivenAnswer;
 import perveance.engine.analysis.StageAnswer;
@@ -101,7 +103,13 @@ final class FootBar extends HBox {
         clean.headroom().isPresent()
             ? QuantityFormat.TYPESET.level(clean.headroom().getAsDouble(), 1)
             : "\u2013");
-    headroomNote.setText("to " + clean.limitedBy().told());
+    headroomNote.setText(desk.say("to " + clean.limitedBy().told() + inItsRow(answer)));
+  }
+
+  private String inItsRow(StageAnswer answer) {
+    ChassisAnswer chassis = bench.answer().get();
+    String told = chassis == null ? "" : ChainFigures.beside(chassis.chains(), answer.ref());
+    return told.isEmpty() ? "" : "; " + told;
   }
 
   private static String harmonics(DrivenAnswer driven) {

@@ -3,10 +3,12 @@ package perveance.desktop.viewmodel;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Collectors;
+import perveance.app.wording.ChainFigures;
 import perveance.app.wording.FigureRow;
 import perveance.app.wording.StageFigures;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.DevicePoint;
+import perveance.engine.analysis.SignalChain;
 import perveance.engine.analysis.StageAnswer;
 
 /** All figures of a chassis as a table for a spreadsheet. */
@@ -27,6 +29,11 @@ public final class FiguresTable {
         StageFigures.point(point).forEach(r -> rows.add(row(stage.ref(), point.ref(), r)));
       }
       StageFigures.signal(stage).forEach(r -> rows.add(row(stage.ref(), "", r)));
+    }
+    for (SignalChain chain : answer.chains()) {
+      ChainFigures.rows(chain)
+          .forEach(
+              r -> rows.add(List.of(r.label(), "", "signal path", r.value(), r.band(), r.note())));
     }
     return rows.stream()
         .map(r -> r.stream().map(FiguresTable::quoted).collect(Collectors.joining(",")))

@@ -3,6 +3,7 @@ package perveance.engine.analysis;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** All hand sums of a stage. */
 final class HandSums {
@@ -12,9 +13,15 @@ final class HandSums {
   private HandSums() {}
 
   static List<HandSum> of(
-      StageModel model, List<DevicePoint> points, SmallSignalAnswer small, double peak) {
+      StageModel model,
+      List<DevicePoint> points,
+      SmallSignalAnswer small,
+      CleanSwing clean,
+      OptionalDouble drive) {
+    double peak = drive.orElse(clean.inputPeak());
     List<HandSum> sums = new ArrayList<>(new PointSums(model).of(points));
     Optional<SignalPath> path = SignalPath.of(model);
+    boolean onGrid = path.filter(p -> p.way() == SignalPath.Way.COMMON_CATHODE).isPresent();
     if (path.isPresent() && points.get(0).mutualConductance() > LEAST) {
       LoadSeen seen = new LoadSeen(model, points.get(0).ref(), false);
       Optional<Double> load = seen.acResistance();
@@ -25,7 +32,13 @@ final class HandSums {
             new FrequencySums(model, small)
                 .all(points.get(0), load.get() - path.get().cathodeResistance()));
       }
+      if (onGrid) {
+        sums.addAll(NoiseSums.of(model, small, points.get(0)));
+      }
     }
+    boolean still = onGrid && path.orElseThrow().cathodeResistance() == 0;
+    double onset = model.valve(points.get(0).ref()).law().gridCurrentOnset();
+    sums.addAll(OverloadSums.of(clean, points.get(0), onset, drive, still));
     sums.addAll(SwingSums.of(new StageCurve(model), peak, model.inputShare()));
     return sums;
   }

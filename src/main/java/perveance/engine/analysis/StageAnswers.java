@@ -70,9 +70,7 @@ final class StageAnswers {
         options.details() ? parts(model, values, atDrive) : List.of(),
         readings(model, points, bands),
         loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak()))),
-        options.details()
-            ? HandSums.of(model, points, small, drive.orElse(clean.inputPeak()))
-            : List.of(),
+        options.details() ? HandSums.of(model, points, small, clean, drive) : List.of(),
         model.stage().assumptions(),
         List.of());
   }

@@ -46,7 +46,8 @@ final class SupplyEdits {
               ? new SupplyFeed.Dropped(changed, d.dropper())
               : s.feed();
       supplies.add(
-          new Supply(s.name().equals(name) ? changed : s.name(), feed, s.reservoir(), s.bleeder()));
+          new Supply(s.name().equals(name) ? changed : s.name(), feed, s.reservoir(), s.bleeder())
+              .with(s.ratings()));
     }
     List<StageEntry> stages = new ArrayList<>(chassis.stages());
     for (String key : KEYS) {

@@ -85,7 +85,8 @@ final class Nearby {
             supply.name(),
             new SupplyFeed.Stated(solved.get().voltage() / chassis.conditions().mainsRatio()),
             supply.reservoir(),
-            supply.bleeder())
+            supply.bleeder(),
+            supply.ratings())
         : supply;
   }
 

@@ -13,6 +13,7 @@ import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.StageKind;
 import perveance.engine.stage.Supply;
 import perveance.engine.stage.SupplyFeed;
+import perveance.engine.stage.SupplyRatings;
 
 /** What can be done with the stages and supply nodes of a chassis. */
 public final class StageList {
@@ -185,7 +186,9 @@ public final class StageList {
               : new SupplyFeed.Stated(QuantityParser.parse(value, Unit.VOLT).value());
       Supply supply =
           new Supply(name, feed, optional(reservoir, Unit.FARAD), optional(bleeder, Unit.OHM));
-      return bench.edit(new Edit.SetSupply(supply));
+      SupplyRatings ratings =
+          bench.chassis().supply(name).map(Supply::ratings).orElse(SupplyRatings.NONE);
+      return bench.edit(new Edit.SetSupply(supply.with(ratings)));
     } catch (QuantityException e) {
       return Optional.of("Found " + e.found() + ", expected " + e.expected() + ".");
     }

@@ -3,7 +3,6 @@ package perveance.desktop.viewmodel;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.BiFunction;
 import java.util.function.Consumer;
@@ -358,18 +357,13 @@ public final class Workbench {
   }
 
   private void take(String where, Remedy remedy) {
-    String ref = stageOf(where);
-    List<Edit> edits = new ArrayList<>();
-    for (Map.Entry<String, String> e : remedy.edits().entrySet()) {
-      KeyEditor.Outcome outcome = KeyEditor.parse(chassis(), ref, e.getKey(), e.getValue());
-      if (outcome instanceof KeyEditor.Outcome.Accepted accepted) {
-        edits.add(accepted.edit());
-      } else if (outcome instanceof KeyEditor.Outcome.Refused refused) {
-        message.set(refused.why());
-        return;
-      }
+    RemedyEdits.Outcome outcome = RemedyEdits.of(chassis(), where, stageOf(where), remedy);
+    if (outcome.refused().isPresent()) {
+      message.set(outcome.refused().get());
+      return;
     }
-    Optional<String> refused = edit(new Edit.Together("take the remedy for " + where, edits));
+    Optional<String> refused =
+        edit(new Edit.Together("take the remedy for " + where, outcome.edits()));
     if (refused.isEmpty()) {
       message.set(remedy.text());
     }

@@ -63,6 +63,7 @@ public final class ChassisAnalysis {
     List<Finding> findings = new ArrayList<>();
     if (options.details()) {
       findings.addAll(new ChassisFindings(model).all(discharges));
+      dc.ifPresent(idle -> findings.addAll(SupplyPartFindings.of(model, idle, cold)));
       dc.ifPresent(idle -> findings.addAll(answers.drain().findings(model, idle)));
       findings.addAll(ChainFindings.of(chains, stages));
     }

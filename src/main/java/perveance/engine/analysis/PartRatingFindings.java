@@ -15,7 +15,7 @@ import perveance.engine.stage.StageCircuit.PartType;
 /** Findings about parts whose rating the stage states: what they bear against what they may. */
 final class PartRatingFindings {
   /** Share of the rated power beyond which a resistor runs hot, common practice 50 to 60 % [1]. */
-  private static final double HOT = 0.6;
+  static final double HOT = 0.6;
 
   private final FindingContext context;
   private final PartDuty duty;

@@ -6,13 +6,27 @@ import java.util.OptionalDouble;
 import perveance.engine.base.Unit;
 import perveance.engine.stage.Supply;
 import perveance.engine.stage.SupplyFeed;
+import perveance.engine.stage.SupplyRatings;
 import perveance.files.toml.Range;
 import perveance.files.toml.StrictTable;
 
 /** Reads one supply node. */
 final class SupplyReader {
+  static final String RESERVOIR_VOLTAGE = "reservoir_voltage";
+  static final String DROPPER_POWER = "dropper_power";
+  static final String BLEEDER_POWER = "bleeder_power";
+
   /** The keys in their usual order. */
-  static final List<String> ORDER = List.of("voltage", "from", "dropper", "reservoir", "bleeder");
+  static final List<String> ORDER =
+      List.of(
+          "voltage",
+          "from",
+          "dropper",
+          "reservoir",
+          "bleeder",
+          RESERVOIR_VOLTAGE,
+          DROPPER_POWER,
+          BLEEDER_POWER);
 
   /** Finite is all that is asked here; what is possible the engine's checks say. */
   private static final double FINITE = 1e15;
@@ -20,6 +34,9 @@ final class SupplyReader {
   private static final Range VOLTAGE = Range.within(Unit.VOLT, FINITE);
   private static final Range RESISTANCE = Range.within(Unit.OHM, FINITE);
   private static final Range CAPACITANCE = Range.within(Unit.FARAD, FINITE);
+
+  private static final Range RATED_VOLTAGE = new Range(Unit.VOLT, 1, 50e3);
+  private static final Range RATED_POWER = new Range(Unit.WATT, 0.01, 10e3);
 
   private SupplyReader() {}
 
@@ -30,11 +47,16 @@ final class SupplyReader {
     OptionalDouble dropper = table.quantity("dropper", RESISTANCE);
     OptionalDouble reservoir = table.quantity("reservoir", CAPACITANCE);
     OptionalDouble bleeder = table.quantity("bleeder", RESISTANCE);
+    SupplyRatings ratings =
+        new SupplyRatings(
+            table.quantity(RESERVOIR_VOLTAGE, RATED_VOLTAGE),
+            table.quantity(DROPPER_POWER, RATED_POWER),
+            table.quantity(BLEEDER_POWER, RATED_POWER));
     table.refuseOthers();
     Optional<SupplyFeed> feed = feed(table, voltage, from, dropper);
     return feed.isEmpty()
         ? Optional.empty()
-        : Optional.of(new Supply(name, feed.get(), reservoir, bleeder));
+        : Optional.of(new Supply(name, feed.get(), reservoir, bleeder, ratings));
   }
 
   private static Optional<SupplyFeed> feed(

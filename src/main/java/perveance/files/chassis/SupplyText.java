@@ -24,6 +24,9 @@ final class SupplyText {
     }
     put(values, "reservoir", supply.reservoir(), Unit.FARAD);
     put(values, "bleeder", supply.bleeder(), Unit.OHM);
+    put(values, SupplyReader.RESERVOIR_VOLTAGE, supply.ratings().reservoirVoltage(), Unit.VOLT);
+    put(values, SupplyReader.DROPPER_POWER, supply.ratings().dropperPower(), Unit.WATT);
+    put(values, SupplyReader.BLEEDER_POWER, supply.ratings().bleederPower(), Unit.WATT);
     return values;
   }
 

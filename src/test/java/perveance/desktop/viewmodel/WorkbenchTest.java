@@ -15,12 +15,14 @@ import org.junit.jupiter.params.provider.MethodSource;
 import perveance.app.Edit;
 import perveance.engine.base.BiasMessage;
 import perveance.engine.base.Finding;
+import perveance.engine.base.HazardMessage;
 import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageKind;
 import perveance.engine.stage.StageKinds;
+import perveance.engine.stage.Supply;
 
 /** What a person does, without a window. */
 class WorkbenchTest {
@@ -149,6 +151,30 @@ class WorkbenchTest {
     bench.undo();
     assertEquals("1k5", setting("cathode_resistor"));
     assertEquals("100k", setting("anode_load"));
+  }
+
+  /** A finding about a supply node changes that node, and takes nothing else of it away. */
+  @Test
+  void aRemedyForASupplyNodeIsOnePressToo() {
+    Supply before = bench.chassis().supplies().get(0);
+    Finding finding =
+        Finding.of(
+                HazardMessage.SLOW_DISCHARGE,
+                Severity.CAUTION,
+                "supply " + before.name(),
+                "It",
+                "a minute",
+                "60 V")
+            .withRemedy(
+                new Remedy(
+                    "Both.", java.util.Map.of("bleeder", "68k", "reservoir_voltage", "450 V")));
+    bench.take(finding);
+    Supply now = bench.chassis().supplies().get(0);
+    assertEquals(68e3, now.bleeder().orElseThrow());
+    assertEquals(450, now.ratings().reservoirVoltage().orElseThrow());
+    assertEquals(before.reservoir(), now.reservoir());
+    bench.undo();
+    assertEquals(before, bench.chassis().supplies().get(0));
   }
 
   static List<StageKind> kinds() {

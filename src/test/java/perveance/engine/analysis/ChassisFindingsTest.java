@@ -19,6 +19,9 @@ import perveance.engine.base.Severity;
 import perveance.engine.base.SignalMessage;
 import perveance.engine.base.SupplyMessage;
 import perveance.engine.stage.HeaterSupply;
+import perveance.engine.stage.Supply;
+import perveance.engine.stage.SupplyFeed;
+import perveance.engine.stage.SupplyRatings;
 
 /** Findings about more than one stage, about parts' ratings and about loads: figures and cures. */
 class ChassisFindingsTest {
@@ -177,6 +180,37 @@ class ChassisFindingsTest {
     assertEquals(310, over.value().orElseThrow(), 0.01);
     assertEquals("630 V", edit(over, "coupling_voltage"));
     assertEquals("V1a.coupling", over.part().orElseThrow());
+  }
+
+  /**
+   * Derived. Cold, a reservoir on 385 V behind 18 k stands at 385 V; 4.27 mA through 18 k is 0.33
+   * W. Tolerance 10 % for the current, the law's.
+   */
+  @Test
+  void partsOfTheSupplyAreHeldAgainstTheirRatings() {
+    String[] keys = Bench.standard();
+    keys[3] = "B";
+    Supply dropped =
+        new Supply(
+            "B",
+            new SupplyFeed.Dropped("A", 18e3),
+            OptionalDouble.of(22e-6),
+            OptionalDouble.of(220e3),
+            new SupplyRatings(
+                OptionalDouble.of(350), OptionalDouble.of(0.25), OptionalDouble.of(1)));
+    Bench bench = Bench.on(385).supply(dropped);
+    for (String ref : new String[] {"V1a", "V1b", "V2a", "V2b"}) {
+      bench.stage(ref, "common-cathode", keys);
+    }
+    ChassisAnswer answer = bench.answer(AnalysisOptions.FULL);
+    Finding reservoir = find(answer, PartMessage.CAPACITOR_VOLTAGE_OVER).orElseThrow();
+    assertEquals("supply B", reservoir.where());
+    assertEquals("supply.B.reservoir", reservoir.part().orElseThrow());
+    double cold = 385 * 220 / 238.0;
+    assertEquals(cold, reservoir.value().orElseThrow(), 1);
+    assertEquals("450 V", edit(reservoir, "reservoir_voltage"));
+    Finding dropper = find(answer, PartMessage.RESISTOR_POWER_OVER).orElseThrow();
+    assertTrue(dropper.text().startsWith("The dropper of supply B dissipates"), dropper.text());
   }
 
   private static String edit(Finding finding, String key) {

@@ -14,6 +14,7 @@ import org.junit.jupiter.api.Test;
 import perveance.engine.base.BadInputException;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
+import perveance.engine.stage.HeaterSupply;
 import perveance.engine.stage.Setting;
 import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.Supply;
@@ -202,7 +203,8 @@ class ChassisRoundTripTest {
             supply.name(),
             new SupplyFeed.Dropped(now, d.dropper()),
             supply.reservoir(),
-            supply.bleeder())
+            supply.bleeder(),
+            supply.ratings())
         : supply;
   }
 
@@ -216,6 +218,10 @@ class ChassisRoundTripTest {
         c.resistorTolerance(),
         random.nextInt(100) / 100.0,
         c.supplyTolerance(),
-        c.threshold());
+        c.threshold(),
+        new HeaterSupply(
+            random.nextBoolean() ? 6.3 : 12.6,
+            OptionalDouble.of(1 + random.nextInt(8)),
+            random.nextInt(3) * 0.15));
   }
 }

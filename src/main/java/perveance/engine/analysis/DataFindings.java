@@ -15,6 +15,7 @@ import perveance.engine.device.Device;
 import perveance.engine.device.Evidence;
 import perveance.engine.device.FitSummary;
 import perveance.engine.device.LawParameter;
+import perveance.engine.stage.ChassisNames;
 import perveance.engine.stage.StageCircuit.Part;
 import perveance.engine.stage.StageCircuit.StageDevice;
 
@@ -103,13 +104,43 @@ final class DataFindings {
             .filter(l -> l.ref().equals(point.ref()) && BiasFindings.resistive(l))
             .isPresent();
     Band band = point.bands().get("anodeChassis");
-    if (!fed || band == null) {
+    if (!fed || band == null || onSupply(point)) {
       return;
     }
     band.shares().stream()
         .max(Comparator.comparingDouble(Share::fraction))
-        .filter(s -> s.fraction() >= MOST && !s.cause().startsWith("valve"))
+        .filter(s -> s.fraction() >= MOST && !ofValve(s.cause()))
         .ifPresent(s -> findings.add(worthMeasuring(point, band, s)));
+  }
+
+  /** An anode on the supply itself says nothing that the supply does not. */
+  private boolean onSupply(DevicePoint point) {
+    int anode = context.model().valve(point.ref()).anode();
+    String node = context.model().circuit().nodes().get(anode);
+    return node.startsWith(ChassisNames.supply(""));
+  }
+
+  private static boolean ofValve(String cause) {
+    return cause.endsWith("conduction") || cause.endsWith("contact potential");
+  }
+
+  /** Whether a cause is a supply node or one of its parts. */
+  private static boolean ofSupply(String cause) {
+    return cause.startsWith("supply ");
+  }
+
+  /** The supply or stage that a cause outside this stage belongs to: "supply B", "V1a". */
+  private static String owner(String cause) {
+    int end = cause.indexOf(' ', ofSupply(cause) ? "supply ".length() : 0);
+    return end < 0 ? cause : cause.substring(0, end);
+  }
+
+  /** A cause outside this stage as a person would say it: "the dropper of supply B". */
+  private static String said(String cause) {
+    String owner = owner(cause);
+    return owner.equals(cause)
+        ? cause
+        : "the " + cause.substring(owner.length() + 1).replace('_', ' ') + " of " + owner;
   }
 
   private Finding worthMeasuring(DevicePoint point, Band band, Share most) {
@@ -117,14 +148,14 @@ final class DataFindings {
         context.answer().circuit().parts().stream()
             .filter(p -> p.element().equals(context.ref() + "." + most.cause()))
             .findFirst();
-    String named = part.map(context::named).orElse(most.cause());
+    String named = part.map(context::named).orElse(said(most.cause()));
     double middle = 0.5 * (band.low() + band.high());
     double half = 0.5 * (band.high() - band.low()) * Math.sqrt(1 - most.fraction());
     Finding finding =
         Finding.of(
                 DataMessage.BAND_CAUSE,
                 Severity.NOTE,
-                part.isPresent() ? context.ref() : most.cause(),
+                part.isPresent() ? context.ref() : owner(most.cause()),
                 point.ref(),
                 Words.percent(most.fraction()),
                 "anode voltage",

@@ -8,6 +8,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
+import perveance.engine.base.BiasMessage;
+import perveance.engine.base.DataMessage;
 import perveance.engine.base.Finding;
 import perveance.engine.base.HazardMessage;
 import perveance.engine.base.MessageCode;
@@ -18,6 +20,7 @@ import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.base.SignalMessage;
 import perveance.engine.base.SupplyMessage;
+import perveance.engine.stage.Conditions;
 import perveance.engine.stage.HeaterSupply;
 import perveance.engine.stage.Supply;
 import perveance.engine.stage.SupplyFeed;
@@ -211,6 +214,42 @@ class ChassisFindingsTest {
     assertEquals("450 V", edit(reservoir, "reservoir_voltage"));
     Finding dropper = find(answer, PartMessage.RESISTOR_POWER_OVER).orElseThrow();
     assertTrue(dropper.text().startsWith("The dropper of supply B dissipates"), dropper.text());
+  }
+
+  /** A dropper of 20 % makes most of the doubt of a stage behind it: told at its supply node. */
+  @Test
+  void theDoubtOfADropperIsToldAtItsNode() {
+    Conditions loose = FindingCases.conditions(1, HeaterSupply.USUAL);
+    Conditions conditions =
+        new Conditions(
+            loose.mains(),
+            loose.mainsActual(),
+            loose.mainsFrequency(),
+            loose.meter(),
+            0.2,
+            loose.capacitorTolerance(),
+            0.001,
+            loose.threshold());
+    Finding finding =
+        expect(
+            Bench.on(600)
+                .conditions(conditions)
+                .dropped("B", "A", 470e3, 22e-6)
+                .standardWith("supply", "B", "anode_load", "10k", "cathode_resistor", "3k3"),
+            DataMessage.BAND_CAUSE);
+    assertEquals("supply B", finding.where());
+    assertTrue(finding.text().contains("comes from the dropper of supply B"), finding.text());
+  }
+
+  /** A follower's anode is the supply: nothing there is worth measuring twice. */
+  @Test
+  void theDoubtOfAnAnodeOnItsSupplyIsNotTold() {
+    ChassisAnswer answer =
+        FindingCases.of(BiasMessage.COLD_START_GRID).answer(AnalysisOptions.FULL);
+    assertTrue(
+        answer.findings().stream()
+            .noneMatch(f -> f.code() == DataMessage.BAND_CAUSE && f.text().startsWith("V1b")),
+        answer.findings().toString());
   }
 
   private static String edit(Finding finding, String key) {

@@ -18,7 +18,7 @@ public final class CommandLines {
    * @return exit status
    */
   public static int run(Window desktop, String... args) {
-    return create(desktop).execute(args);
+    return create(desktop, args).execute(args);
   }
 
   /** Opens the desktop program. */
@@ -33,9 +33,10 @@ public final class CommandLines {
     void open(Optional<Path> file) throws BadInputException;
   }
 
-  /** The command line with its error handling, ready to execute. */
-  static CommandLine create(Window desktop) {
+  /** The command line with its error handling, ready to execute the arguments. */
+  static CommandLine create(Window desktop, String... args) {
     CommandLine line = new CommandLine(new PerveanceCommand(desktop));
+    Commands.add(line, args);
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setExecutionExceptionHandler(CommandLines::failed);
     line.setExitCodeExceptionMapper(
@@ -47,9 +48,9 @@ public final class CommandLines {
     return line;
   }
 
-  /** A command line that prints where another does. */
-  static CommandLine create(PerveanceCommand like) {
-    return create(like.window()).setOut(like.out()).setErr(like.err());
+  /** Runs a command line that prints where another does. */
+  static int run(PerveanceCommand like, String... args) {
+    return create(like.window(), args).setOut(like.out()).setErr(like.err()).execute(args);
   }
 
   private static int failed(Exception exception, CommandLine line, CommandLine.ParseResult parsed) {

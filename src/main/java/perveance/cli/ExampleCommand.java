@@ -42,8 +42,8 @@ final class ExampleCommand implements Callable<Integer> {
     Files.createDirectories(folder);
     Path file = folder.resolve(NAME);
     WholeFile.write(file, List.of(), out -> out.write(chassis));
-    int checked = CommandLines.create(parent).execute("check", file.toString());
-    int drawn = CommandLines.create(parent).execute("sheet", file.toString());
+    int checked = CommandLines.run(parent, "check", file.toString());
+    int drawn = CommandLines.run(parent, "sheet", file.toString());
     return Math.max(checked, drawn);
   }
 }

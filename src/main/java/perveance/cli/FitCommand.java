@@ -28,8 +28,9 @@ import picocli.CommandLine.ParentCommand;
     name = "fit",
     mixinStandardHelpOptions = true,
     description = {
-      "Fits a device law to a device file's evidence or to a table of readings, says how well it",
-      "meets them and which it distrusts, and writes a device file if asked.",
+      "Fits a device law to readings and says how well it meets them.",
+      "The readings are a table or a device file's evidence; which of them it distrusts is told,",
+      "and a device file is written if asked.",
       "With --valve it scales a typical law to the first reading instead."
     },
     footer = {

@@ -2,6 +2,7 @@ package perveance.cli;
 
 import java.io.PrintWriter;
 import java.io.Writer;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
@@ -13,22 +14,12 @@ import picocli.CommandLine.Spec;
     versionProvider = PerveanceCommand.Version.class,
     synopsisSubcommandLabel = "COMMAND",
     description = "Amplifier-stage design for thermionic valves.",
-    subcommands = {
-      CheckCommand.class,
-      SheetCommand.class,
-      CurvesCommand.class,
-      FitCommand.class,
-      GeometryCommand.class,
-      DesktopCommand.class,
-      ExampleCommand.class,
-      CompletionCommand.class
-    },
     footer = {
       "",
       "Start with:  perveance check examples/line-stage.toml",
       "",
-      "Voltages in valve equipment can kill, also after switch-off. Local electrical codes and",
-      "competent or licensed persons decide whether and how work is done."
+      "Voltages in valve equipment can kill, also after switch-off. Local electrical",
+      "codes and competent or licensed persons decide whether and how work is done."
     })
 public final class PerveanceCommand {
   private final CommandLines.Window window;
@@ -46,20 +37,23 @@ public final class PerveanceCommand {
     return window;
   }
 
-  @Spec private CommandSpec spec = CommandSpec.create();
+  /** Absent in a stand-in that no command line has taken up. */
+  @Spec private @Nullable CommandSpec spec;
 
   /** Where results go. */
   PrintWriter out() {
-    return spec.commandLine() == null
+    CommandSpec taken = spec;
+    return taken == null || taken.commandLine() == null
         ? new PrintWriter(Writer.nullWriter())
-        : spec.commandLine().getOut();
+        : taken.commandLine().getOut();
   }
 
   /** Where complaints go. */
   PrintWriter err() {
-    return spec.commandLine() == null
+    CommandSpec taken = spec;
+    return taken == null || taken.commandLine() == null
         ? new PrintWriter(Writer.nullWriter())
-        : spec.commandLine().getErr();
+        : taken.commandLine().getErr();
   }
 
   /** Version of the program, from the jar. */

@@ -15,7 +15,7 @@ record CommandTrial(int status, String out, String err) {
   static CommandTrial of(String... args) {
     StringWriter out = new StringWriter();
     StringWriter err = new StringWriter();
-    CommandLine line = CommandLines.create(file -> {});
+    CommandLine line = CommandLines.create(file -> {}, args);
     line.setOut(new PrintWriter(out, true));
     line.setErr(new PrintWriter(err, true));
     int status = line.execute(args);

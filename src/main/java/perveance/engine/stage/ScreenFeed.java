@@ -68,7 +68,7 @@ final class ScreenFeed {
   private static void noScreen(StageValues values, List<Complaint> complaints) {
     for (KeySpec key : KEYS) {
       boolean harmless =
-          key.equals(CONNECTION) && values.word(key.key()).orElse("").equals("triode");
+          key.key().equals(CONNECTION.key()) && values.word(key.key()).orElse("").equals("triode");
       if (values.has(key.key()) && !harmless) {
         complaints.add(
             new Complaint(

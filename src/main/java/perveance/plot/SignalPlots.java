@@ -88,11 +88,16 @@ public final class SignalPlots {
               return new PlotDescription(
                   "Waveform",
                   new PlotAxis("cycles", 0, 2, false),
-                  new PlotAxis("anode to cathode, V", low - edge, high + edge, false),
+                  new PlotAxis("anode to cathode, V", low - edge, high + 3 * edge, false),
                   List.of(
                       new PlotSeries("sine of the same swing", Role.SECOND, sine),
                       new PlotSeries("anode", Role.MAIN, curve)),
-                  List.of(label("dashed: a sine of the same swing", new PlotPoint(0.03, low))));
+                  List.of(
+                      new Label(
+                          "dashed: a sine of the same swing",
+                          new PlotPoint(0.03, high + 3 * edge),
+                          Anchor.TOP_LEFT,
+                          false)));
             });
   }
 

@@ -150,12 +150,17 @@ final class OpenWindow {
 
   /** Takes hold of the operating point and pulls it by some pixels. */
   void dragPoint(double dx, double dy) {
+    drag("POINT", dx, dy);
+  }
+
+  /** Takes hold of a part of the load lines and pulls it by some pixels. */
+  void drag(String handle, double dx, double dy) {
     Point2D at =
         Toolkit.on(
             () -> {
               stage.toFront();
               stage.requestFocus();
-              return WindowProbe.hand(main).localToScreen(WindowProbe.operatingPoint(main));
+              return WindowProbe.hand(main).localToScreen(WindowProbe.grip(main, handle));
             });
     Robot robot = Toolkit.on(Robot::new);
     Toolkit.run(() -> robot.mouseMove(at));
@@ -166,6 +171,26 @@ final class OpenWindow {
     }
     Toolkit.run(() -> robot.mouseRelease(MouseButton.PRIMARY));
     Toolkit.run(() -> {});
+  }
+
+  /** Presses keys as a person would, at what has the focus. */
+  void press(KeyCode... codes) {
+    Robot robot = Toolkit.on(Robot::new);
+    Toolkit.run(
+        () -> {
+          for (KeyCode code : codes) {
+            robot.keyPress(code);
+          }
+          for (int i = codes.length - 1; i >= 0; i--) {
+            robot.keyRelease(codes[i]);
+          }
+        });
+    Toolkit.run(() -> {});
+  }
+
+  /** What is said at the foot of the window. */
+  String message() {
+    return Toolkit.on(() -> desk.bench().message().get());
   }
 
   static KeyEvent key(KeyCode code) {

@@ -47,6 +47,7 @@ final class Bits {
 
   static VBox figure(String heading, Label value, Label note) {
     value.getStyleClass().add("figure-value");
+    value.setMinWidth(Region.USE_PREF_SIZE);
     note.getStyleClass().add("figure-note");
     return new VBox(label(heading, "figure-label"), value, note);
   }

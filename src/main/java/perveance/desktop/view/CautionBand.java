@@ -2,7 +2,6 @@ package perveance.desktop.view;
 
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.OverrunStyle;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
@@ -25,8 +24,8 @@ final class CautionBand extends HBox {
     mark.setStyle("-fx-padding: 4 0 0 0; -fx-font-size: 10px;");
     StackPane shape = new StackPane(sign, mark);
     shape.setMinWidth(20);
-    words.setTextOverrun(OverrunStyle.ELLIPSIS);
     words.setWrapText(true);
+    words.setMinHeight(USE_PREF_SIZE);
     words.setMaxWidth(Double.MAX_VALUE);
     HBox.setHgrow(words, Priority.ALWAYS);
     Button more = Bits.button("All steps", this::steps, "link");

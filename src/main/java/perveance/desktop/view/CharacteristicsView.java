@@ -78,6 +78,7 @@ final class CharacteristicsView extends StackPane {
       ToggleButton choice = new ToggleButton(desk.say(mover.word()));
       choice.getStyleClass().setAll("tab-word", "small");
       choice.setToggleGroup(group);
+      choice.setMinWidth(USE_PREF_SIZE);
       choice.setSelected(mover == PointDrag.Mover.BIAS);
       choice.setId("mover-" + mover.name().toLowerCase(Locale.ROOT));
       choice.setOnAction(
@@ -88,6 +89,7 @@ final class CharacteristicsView extends StackPane {
       bar.getChildren().add(choice);
     }
     loads.setId("load-lines");
+    loads.setMinWidth(USE_PREF_SIZE);
     bar.getChildren().addAll(Bits.gap(), loads);
     bar.setAlignment(Pos.CENTER_LEFT);
     bar.setMaxHeight(USE_PREF_SIZE);

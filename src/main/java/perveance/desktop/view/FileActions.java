@@ -5,10 +5,13 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
+import perveance.desktop.task.LatestOnly;
 import perveance.desktop.viewmodel.Asking;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.DocumentException;
 import perveance.desktop.viewmodel.FiguresTable;
+import perveance.desktop.viewmodel.Settings;
 import perveance.desktop.viewmodel.Starters;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.plot.Artwork;
@@ -22,9 +25,13 @@ final class FileActions {
   private static final double BITMAP_SCALE = 2;
 
   private final Desk desk;
+  private final LatestOnly<Order, Made> sheets;
 
   FileActions(Desk desk) {
     this.desk = desk;
+    sheets =
+        desk.bench()
+            .aside((order, progress) -> new Made(order.file(), order.press().get()), this::write);
   }
 
   /** Something that may fail for a reason that a person can mend. */
@@ -117,14 +124,17 @@ final class FileActions {
   }
 
   private void export(String what, String suffix, String ending, byte[] content) {
-    desk.asking()
-        .fileToWrite(what, name() + suffix, ending)
-        .ifPresent(
-            file -> {
-              if (attempt(() -> desk.document().documents().write(file, content))) {
-                desk.bench().say("Written: " + file);
-              }
-            });
+    fileToWrite(what, suffix, ending).ifPresent(file -> write(new Made(file, content)));
+  }
+
+  private Optional<Path> fileToWrite(String what, String suffix, String ending) {
+    return desk.asking().fileToWrite(what, name() + suffix, ending);
+  }
+
+  private void write(Made made) {
+    if (attempt(() -> desk.document().documents().write(made.file(), made.content()))) {
+      desk.bench().say("Written: " + made.file());
+    }
   }
 
   void sheet() {
@@ -133,8 +143,20 @@ final class FileActions {
       desk.bench().say("The figures are still being worked out; print again in a moment.");
       return;
     }
-    export("Print the sheet", "-sheet", "pdf", desk.press().sheet(answer, desk.settings().get()));
+    fileToWrite("Print the sheet", "-sheet", "pdf")
+        .ifPresent(
+            file -> {
+              desk.bench().say("The sheet is being printed\u2026");
+              Settings settings = desk.settings().get();
+              sheets.ask(new Order(file, () -> desk.press().sheet(answer, settings)));
+            });
   }
+
+  /** A file that takes a while to make. */
+  private record Order(Path file, Supplier<byte[]> press) {}
+
+  /** A file that is made. */
+  private record Made(Path file, byte[] content) {}
 
   void figures() {
     ChassisAnswer answer = desk.bench().answer().get();

@@ -192,6 +192,7 @@ final class FindingsPane extends VBox {
       box.getChildren().add(Bits.wrapped(desk.say(sum.note()), "soft", "small"));
     }
     box.getStyleClass().add("finding");
+    box.setId("hand-sum");
     return box;
   }
 }

@@ -50,7 +50,8 @@ final class FootBar extends HBox {
     sliderBox.setMinWidth(180);
     drive.setMinWidth(USE_PREF_SIZE);
     message.setId("message");
-    message.setMinWidth(120);
+    message.setMinWidth(0);
+    message.setMinHeight(0);
     getChildren()
         .addAll(
             Bits.figure("Drive at the input", drive, Bits.label("")),

@@ -4,6 +4,7 @@ import java.io.File;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.scene.Scene;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
@@ -21,6 +22,9 @@ import perveance.plot.PlotFonts;
 
 /** The window: the sheet, alive. */
 public final class MainWindow {
+  /** Large type must not push the drawing out of the window. */
+  private static final double FIGURES_SHARE = 0.27;
+
   private final Desk desk;
   private final PlotFonts fonts = new PlotFonts();
   private final BorderPane root = new BorderPane();
@@ -119,12 +123,16 @@ public final class MainWindow {
     }
     RowConstraints high = new RowConstraints();
     high.setVgrow(Priority.ALWAYS);
-    RowConstraints low = new RowConstraints();
-    low.setVgrow(Priority.NEVER);
-    middle.getRowConstraints().addAll(high, low);
+    RowConstraints flat = new RowConstraints();
+    flat.setVgrow(Priority.NEVER);
+    middle.getRowConstraints().addAll(high, flat);
     middle.add(Bits.growing(schematic), 0, 0);
     middle.add(Bits.growing(plots), 1, 0);
-    middle.add(figures, 0, 1, 2, 1);
+    ScrollPane low = new ScrollPane(figures);
+    low.setFitToWidth(true);
+    low.maxHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE));
+    low.minHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE / 2));
+    middle.add(low, 0, 1, 2, 1);
     middle.add(Bits.growing(findings), 2, 0, 1, 2);
     schematic.setMinSize(0, 0);
     plots.setMinSize(0, 0);
@@ -200,6 +208,11 @@ public final class MainWindow {
     List<File> dropped = event.getDragboard().getFiles();
     event.setDropCompleted(!dropped.isEmpty());
     event.consume();
+    take(dropped);
+  }
+
+  /** Opens the first of the files that were let fall on the window. */
+  void take(List<File> dropped) {
     if (!dropped.isEmpty()) {
       files.open(dropped.get(0).toPath());
     }

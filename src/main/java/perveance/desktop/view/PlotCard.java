@@ -6,7 +6,7 @@ import java.util.Optional;
 import java.util.function.Function;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
-import javafx.scene.layout.HBox;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import perveance.desktop.viewmodel.Desk;
@@ -58,7 +58,7 @@ final class PlotCard extends VBox {
     characteristics = new CharacteristicsView(desk, fonts);
     spread = new SpreadView(desk, fonts);
     getStyleClass().add("card");
-    HBox bar = new HBox(9);
+    FlowPane bar = new FlowPane(9, 0);
     ToggleGroup group = new ToggleGroup();
     for (View v : View.values()) {
       ToggleButton tab = new ToggleButton(v.word());

@@ -32,6 +32,8 @@ final class SearchField extends TextField {
     setMinWidth(140);
     hits.setCellFactory(list -> new Cell());
     hits.setPrefWidth(380);
+    // the keys stay with the field in which they are typed
+    hits.setFocusTraversable(false);
     hits.setOnMouseClicked(e -> take());
     popup.getContent().add(hits);
     popup.setAutoHide(true);
@@ -89,6 +91,9 @@ final class SearchField extends TextField {
   }
 
   private void keyed(KeyEvent event) {
+    if (event.isShortcutDown() || event.isAltDown()) {
+      return;
+    }
     int at = hits.getSelectionModel().getSelectedIndex();
     if (event.getCode() == KeyCode.DOWN) {
       hits.getSelectionModel().select(Math.min(hits.getItems().size() - 1, at + 1));

@@ -19,6 +19,7 @@ final class TopBar extends HBox {
   private final Label edited = Bits.label("", "soft");
   private final Button undo;
   private final Button redo;
+  private final Tooltip hint = new Tooltip();
   private final Tooltip undoHint = new Tooltip();
   private final Tooltip redoHint = new Tooltip();
   private final SearchField search;
@@ -36,7 +37,8 @@ final class TopBar extends HBox {
     Button sheet = Bits.button("Print the sheet", files::sheet, "main-button");
     sheet.setId("print-sheet");
     sheet.setMinWidth(USE_PREF_SIZE);
-    title.setMaxWidth(320);
+    title.maxWidthProperty().bind(widthProperty().multiply(0.3));
+    title.setTooltip(hint);
     edited.setId("edited");
     edited.setMinWidth(USE_PREF_SIZE);
     undo.setMinWidth(USE_PREF_SIZE);
@@ -79,6 +81,7 @@ final class TopBar extends HBox {
   final void refresh() {
     History history = bench.history().get();
     title.setText(history.now().title().isBlank() ? "Untitled" : history.now().title());
+    hint.setText(title.getText());
     edited.setText(history.now().equals(bench.savedChassis()) ? "" : "edited");
     undo.setDisable(history.past().isEmpty());
     redo.setDisable(history.future().isEmpty());

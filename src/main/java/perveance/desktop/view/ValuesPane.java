@@ -5,6 +5,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
+import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.KeyEditor;
@@ -27,6 +28,11 @@ final class ValuesPane extends ScrollPane {
     this.bench = desk.bench();
     grid.setHgap(12);
     grid.setVgap(5);
+    for (double percent : new double[] {32, 26, 42}) {
+      ColumnConstraints column = new ColumnConstraints();
+      column.setPercentWidth(percent);
+      grid.getColumnConstraints().add(column);
+    }
     setContent(grid);
     setFitToWidth(true);
     setId("values");
@@ -69,7 +75,6 @@ final class ValuesPane extends ScrollPane {
         new TextField(bench.chassis().stage(ref).map(s -> text(s, spec.key())).orElse(""));
     field.setId("value-" + spec.key());
     field.setPrefColumnCount(8);
-    field.setMinWidth(90);
     field.setAccessibleText(
         desk.say(ref + " " + KeyEditor.words(spec.key()) + ", " + spec.meaning()));
     Label note = Bits.wrapped(desk.say(spec.meaning()), "soft", "small");
@@ -93,8 +98,6 @@ final class ValuesPane extends ScrollPane {
           }
         });
     grid.addRow(row, name, field, note);
-    GridPane.setHgrow(note, javafx.scene.layout.Priority.ALWAYS);
-    name.setMinWidth(110);
   }
 
   private void commit(String ref, KeySpec spec, TextField field, Label note) {

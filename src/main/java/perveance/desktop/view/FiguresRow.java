@@ -17,6 +17,9 @@ import perveance.engine.analysis.StageAnswer;
 final class FiguresRow extends VBox {
   private static final int COLUMNS = 4;
 
+  /** A band that is out of date until the new one comes. */
+  private static final double FADED = 0.45;
+
   /** So many figures still fill two rows of the usual columns. */
   private static final int TWO_ROWS = 8;
 
@@ -88,9 +91,14 @@ final class FiguresRow extends VBox {
   }
 
   private void show(Cell cell, FigureRow row) {
-    cell.name().setText(desk.say(capital(row.label())));
+    String name = desk.say(capital(row.label()));
     cell.value().setText(desk.say(row.value()));
-    text(cell.band(), desk.say(row.band()));
+    boolean follows = row.band().isEmpty() && !desk.bench().settled().get();
+    cell.band().setOpacity(follows ? FADED : 1);
+    if (!follows || !cell.name().getText().equals(name)) {
+      text(cell.band(), desk.say(row.band()));
+    }
+    cell.name().setText(name);
     text(cell.note(), desk.say(row.note()));
     cell.box()
         .setAccessibleText(

@@ -58,6 +58,9 @@ final class KindPicker {
     return scroll;
   }
 
+  /** Smallest type that is aimed at on a card, in pixels. */
+  private static final double READABLE = 8;
+
   private Button card(StageStarter starter, StageKind kind, StageEntry entry) {
     ArtworkNode picture = new ArtworkNode();
     picture.setMinSize(196, 170);
@@ -71,7 +74,7 @@ final class KindPicker {
             kind.draw(starter.values(entry, kind)),
             bare,
             12,
-            0));
+            READABLE));
     Button card = Bits.button(desk.say(kind.title()), () -> take(kind), "kind-card");
     card.setGraphic(new VBox(picture));
     card.setId("kind-" + kind.name());

@@ -14,6 +14,7 @@ import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.RowConstraints;
 import javafx.scene.layout.VBox;
 import perveance.desktop.viewmodel.Desk;
@@ -37,6 +38,7 @@ public final class MainWindow {
   private final SchematicCard schematic;
   private final PlotCard plots;
   private final FiguresRow figures;
+  private final ScrollPane low = new ScrollPane();
   private final FindingsPane findings;
   private final FootBar foot;
   private final Commands commands;
@@ -128,7 +130,7 @@ public final class MainWindow {
     middle.getRowConstraints().addAll(high, flat);
     middle.add(Bits.growing(schematic), 0, 0);
     middle.add(Bits.growing(plots), 1, 0);
-    ScrollPane low = new ScrollPane(figures);
+    low.setContent(figures);
     low.setFitToWidth(true);
     low.maxHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE));
     low.minHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE / 2));
@@ -187,6 +189,8 @@ public final class MainWindow {
     plots.refresh();
     schematic.refresh();
     foot.refresh();
+    // what a hand drags must not move because a line of the figures comes or goes
+    low.setPrefHeight(desk.drag().isHeld() ? low.getHeight() : Region.USE_COMPUTED_SIZE);
     figures.refresh();
     // lists follow when the hand rests, so that a drag stays light
     if (!desk.drag().isHeld()) {

@@ -62,9 +62,8 @@ public final class ChassisAnalysis {
     List<SignalChain> chains = SignalChains.of(chassis, stages);
     List<Finding> findings = new ArrayList<>();
     if (options.details()) {
-      findings.addAll(new ChassisFindings(model).all(discharges));
-      dc.ifPresent(idle -> findings.addAll(SupplyPartFindings.of(model, idle, cold)));
-      dc.ifPresent(idle -> findings.addAll(answers.drain().findings(model, idle)));
+      findings.addAll(new ChassisFindings(model, cold).all(discharges, answers.drain()));
+      findings.addAll(EnvelopeFindings.of(model, stages));
       findings.addAll(ChainFindings.of(chains, stages));
     }
     stages.forEach(s -> findings.addAll(s.findings()));

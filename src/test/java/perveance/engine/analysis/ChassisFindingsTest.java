@@ -252,6 +252,34 @@ class ChassisFindingsTest {
         answer.findings().toString());
   }
 
+  /**
+   * Derived. Two sections of one 5687 in different stages, each within its own 4.2 W at about 4 W,
+   * make 8 W together, over the 7.5 W of the envelope; exact sum of both stages' figures.
+   */
+  @Test
+  void bothAnodesCountTogetherWhateverStagesTheyServe() {
+    Bench bench = Bench.on(280);
+    for (String ref : new String[] {"V1a", "V1b"}) {
+      bench.stage(
+          ref,
+          "common-cathode",
+          "device",
+          "5687",
+          "supply",
+          "A",
+          "anode_load",
+          "4k7",
+          "cathode_resistor",
+          "180");
+    }
+    ChassisAnswer answer = bench.answer(AnalysisOptions.FULL);
+    Finding finding = find(answer, RatingMessage.BOTH_ANODES_OVER).orElseThrow();
+    double sum =
+        answer.stages().stream().mapToDouble(s -> s.points().get(0).anodeDissipation()).sum();
+    assertEquals(sum, finding.value().orElseThrow(), 1e-9);
+    assertTrue(finding.text().startsWith("V1: both anodes"), finding.text());
+  }
+
   private static String edit(Finding finding, String key) {
     Map<String, String> edits = finding.remedy().map(Remedy::edits).orElse(Map.of());
     return edits.getOrDefault(key, "");

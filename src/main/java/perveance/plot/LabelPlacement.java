@@ -2,6 +2,7 @@ package perveance.plot;
 
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -16,6 +17,9 @@ final class LabelPlacement {
 
   /** Paper that a text wants to its left and right. */
   private static final double AIR = 0.12;
+
+  /** Stands for what has not been asked for yet; most labels stay at one of their first places. */
+  private static final double UNKNOWN = -1;
 
   private final List<SchematicLabel> labels;
   private final Obstacles obstacles;
@@ -42,8 +46,9 @@ final class LabelPlacement {
 
   private Placed run() {
     for (SchematicLabel label : labels) {
-      covered.add(
-          label.places().stream().mapToDouble(p -> obstacles.covered(airy(p.box()))).toArray());
+      double[] unknown = new double[label.places().size()];
+      Arrays.fill(unknown, UNKNOWN);
+      covered.add(unknown);
     }
     for (int i = 0; i < labels.size(); i++) {
       chosen[i] = best(i, i);
@@ -68,8 +73,8 @@ final class LabelPlacement {
     List<SchematicLabel.Place> places = labels.get(label).places();
     int best = 0;
     double least = Double.POSITIVE_INFINITY;
-    for (int i = 0; i < places.size(); i++) {
-      double cost = DISLIKE * i + penalty(covered.get(label)[i]);
+    for (int i = 0; i < places.size() && DISLIKE * i < least; i++) {
+      double cost = DISLIKE * i + penalty(covered(label, i));
       if (cost < least) {
         cost += penalty(amongLabels(label, places.get(i), standing));
       }
@@ -79,6 +84,14 @@ final class LabelPlacement {
       }
     }
     return best;
+  }
+
+  private double covered(int label, int place) {
+    double[] known = covered.get(label);
+    if (known[place] == UNKNOWN) {
+      known[place] = obstacles.covered(airy(labels.get(label).places().get(place).box()));
+    }
+    return known[place];
   }
 
   /** However small a collision is, a free place at the end of the list is better. */
@@ -100,7 +113,7 @@ final class LabelPlacement {
   private double collision() {
     double sum = 0;
     for (int i = 0; i < labels.size(); i++) {
-      sum += covered.get(i)[chosen[i]] + amongLabels(i, place(i), i);
+      sum += covered(i, chosen[i]) + amongLabels(i, place(i), i);
     }
     return sum;
   }

@@ -8,6 +8,7 @@ import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import perveance.engine.stage.Drawing;
 import perveance.engine.stage.SymbolShape;
 
@@ -18,14 +19,12 @@ import perveance.engine.stage.SymbolShape;
 public final class SchematicPainter {
   private static final double MARGIN = 0.6;
 
-  /** Sizes of type that are tried when the usual one would be too small to read. */
-  private static final double[] FACTORS = {1, 1.15, 1.3, 1.5, 1.7, 1.9, 2.2};
-
   private final Look look;
   private final SchematicLabels labels;
   private final TextWidths bold;
   private final TextWidths regular;
-  private int usual;
+  private final TypeSize typeSize = new TypeSize(this);
+  private @Nullable Strokes last;
 
   /**
    * A painter.
@@ -74,7 +73,7 @@ public final class SchematicPainter {
 
   /** Finds a place for every text. */
   SchematicLayout layout(Drawing drawing, SchematicText text, double factor) {
-    Obstacles obstacles = obstacles(drawing, text.zigzag());
+    Obstacles obstacles = strokes(drawing, text.zigzag());
     List<SchematicLabel> all = new LabelPlaces(bold, regular, factor).all(drawing, text);
     LabelPlacement.Placed placed = LabelPlacement.place(all, obstacles);
     Rectangle2D extent = obstacles.extent();
@@ -90,30 +89,22 @@ public final class SchematicPainter {
     return new SchematicLayout(drawing, text, all, placed, factor, airy);
   }
 
-  /**
-   * The layout with the smallest type that can still be read in an area; where the texts would then
-   * cover something, the largest with which they do not.
-   */
+  /** The layout with type that can be read in an area, as far as that can be. */
   SchematicLayout layout(
       Drawing drawing, SchematicText text, Rectangle2D area, double largest, double readable) {
-    SchematicLayout best = layout(drawing, text, FACTORS[usual]);
-    if (best.isClear() && best.smallest(area, largest) >= readable && usual > 0) {
-      SchematicLayout smaller = layout(drawing, text, FACTORS[usual - 1]);
-      if (smaller.smallest(area, largest) < readable) {
-        return best;
-      }
+    return typeSize.layout(new TypeSize.Room(drawing, area, largest, readable), text);
+  }
+
+  /** The strokes that were asked for last; values change more often than the drawing. */
+  private record Strokes(Drawing drawing, boolean zigzag, Obstacles obstacles) {}
+
+  private Obstacles strokes(Drawing drawing, boolean zigzag) {
+    Strokes known = last;
+    if (known == null || known.zigzag() != zigzag || !known.drawing().equals(drawing)) {
+      known = new Strokes(drawing, zigzag, obstacles(drawing, zigzag));
+      last = known;
     }
-    best = layout(drawing, text, FACTORS[0]);
-    usual = 0;
-    for (int i = 1; i < FACTORS.length && best.smallest(area, largest) < readable; i++) {
-      SchematicLayout next = layout(drawing, text, FACTORS[i]);
-      boolean larger = next.smallest(area, largest) > best.smallest(area, largest);
-      if (larger && (next.isClear() || !best.isClear())) {
-        best = next;
-        usual = i;
-      }
-    }
-    return best;
+    return known.obstacles();
   }
 
   private static Obstacles obstacles(Drawing drawing, boolean zigzag) {

@@ -5,6 +5,7 @@ import java.util.HashSet;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ToggleButton;
@@ -110,16 +111,23 @@ final class SchematicCard extends VBox {
     device.setVisible(stage.isPresent());
     device.setAccessibleText(desk.say("Choose another valve"));
     if (listed.isSelected()) {
-      place.getChildren().setAll(values);
+      put(values);
       values.refresh();
     } else if (stage.isEmpty()) {
       failure.setText(
           "No stage yet. \u201cAdd a stage\u201d on the left shows the kinds there are.");
-      place.getChildren().setAll(failure);
+      put(failure);
     } else {
-      place.getChildren().setAll(drawing);
+      put(drawing);
       drawing.refresh();
       bench.stageAnswer().ifPresent(this::describe);
+    }
+  }
+
+  /** What is taken out and put back would be styled anew with each answer. */
+  private void put(Node content) {
+    if (!place.getChildren().contains(content)) {
+      place.getChildren().setAll(content);
     }
   }
 

@@ -154,10 +154,7 @@ final class SchematicView extends StackPane {
     byName.forEach(
         (name, handle) -> {
           handle.setAccessibleText(words.getOrDefault(name, name));
-          handle.getStyleClass().remove("marked");
-          if (marked.contains(name)) {
-            handle.getStyleClass().add("marked");
-          }
+          handle.mark(marked.contains(name));
         });
   }
 

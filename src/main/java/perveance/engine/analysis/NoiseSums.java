@@ -54,7 +54,9 @@ final class NoiseSums {
             "f = 1 / (2 pi Rs Cin)",
             "1 / (2 pi x " + Sum.ohms(before) + " x " + Sum.farads(answer.inputCapacitance()) + ")",
             Sum.hertz(corner),
-            "the output's own corner, Zout with what hangs on it, comes on top");
+            model.atSource()
+                ? "the output's own corner, Zout with what hangs on it, comes on top"
+                : "it is told as the upper corner of the stage before, whose output this is");
     return List.of(thermal, upper);
   }
 }

@@ -75,7 +75,7 @@ final class Remedies {
       if (trial.isEmpty()) {
         return Optional.empty();
       }
-      if (cured.test(trial.get().answer())) {
+      if (cured.test(trial.get().answer()) && keepsLimits(trial.get().answer())) {
         return trial;
       }
     }
@@ -100,7 +100,7 @@ final class Remedies {
         value = up ? above(value) : below(value);
         Optional<Trial> trial = trial(part, value);
         double at = trial.map(t -> figure.applyAsDouble(t.answer())).orElse(0.0);
-        if (at < last) {
+        if (at < last || (at > least && !keepsLimits(trial.orElseThrow().answer()))) {
           break;
         }
         last = at;
@@ -110,6 +110,29 @@ final class Remedies {
       }
     }
     return best;
+  }
+
+  /** Whether a change drives no valve over a limit, or further over one, than it is now. */
+  private boolean keepsLimits(Variant changed) {
+    return changed.limits().stream()
+        .filter(use -> use.share() > 1 && counts(use))
+        .allMatch(
+            use -> now.limits().stream().anyMatch(u -> same(u, use) && use.share() <= u.share()));
+  }
+
+  /** Whether a limit is one of those that findings are told about. */
+  private boolean counts(LimitUse use) {
+    return now.circuit().devices().stream()
+        .filter(d -> d.ref().equals(use.ref()))
+        .flatMap(d -> d.device().defaultRatings().stream())
+        .anyMatch(ratings -> RatingFindings.under(use, ratings));
+  }
+
+  private static boolean same(LimitUse one, LimitUse other) {
+    return one.ref().equals(other.ref())
+        && one.what().equals(other.what())
+        && one.when().equals(other.when())
+        && one.source().equals(other.source());
   }
 
   /** The remedy that a trial amounts to. */

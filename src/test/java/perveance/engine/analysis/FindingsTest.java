@@ -165,6 +165,48 @@ class FindingsTest {
     assertEquals("68k", finding.remedy().orElseThrow().edits().get("bleeder"));
   }
 
+  /**
+   * A single EL84 at 95 % of its 12 W would give more clean output with a smaller cathode resistor,
+   * and go over its limit: no remedy says so.
+   */
+  @Test
+  void noRemedyDrivesAValveOverALimit() {
+    String[] keys = {
+      "device",
+      "EL84",
+      "supply",
+      "A",
+      "primary",
+      "5k2",
+      "winding_resistance",
+      "280",
+      "secondary_load",
+      "8",
+      "screen_resistor",
+      "100",
+      "cathode_resistor",
+      "150",
+      "cathode_bypass",
+      "220u",
+      "grid_leak",
+      "470k",
+      "drive",
+      "3 V"
+    };
+    StageAnswer now = Bench.on(265).stage("V2", "single-ended-output", keys).full();
+    double limit = 12;
+    assertTrue(now.points().get(0).anodeDissipation() < limit);
+    for (Finding finding : now.findings()) {
+      String resistor =
+          finding.remedy().map(r -> r.edits().getOrDefault("cathode_resistor", "")).orElse("");
+      if (!resistor.isEmpty()) {
+        keys[13] = resistor;
+        StageAnswer after = Bench.on(265).stage("V2", "single-ended-output", keys).first();
+        assertTrue(after.points().get(0).anodeDissipation() <= limit, finding.toString());
+      }
+    }
+  }
+
   @Test
   void theWorstComeFirst() {
     List<Finding> findings =

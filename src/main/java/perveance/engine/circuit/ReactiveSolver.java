@@ -1,19 +1,29 @@
 package perveance.engine.circuit;
 
 import java.util.Arrays;
+import java.util.Locale;
 import perveance.engine.numeric.DenseLu;
 
 /**
  * Large signals at a stated frequency, with every capacitor, inductor and transformer as it is: the
  * elliptical load line of a reactive load, the bypass that does not quite hold. All samples of the
  * period are solved together by harmonic balance. What a waveform has at half the samples and above
- * is folded; how much of the currents that leaves over is told by {@link PeriodicState#residual}.
+ * is folded and leaves currents over (see {@link PeriodicState#residual}); where that is more than
+ * 1 uA the samples are doubled, and where there is no room for more of them there is no answer.
  *
  * <p>The work grows with the cube of samples times device nodes: 64 samples serve one or two
  * valves, 32 a push-pull pair. Not for use by two threads at once.
  */
 public final class ReactiveSolver {
   private static final int LARGEST = 1536;
+
+  /** To double the samples beyond this takes longer than anyone waits for an answer. */
+  private static final int LARGEST_REFINED = LARGEST / 2;
+
+
+  /** Most that folding may leave over of the currents into a node [A]. */
+  private static final double FOLDED = 1e-6;
+
   private static final int MOST_ITERATIONS = 40;
   private static final double SHORTEST = 1.0 / 64;
   private static final double SMALLEST_STRIDE = 1.0 / 128;
@@ -89,7 +99,7 @@ public final class ReactiveSolver {
    * Finds the steady cycle at a level.
    *
    * @param peak peak of the waveform; each source gets its share of it, zero or above [V] or [A]
-   * @return the cycle, or why there is none
+   * @return the cycle, at the drive's samples or a power of two more, or why there is none
    */
   public ReactiveOutcome solve(double peak) {
     ElementChecks.notNegative("peak", peak);
@@ -120,8 +130,30 @@ public final class ReactiveSolver {
         }
       }
     }
-    return new ReactiveOutcome.Converged(
-        new ReactiveSolution(network, equations, drive, known, peak, frequency), iterations);
+    ReactiveSolution cycle =
+        new ReactiveSolution(network, equations, drive, known, peak, frequency);
+    return cycle.residual() <= FOLDED
+        ? new ReactiveOutcome.Converged(cycle, iterations)
+        : finer(peak, cycle.residual());
+  }
+
+  /** Solves with twice the samples what folding has spoiled. */
+  private ReactiveOutcome finer(double peak, double leftOver) {
+    if (2 * x.length > LARGEST_REFINED) {
+      return new ReactiveOutcome.NotConverged(
+          String.format(
+              Locale.ROOT,
+              "the waveforms are too sharp for %d samples: %.2g A is left over",
+              drive.waveform().count(),
+              leftOver),
+          peak,
+          0);
+    }
+    Drive denser = new Drive(drive.waveform().finer(), drive.shares());
+    ReactiveOutcome outcome = new ReactiveSolver(rest, denser, frequency).solve(peak);
+    return outcome instanceof ReactiveOutcome.Converged found
+        ? new ReactiveOutcome.Converged(found.solution(), iterations + found.iterations())
+        : outcome;
   }
 
   private boolean balance(double peak) {

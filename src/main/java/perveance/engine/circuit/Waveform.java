@@ -1,5 +1,7 @@
 package perveance.engine.circuit;
 
+import java.util.function.IntFunction;
+
 /**
  * One period of a drive at equal steps, its highest peak being 1. The number of samples is a power
  * of two, 8 or more; harmonics from half of it up are folded, so it should be several times the
@@ -9,9 +11,11 @@ public final class Waveform {
   private static final int FEWEST = 8;
 
   private final double[] samples;
+  private final IntFunction<Waveform> shape;
 
-  private Waveform(double[] samples) {
+  private Waveform(double[] samples, IntFunction<Waveform> shape) {
     this.samples = samples;
+    this.shape = shape;
   }
 
   /**
@@ -49,7 +53,8 @@ public final class Waveform {
           firstShare * Math.cos(firstCycles * turn) + secondShare * Math.cos(secondCycles * turn);
       samples[k] = both / sum;
     }
-    return new Waveform(samples);
+    return new Waveform(
+        samples, n -> twoTone(n, firstCycles, firstShare, secondCycles, secondShare));
   }
 
   /**
@@ -70,6 +75,15 @@ public final class Waveform {
    */
   public static Waveform ccif() {
     return twoTone(256, 19, 1, 20, 1);
+  }
+
+  /**
+   * The same shape at twice as many samples.
+   *
+   * @return finer waveform
+   */
+  Waveform finer() {
+    return shape.apply(2 * samples.length);
   }
 
   /**

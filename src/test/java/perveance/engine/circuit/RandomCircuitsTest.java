@@ -97,6 +97,7 @@ class RandomCircuitsTest {
         if (new ReactiveSolver(point.solution(), drive, 1000).solve(peak)
             instanceof ReactiveOutcome.Converged cycle) {
           checkCycle(circuit, cycle.solution(), which);
+          assertTrue(cycle.solution().residual() <= 1e-6, which);
         }
         checkCourse(circuit, which);
       }

@@ -170,4 +170,34 @@ class ReactiveSolverTest {
     Harmonics h = cycle.harmonics(c.node("s"), 0);
     assertEquals(0, h.relative(2).orElseThrow(), 1e-9);
   }
+
+  /**
+   * A valve driven hard into cut-off and grid current has edges that 16 samples fold. The answer
+   * comes with more samples, and agrees with one that started from eight times as many; with edges
+   * too sharp for any number of samples at hand there is a reason and no answer. Tolerance: 1e-3 of
+   * the fundamental; what lies above half of the fewest samples that pass is left out of both.
+   */
+  @Test
+  void foldedEdgesAreSolvedWithMoreSamplesOrRefused() {
+    Circuit c = stage();
+    Drive coarse = Drive.of(Waveform.cosine(16), c.element("in"));
+    ReactiveOutcome outcome = new ReactiveSolver(rest(c), coarse, 1000).solve(3);
+    ReactiveSolution found = assertInstanceOf(ReactiveOutcome.Converged.class, outcome).solution();
+    assertTrue(found.count() > 16, "samples " + found.count());
+    assertTrue(found.residual() <= 1e-6, "residual " + found.residual());
+    Drive fine = Drive.of(Waveform.cosine(128), c.element("in"));
+    ReactiveOutcome finer = new ReactiveSolver(rest(c), fine, 1000).solve(3);
+    Harmonics expected =
+        assertInstanceOf(ReactiveOutcome.Converged.class, finer)
+            .solution()
+            .harmonics(c.node("out"), 0);
+    Harmonics harmonics = found.harmonics(c.node("out"), 0);
+    for (int n = 1; n <= 5; n++) {
+      double allowed = 1e-3 * expected.amplitude(1);
+      assertEquals(expected.cosine(n), harmonics.cosine(n), allowed, "harmonic " + n);
+    }
+    ReactiveOutcome sharp = new ReactiveSolver(rest(c), coarse, 1000).solve(300);
+    String reason = assertInstanceOf(ReactiveOutcome.NotConverged.class, sharp).reason();
+    assertTrue(reason.contains("too sharp"), reason);
+  }
 }

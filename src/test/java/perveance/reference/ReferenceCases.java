@@ -67,6 +67,11 @@ final class ReferenceCases {
             + " grid_leak=1M coupling=22n load=470k ";
     all.add(
         stage("pentode-screen-dropper", 0.2, pentode + "screen_resistor=1M screen_bypass=0.1u"));
+    all.add(
+        stage(
+            "pentodes-parallel",
+            0.2,
+            pentode + "sections=2 grid_stopper=1k screen_resistor=470k screen_bypass=0.1u"));
     all.add(stage("pentode-as-triode", 1, pentode + "connection=triode"));
     all.add(
         stage(
@@ -84,6 +89,11 @@ final class ReferenceCases {
             "follower-fixed-bias",
             10,
             follower + "cathode_resistor=1k cathode_load=47k grid_bias=100"));
+    all.add(
+        stage(
+            "followers-parallel",
+            10,
+            follower + "cathode_resistor=470 cathode_load=22k sections=2 grid_stopper=1k"));
     all.add(
         stage("follower-current-source", 10, follower + "cathode_resistor=1k cathode_current=2m"));
     all.add(
@@ -198,6 +208,13 @@ final class ReferenceCases {
             pair
                 + "device=beam grid_bias=-20 screen_supply=B screen_resistor=470 source=10k"
                 + iron));
+    all.add(
+        stage(
+            "push-pull-screen-dropper",
+            15,
+            pair
+                + "device=beam cathode_resistor=240 cathode_bypass=100u shared=true"
+                + " screen_dropper=2k2 screen_bypass=22u"));
     all.add(
         stage(
             "push-pull-ultra-linear",

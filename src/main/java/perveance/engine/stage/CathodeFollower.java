@@ -4,11 +4,13 @@ import static perveance.engine.stage.StageKeys.ANODE_LOAD;
 import static perveance.engine.stage.StageKeys.CONNECTION;
 import static perveance.engine.stage.StageKeys.DEVICE;
 import static perveance.engine.stage.StageKeys.GRID_BIAS;
+import static perveance.engine.stage.StageKeys.SECTIONS;
 import static perveance.engine.stage.StageKeys.SUPPLY;
 
 import java.util.ArrayList;
 import java.util.List;
 import perveance.engine.circuit.Circuit;
+import perveance.engine.device.LawKind;
 import perveance.engine.stage.Drawing.Side;
 import perveance.engine.stage.Drawing.SymbolType;
 import perveance.engine.stage.StageCircuit.LoadLineSpec;
@@ -22,7 +24,7 @@ final class CathodeFollower implements StageKind {
   private static final List<KeySpec> KEYS =
       KeyList.of(
           List.of(
-              List.of(DEVICE, CONNECTION, SUPPLY.asRequired(), ANODE_LOAD),
+              List.of(DEVICE, SECTIONS, CONNECTION, SUPPLY.asRequired(), ANODE_LOAD),
               CathodeLoad.KEYS,
               List.of(GRID_BIAS),
               GridInput.KEYS,
@@ -48,6 +50,7 @@ final class CathodeFollower implements StageKind {
   public List<Complaint> check(StageValues values) {
     List<Complaint> complaints = new ArrayList<>(ValvePair.check(values));
     complaints.addAll(CathodeLoad.check(values));
+    complaints.addAll(Sections.check(values));
     return complaints;
   }
 
@@ -62,16 +65,19 @@ final class CathodeFollower implements StageKind {
     int cathode = wiring.node("cathode");
     int foot = CathodeLoad.wire(wiring, cathode);
     int joint = GridInput.wire(wiring, foot);
-    int grid = GridInput.stopper(wiring, joint, "");
-    ValvePair.Triode nodes = new ValvePair.Triode(anode, grid, cathode);
-    ValvePair.add(wiring, values.ref(), DEVICE.key(), nodes, true);
-    OutputCoupling.wire(wiring, "output", cathode);
-    wiring.testPoint(cathode, values.ref(), "cathode");
-    wiring.testPoint(joint, values.ref(), "grid");
-    if (anode != supply) {
-      wiring.testPoint(anode, values.ref(), "anode");
+    for (int i = 0; i < Sections.count(values); i++) {
+      int grid = GridInput.stopper(wiring, joint, Sections.suffix(i));
+      ValvePair.Triode nodes = new ValvePair.Triode(anode, grid, cathode);
+      ValvePair.add(wiring, Sections.ref(values, i), DEVICE.key(), nodes, true);
     }
-    return wiring.finish(new LoadLineSpec(values.ref(), false));
+    OutputCoupling.wire(wiring, "output", cathode);
+    String first = Sections.ref(values, 0);
+    wiring.testPoint(cathode, first, "cathode");
+    wiring.testPoint(joint, first, "grid");
+    if (anode != supply) {
+      wiring.testPoint(anode, first, "anode");
+    }
+    return wiring.finish(new LoadLineSpec(first, false));
   }
 
   @Override
@@ -83,14 +89,13 @@ final class CathodeFollower implements StageKind {
       sketch.supply(x, y - 14, SUPPLY, Side.ABOVE);
       sketch.wire(x, y - 14, x, y - 13);
       sketch.upright(SymbolType.RESISTOR, x, y - 11, ANODE_LOAD.key(), Side.RIGHT);
-      sketch.wire(x, y - 9, x, y - 4);
+      sketch.wire(x, y - 9, x, y - 6);
       sketch.mark(x, y - 7, "anode", Side.LEFT);
     } else {
       sketch.supply(x, y - 7, SUPPLY, Side.ABOVE);
-      sketch.wire(x, y - 7, x, y - 4);
+      sketch.wire(x, y - 7, x, y - 6);
     }
-    ValvePair.sketch(sketch, values.device(), x, y, false, values.ref());
-    GridInput.sketchStopper(sketch, 8, x - 4, y, "");
+    int last = valves(sketch, x, y);
     int joint = CathodeLoad.sketch(sketch, x, y + 6);
     sketch.wire(x, y + 4, x, y + 6);
     sketch.mark(x, y + 6, "cathode", Side.LEFT);
@@ -102,7 +107,26 @@ final class CathodeFollower implements StageKind {
     } else {
       GridInput.sketch(sketch, 8, y);
     }
-    OutputCoupling.sketchFromCathode(sketch, x, y + 6);
+    OutputCoupling.sketchFromCathode(sketch, last, y + 6);
     return sketch.finish();
+  }
+
+  /** Draws the valves, anodes and cathodes joined; gives where the last one stands. */
+  private static int valves(Sketch sketch, int x, int y) {
+    int last = Sections.sketch(sketch, x, y, 8, y - 6);
+    boolean tied = sketch.values().device().law().kind() == LawKind.PENTODE;
+    for (int at = x; at <= last; at += Sections.step(sketch.values())) {
+      if (tied) {
+        sketch.wire(at + 4, y, at + 5, y, at + 5, y - 4, at, y - 4);
+      }
+      if (at > x) {
+        sketch.wire(at, y + 4, at, y + 6);
+      }
+    }
+    if (last > x) {
+      sketch.wire(x, y - 6, last, y - 6);
+      sketch.wire(x, y + 6, last, y + 6);
+    }
+    return last;
   }
 }

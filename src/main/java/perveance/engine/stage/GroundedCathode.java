@@ -95,14 +95,23 @@ final class GroundedCathode {
     GridInput.sketch(sketch, JOINT, GRID);
     int last = Sections.sketch(sketch, X, GRID, JOINT, AnodeLoad.ANODE);
     CathodeBias.sketch(sketch, X, GRID + 4);
-    if (fed) {
-      ScreenFeed.sketch(sketch, X, GRID, AnodeLoad.RAIL);
+    Sections.sketchCathodes(sketch, X, GRID + 4);
+    for (int x = X; x <= last; x += Sections.step(values)) {
+      screen(sketch, x, last);
     }
-    if (ScreenFeed.tied(values)) {
-      sketch.wire(X + 4, GRID, X + 5, GRID, X + 5, AnodeLoad.ANODE + 1, X, AnodeLoad.ANODE + 1);
-    }
-    int from = fed ? X + 16 : last;
+    int from = fed ? last + 16 : last;
     sketch.wire(X, AnodeLoad.ANODE, from, AnodeLoad.ANODE);
     OutputCoupling.sketch(sketch, from, AnodeLoad.ANODE);
+  }
+
+  /** Draws the screen's lead to the feed of the first valve's screen, or to the anode. */
+  private static void screen(Sketch sketch, int x, int last) {
+    if (ScreenFeed.tied(sketch.values())) {
+      sketch.wire(x + 4, GRID, x + 5, GRID, x + 5, AnodeLoad.ANODE + 1, x, AnodeLoad.ANODE + 1);
+    } else if (ScreenFeed.fed(sketch.values()) && x == X) {
+      ScreenFeed.sketch(sketch, X, last, GRID, AnodeLoad.RAIL);
+    } else if (ScreenFeed.fed(sketch.values())) {
+      ScreenFeed.join(sketch, X, x, GRID);
+    }
   }
 }

@@ -134,7 +134,9 @@ final class OutputFeed {
     if (!OutputIdle.stated(values)) {
       return values.number(SCREEN_VOLTAGE.key());
     }
-    double drop = values.number(SCREEN_RESISTOR.key(), 0) * idle.screenCurrent();
+    double drop =
+        values.number(SCREEN_RESISTOR.key(), 0) * idle.screenCurrent()
+            + ScreenDropper.drop(values, idle.screenCurrent());
     return OutputIdle.screenVoltage(values, ValveWiring.PENTODE) + idle.cathode() + drop;
   }
 

@@ -6,6 +6,8 @@ import static perveance.engine.stage.StageKeys.DEVICE;
 import static perveance.engine.stage.StageKeys.DEVICE2;
 import static perveance.engine.stage.StageKeys.GRID_BIAS;
 import static perveance.engine.stage.StageKeys.REF2;
+import static perveance.engine.stage.StageKeys.SCREEN_BYPASS;
+import static perveance.engine.stage.StageKeys.SCREEN_DROPPER;
 import static perveance.engine.stage.StageKeys.SECTIONS;
 import static perveance.engine.stage.StageKeys.SHARED;
 
@@ -24,6 +26,7 @@ final class PushPullOutput implements StageKind {
           List.of(
               List.of(DEVICE, DEVICE2, REF2, SECTIONS),
               OutputFeed.KEYS,
+              List.of(SCREEN_DROPPER, SCREEN_BYPASS),
               OutputTransformer.KEYS,
               List.of(CATHODE_RESISTOR, CATHODE_BYPASS, SHARED, GRID_BIAS),
               GridInput.KEYS,
@@ -47,9 +50,10 @@ final class PushPullOutput implements StageKind {
   @Override
   public List<Complaint> check(StageValues values) {
     List<Complaint> complaints = new ArrayList<>(OutputFeed.check(values));
+    complaints.addAll(ScreenDropper.check(values));
     complaints.addAll(CathodeBias.check(values));
     complaints.addAll(ValvePair.checkNames(values));
-    complaints.addAll(Sections.checkCount(values));
+    complaints.addAll(Sections.check(values));
     if (values.device().law().kind() != values.secondDevice().law().kind()) {
       complaints.add(
           new Complaint(
@@ -95,8 +99,7 @@ final class PushPullOutput implements StageKind {
             : new OutputIdle(0, 0, 0);
     double drop = OutputTransformer.drop(values, sections * idle.anodeCurrent(), 2);
     int rail = OutputFeed.anodeRail(wiring, idle, drop);
-    int screenRail =
-        connection.equals(ValveWiring.PENTODE) ? OutputFeed.screenRail(wiring, idle, rail) : rail;
+    int screenRail = ScreenDropper.wire(wiring, idle, rail, connection);
     AntiphaseInput.Joints joints = AntiphaseInput.wire(wiring);
     PairedCathodes.Nodes cathodes = PairedCathodes.wire(wiring);
     OutputTransformer transformer = new OutputTransformer(wiring, 2);

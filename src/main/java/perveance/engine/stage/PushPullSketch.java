@@ -121,7 +121,8 @@ final class PushPullSketch {
   }
 
   private int core() {
-    return last + (screened ? 30 : 28);
+    int right = last + (screened ? 30 : 28);
+    return ScreenDropper.stated(values) ? right + 6 : right;
   }
 
   private void transformer() {
@@ -171,13 +172,20 @@ final class PushPullSketch {
   }
 
   private void screenRail(int first, int right) {
-    if (OutputFeed.ownScreenRail(values)) {
-      rungs(first, right, CORE + 4);
-      sketch.wire(first, CORE + 4, first - 6, CORE + 4);
-      SingleEndedSketch.screenSupply(sketch, first - 6, CORE + 4);
+    boolean own = OutputFeed.ownScreenRail(values);
+    boolean dropped = ScreenDropper.stated(values);
+    int y = own ? CORE + 4 : CORE;
+    int from = own ? first : right;
+    int to = own ? first - (dropped ? 8 : 6) : core() - 8;
+    rungs(first, right, y);
+    if (dropped) {
+      ScreenDropper.sketch(sketch, from, to, y);
+      ScreenDropper.sketchBypass(sketch, right, BOTTOM - 4);
     } else {
-      rungs(first, right, CORE);
-      sketch.wire(right, CORE, core() - 8, CORE);
+      sketch.wire(from, y, to, y);
+    }
+    if (own) {
+      SingleEndedSketch.screenSupply(sketch, to, y);
     }
   }
 

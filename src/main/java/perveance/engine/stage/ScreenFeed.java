@@ -22,6 +22,9 @@ final class ScreenFeed {
   static final List<KeySpec> KEYS =
       List.of(CONNECTION, SCREEN_RESISTOR, SCREEN_BYPASS, SCREEN_VOLTAGE, SCREEN_SUPPLY);
 
+  /** How far to the right of its valve the feed of a screen stands. */
+  private static final int FEED = 14;
+
   private ScreenFeed() {}
 
   /** Whether the screen is fed by itself. */
@@ -120,14 +123,22 @@ final class ScreenFeed {
     return screen;
   }
 
+  /** Draws from the screen of a further valve to that on its left, or to the first one's feed. */
+  static void join(Sketch sketch, int first, int x, int y) {
+    int left = x - Sections.step(sketch.values());
+    int to = left == first ? first + FEED : left + 6;
+    sketch.wire(x + 4, y, x + 6, y, x + 6, y - 6, to, y - 6);
+  }
+
   /**
-   * Draws the feed of a screen, fourteen units to the right of its valve.
+   * Draws the feed of a screen, fourteen units to the right of its valve, and its bypass as far to
+   * the right of the last valve.
    *
    * @param rail height of the rail from which the anode load hangs
    */
-  static void sketch(Sketch sketch, int valve, int y, int rail) {
+  static void sketch(Sketch sketch, int valve, int last, int y, int rail) {
     StageValues values = sketch.values();
-    int x = valve + 14;
+    int x = valve + FEED;
     sketch.wire(valve + 4, y, x, y);
     int top = y - 12;
     if (values.has(SCREEN_RESISTOR.key())) {
@@ -149,9 +160,13 @@ final class ScreenFeed {
     }
     if (values.has(SCREEN_BYPASS.key())) {
       SymbolType type = StageWiring.capacitorSymbol(values, SCREEN_BYPASS);
-      sketch.wire(x, y, x, y + 2);
-      sketch.upright(type, x, y + 4, SCREEN_BYPASS.key(), Side.RIGHT);
-      sketch.ground(x, y + 6);
+      int at = last + FEED;
+      if (last > valve) {
+        sketch.wire(last + 6, y, at, y);
+      }
+      sketch.wire(at, y, at, y + 2);
+      sketch.upright(type, at, y + 4, SCREEN_BYPASS.key(), Side.RIGHT);
+      sketch.ground(at, y + 6);
     }
   }
 }

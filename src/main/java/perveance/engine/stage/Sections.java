@@ -2,7 +2,6 @@ package perveance.engine.stage;
 
 import static perveance.engine.stage.StageKeys.SECTIONS;
 
-import java.util.ArrayList;
 import java.util.List;
 import perveance.engine.device.LawKind;
 import perveance.engine.stage.Drawing.Side;
@@ -39,7 +38,7 @@ final class Sections {
   }
 
   /** The number must be whole. */
-  static List<Complaint> checkCount(StageValues values) {
+  static List<Complaint> check(StageValues values) {
     double sections = values.number(SECTIONS.key(), 1);
     return sections == Math.rint(sections)
         ? List.of()
@@ -47,19 +46,8 @@ final class Sections {
             new Complaint(SECTIONS.key(), Double.toString(sections), "a whole number of sections"));
   }
 
-  static List<Complaint> check(StageValues values) {
-    List<Complaint> complaints = new ArrayList<>(checkCount(values));
-    double sections = values.number(SECTIONS.key(), 1);
-    if (sections > 1 && values.device().law().kind() == LawKind.PENTODE) {
-      complaints.add(
-          new Complaint(
-              SECTIONS.key(), "several pentodes in parallel", "triodes, or one pentode, here"));
-    }
-    return complaints;
-  }
-
   /**
-   * Draws the valves side by side with their stoppers, anodes and cathodes joined.
+   * Draws the valves side by side with their stoppers, joined grids and leads of the anodes.
    *
    * @return where the last valve stands
    */
@@ -77,7 +65,6 @@ final class Sections {
         int riser = at - 12;
         sketch.wire(riser, y - 5, riser, y);
         GridInput.sketchStopper(sketch, riser, at - 4, y, suffix(i));
-        cathode(sketch, at, y + 4);
       }
     }
     int last = x + (count - 1) * step(values);
@@ -88,16 +75,18 @@ final class Sections {
     return last;
   }
 
-  /** Joins the cathode of a further valve to the one on its left, or to chassis as that one is. */
-  private static void cathode(Sketch sketch, int x, int y) {
-    if (!CathodeBias.raised(sketch.values())) {
-      sketch.ground(x, y);
-      return;
+  /** Joins the cathodes of further valves to the first, or each to chassis as the first is. */
+  static void sketchCathodes(Sketch sketch, int x, int y) {
+    StageValues values = sketch.values();
+    boolean bypassed = values.has(StageKeys.CATHODE_BYPASS.key());
+    for (int i = 1; i < count(values); i++) {
+      int at = x + i * step(values);
+      if (CathodeBias.raised(values)) {
+        int from = i == 1 && bypassed ? CathodeBias.BYPASS : 0;
+        sketch.wire(at, y, at, y + 2, at - step(values) + from, y + 2);
+      } else {
+        sketch.ground(at, y);
+      }
     }
-    int step = step(sketch.values());
-    boolean first = x == GroundedCathode.X + step;
-    boolean bypassed = sketch.values().has(StageKeys.CATHODE_BYPASS.key());
-    int from = first && bypassed ? CathodeBias.BYPASS : 0;
-    sketch.wire(x, y, x, y + 2, x - step + from, y + 2);
   }
 }

@@ -45,7 +45,7 @@ final class SingleEndedOutput implements StageKind {
   public List<Complaint> check(StageValues values) {
     List<Complaint> complaints = new ArrayList<>(OutputFeed.check(values));
     complaints.addAll(CathodeBias.check(values));
-    complaints.addAll(Sections.checkCount(values));
+    complaints.addAll(Sections.check(values));
     boolean dropped = values.has(SCREEN_RESISTOR.key());
     if (values.has(SCREEN_BYPASS.key()) && (!dropped || !ScreenFeed.fed(values))) {
       complaints.add(

@@ -34,6 +34,7 @@ final class SingleEndedSketch {
     GridInput.sketch(sketch, JOINT, Y);
     int last = Sections.sketch(sketch, X, Y, JOINT, ANODE);
     CathodeBias.sketch(sketch, X, Y + 4);
+    Sections.sketchCathodes(sketch, X, Y + 4);
     int core = last + (screened(values) ? SCREEN + 6 : 14);
     sketch.mark(X, ANODE, "anode", Side.LEFT);
     sketch.wire(X, ANODE, core - 2, ANODE);

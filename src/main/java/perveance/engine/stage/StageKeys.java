@@ -48,6 +48,8 @@ final class StageKeys {
 
   // Screen.
   static final KeySpec SCREEN_RESISTOR = ohms("screen_resistor", "resistor that feeds the screen");
+  static final KeySpec SCREEN_DROPPER =
+      ohms("screen_dropper", "resistor that feeds the screens of all valves together");
   static final KeySpec SCREEN_BYPASS = farads("screen_bypass", "capacitor from the screen");
   static final KeySpec SCREEN_VOLTAGE =
       volts("screen_voltage", 1, 5000, "voltage that feeds the screen");

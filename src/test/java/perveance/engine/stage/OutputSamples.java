@@ -148,6 +148,26 @@ final class OutputSamples {
             .with("cathode_bypass", 100e-6)
             .with("screen_supply", "B"));
     all.put(
+        "push-pull, screens by one dropper",
+        pentode
+            .copy()
+            .with("cathode_resistor", 230)
+            .with("shared", true)
+            .with("cathode_bypass", 100e-6)
+            .with("screen_dropper", 4.7e3)
+            .with("screen_bypass", 22e-6)
+            .with("secondary_load", 8));
+    all.put(
+        "push-pull, four pentodes, dropper from own supply",
+        pentode
+            .copy()
+            .with("sections", 2)
+            .with("grid_bias", -38)
+            .with("screen_resistor", 1e3)
+            .with("screen_dropper", 1e3)
+            .with("screen_bypass", 22e-6)
+            .with("screen_supply", "B"));
+    all.put(
         "push-pull, four pentodes",
         pentode
             .copy()

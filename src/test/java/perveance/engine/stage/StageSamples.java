@@ -64,6 +64,28 @@ final class StageSamples {
             .with("coupling", 22e-9)
             .with("load", 470e3));
     all.put(
+        "pentodes in parallel",
+        new StageBench("common-cathode", PENTODE)
+            .with("sections", 3)
+            .with("anode_load", 100e3)
+            .with("cathode_resistor", 1e3)
+            .with("cathode_bypass", 47e-6)
+            .with("screen_resistor", 470e3)
+            .with("screen_bypass", 0.1e-6)
+            .with("grid_leak", 1e6)
+            .with("grid_stopper", 1e3)
+            .with("coupling", 22e-9)
+            .with("load", 470e3));
+    all.put(
+        "pentodes in parallel as triodes",
+        new StageBench("common-cathode", PENTODE)
+            .with("sections", 2)
+            .with("connection", "triode")
+            .with("anode_load", 47e3)
+            .with("cathode_resistor", 1e3)
+            .with("grid_leak", 1e6)
+            .with("load", 470e3));
+    all.put(
         "pentode, screen stated",
         new StageBench("common-cathode", PENTODE)
             .with("anode_load", 220e3)
@@ -111,6 +133,25 @@ final class StageSamples {
             .with("cathode_load", 100e3)
             .with("load", 100e3)
             .in(StageBench.drivenFrom("V0.anode")));
+    all.put(
+        "followers in parallel",
+        follower
+            .copy()
+            .with("sections", 3)
+            .with("cathode_resistor", 1e3)
+            .with("cathode_bypass", 22e-6)
+            .with("cathode_load", 22e3)
+            .with("grid_stopper", 1e3)
+            .with("anode_load", 100)
+            .with("coupling", 1e-6)
+            .with("load", 100e3));
+    all.put(
+        "followers in parallel, pentodes",
+        new StageBench("cathode-follower", PENTODE)
+            .with("sections", 2)
+            .with("connection", "triode")
+            .with("cathode_load", 10e3)
+            .with("grid_bias", 60));
     all.put(
         "follower on a current source",
         follower

@@ -20,7 +20,6 @@ public final class ReactiveSolver {
   /** To double the samples beyond this takes longer than anyone waits for an answer. */
   private static final int LARGEST_REFINED = LARGEST / 2;
 
-
   /** Most that folding may leave over of the currents into a node [A]. */
   private static final double FOLDED = 1e-6;
 

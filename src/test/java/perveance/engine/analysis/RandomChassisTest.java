@@ -80,7 +80,7 @@ class RandomChassisTest {
   }
 
   /** Walks through records, lists and maps; no number may be not-a-number. */
-  private static void finite(@Nullable Object at, String path, Chassis chassis) {
+  static void finite(@Nullable Object at, String path, Chassis chassis) {
     if (at instanceof Double number) {
       assertFalse(number.isNaN(), () -> path + " of " + chassis);
     } else if (at instanceof OptionalDouble number && number.isPresent()) {

@@ -7,9 +7,10 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /**
- * Derived: sections in parallel, and screens fed together, with linear valves against hand formulas.
- * n sections have n times the mutual conductance and an n-th of the anode resistance. Tolerances are
- * the digits of the sums; mid-band figures differ from them by the corners, below 1e-5.
+ * Derived: sections in parallel, and screens fed together, with linear valves against hand
+ * formulas. n sections have n times the mutual conductance and an n-th of the anode resistance.
+ * Tolerances are the digits of the sums; mid-band figures differ from them by the corners, below
+ * 1e-5.
  */
 class ParallelFormulasTest {
   /** Gain n gm (Ra || ra / n) with the screens held still by the bypass. */
@@ -85,8 +86,8 @@ class ParallelFormulasTest {
 
   /**
    * One side driven alone moves the screens' common feed: without a bypass by the screen currents'
-   * sum through the dropper, with one not at all. Antiphase drive of like valves moves it in neither
-   * case, so the gain is that of still screens: 2 gm (ra || Raa / 2).
+   * sum through the dropper, with one not at all. Antiphase drive of like valves moves it in
+   * neither case, so the gain is that of still screens: 2 gm (ra || Raa / 2).
    */
   @Test
   void antiphaseScreenCurrentsCancelInTheDropper() {

@@ -155,6 +155,7 @@ final class OpenWindow {
 
   /** Takes hold of a part of the load lines and pulls it by some pixels. */
   void drag(String handle, double dx, double dy) {
+    Toolkit.frames();
     Point2D at =
         Toolkit.on(
             () -> {

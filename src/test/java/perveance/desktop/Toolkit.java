@@ -4,6 +4,7 @@ import java.util.concurrent.Callable;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.FutureTask;
 import java.util.concurrent.TimeUnit;
+import javafx.animation.AnimationTimer;
 import javafx.application.Platform;
 
 /** Starts the window toolkit without a display, once. */
@@ -11,6 +12,8 @@ final class Toolkit {
   private static final String NEEDS =
       "The window toolkit did not start. On Debian install the package libpangoft2-1.0-0;"
           + " the tests draw into memory and need no display.";
+
+  private static final int FRAMES = 4;
 
   private Toolkit() {}
 
@@ -46,6 +49,29 @@ final class Toolkit {
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
       throw new AssertionError(e);
+    }
+  }
+
+  /** Lets the window be laid out and drawn; sizes stand still after a few frames. */
+  static void frames() {
+    CountDownLatch seen = new CountDownLatch(FRAMES);
+    AnimationTimer timer =
+        new AnimationTimer() {
+          @Override
+          public void handle(long now) {
+            seen.countDown();
+          }
+        };
+    run(timer::start);
+    try {
+      if (!seen.await(60, TimeUnit.SECONDS)) {
+        throw new AssertionError("the window is not drawn");
+      }
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+      throw new AssertionError(e);
+    } finally {
+      run(timer::stop);
     }
   }
 

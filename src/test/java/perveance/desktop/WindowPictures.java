@@ -133,7 +133,7 @@ public final class WindowPictures {
   }
 
   private void save(Stage stage, String name, int[] size, boolean dark) {
-    Toolkit.run(() -> stage.getScene().getRoot().layout());
+    Toolkit.frames();
     Toolkit.run(
         () -> {
           WritableImage image = stage.getScene().snapshot(null);

@@ -4,8 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import javafx.geometry.VPos;
 import javafx.scene.control.Label;
 import javafx.scene.layout.ColumnConstraints;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
 import perveance.app.wording.FigureRow;
@@ -47,7 +49,11 @@ final class FiguresRow extends VBox {
       Label value = Bits.label("", "figure-value");
       Label band = Bits.label("", "figure-note");
       Label note = Bits.wrapped("", "figure-note");
-      return new Cell(new VBox(name, value, band, note), name, value, band, note);
+      // the band stands beside its figure, beneath it where that is too narrow
+      FlowPane figure = new FlowPane(7, 0, value, band);
+      figure.setRowValignment(VPos.BASELINE);
+      figure.setPrefWrapLength(0);
+      return new Cell(new VBox(name, figure, note), name, value, band, note);
     }
   }
 

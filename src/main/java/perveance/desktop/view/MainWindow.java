@@ -4,7 +4,6 @@ import java.io.File;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.scene.Scene;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
@@ -38,7 +37,7 @@ public final class MainWindow {
   private final SchematicCard schematic;
   private final PlotCard plots;
   private final FiguresRow figures;
-  private final ScrollPane low = new ScrollPane();
+  private final CappedScroll low = new CappedScroll();
   private final FindingsPane findings;
   private final FootBar foot;
   private final Commands commands;
@@ -131,9 +130,7 @@ public final class MainWindow {
     middle.add(Bits.growing(schematic), 0, 0);
     middle.add(Bits.growing(plots), 1, 0);
     low.setContent(figures);
-    low.setFitToWidth(true);
-    low.maxHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE));
-    low.minHeightProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE / 2));
+    low.capProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE));
     middle.add(low, 0, 1, 2, 1);
     middle.add(Bits.growing(findings), 2, 0, 1, 2);
     schematic.setMinSize(0, 0);

@@ -28,7 +28,7 @@ final class ValuesPane extends ScrollPane {
     this.bench = desk.bench();
     grid.setHgap(12);
     grid.setVgap(5);
-    for (double percent : new double[] {32, 26, 42}) {
+    for (double percent : new double[] {29, 33, 38}) {
       ColumnConstraints column = new ColumnConstraints();
       column.setPercentWidth(percent);
       grid.getColumnConstraints().add(column);

@@ -2,6 +2,7 @@ package perveance.engine.analysis;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import perveance.engine.analysis.SignalChain.Link;
 import perveance.engine.base.Finding;
 import perveance.engine.base.Severity;
@@ -14,19 +15,44 @@ final class ChainFindings {
   /** A driver with less in hand than this is thin, common practice [dB]. */
   private static final double THIN = 3;
 
+  /** An output stage is usually driven a little beyond its clean swing [dB]. */
+  private static final double USUAL_OVER = 1;
+
   private ChainFindings() {}
 
   static List<Finding> of(List<SignalChain> chains, List<StageAnswer> stages) {
     List<Finding> findings = new ArrayList<>();
     for (SignalChain chain : chains) {
       Link last = chain.links().get(chain.links().size() - 1);
-      if (forPower(find(stages, last.ref()))) {
+      boolean forPower = forPower(find(stages, last.ref()));
+      drive(chain, forPower).ifPresent(findings::add);
+      if (forPower) {
         for (Link link : chain.links().subList(0, chain.links().size() - 1)) {
           judge(find(stages, link.ref()), link, last, findings);
         }
       }
     }
     return findings;
+  }
+
+  /** A drive of the first stage that is more than the row takes cleanly. */
+  private static Optional<Finding> drive(SignalChain chain, boolean forPower) {
+    double drive = chain.drive().orElse(0);
+    double over = 20 * Math.log10(drive / chain.inputPeak());
+    if (!Double.isFinite(over) || over <= (forPower ? USUAL_OVER : 0)) {
+      return Optional.empty();
+    }
+    String ref = chain.links().get(0).ref();
+    return Optional.of(
+        Finding.of(
+                SignalMessage.ROW_OVERDRIVEN,
+                Severity.CAUTION,
+                ref,
+                ref,
+                Words.of(drive, Unit.VOLT),
+                chain.clipsFirst(),
+                Words.of(chain.inputPeak(), Unit.VOLT))
+            .withValue(drive, chain.inputPeak(), Unit.VOLT));
   }
 
   private static StageAnswer find(List<StageAnswer> stages, String ref) {

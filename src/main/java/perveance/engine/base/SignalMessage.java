@@ -20,6 +20,7 @@ public enum SignalMessage implements MessageCode {
   BLOCKING("{0}: twice the clean input charges {1} by {2}; the bias then takes {3} to recover."),
   DRIVER_THIN("{0} has only {1} in hand over what drives {2} to its limit."),
   DRIVER_SHORT("{0} overloads before {1}: it gives {2} peak cleanly where {1} wants {3} of it."),
+  ROW_OVERDRIVEN("{0}: the stated drive of {1} overloads {2}; the row is clean to {3}."),
   HIGH_NOISE("{0}: noise at the input is {1}, most of it from {2}.");
 
   private final String template;

@@ -108,6 +108,11 @@ final class Bench {
     return stage("V1a", "common-cathode", flat.toArray(new String[0]));
   }
 
+  /** Adds the usual stage under another name, to be driven by one before. */
+  Bench standardNext(String ref) {
+    return stage(ref, "common-cathode", standard());
+  }
+
   static StageEntry entry(String ref, String kind, String... keysAndTexts) {
     Map<String, Setting> settings = new LinkedHashMap<>();
     for (int i = 0; i < keysAndTexts.length; i += 2) {

@@ -43,6 +43,30 @@ final class SignalCases {
     cases.put(SignalMessage.NO_HEADROOM, () -> standard(310, "drive", "1.3 V"));
     cases.put(SignalMessage.LITTLE_HEADROOM, () -> standard(310, "drive", "0.9 V"));
     cases.put(SignalMessage.HIGH_DISTORTION, () -> standard(310, "drive", "2 V"));
+    cases.put(
+        SignalMessage.ROW_OVERDRIVEN,
+        () ->
+            Bench.on(310)
+                .stage(
+                    "V1a",
+                    "common-cathode",
+                    "device",
+                    "12AX7",
+                    "supply",
+                    "A",
+                    "anode_load",
+                    "100k",
+                    "cathode_resistor",
+                    "1k5",
+                    "cathode_bypass",
+                    "22u",
+                    "coupling",
+                    "22n",
+                    "drives",
+                    "V1b",
+                    "drive",
+                    "50 mV")
+                .standardNext("V1b"));
     cases.put(SignalMessage.DRIVER_SHORT, () -> driven(200, "300B", "1k", "60 V"));
     cases.put(SignalMessage.DRIVER_THIN, () -> driven(250, "2A3", "750", "40 V"));
   }

@@ -234,6 +234,12 @@ final class ReferenceCases {
             pair
                 + "device=beam grid_bias=-22 screen_supply=B screen_resistor=470 source=2k2"
                 + " input_coupling=0.1u"));
+    all.add(
+        stage(
+            "push-pull-driver-transformer",
+            30,
+            "push-pull-output primary=6k6 secondary_load=8 device=beam grid_bias=-22"
+                + " screen_supply=B source=1k"));
   }
 
   private static ReferenceCase stage(String name, double peak, String stage) {

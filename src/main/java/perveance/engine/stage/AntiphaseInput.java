@@ -5,6 +5,7 @@ import static perveance.engine.stage.StageKeys.SOURCE;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import perveance.engine.circuit.Element;
 import perveance.engine.circuit.Element.Winding;
 
@@ -24,10 +25,14 @@ final class AntiphaseInput {
    *
    * @param first node of the grid in phase
    * @param second node of the grid in opposite phase
+   * @param foot node of the bias, where it is wired already
    */
-  record Joints(int first, int second) {}
+  record Joints(int first, int second, OptionalInt foot) {}
 
+  /** Wires it; the winding of a driver transformer returns to the bias, else to chassis. */
   static Joints wire(StageWiring wiring) {
+    boolean transformer = GridInput.byTransformer(wiring.values());
+    int foot = transformer ? GridInput.biasFoot(wiring) : 0;
     int source = wiring.node("input");
     int phase = wiring.node("phase");
     int phase2 = wiring.node("phase2");
@@ -35,22 +40,29 @@ final class AntiphaseInput {
     List<Winding> windings =
         List.of(
             new Winding(source, 0, 1, TRACE, 0),
-            new Winding(phase, 0, 1, 0, 0),
-            new Winding(0, phase2, 1, 0, 0));
+            new Winding(phase, foot, 1, 0, 0),
+            new Winding(foot, phase2, 1, 0, 0));
     wiring.element(
         new Element.Transformer(wiring.name("splitter"), windings, Double.POSITIVE_INFINITY));
+    if (transformer) {
+      GridInput.assumeTransformer(wiring);
+    }
     int entry = side(wiring, phase, "");
     side(wiring, phase2, "2");
     wiring.input(Optional.of(wiring.name("input")), entry);
-    return new Joints(wiring.node("grid_in"), wiring.node("grid_in2"));
+    OptionalInt bias = transformer ? OptionalInt.of(foot) : OptionalInt.empty();
+    return new Joints(wiring.node("grid_in"), wiring.node("grid_in2"), bias);
   }
 
   private static int side(StageWiring wiring, int phase, String suffix) {
-    int entry = wiring.node("entry" + suffix);
+    boolean transformer = GridInput.byTransformer(wiring.values());
+    int entry = wiring.node((transformer ? "grid_in" : "entry") + suffix);
     double resistance = GridInput.sourceResistance(wiring);
     wiring.outerResistor(SOURCE.key() + suffix, phase, entry, resistance);
-    int joint = wiring.node("grid_in" + suffix);
-    GridInput.coupling(wiring, INPUT_COUPLING.key() + suffix, entry, joint);
+    if (!transformer) {
+      int joint = wiring.node("grid_in" + suffix);
+      GridInput.coupling(wiring, INPUT_COUPLING.key() + suffix, entry, joint);
+    }
     return entry;
   }
 }

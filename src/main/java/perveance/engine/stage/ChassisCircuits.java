@@ -217,6 +217,7 @@ public final class ChassisCircuits {
       Surroundings around =
           new Surroundings(
               input,
+              rough.drivenBy(),
               source,
               rough.directOutput(),
               rough.next().map(next -> nexts.getOrDefault(next.ref(), next)),

@@ -38,6 +38,7 @@ final class ChassisWiring {
     boolean direct = direct(entry);
     return new Surroundings(
         driver.filter(ChassisWiring::direct).map(StageEntry::ref),
+        driver.filter(d -> !direct(d)).map(StageEntry::ref),
         OptionalDouble.empty(),
         direct ? next.map(StageEntry::ref) : Optional.empty(),
         direct ? Optional.empty() : next.map(ChassisWiring::input),

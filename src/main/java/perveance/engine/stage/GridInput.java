@@ -96,6 +96,38 @@ final class GridInput {
     return joint;
   }
 
+  /**
+   * Whether an output stage is driven by a transformer, as data sheets with grid current assume:
+   * neither a capacitor nor a grid leak stands before the grid, and no stage drives it.
+   */
+  static boolean byTransformer(StageValues values) {
+    return !direct(values)
+        && values.around().drivenBy().isEmpty()
+        && !values.has(INPUT_COUPLING.key())
+        && !values.has(GRID_LEAK.key());
+  }
+
+  /** Notes that the grid finds its bias through the winding of a driver transformer. */
+  static void assumeTransformer(StageWiring wiring) {
+    wiring.assume(
+        "Neither input_coupling nor grid_leak is stated; the grid is taken as driven by a"
+            + " transformer, so that its current does not shift the bias.");
+  }
+
+  /** Wires the source of an output stage up to the node before the stopper. */
+  static int outputEntry(StageWiring wiring, int foot) {
+    if (!byTransformer(wiring.values())) {
+      return entry(wiring, "grid_in");
+    }
+    int source = wiring.node("input");
+    int joint = wiring.node("grid_in");
+    wiring.voltageSource("input", source, foot, 0);
+    wiring.outerResistor(SOURCE.key(), source, joint, sourceResistance(wiring));
+    wiring.input(Optional.of(wiring.name("input")), joint);
+    assumeTransformer(wiring);
+    return joint;
+  }
+
   static double sourceResistance(StageWiring wiring) {
     StageValues values = wiring.values();
     if (values.has(SOURCE.key())) {

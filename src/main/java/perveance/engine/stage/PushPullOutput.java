@@ -107,7 +107,7 @@ final class PushPullOutput implements StageKind {
         new PushPullSide(0, wiring.node("anode"), joints.first(), cathodes.first());
     PushPullSide second =
         new PushPullSide(sections, wiring.node("anode2"), joints.second(), cathodes.second());
-    int foot = GridInput.biasFoot(wiring);
+    int foot = joints.foot().orElseGet(() -> GridInput.biasFoot(wiring));
     first.wire(wiring, transformer.primary(rail, first.anode(), 1, ""), screenRail, foot);
     second.wire(wiring, transformer.primary(rail, second.anode(), -1, "2"), screenRail, foot);
     transformer.finish();

@@ -78,8 +78,8 @@ final class SingleEndedOutput implements StageKind {
     int tap = transformer.primary(rail, anode, 1, "");
     int screens =
         connection.equals(ValveWiring.PENTODE) ? OutputFeed.screenRail(wiring, idle, rail) : tap;
-    int joint = GridInput.entry(wiring, "grid_in");
     int foot = GridInput.biasFoot(wiring);
+    int joint = GridInput.outputEntry(wiring, foot);
     if (GridInput.hasLeak(values)) {
       GridInput.leak(wiring, joint, foot, "", OutputFeed.usualLeak(values));
     }

@@ -9,6 +9,7 @@ import java.util.OptionalDouble;
  *
  * @param directInput name of the circuit node wired straight to its grid, empty when the stage has
  *     a source of its own behind a capacitor
+ * @param drivenBy reference of the stage that drives it through a capacitor, empty when none does
  * @param sourceResistance output resistance of the stage that drives it, used where the stage
  *     states no {@code source} of its own [ohm]
  * @param directOutput reference of the stage wired straight to its main output, empty when none is
@@ -17,6 +18,7 @@ import java.util.OptionalDouble;
  */
 public record Surroundings(
     Optional<String> directInput,
+    Optional<String> drivenBy,
     OptionalDouble sourceResistance,
     Optional<String> directOutput,
     Optional<NextInput> next,
@@ -24,6 +26,7 @@ public record Surroundings(
   /** A stage by itself. */
   public static final Surroundings NONE =
       new Surroundings(
+          Optional.empty(),
           Optional.empty(),
           OptionalDouble.empty(),
           Optional.empty(),

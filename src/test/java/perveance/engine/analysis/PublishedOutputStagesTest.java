@@ -126,6 +126,53 @@ class PublishedOutputStagesTest {
     assertTrue(median(atDrive) <= 0.06, "current at drive " + atDrive);
   }
 
+  /**
+   * Case: class AB2 pairs of the RCA Receiving Tube Manual (memory), fixed bias, drive by a
+   * transformer, anode voltage, screen voltage, bias, drive from grid to grid, load, power, mean
+   * anode current at drive. Not in any fit. Tolerance: push-pull power 8 % median as the requirement
+   * sets it, 15 % at worst in power and current, the sheets rounding the drive.
+   */
+  @Test
+  void pairsDrivenIntoGridCurrent() {
+    double[][] rows = {
+      {360, 270, -22.5, 72, 3800, 47, 205},
+      {360, 225, -18, 52, 6000, 31, 142},
+      {375, 250, -26, 82, 10e3, 18.5, 82}
+    };
+    List<String> types = List.of("6L6", "6L6", "6F6");
+    List<Double> power = new ArrayList<>();
+    List<Double> current = new ArrayList<>();
+    for (int i = 0; i < rows.length; i++) {
+      double[] row = rows[i];
+      List<String> keys = new ArrayList<>(List.of("device", types.get(i)));
+      keys.addAll(List.of("connection", "pentode"));
+      put(keys, "anode_voltage", Double.toString(row[0]), " V");
+      put(keys, "screen_voltage", Double.toString(row[1]), " V");
+      put(keys, "grid_bias", Double.toString(row[2]), " V");
+      put(keys, "drive", Double.toString(row[3] / 2), " V");
+      put(keys, "primary", Double.toString(row[4]), "");
+      DrivenAnswer driven = driven("push-pull-output", keys);
+      power.add(driven.power().orElseThrow() / row[5] - 1);
+      current.add(1e3 * driven.meanAnodeCurrent() / row[6] - 1);
+    }
+    assertTrue(median(power) <= 0.08, "power " + power);
+    assertTrue(worst(power) <= 0.15, "power " + power);
+    assertTrue(worst(current) <= 0.15, "current at drive " + current);
+  }
+
+  /** A capacitor before the grids lets their current shift the bias: the same pair gives less. */
+  @Test
+  void aCouplingCapacitorBlocksAnOverdrivenPair() {
+    List<String> keys =
+        new ArrayList<>(List.of("device", "6L6", "connection", "pentode", "primary", "3800"));
+    keys.addAll(List.of("anode_voltage", "360 V", "screen_voltage", "270 V"));
+    keys.addAll(List.of("grid_bias", "-22.5 V", "drive", "36 V"));
+    double byTransformer = driven("push-pull-output", keys).power().orElseThrow();
+    keys.addAll(List.of("input_coupling", "100n", "grid_leak", "220k"));
+    double byCapacitor = driven("push-pull-output", keys).power().orElseThrow();
+    assertTrue(byCapacitor < 0.6 * byTransformer, byCapacitor + " of " + byTransformer);
+  }
+
   private static List<String> pair(Row row) {
     List<String> keys = new ArrayList<>(List.of("device", row.text("type")));
     keys.addAll(List.of("connection", "pentode"));

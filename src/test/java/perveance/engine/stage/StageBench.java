@@ -113,6 +113,7 @@ final class StageBench {
   static Surroundings drivenFrom(String node) {
     return new Surroundings(
         Optional.of(node),
+        Optional.empty(),
         OptionalDouble.empty(),
         Optional.empty(),
         Optional.empty(),

@@ -129,8 +129,8 @@ class PublishedOutputStagesTest {
   /**
    * Case: class AB2 pairs of the RCA Receiving Tube Manual (memory), fixed bias, drive by a
    * transformer, anode voltage, screen voltage, bias, drive from grid to grid, load, power, mean
-   * anode current at drive. Not in any fit. Tolerance: push-pull power 8 % median as the requirement
-   * sets it, 15 % at worst in power and current, the sheets rounding the drive.
+   * anode current at drive. Not in any fit. Tolerance: push-pull power 8 % median as the
+   * requirement sets it, 15 % at worst in power and current, the sheets rounding the drive.
    */
   @Test
   void pairsDrivenIntoGridCurrent() {

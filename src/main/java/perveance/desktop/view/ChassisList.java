@@ -42,8 +42,6 @@ final class ChassisList extends VBox {
     ScrollPane scroll = new ScrollPane(rows);
     scroll.setFitToWidth(true);
     getChildren().add(Bits.growing(scroll));
-    setPrefWidth(205);
-    setMinWidth(170);
     setId("chassis");
     bench.chosenStage().addListener((o, was, is) -> refresh());
   }

@@ -66,7 +66,6 @@ public final class MainWindow {
     chassis.onAddStage(pickers::kind);
     layOut();
     listen();
-    refresh();
   }
 
   /**
@@ -133,12 +132,15 @@ public final class MainWindow {
     low.capProperty().bind(scene.heightProperty().multiply(FIGURES_SHARE));
     middle.add(low, 0, 1, 2, 1);
     middle.add(Bits.growing(findings), 2, 0, 1, 2);
-    schematic.setMinSize(0, 0);
-    plots.setMinSize(0, 0);
-    findings.setMinSize(0, 0);
+    // they take the room there is, so nobody has to ask them how large they would like to be
+    for (Region card : List.of(schematic, plots, findings)) {
+      card.setMinSize(0, 0);
+      card.setPrefSize(0, 0);
+    }
     VBox centre = new VBox(caution, Bits.growing(middle), foot);
     centre.setMinSize(0, 0);
     middle.setMinSize(0, 0);
+    middle.setPrefSize(0, 0);
     root.setCenter(centre);
   }
 

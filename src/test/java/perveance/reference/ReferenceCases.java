@@ -235,6 +235,14 @@ final class ReferenceCases {
                 + "device=beam grid_bias=-22 screen_supply=B screen_resistor=470 source=2k2"
                 + " input_coupling=0.1u"));
     all.add(
+        chain(
+            "direct-coupled-output-pair",
+            0.5,
+            "long-tailed-pair device=medium anode_load=100k tail_resistor=4k7 cathode_resistor=330"
+                + " grid_leak=1M second_grid_leak=1M second_grid_bypass=0.1u drives=V2",
+            "push-pull-output device=power primary=6k6 secondary_load=8 cathode_resistor=2k2"
+                + " shared=true grid_stopper=1k"));
+    all.add(
         stage(
             "push-pull-driver-transformer",
             30,

@@ -31,6 +31,9 @@ final class AntiphaseInput {
 
   /** Wires it; the winding of a driver transformer returns to the bias, else to chassis. */
   static Joints wire(StageWiring wiring) {
+    if (GridInput.direct(wiring.values())) {
+      return direct(wiring);
+    }
     boolean transformer = GridInput.byTransformer(wiring.values());
     int foot = transformer ? GridInput.biasFoot(wiring) : 0;
     int source = wiring.node("input");
@@ -52,6 +55,15 @@ final class AntiphaseInput {
     wiring.input(Optional.of(wiring.name("input")), entry);
     OptionalInt bias = transformer ? OptionalInt.of(foot) : OptionalInt.empty();
     return new Joints(wiring.node("grid_in"), wiring.node("grid_in2"), bias);
+  }
+
+  /** Both grids hang on the outputs of the splitter before. */
+  private static Joints direct(StageWiring wiring) {
+    Surroundings around = wiring.values().around();
+    int first = wiring.outerNode(around.directInput().orElseThrow());
+    int second = wiring.outerNode(around.directInput2().orElseThrow());
+    wiring.input(Optional.empty(), first);
+    return new Joints(first, second, OptionalInt.empty());
   }
 
   private static int side(StageWiring wiring, int phase, String suffix) {

@@ -211,12 +211,14 @@ public final class ChassisCircuits {
       Map<String, NextInput> nexts) {
     List<StageCircuit> stages = new ArrayList<>();
     Optional<String> input = Optional.empty();
+    Optional<String> input2 = Optional.empty();
     OptionalDouble source = sourceResistance;
     for (String ref : group.refs()) {
       Surroundings rough = values(ref).around();
       Surroundings around =
           new Surroundings(
               input,
+              input2,
               rough.drivenBy(),
               source,
               rough.directOutput(),
@@ -224,8 +226,9 @@ public final class ChassisCircuits {
               rough.supplyVoltage());
       StageCircuit stage = kind(ref).build(values(ref).in(around), builder);
       stages.add(stage);
-      int output = stage.outputs().get(0).plus();
-      input = Optional.of(builder.build().nodes().get(output));
+      List<String> nodes = builder.build().nodes();
+      input = Optional.of(nodes.get(stage.outputs().get(0).plus()));
+      input2 = stage.outputs().stream().skip(1).findFirst().map(o -> nodes.get(o.plus()));
       source = OptionalDouble.empty();
     }
     return stages;

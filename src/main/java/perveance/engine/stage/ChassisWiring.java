@@ -21,6 +21,13 @@ final class ChassisWiring {
     return drives(entry).isPresent() && !entry.settings().containsKey(StageKeys.COUPLING.key());
   }
 
+  /** Whether a stage has two outputs of opposite phase. */
+  private static boolean twoOutputs(StageEntry entry) {
+    return StageKinds.find(entry.kind())
+        .filter(kind -> kind.keys().contains(StageKeys.LOAD2))
+        .isPresent();
+  }
+
   /** The stage that drives a stage. */
   static Optional<StageEntry> driver(Chassis chassis, String ref) {
     return chassis.stages().stream()
@@ -38,6 +45,7 @@ final class ChassisWiring {
     boolean direct = direct(entry);
     return new Surroundings(
         driver.filter(ChassisWiring::direct).map(StageEntry::ref),
+        driver.filter(ChassisWiring::direct).filter(ChassisWiring::twoOutputs).map(StageEntry::ref),
         driver.filter(d -> !direct(d)).map(StageEntry::ref),
         OptionalDouble.empty(),
         direct ? next.map(StageEntry::ref) : Optional.empty(),

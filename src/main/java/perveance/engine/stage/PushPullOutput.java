@@ -69,12 +69,12 @@ final class PushPullOutput implements StageKind {
       complaints.add(
           new Complaint(REF2.key(), "a name for one of several valves", "one valve a side"));
     }
-    if (GridInput.direct(values)) {
+    if (GridInput.direct(values) && values.around().directInput2().isEmpty()) {
       complaints.add(
           new Complaint(
               StageKeys.INPUT_COUPLING.key(),
-              "a stage wired straight to its grids",
-              "a coupling in the stage that drives it"));
+              "a stage of one output wired straight to two grids",
+              "a splitter, or a coupling in the stage that drives it"));
     }
     return complaints;
   }

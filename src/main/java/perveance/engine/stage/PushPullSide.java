@@ -17,7 +17,9 @@ record PushPullSide(int start, int anode, int joint, int cathode) {
   void wire(StageWiring wiring, int tap, int screenRail, int foot) {
     StageValues values = wiring.values();
     String side = start == 0 ? "" : "2";
-    GridInput.leak(wiring, joint, foot, side, OutputFeed.usualLeak(values));
+    if (GridInput.hasLeak(values)) {
+      GridInput.leak(wiring, joint, foot, side, OutputFeed.usualLeak(values));
+    }
     int sections = Sections.count(values);
     String key = start == 0 ? DEVICE.key() : ValvePair.secondKey(values);
     String connection = ValveWiring.connection(values, values.device());

@@ -1,7 +1,6 @@
 package perveance.engine.stage;
 
 import static perveance.engine.stage.StageKeys.CATHODE_BYPASS;
-import static perveance.engine.stage.StageKeys.GRID_LEAK;
 import static perveance.engine.stage.StageKeys.INPUT_COUPLING;
 import static perveance.engine.stage.StageKeys.PRIMARY;
 import static perveance.engine.stage.StageKeys.SOURCE;
@@ -73,7 +72,9 @@ final class PushPullSketch {
 
   private void input(int y, String suffix) {
     String text = suffix.isEmpty() ? "in" : "in, inverted";
-    if (values.has(INPUT_COUPLING.key())) {
+    if (GridInput.direct(values)) {
+      GridInput.terminal(sketch, JOINT, y);
+    } else if (values.has(INPUT_COUPLING.key())) {
       sketch.input(JOINT - 12, y, SOURCE.key() + suffix, text);
       sketch.wire(JOINT - 12, y, JOINT - 6, y);
       String local = INPUT_COUPLING.key() + suffix;
@@ -83,9 +84,10 @@ final class PushPullSketch {
       sketch.input(JOINT - 4, y, SOURCE.key() + suffix, text);
       sketch.wire(JOINT - 4, y, JOINT, y);
     }
-    sketch.wire(JOINT, y, JOINT, y + 2);
-    sketch.upright(SymbolType.RESISTOR, JOINT, y + 4, GRID_LEAK.key() + suffix, Side.LEFT);
-    GridInput.foot(sketch, JOINT, y + 6);
+    if (GridInput.hasLeak(values)) {
+      GridInput.sketchLeak(sketch, JOINT, y, suffix);
+      GridInput.foot(sketch, JOINT, y + 6);
+    }
   }
 
   private void cathodes() {

@@ -9,6 +9,8 @@ import java.util.OptionalDouble;
  *
  * @param directInput name of the circuit node wired straight to its grid, empty when the stage has
  *     a source of its own behind a capacitor
+ * @param directInput2 name of the node wired straight to its second grid, empty when the stage
+ *     before has one output
  * @param drivenBy reference of the stage that drives it through a capacitor, empty when none does
  * @param sourceResistance output resistance of the stage that drives it, used where the stage
  *     states no {@code source} of its own [ohm]
@@ -18,6 +20,7 @@ import java.util.OptionalDouble;
  */
 public record Surroundings(
     Optional<String> directInput,
+    Optional<String> directInput2,
     Optional<String> drivenBy,
     OptionalDouble sourceResistance,
     Optional<String> directOutput,
@@ -26,6 +29,7 @@ public record Surroundings(
   /** A stage by itself. */
   public static final Surroundings NONE =
       new Surroundings(
+          Optional.empty(),
           Optional.empty(),
           Optional.empty(),
           OptionalDouble.empty(),

@@ -157,6 +157,7 @@ class BenchQuestionsTest {
     Surroundings none = Surroundings.NONE;
     return new Surroundings(
         none.directInput(),
+        none.directInput2(),
         none.drivenBy(),
         none.sourceResistance(),
         none.directOutput(),

@@ -1,6 +1,7 @@
 package perveance.engine.stage;
 
 import java.util.Map;
+import java.util.Optional;
 
 /** Output stages in their variants. */
 final class OutputSamples {
@@ -167,6 +168,13 @@ final class OutputSamples {
             .with("screen_dropper", 1e3)
             .with("screen_bypass", 22e-6)
             .with("screen_supply", "B"));
+    all.put(
+        "push-pull triodes, direct",
+        pair(StageSamples.TRIODE)
+            .with("cathode_resistor", 900)
+            .with("shared", true)
+            .with("grid_stopper", 1e3)
+            .in(StageBench.drivenFrom("V0.anode", Optional.of("V0.anode2"))));
     all.put(
         "push-pull, four pentodes",
         pentode

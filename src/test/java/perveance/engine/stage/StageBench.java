@@ -107,12 +107,20 @@ final class StageBench {
     around
         .directInput()
         .ifPresent(n -> builder.add(new Element.VoltageSource("before", builder.node(n), 0, 100)));
+    around
+        .directInput2()
+        .ifPresent(n -> builder.add(new Element.VoltageSource("before2", builder.node(n), 0, 100)));
     return new Built(stage, builder.build(), kind.draw(values()));
   }
 
   static Surroundings drivenFrom(String node) {
+    return drivenFrom(node, Optional.empty());
+  }
+
+  static Surroundings drivenFrom(String node, Optional<String> node2) {
     return new Surroundings(
         Optional.of(node),
+        node2,
         Optional.empty(),
         OptionalDouble.empty(),
         Optional.empty(),

@@ -64,13 +64,44 @@ final class FiguresRow extends VBox {
             .flatMap(a -> StageFigures.signal(a).stream())
             .filter(r -> !ELSEWHERE.contains(r.label()))
             .toList();
+    if (isPartOfWhatStands(rows)) {
+      follow(rows);
+    } else {
+      showAll(rows);
+    }
+    basis.setText(answer.isEmpty() ? "" : desk.say(basis()));
+  }
+
+  private void showAll(List<FigureRow> rows) {
     if (cells.size() != rows.size()) {
       layOut(rows.size());
     }
     for (int i = 0; i < rows.size(); i++) {
       show(cells.get(i), rows.get(i));
     }
-    basis.setText(answer.isEmpty() ? "" : desk.say(basis()));
+  }
+
+  /** A first answer leaves out what takes long; that must not rebuild the row at each step. */
+  private boolean isPartOfWhatStands(List<FigureRow> rows) {
+    List<String> standing = cells.stream().map(c -> c.name().getText()).toList();
+    return !rows.isEmpty()
+        && rows.size() < cells.size()
+        && !desk.bench().settled().get()
+        && rows.stream().map(this::name).allMatch(standing::contains);
+  }
+
+  private void follow(List<FigureRow> rows) {
+    for (Cell cell : cells) {
+      cell.value().setOpacity(FADED);
+      rows.stream()
+          .filter(r -> name(r).equals(cell.name().getText()))
+          .findFirst()
+          .ifPresent(r -> show(cell, r));
+    }
+  }
+
+  private String name(FigureRow row) {
+    return desk.say(capital(row.label()));
   }
 
   private void layOut(int figures) {
@@ -97,7 +128,8 @@ final class FiguresRow extends VBox {
   }
 
   private void show(Cell cell, FigureRow row) {
-    String name = desk.say(capital(row.label()));
+    String name = name(row);
+    cell.value().setOpacity(1);
     cell.value().setText(desk.say(row.value()));
     boolean follows = row.band().isEmpty() && !desk.bench().settled().get();
     cell.band().setOpacity(follows ? FADED : 1);

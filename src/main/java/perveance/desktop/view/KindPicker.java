@@ -22,6 +22,9 @@ import perveance.plot.SchematicText;
 
 /** A new stage, its kind chosen by its picture. */
 final class KindPicker {
+  /** Smallest type that is aimed at on a card, in pixels. */
+  private static final double READABLE = 8;
+
   private final Desk desk;
   private final StageList list;
   private final PlotFonts fonts;
@@ -57,9 +60,6 @@ final class KindPicker {
     scroll.setPrefViewportWidth(880);
     return scroll;
   }
-
-  /** Smallest type that is aimed at on a card, in pixels. */
-  private static final double READABLE = 8;
 
   private Button card(StageStarter starter, StageKind kind, StageEntry entry) {
     ArtworkNode picture = new ArtworkNode();

@@ -100,8 +100,11 @@ final class FindingsPane extends VBox {
   private VBox card(String style, Shape shape, String title, String text, String severity) {
     shape.getStyleClass().add("finding-shape");
     Label word = Bits.label(severity, "severity");
-    Label name = Bits.label(title, "strong");
-    HBox head = new HBox(8, shape, name, Bits.gap(), word);
+    word.setMinWidth(USE_PREF_SIZE);
+    Label name = Bits.wrapped(title, "strong");
+    HBox.setHgrow(name, javafx.scene.layout.Priority.ALWAYS);
+    name.setMaxWidth(Double.MAX_VALUE);
+    HBox head = new HBox(8, shape, name, word);
     head.setAlignment(javafx.geometry.Pos.CENTER_LEFT);
     VBox card = new VBox(head, Bits.wrapped(desk.say(text)));
     card.getStyleClass().addAll("finding", style);

@@ -143,7 +143,8 @@ final class CharacteristicsView extends StackPane {
   /** Draws what has changed. */
   void refresh() {
     Optional<StageAnswer> answer = bench.stageAnswer();
-    if (!held || frame.isEmpty()) {
+    boolean still = held || desk.drag().isHeld();
+    if (!still || frame.isEmpty()) {
       Optional<PlotDescription> next = answer.flatMap(StagePlots::frame);
       String key = next.map(CharacteristicsView::key).orElse("") + desk.settings().get();
       if (!key.equals(drawnFor)) {

@@ -42,6 +42,8 @@ record PushPullSide(int start, int anode, int joint, int cathode) {
     wiring.testPoint(anode, ref, "anode");
     if (values.has(StageKeys.SCREEN_RESISTOR.key())) {
       wiring.testPoint(wiring.node("screen" + Sections.suffix(start)), ref, "screen");
+    } else if (start == 0 && ScreenDropper.stated(values)) {
+      wiring.testPoint(wiring.node(ScreenDropper.FEED), ref, "screen");
     }
     if (cathode != 0 && (start == 0 || PairedCathodes.apart(values))) {
       wiring.testPoint(cathode, ref, "cathode");

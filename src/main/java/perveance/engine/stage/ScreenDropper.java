@@ -10,6 +10,9 @@ import perveance.engine.stage.StageKind.Complaint;
 
 /** The one resistor, with its bypass, through which the screens of a push-pull stage are fed. */
 final class ScreenDropper {
+  /** Node behind the dropper. */
+  static final String FEED = "screen_feed";
+
   private ScreenDropper() {}
 
   static boolean stated(StageValues values) {
@@ -46,7 +49,7 @@ final class ScreenDropper {
     if (!stated(wiring.values())) {
       return rail;
     }
-    int feed = wiring.node("screen_feed");
+    int feed = wiring.node(FEED);
     wiring.resistor(SCREEN_DROPPER, rail, feed, "screen dropper");
     if (wiring.values().has(SCREEN_BYPASS.key())) {
       wiring.capacitor(SCREEN_BYPASS, feed, 0, "screen bypass");

@@ -28,6 +28,8 @@ import perveance.plot.StagePlots;
 /** What moves over the characteristics; plain lines, so that a drag costs little. */
 final class LoadLineLayer extends Region {
   private static final double MILLI = 1e-3;
+  private static final double PIECE = 8;
+  private static final double MOST_PIECES = 200;
 
   private final Desk desk;
   private final Canvas canvas = new Canvas();
@@ -108,6 +110,8 @@ final class LoadLineLayer extends Region {
     grips.forEach(grip -> taken.add(new Rectangle2D(grip.x() - 8, grip.y() - 9, 16, 18)));
     taken.add(label(g, view, settings, taken));
     if (edge.size() > 1) {
+      taken.addAll(covered(view.dc()));
+      taken.addAll(covered(view.ac()));
       gridCurrentWords(g, settings, edge, taken);
     }
   }
@@ -149,6 +153,25 @@ final class LoadLineLayer extends Region {
         return;
       }
     }
+  }
+
+  /** What a line covers, in short pieces, so that a slanting line does not cover its whole box. */
+  private List<Rectangle2D> covered(List<LoadLineView.Point> line) {
+    List<Rectangle2D> pieces = new ArrayList<>();
+    for (int i = 1; i < line.size(); i++) {
+      double x = scale.x(line.get(i - 1).voltage());
+      double y = scale.y(line.get(i - 1).current() / MILLI);
+      double across = scale.x(line.get(i).voltage()) - x;
+      double down = scale.y(line.get(i).current() / MILLI) - y;
+      int count = (int) Math.ceil(Math.min(MOST_PIECES, Math.hypot(across, down) / PIECE));
+      for (int k = 0; k < count; k++) {
+        double left = x + across * (across < 0 ? k + 1 : k) / count;
+        double top = y + down * (down < 0 ? k + 1 : k) / count;
+        double width = Math.abs(across) / count + 2;
+        pieces.add(new Rectangle2D(left - 1, top - 1, width, Math.abs(down) / count + 2));
+      }
+    }
+    return pieces;
   }
 
   /** Whether the curve at which grid current begins runs to the right of a point or below it. */

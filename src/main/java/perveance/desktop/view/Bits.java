@@ -1,5 +1,6 @@
 package perveance.desktop.view;
 
+import java.util.regex.Pattern;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
@@ -9,6 +10,9 @@ import javafx.scene.layout.VBox;
 
 /** Small parts of a window, made alike everywhere. */
 final class Bits {
+  private static final Pattern BEFORE_UNIT =
+      Pattern.compile("(?<=\\d) (?=(%|dB|[GMkm\u00b5np]?(V|A|W|Hz|J|s|F|\u03a9)(?![A-Za-z])))");
+
   private Bits() {}
 
   static Label label(String text, String... styles) {
@@ -22,6 +26,11 @@ final class Bits {
     label.setWrapText(true);
     label.setMinHeight(Region.USE_PREF_SIZE);
     return label;
+  }
+
+  /** A figure stays with its unit where a line is broken. */
+  static String kept(String text) {
+    return BEFORE_UNIT.matcher(text).replaceAll("\u00a0");
   }
 
   static Button button(String text, Runnable action, String... styles) {

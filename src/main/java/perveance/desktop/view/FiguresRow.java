@@ -137,7 +137,7 @@ final class FiguresRow extends VBox {
       text(cell.band(), desk.say(row.band()));
     }
     cell.name().setText(name);
-    text(cell.note(), desk.say(row.note()));
+    text(cell.note(), Bits.kept(desk.say(row.note())));
     cell.box()
         .setAccessibleText(
             desk.say(row.label() + " " + row.value() + " " + row.band() + " " + row.note()));

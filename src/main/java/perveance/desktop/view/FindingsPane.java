@@ -106,14 +106,14 @@ final class FindingsPane extends VBox {
     name.setMaxWidth(Double.MAX_VALUE);
     HBox head = new HBox(8, shape, name, word);
     head.setAlignment(javafx.geometry.Pos.CENTER_LEFT);
-    VBox card = new VBox(head, Bits.wrapped(desk.say(text)));
+    VBox card = new VBox(head, Bits.wrapped(Bits.kept(desk.say(text))));
     card.getStyleClass().addAll("finding", style);
     card.setAccessibleText(desk.say(severity + ": " + title + ". " + text));
     return card;
   }
 
   private List<javafx.scene.Node> remedy(Finding finding, Remedy remedy) {
-    Label what = Bits.wrapped(desk.say(remedy.text()), "small");
+    Label what = Bits.wrapped(Bits.kept(desk.say(remedy.text())), "small");
     if (remedy.edits().isEmpty()) {
       return List.of(what);
     }

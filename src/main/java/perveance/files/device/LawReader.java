@@ -26,7 +26,9 @@ final class LawReader {
       table.require(key, "a number in SI units");
       read(table, key, values);
     }
-    form.get().further().forEach(key -> read(table, key, values));
+    for (String key : form.get().further()) {
+      read(table, key, values);
+    }
     table.refuseOthers();
     if (!values.keySet().containsAll(form.get().keys())) {
       return Optional.empty();

@@ -13,6 +13,7 @@ import org.openjdk.jmh.annotations.Param;
 import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
+import org.openjdk.jmh.annotations.Threads;
 import org.openjdk.jmh.annotations.Warmup;
 import perveance.engine.analysis.AnalysisOptions;
 import perveance.engine.analysis.ChassisAnalysis;
@@ -66,5 +67,12 @@ public class AnswerBenchmark {
   @Benchmark
   public ChassisAnswer spreadOf100000() {
     return analysis.answer(chassis, SPREAD, Progress.none());
+  }
+
+  /** Half of those samples on each of two threads: the whole spread on two cores. */
+  @Benchmark
+  @Threads(2)
+  public ChassisAnswer spreadOnTwoCores() {
+    return analysis.answer(chassis, SPREAD.withSamples(50_000), Progress.none());
   }
 }

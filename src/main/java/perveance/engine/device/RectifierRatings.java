@@ -1,5 +1,6 @@
 package perveance.engine.device;
 
+import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
@@ -19,10 +20,9 @@ public record RectifierRatings(
   /** Copies the lists and sorts the resistances. */
   public RectifierRatings {
     limits = List.copyOf(limits);
-    limitingResistances =
-        limitingResistances.stream()
-            .sorted(Comparator.comparingDouble(LimitingResistance::anodeVoltage))
-            .toList();
+    List<LimitingResistance> byVoltage = new ArrayList<>(limitingResistances);
+    byVoltage.sort(new LowestVoltageFirst());
+    limitingResistances = List.copyOf(byVoltage);
     outputs = List.copyOf(outputs);
   }
 
@@ -64,5 +64,13 @@ public record RectifierRatings(
       }
     }
     return OptionalDouble.empty();
+  }
+
+  /** Not a lambda: linking the first one costs more than the rest of reading a file. */
+  private static final class LowestVoltageFirst implements Comparator<LimitingResistance> {
+    @Override
+    public int compare(LimitingResistance one, LimitingResistance other) {
+      return Double.compare(one.anodeVoltage(), other.anodeVoltage());
+    }
   }
 }

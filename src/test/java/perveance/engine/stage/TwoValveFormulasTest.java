@@ -142,6 +142,11 @@ class TwoValveFormulasTest {
     // each side -mu R / (2 (ra + R)), the currents being equal and opposite
     assertEquals(-20 * 22e3 / (2 * 29.7e3), stage.gain(0), 1e-4);
     assertEquals(20 * 22e3 / (2 * 29.7e3), stage.gain(1), 1e-4);
+    // at rest each valve takes half of the 4 mA, so 44 V of the 250 V drop in its 22 k; what the
+    // source's 100 Mohm carry beyond that is below 1 uA
+    assertEquals(2e-3, stage.amperes("V1a"), 0.5e-6);
+    assertEquals(2e-3, stage.amperes("V1b"), 0.5e-6);
+    assertEquals(206, stage.volts("anode"), 0.02);
   }
 
   /**

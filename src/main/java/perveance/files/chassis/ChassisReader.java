@@ -6,6 +6,7 @@ import perveance.engine.base.BadInputException;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
 import perveance.files.device.DeviceFiles;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.StrictTable;
@@ -47,7 +48,9 @@ public final class ChassisReader {
    */
   public Chassis read(SourceText source) throws BadInputException {
     Problems problems = new Problems(source.file());
-    StrictTable root = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
+    StrictTable root =
+        new StrictTable(
+            TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
     root.require("perveance", "the version of the file's form, " + VERSION);
     root.whole("perveance", VERSION, VERSION);
     String title = root.text("title").orElse("");

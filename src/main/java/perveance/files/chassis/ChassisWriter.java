@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.TomlEditor;
 import perveance.files.toml.TomlTable;
@@ -41,7 +42,7 @@ public final class ChassisWriter {
    * @return the new text
    */
   public static String update(SourceText source, Chassis before, Chassis after) {
-    TomlEditor editor = new TomlEditor(source);
+    TomlEditor editor = new TomlEditor(source, KeyWords.OF_THE_TRADE);
     if (!before.title().equals(after.title())) {
       editor.set(editor.root(), "title", TomlText.text(after.title()), ORDER);
     }

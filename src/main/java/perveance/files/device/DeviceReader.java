@@ -15,6 +15,7 @@ import perveance.engine.device.Heater;
 import perveance.engine.device.Ratings;
 import perveance.engine.device.RectifierRatings;
 import perveance.engine.device.Validity;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.StrictTable;
@@ -35,7 +36,9 @@ public final class DeviceReader {
 
   private DeviceReader(SourceText source) {
     this.problems = new Problems(source.file());
-    this.root = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
+    this.root =
+        new StrictTable(
+            TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
   }
 
   /**

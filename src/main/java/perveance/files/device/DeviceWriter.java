@@ -7,6 +7,7 @@ import java.util.Optional;
 import perveance.engine.device.DeviceLaw;
 import perveance.engine.device.FitSummary;
 import perveance.engine.device.Validity;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.TomlEditor;
 import perveance.files.toml.TomlEntry;
@@ -27,7 +28,7 @@ public final class DeviceWriter {
    * @throws IllegalArgumentException when the text has faults or the law has no form in a file
    */
   public static String update(SourceText source, DeviceLaw law, FitSummary fit, Validity validity) {
-    TomlEditor editor = new TomlEditor(source);
+    TomlEditor editor = new TomlEditor(source, KeyWords.OF_THE_TRADE);
     put(editor, "law", LawText.law(law));
     put(editor, "fit", LawText.fit(fit));
     put(editor, "validity", LawText.validity(validity, law.kind()));

@@ -13,6 +13,7 @@ import perveance.engine.device.geometry.Emitter;
 import perveance.engine.device.geometry.PlaneDiode;
 import perveance.engine.device.geometry.PlaneGrid;
 import perveance.engine.device.geometry.TriodeGeometry;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.Range;
 import perveance.files.toml.SourceText;
@@ -60,7 +61,9 @@ public final class GeometryReader {
    */
   public static ElectrodeDesign read(SourceText source) throws BadInputException {
     Problems problems = new Problems(source.file());
-    StrictTable table = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
+    StrictTable table =
+        new StrictTable(
+            TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
     table.require("perveance_geometry", "the version of the file's form, " + VERSION);
     table.whole("perveance_geometry", VERSION, VERSION);
     return new GeometryReader(table, problems).design();

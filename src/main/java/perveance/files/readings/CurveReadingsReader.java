@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.base.BadInputException;
 import perveance.engine.device.Evidence;
+import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
 import perveance.files.toml.StrictTable;
@@ -58,7 +59,9 @@ public final class CurveReadingsReader {
   }
 
   private static CurveReadings toml(SourceText source, Problems problems) {
-    StrictTable root = new StrictTable(TomlParser.parse(source, problems), "", source, problems);
+    StrictTable root =
+        new StrictTable(
+            TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
     root.require(VERSION_KEY, "the version of the file's form, " + VERSION);
     root.whole(VERSION_KEY, VERSION, VERSION);
     Optional<String> device = root.text("device");

@@ -7,11 +7,13 @@ import java.util.Optional;
 final class KeyValueReader {
   private final Cursor cursor;
   private final Problems problems;
+  private final KeyWords words;
   private int keyEnd;
 
-  KeyValueReader(Cursor cursor, Problems problems) {
+  KeyValueReader(Cursor cursor, Problems problems, KeyWords words) {
     this.cursor = cursor;
     this.problems = problems;
+    this.words = words;
   }
 
   /** Reads the pair at the cursor; a value that cannot be read still takes its key's place. */
@@ -30,13 +32,14 @@ final class KeyValueReader {
     Span keySpan = new Span(start, keyEnd, line);
     String key = parts.get(parts.size() - 1);
     try {
-      TomlValue value = new ValueReader(cursor, problems).read(owner, key, depth);
+      TomlValue value = new ValueReader(cursor, problems, words).read(owner, key, depth);
       if (table.form() != TomlTable.Form.BRACES) {
         requireLineEnd(value);
       }
-      put(owner, new TomlEntry(key, keySpan, value));
+      boolean named = value instanceof TomlValue.Table;
+      put(owner, new TomlEntry(named ? key : words.plain(key), keySpan, value));
     } catch (TomlFault fault) {
-      put(owner, new TomlEntry(key, keySpan, new TomlValue.Unreadable(keySpan)));
+      put(owner, new TomlEntry(words.plain(key), keySpan, new TomlValue.Unreadable(keySpan)));
       throw fault;
     }
   }

@@ -325,15 +325,15 @@ public final class StrictTable {
   public void refuseOthers() {
     for (TomlEntry entry : table.entries()) {
       if (!known.contains(entry.key())) {
-        Optional<String> suggestion = NearMiss.suggest(entry.key(), known);
+        LikelyKeys likely = LikelyKeys.of(entry.key(), known);
         complaints.add(
             entry.keySpan(),
             entry.key(),
             "an unknown key",
-            suggestion.isPresent()
+            likely.suggestion().isPresent()
                 ? "a key that belongs here"
-                : "one of " + String.join(", ", known),
-            suggestion);
+                : "one of " + String.join(", ", likely.keys()),
+            likely.suggestion());
       }
     }
   }

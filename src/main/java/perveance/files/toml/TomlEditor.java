@@ -22,12 +22,13 @@ public final class TomlEditor {
    * Starts to edit a text.
    *
    * @param source a text without faults
+   * @param words other words for those in keys
    * @throws IllegalArgumentException when the text has faults
    */
-  public TomlEditor(SourceText source) {
+  public TomlEditor(SourceText source, KeyWords words) {
     Problems problems = new Problems(source.file());
     this.source = source;
-    this.root = TomlParser.parse(source, problems);
+    this.root = TomlParser.parse(source, problems, words);
     if (!problems.isEmpty()) {
       throw new IllegalArgumentException("source has faults: " + problems.list().get(0).message());
     }

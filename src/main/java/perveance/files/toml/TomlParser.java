@@ -10,12 +10,14 @@ import java.util.List;
 public final class TomlParser {
   private final Cursor cursor;
   private final Problems problems;
+  private final KeyWords words;
   private final TomlTable root;
   private final Structure structure;
 
-  private TomlParser(SourceText source, Problems problems) {
+  private TomlParser(SourceText source, Problems problems, KeyWords words) {
     this.cursor = new Cursor(source.text());
     this.problems = problems;
+    this.words = words.in(source.text());
     this.root = new TomlTable("", TomlTable.Form.ROOT, new Span(0, 0, 1));
     this.structure = new Structure(root);
   }
@@ -28,7 +30,19 @@ public final class TomlParser {
    * @return what could be read
    */
   public static TomlTable parse(SourceText source, Problems problems) {
-    return new TomlParser(source, problems).parse();
+    return parse(source, problems, KeyWords.AS_WRITTEN);
+  }
+
+  /**
+   * Reads a text whose keys may be written in several words.
+   *
+   * @param source the text
+   * @param problems receives the faults
+   * @param words other words for those in keys
+   * @return what could be read, each key under its one name
+   */
+  public static TomlTable parse(SourceText source, Problems problems, KeyWords words) {
+    return new TomlParser(source, problems, words).parse();
   }
 
   private TomlTable parse() {
@@ -43,7 +57,7 @@ public final class TomlParser {
           table = new TomlTable("", TomlTable.Form.HEADER, new Span(0, 0, line));
           table = header();
         } else if (cursor.peek() != Cursor.END) {
-          new KeyValueReader(cursor, problems).read(table, 0);
+          new KeyValueReader(cursor, problems, words).read(table, 0);
         }
       } catch (TomlFault fault) {
         problems.add(fault.line(), "", fault.found(), fault.expected(), fault.suggestion());

@@ -10,10 +10,12 @@ final class ValueReader {
 
   private final Cursor cursor;
   private final Problems problems;
+  private final KeyWords words;
 
-  ValueReader(Cursor cursor, Problems problems) {
+  ValueReader(Cursor cursor, Problems problems, KeyWords words) {
     this.cursor = cursor;
     this.problems = problems;
+    this.words = words;
   }
 
   /** Reads the value at the cursor; braces make a table below the given one. */
@@ -78,7 +80,7 @@ final class ValueReader {
       if (cursor.atLineEnd()) {
         throw new TomlFault(cursor.line(), "the end of the line", "a key or a closing }");
       }
-      new KeyValueReader(cursor, problems).read(table, depth + 1);
+      new KeyValueReader(cursor, problems, words).read(table, depth + 1);
       cursor.skipSpaces();
       first = false;
     }

@@ -45,16 +45,18 @@ class TomlEditorTest {
       ref = "V2"
       """;
 
-  private final TomlEditor editor = new TomlEditor(SourceText.of("a.toml", TEXT));
+  private final TomlEditor editor =
+      new TomlEditor(SourceText.of("a.toml", TEXT), KeyWords.AS_WRITTEN);
   private final List<TomlTable> stages = editor.root().tables("stage");
 
   @ParameterizedTest
   @ValueSource(
       strings = {"", "\n", "#x", "a=1", "a=1\n[b]", "[b]\n#c\n\n#d\n\n", "\n\n[[a]]\n\n[[a]]"})
   void withoutEditsTheTextStaysAsItIs(String text) {
-    assertEquals(text, new TomlEditor(SourceText.of("a.toml", text)).result());
+    assertEquals(text, new TomlEditor(SourceText.of("a.toml", text), KeyWords.AS_WRITTEN).result());
     String windows = text.replace("\n", "\r\n");
-    assertEquals(windows, new TomlEditor(SourceText.of("a.toml", windows)).result());
+    assertEquals(
+        windows, new TomlEditor(SourceText.of("a.toml", windows), KeyWords.AS_WRITTEN).result());
     assertEquals(TEXT, editor.result());
   }
 
@@ -81,7 +83,7 @@ class TomlEditorTest {
   @Test
   void aKeyThatComesFirstGoesAboveTheCommentsOfTheNext() {
     String text = "[[stage]]\n# the drive\ndrive = 1\n";
-    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text));
+    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text), KeyWords.AS_WRITTEN);
     other.set(other.root().tables("stage").get(0), "load", "2", ORDER);
     assertEquals("[[stage]]\nload = 2\n# the drive\ndrive = 1\n", other.result());
   }
@@ -97,7 +99,8 @@ class TomlEditorTest {
 
   @Test
   void aKeyIsAddedWhereTheLastLineHasNoEnd() {
-    TomlEditor other = new TomlEditor(SourceText.of("a.toml", "[[stage]]\r\nref = 1"));
+    TomlEditor other =
+        new TomlEditor(SourceText.of("a.toml", "[[stage]]\r\nref = 1"), KeyWords.AS_WRITTEN);
     TomlTable stage = other.root().tables("stage").get(0);
     other.set(stage, "kind", "2", ORDER);
     other.set(stage, "load", "3", ORDER);
@@ -189,7 +192,7 @@ class TomlEditorTest {
 
   @Test
   void aFileWithoutStagesGetsThemAtItsEnd() {
-    TomlEditor other = new TomlEditor(SourceText.of("a.toml", "a = 1\n# bye"));
+    TomlEditor other = new TomlEditor(SourceText.of("a.toml", "a = 1\n# bye"), KeyWords.AS_WRITTEN);
     String fresh = other.block("[[stage]]", values("ref", "1"));
     other.arrange(List.of(), List.of(new BlockWanted.New(fresh), new BlockWanted.New(fresh)));
     assertEquals("a = 1\n# bye\n\n[[stage]]\nref = 1\n\n[[stage]]\nref = 1\n", other.result());
@@ -206,7 +209,7 @@ class TomlEditorTest {
   void tablesInBracesAndDottedKeysAreEditedInTheirOwnForm() {
     String text =
         "supply = { A = { voltage = 1, reservoir = 2 }, B = {} } # s\nc.mains = 1 # m\nc.x = 2\n";
-    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text));
+    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text), KeyWords.AS_WRITTEN);
     TomlTable supply = other.root().table("supply").orElseThrow();
     TomlTable a = supply.table("A").orElseThrow();
     TomlTable c = other.root().table("c").orElseThrow();
@@ -219,7 +222,7 @@ class TomlEditorTest {
         "supply = { A = { reservoir = 2, bleeder = 3 }, B = { voltage = 9 } } # s\n"
             + "c.x = 2\nc.meter = 7\n",
         other.result());
-    TomlEditor again = new TomlEditor(SourceText.of("a.toml", text));
+    TomlEditor again = new TomlEditor(SourceText.of("a.toml", text), KeyWords.AS_WRITTEN);
     again.remove(again.root().table("supply").orElseThrow(), "B");
     again.remove(again.root(), "c");
     assertEquals("supply = { A = { voltage = 1, reservoir = 2 } } # s\n", again.result());
@@ -230,7 +233,9 @@ class TomlEditorTest {
     List<String> keys = List.of("a", "b", "c");
     for (int removed = 0; removed < 8; removed++) {
       for (int added = 0; added < 3; added++) {
-        TomlEditor other = new TomlEditor(SourceText.of("a.toml", "t = {a = 1, b = 2,c = 3 } # x"));
+        TomlEditor other =
+            new TomlEditor(
+                SourceText.of("a.toml", "t = {a = 1, b = 2,c = 3 } # x"), KeyWords.AS_WRITTEN);
         TomlTable table = other.root().table("t").orElseThrow();
         Map<String, String> expected = new LinkedHashMap<>();
         for (int i = 0; i < 3; i++) {
@@ -262,7 +267,7 @@ class TomlEditorTest {
   @Test
   void blocksWithoutBlankLinesBetweenKeepTheirKeysApart() {
     String text = "x = 1\n[a]\nb = 1\n[c]\nd = 1\n[[e]]\n[f]\n";
-    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text));
+    TomlEditor other = new TomlEditor(SourceText.of("a.toml", text), KeyWords.AS_WRITTEN);
     other.set(other.root(), "y", "2", List.of());
     other.set(other.root().table("a").orElseThrow(), "n", "2", List.of());
     other.set(other.root().tables("e").get(0), "n", "3", List.of());
@@ -274,7 +279,7 @@ class TomlEditorTest {
   @Test
   void aFaultyTextIsNotEdited() {
     SourceText faulty = SourceText.of("a.toml", "a = ");
-    assertThrows(IllegalArgumentException.class, () -> new TomlEditor(faulty));
+    assertThrows(IllegalArgumentException.class, () -> new TomlEditor(faulty, KeyWords.AS_WRITTEN));
   }
 
   private List<BlockWanted> kept(int... indices) {

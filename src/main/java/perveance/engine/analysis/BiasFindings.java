@@ -32,6 +32,9 @@ final class BiasFindings {
   /** Ratio of the ends of the band from which an idle current must be set by measurement [1]. */
   private static final double WIDE = 1.8;
 
+  /** A cathode that stands up by less than this of the bias leaves the bias to the grid [1]. */
+  private static final double HELD_BY_GRID = 0.5;
+
   /** A grid this far above a cold cathode may arc or pull emission when it warms [V]. */
   private static final double COLD_GRID = 30;
 
@@ -155,10 +158,16 @@ final class BiasFindings {
     }
   }
 
-  /** A band so wide that only measurement sets the current, as with a fixed bias. */
+  /**
+   * A band so wide that only measurement sets the current, as with a fixed bias. Where the cathode
+   * makes the bias, alone or following a grid that is wired to an anode, there is nothing to set.
+   */
   private void spread(DevicePoint point) {
     Band band = point.bands().get("anodeCurrent");
     if (band == null || !(band.low() > 0) || band.high() < WIDE * band.low()) {
+      return;
+    }
+    if (Math.abs(point.cathodeChassis()) >= HELD_BY_GRID * Math.abs(point.grid())) {
       return;
     }
     Finding finding =

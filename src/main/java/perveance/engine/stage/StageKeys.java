@@ -29,7 +29,7 @@ final class StageKeys {
           0,
           0,
           false,
-          List.of("triode", "pentode", "ultra-linear"),
+          List.of("triode", "pentode", "beam", "tetrode", "ultra-linear"),
           "what the screen is joined to");
 
   // Anode.

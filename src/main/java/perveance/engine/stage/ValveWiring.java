@@ -39,12 +39,16 @@ final class ValveWiring {
    */
   record Nodes(int anode, int grid, int screen, int cathode) {}
 
-  /** How a device's screen is joined: as stated, or in the way that its kind suggests. */
+  /**
+   * How a device's screen is joined: as stated, or in the way that its kind suggests. What is said
+   * of a beam valve, {@code beam} or {@code tetrode}, is a screen with a feed of its own as well.
+   */
   static String connection(StageValues values, Device device) {
     if (device.law().kind() != LawKind.PENTODE) {
       return TRIODE;
     }
-    return values.word(StageKeys.CONNECTION.key()).orElse(PENTODE);
+    String stated = values.word(StageKeys.CONNECTION.key()).orElse(PENTODE);
+    return stated.equals(TRIODE) || stated.equals(ULTRA_LINEAR) ? stated : PENTODE;
   }
 
   static SymbolType symbol(Device device) {

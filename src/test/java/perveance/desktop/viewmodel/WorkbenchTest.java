@@ -55,6 +55,14 @@ class WorkbenchTest {
     assertEquals("47k", setting("anode_load"));
   }
 
+  @Test
+  void theWordTypedForABeamValveIsKept() {
+    Edit.SetKey expected = new Edit.SetKey("V1a", "connection", new Setting.Word("tetrode"));
+    assertEquals(
+        new KeyEditor.Outcome.Accepted(expected),
+        KeyEditor.parse(bench.chassis(), "V1a", "connection", "tetrode"));
+  }
+
   @ParameterizedTest
   @CsvSource({
     "anode_load, 22 V",

@@ -152,8 +152,8 @@ class ChassisChecksTest {
             "stage V1 cathode_resistr: found an unknown key, expected a key of common-cathode; did"
                 + " you mean \"cathode_resistor\"?",
             "stage V1 grid_leak: found \"big\", expected a resistance such as \"4k7\"",
-            "stage V1 connection: found \"triod\", expected one of triode, pentode, ultra-linear;"
-                + " did you mean \"triode\"?",
+            "stage V1 connection: found \"triod\", expected one of triode, pentode, beam, tetrode,"
+                + " ultra-linear; did you mean \"triode\"?",
             "stage V1 drive: found NaN, expected a voltage from 1 uV to 5000 V",
             "stage V1 supply: found nothing, expected supply node that feeds the stage: the name of"
                 + " a supply"),

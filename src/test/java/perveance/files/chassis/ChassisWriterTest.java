@@ -62,6 +62,27 @@ class ChassisWriterTest {
         saved(TEXT, withStages(chassis, stages)));
   }
 
+  /** Both words mean a screen with its own feed; the file keeps the one that was written. */
+  @Test
+  void theWordForABeamValveStays() throws BadInputException {
+    Chassis chassis = Samples.read(TEXT);
+    for (String word : List.of("beam", "tetrode", "pentode")) {
+      List<StageEntry> stages = new ArrayList<>(chassis.stages());
+      StageEntry beam =
+          stages
+              .get(0)
+              .with("device", new Setting.Word("6V6GT"))
+              .with("connection", new Setting.Word(word))
+              .with("screen_voltage", new Setting.Number("200 V", 200));
+      stages.set(0, beam);
+      String text = saved(TEXT, withStages(chassis, stages));
+      assertTrue(text.contains("connection = \"" + word + "\""), text);
+      stages.set(0, beam.with("drive", new Setting.Number("1 V", 1)));
+      String again = saved(text, withStages(Samples.read(text), stages));
+      assertTrue(again.contains("connection = \"" + word + "\""), again);
+    }
+  }
+
   @Test
   void aRenamedStageAndItsDriverKeepTheirComments() throws BadInputException {
     Chassis chassis = Samples.read(TEXT);

@@ -3,6 +3,7 @@ package perveance.report;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import perveance.app.wording.Figures;
 import perveance.engine.analysis.ChassisAnswer;
@@ -46,10 +47,16 @@ final class OtherPoints {
     Set<Device> devices = new LinkedHashSet<>();
     stage.circuit().devices().stream().map(StageCircuit.StageDevice::device).forEach(devices::add);
     devices.stream()
-        .flatMap(d -> d.heaters().stream().limit(1))
+        .flatMap(d -> heater(chassis, d).stream())
         .map(this::heater)
         .forEach(points::add);
     return points;
+  }
+
+  /** How a valve's heater is wired here: to suit the winding, else as its maker names first. */
+  static Optional<Heater> heater(ChassisAnswer chassis, Device device) {
+    List<Heater> ways = device.heaters();
+    return chassis.chassis().conditions().heaters().suited(ways).or(() -> ways.stream().findFirst());
   }
 
   private boolean uses(String supply) {

@@ -3,10 +3,12 @@ package perveance.report;
 import java.util.ArrayList;
 import java.util.List;
 import perveance.app.wording.Figures;
+import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.PartDuty;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.base.Unit;
 import perveance.engine.device.Device;
+import perveance.engine.device.Heater;
 import perveance.engine.stage.StageCircuit;
 
 /** The parts list: value, rating to buy, what it stands. */
@@ -48,17 +50,13 @@ final class PartRows {
   }
 
   /** One row per envelope type: base and heater. */
-  static List<Block> valves(Typeface faces, SheetOptions options, StageAnswer stage) {
+  static List<Block> valves(
+      Typeface faces, SheetOptions options, ChassisAnswer chassis, StageAnswer stage) {
     List<Block> rows = new ArrayList<>();
     for (StageCircuit.StageDevice section : stage.circuit().devices()) {
       Device device = section.device();
       String heater =
-          device.heaters().isEmpty()
-              ? "heater not known"
-              : (device.heaters().get(0).directlyHeated() ? "filament " : "heater ")
-                  + Figures.reading(device.heaters().get(0).voltage(), Unit.VOLT)
-                  + " "
-                  + Figures.reading(device.heaters().get(0).current(), Unit.AMPERE);
+          OtherPoints.heater(chassis, device).map(PartRows::heater).orElse("heater not known");
       rows.add(
           row(
               faces,
@@ -68,6 +66,13 @@ final class PartRows {
               options.vocabulary().say(heater)));
     }
     return rows;
+  }
+
+  private static String heater(Heater heater) {
+    return (heater.directlyHeated() ? "filament " : "heater ")
+        + Figures.reading(heater.voltage(), Unit.VOLT)
+        + " "
+        + Figures.reading(heater.current(), Unit.AMPERE);
   }
 
   private static Block row(Typeface faces, String name, String value, String buy, String stands) {

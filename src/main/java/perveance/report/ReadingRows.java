@@ -15,8 +15,8 @@ final class ReadingRows {
   private static final double[] SHARES = {0.05, 0.21, 0.16, 0.11, 0.145, 0.145, 0.18};
   private static final double ROW = 23.5;
 
-  /** A limit is left out above this multiple of the highest voltage [1]. */
-  private static final double UNREACHABLE = 1.5;
+  /** A limit is left out above this multiple of the highest voltage: mains 10 % high [1]. */
+  private static final double UNREACHABLE = 1.1;
 
   private final Typeface faces;
   private final SheetOptions options;
@@ -149,8 +149,8 @@ final class ReadingRows {
     String text =
         String.format(
             java.util.Locale.ROOT,
-            "Ia from %1$s = (supply \u2212 anode) / %1$s = ________ mA     Ik from %2$s = cathode /"
-                + " %2$s = ________ mA     ratio ________ near 1: the parts agree; away from 1:"
+            "Ia from %1$s = (supply \u2212 anode) / %1$s = ________ mA  \u00b7  Ik from %2$s = cathode /"
+                + " %2$s = ________ mA  \u00b7  ratio ________ near 1: the parts agree; away from 1:"
                 + " measure %1$s and %2$s cold.",
             load.get(),
             cathode.get());

@@ -102,7 +102,7 @@ final class StageStrip {
     StageFigures.signal(stage).forEach(row -> figures.add(figure(row)));
     List<Block> rows = new ArrayList<>();
     stage.parts().forEach(duty -> rows.add(PartRows.of(faces, options, duty)));
-    rows.addAll(PartRows.valves(faces, options, stage));
+    rows.addAll(PartRows.valves(faces, options, chassis, stage));
     Block head = headline("Parts to buy");
     if (!wide()) {
       rows.add(0, head);

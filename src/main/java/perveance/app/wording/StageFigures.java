@@ -69,7 +69,7 @@ public final class StageFigures {
    */
   public static List<FigureRow> signal(StageAnswer answer) {
     List<FigureRow> rows = new ArrayList<>();
-    smallSignal(answer.smallSignal(), rows);
+    smallSignal(answer, rows);
     clean(answer, rows);
     answer.driven().ifPresent(d -> driven(d, rows));
     SmallSignalAnswer small = answer.smallSignal();
@@ -84,7 +84,8 @@ public final class StageFigures {
     return rows;
   }
 
-  private static void smallSignal(SmallSignalAnswer small, List<FigureRow> rows) {
+  private static void smallSignal(StageAnswer answer, List<FigureRow> rows) {
+    SmallSignalAnswer small = answer.smallSignal();
     rows.add(
         new FigureRow(
             "gain",
@@ -110,14 +111,22 @@ public final class StageFigures {
             Figures.reading(small.inputCapacitance(), Unit.FARAD, 2),
             "",
             "with Miller effect"));
-    response(small, rows);
+    response(small, lowestCorner(answer), rows);
   }
 
-  private static void response(SmallSignalAnswer small, List<FigureRow> rows) {
+  /** What is said where no low corner was found: a transformer has one, stated or not. */
+  private static String lowestCorner(StageAnswer answer) {
+    boolean transformer =
+        answer.circuit().parts().stream().anyMatch(part -> part.key().equals("primary"));
+    return transformer ? "not stated" : "down to dc";
+  }
+
+  private static void response(
+      SmallSignalAnswer small, String withoutLowCorner, List<FigureRow> rows) {
     rows.add(
         new FigureRow(
             "\u22123 dB below",
-            Figures.frequency(small.lowCorner(), "down to dc"),
+            Figures.frequency(small.lowCorner(), withoutLowCorner),
             Figures.band(small.bands(), "lowCorner", Unit.HERTZ),
             small
                 .shelf()

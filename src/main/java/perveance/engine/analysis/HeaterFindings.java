@@ -1,7 +1,6 @@
 package perveance.engine.analysis;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -25,9 +24,6 @@ final class HeaterFindings {
 
   private static final double MOST = 0.10;
 
-  /** A heater rated within this of the winding's voltage is taken to hang on it [1]. */
-  private static final double SAME = 0.2;
-
   /** Windings are sold in steps of this [A]. */
   private static final double STEP = 0.5;
 
@@ -47,12 +43,8 @@ final class HeaterFindings {
     return all.findings;
   }
 
-  /** The way of wiring an envelope's heater that suits the winding; empty where none does. */
   private Optional<Heater> onWinding(Envelope envelope) {
-    double winding = conditions.heaters().voltage();
-    return envelope.device().heaters().stream()
-        .filter(h -> Math.abs(h.voltage() / winding - 1) <= SAME)
-        .min(Comparator.comparingDouble(h -> Math.abs(h.voltage() / winding - 1)));
+    return conditions.heaters().suited(envelope.device().heaters());
   }
 
   private void voltage() {

@@ -56,7 +56,12 @@ final class OtherPoints {
   /** How a valve's heater is wired here: to suit the winding, else as its maker names first. */
   static Optional<Heater> heater(ChassisAnswer chassis, Device device) {
     List<Heater> ways = device.heaters();
-    return chassis.chassis().conditions().heaters().suited(ways).or(() -> ways.stream().findFirst());
+    return chassis
+        .chassis()
+        .conditions()
+        .heaters()
+        .suited(ways)
+        .or(() -> ways.stream().findFirst());
   }
 
   private boolean uses(String supply) {

@@ -149,9 +149,9 @@ final class ReadingRows {
     String text =
         String.format(
             java.util.Locale.ROOT,
-            "Ia from %1$s = (supply \u2212 anode) / %1$s = ________ mA  \u00b7  Ik from %2$s = cathode /"
-                + " %2$s = ________ mA  \u00b7  ratio ________ near 1: the parts agree; away from 1:"
-                + " measure %1$s and %2$s cold.",
+            "Ia from %1$s = (supply \u2212 anode) / %1$s = ________ mA  \u00b7  Ik from %2$s ="
+                + " cathode / %2$s = ________ mA  \u00b7  ratio ________ near 1: the parts agree;"
+                + " away from 1: measure %1$s and %2$s cold.",
             load.get(),
             cathode.get());
     return List.of(new Spaced(5, new TextBlock(faces, "Then", text, 8.5, Ink.BLACK, false, 4)));

@@ -26,6 +26,9 @@ final class SwingFindings {
   /** More clean output than this is worth a change of a part [1]. */
   private static final double WORTHWHILE = 1.05;
 
+  /** Sides within this of each other end together [1]. */
+  private static final double ALIKE = 1.02;
+
   private SwingFindings() {}
 
   static List<Finding> of(FindingContext context) {
@@ -51,14 +54,21 @@ final class SwingFindings {
           case BOTTOMING -> SignalMessage.BOTTOMING_FIRST;
           default -> SignalMessage.KNEE_FIRST;
         };
-    String other = Words.of(Math.max(clean.positivePeak(), clean.negativePeak()), Unit.VOLT);
     String[] parts =
-        code.partCount() > 2 ? new String[] {name, at, other} : new String[] {name, at};
+        code.partCount() > 2 ? new String[] {name, at, otherSide(clean)} : new String[] {name, at};
     Finding told =
         Finding.of(code, Severity.NOTE, context.ref(), parts)
             .withValue(clean.inputPeak(), Unit.VOLT);
     return Optional.of(
         own(context, clean) ? moreOutput(context).map(told::withRemedy).orElse(told) : told);
+  }
+
+  private static String otherSide(CleanSwing clean) {
+    double least = Math.min(clean.positivePeak(), clean.negativePeak());
+    double most = Math.max(clean.positivePeak(), clean.negativePeak());
+    return most <= ALIKE * least
+        ? "the other side ends there as well"
+        : "the other side ends at " + Words.of(most, Unit.VOLT);
   }
 
   private static boolean own(FindingContext context, CleanSwing clean) {

@@ -2,9 +2,8 @@ package perveance.engine.base;
 
 /** Findings about signal: headroom, distortion, response, noise. */
 public enum SignalMessage implements MessageCode {
-  GRID_CURRENT_FIRST(
-      "{0} overloads by grid current first, at {1} peak in; the other side ends at {2}."),
-  CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; the other side ends at {2}."),
+  GRID_CURRENT_FIRST("{0} overloads by grid current first, at {1} peak in; {2}."),
+  CUT_OFF_FIRST("{0} overloads by cut-off first, at {1} peak in; {2}."),
   KNEE_FIRST("{0} overloads at the anode knee first, at {1} peak in."),
   BOTTOMING_FIRST(
       "{0} overloads by bottoming first, at {1} peak in: its anode can fall no further."),

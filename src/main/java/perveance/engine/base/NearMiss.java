@@ -14,25 +14,38 @@ public final class NearMiss {
    *
    * @param word what stands there
    * @param known the words that would be right
-   * @return the nearest known word; the first of equally near ones
+   * @return the nearest known word; of equally near ones the one that begins most like the given
+   *     one, and of those the first
    */
   public static Optional<String> suggest(String word, Collection<String> known) {
     String plain = plain(word);
     int allowed = Math.max(1, plain.length() / 3);
     Optional<String> nearest = Optional.empty();
     int least = allowed + 1;
+    int alike = 0;
     for (String candidate : known) {
       String plainCandidate = plain(candidate);
-      if (Math.abs(plainCandidate.length() - plain.length()) >= least) {
+      if (Math.abs(plainCandidate.length() - plain.length()) > Math.min(least, allowed)) {
         continue;
       }
       int slips = slips(plain, plainCandidate);
-      if (slips < least && slips < plainCandidate.length()) {
+      int same = sameBeginning(plain, plainCandidate);
+      boolean nearer = slips < least || (slips == least && slips <= allowed && same > alike);
+      if (nearer && slips < plainCandidate.length()) {
         least = slips;
+        alike = same;
         nearest = Optional.of(candidate);
       }
     }
     return nearest;
+  }
+
+  private static int sameBeginning(String a, String b) {
+    int same = 0;
+    while (same < Math.min(a.length(), b.length()) && a.charAt(same) == b.charAt(same)) {
+      same++;
+    }
+    return same;
   }
 
   private static String plain(String word) {

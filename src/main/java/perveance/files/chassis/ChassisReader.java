@@ -6,6 +6,7 @@ import perveance.engine.base.BadInputException;
 import perveance.engine.stage.Chassis;
 import perveance.engine.stage.Conditions;
 import perveance.files.device.DeviceFiles;
+import perveance.files.toml.FormVersion;
 import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
@@ -51,8 +52,7 @@ public final class ChassisReader {
     StrictTable root =
         new StrictTable(
             TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
-    root.require("perveance", "the version of the file's form, " + VERSION);
-    root.whole("perveance", VERSION, VERSION);
+    FormVersion.check(root, "perveance", VERSION);
     String title = root.text("title").orElse("");
     Conditions conditions = conditions(root.table("conditions"));
     SuppliesReader supplies = new SuppliesReader();

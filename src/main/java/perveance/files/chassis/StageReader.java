@@ -86,10 +86,11 @@ final class StageReader {
   }
 
   private static String meaning(KeySpec spec) {
-    boolean quantity = spec.form() == KeySpec.Form.QUANTITY;
-    return quantity
-        ? spec.meaning() + ", for example \"" + spec.unit().example() + "\""
-        : spec.meaning();
+    return switch (spec.form()) {
+      case QUANTITY -> spec.meaning() + ", for example \"" + spec.unit().example() + "\"";
+      case DEVICE -> spec.meaning() + ", for example \"12AX7\"";
+      default -> spec.meaning();
+    };
   }
 
   private static Range range(KeySpec spec) {

@@ -15,6 +15,7 @@ import perveance.engine.device.Heater;
 import perveance.engine.device.Ratings;
 import perveance.engine.device.RectifierRatings;
 import perveance.engine.device.Validity;
+import perveance.files.toml.FormVersion;
 import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
@@ -79,8 +80,7 @@ public final class DeviceReader {
   }
 
   private DeviceSheet sheet() {
-    root.require("perveance_device", "the version of the file's form, " + VERSION);
-    root.whole("perveance_device", VERSION, VERSION);
+    FormVersion.check(root, "perveance_device", VERSION);
     String type = root.requiredText("type", "12AX7");
     List<String> aliases = root.texts("aliases");
     root.require("kind", "one of " + String.join(", ", KINDS));

@@ -13,6 +13,7 @@ import perveance.engine.device.geometry.Emitter;
 import perveance.engine.device.geometry.PlaneDiode;
 import perveance.engine.device.geometry.PlaneGrid;
 import perveance.engine.device.geometry.TriodeGeometry;
+import perveance.files.toml.FormVersion;
 import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.Range;
@@ -64,8 +65,7 @@ public final class GeometryReader {
     StrictTable table =
         new StrictTable(
             TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
-    table.require("perveance_geometry", "the version of the file's form, " + VERSION);
-    table.whole("perveance_geometry", VERSION, VERSION);
+    FormVersion.check(table, "perveance_geometry", VERSION);
     return new GeometryReader(table, problems).design();
   }
 

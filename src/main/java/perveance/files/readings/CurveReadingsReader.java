@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.base.BadInputException;
 import perveance.engine.device.Evidence;
+import perveance.files.toml.FormVersion;
 import perveance.files.toml.KeyWords;
 import perveance.files.toml.Problems;
 import perveance.files.toml.SourceText;
@@ -62,8 +63,7 @@ public final class CurveReadingsReader {
     StrictTable root =
         new StrictTable(
             TomlParser.parse(source, problems, KeyWords.OF_THE_TRADE), "", source, problems);
-    root.require(VERSION_KEY, "the version of the file's form, " + VERSION);
-    root.whole(VERSION_KEY, VERSION, VERSION);
+    FormVersion.check(root, VERSION_KEY, VERSION);
     Optional<String> device = root.text("device");
     root.text("note");
     root.require("reading", "at least one [[reading]]");

@@ -33,6 +33,13 @@ class NearMissTest {
     assertEquals(Optional.empty(), NearMiss.suggest(typed, KEYS));
   }
 
+  /** Types of one family begin alike: EL35 is nearer to EL34 than to EZ35. */
+  @Test
+  void prefersWhatBeginsAlike() {
+    assertEquals(Optional.of("EL34"), NearMiss.suggest("EL35", List.of("EZ35", "EL34", "EL36")));
+    assertEquals(Optional.of("6L6GC"), NearMiss.suggest("6L6GB", List.of("5U4GB", "6L6GC")));
+  }
+
   /** A single letter is no reason to propose another one. */
   @Test
   void doesNotReplaceWholeWords() {

@@ -124,8 +124,8 @@ class ChassisReaderTest {
         "[supply.A] | [supply.\"A.B\"] | 12: supply A.B: found a supply named \"A.B\", expected",
         "meter = \"10M\" | meter = \"10\" | 8: conditions meter: found \"10\", expected a"
             + " resistance from 1k to 1000M",
-        "perveance = 1 | perveance = 2 | 2: perveance: found 2, expected a whole number from 1 to"
-            + " 1",
+        "perveance = 1 | perveance = 2 | 2: perveance: found 2, a form that a later version"
+            + " of the program writes, expected form 1",
         "[supply.B] | [supply.A] | 16: found supply.A a second time, expected it once only; it"
             + " stands in line 12 already",
         "supply = \"B\" | # gone | 25: stage V1a supply: found nothing, expected",

@@ -88,6 +88,7 @@ public final class DeviceReader {
     int sections = root.whole("sections", 1, 4).orElse(1);
     String base = root.text("base").orElse("");
     root.text("basing");
+    root.text("base_source");
     return new DeviceSheet(
         type,
         aliases,

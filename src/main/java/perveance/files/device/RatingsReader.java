@@ -55,6 +55,8 @@ final class RatingsReader {
   }
 
   static Heater heater(StrictTable table) {
+    table.text("source");
+    table.word("how", HOW);
     Heater heater =
         new Heater(
             table.requiredQuantity("voltage", Ranges.VOLTAGE),
@@ -67,6 +69,7 @@ final class RatingsReader {
 
   static Capacitances capacitances(StrictTable table) {
     table.text("source");
+    table.word("how", HOW);
     table.text("note");
     OptionalDouble gridAnode = table.quantity("grid_anode", Ranges.CAPACITANCE);
     OptionalDouble gridCathode = table.quantity("grid_cathode", Ranges.CAPACITANCE);

@@ -16,6 +16,8 @@ enum Column {
       "anode_voltage",
       "vp",
       "plate_voltage",
+      "anode_volts",
+      "plate_volts",
       "ua",
       "vak",
       "vpk"),
@@ -25,6 +27,7 @@ enum Column {
       "vg",
       "vg1",
       "grid_voltage",
+      "grid_volts",
       "ug",
       "ug1",
       "vgk"),
@@ -40,6 +43,7 @@ enum Column {
       Range.within(Unit.VOLT, 100_000),
       "vg2",
       "screen_voltage",
+      "screen_volts",
       "vs",
       "ug2",
       "vg2k"),
@@ -62,6 +66,17 @@ enum Column {
 
   Range range() {
     return range;
+  }
+
+  /** The column of an electrode's name beside a unit, such as "plate mA". */
+  static Optional<Column> ofElectrode(String name, Unit unit) {
+    boolean volts = unit == Unit.VOLT;
+    return switch (name.strip().toLowerCase(Locale.ROOT)) {
+      case "anode", "plate" -> Optional.of(volts ? ANODE_VOLTAGE : ANODE_CURRENT);
+      case "screen" -> Optional.of(volts ? SCREEN_VOLTAGE : SCREEN_CURRENT);
+      case "grid" -> volts ? Optional.of(GRID_VOLTAGE) : Optional.empty();
+      default -> Optional.empty();
+    };
   }
 
   /** The column with a name, whatever its case. */

@@ -1,5 +1,6 @@
 package perveance.files.readings;
 
+import java.util.List;
 import java.util.Optional;
 import perveance.engine.base.NearMiss;
 import perveance.engine.base.QuantityException;
@@ -14,7 +15,10 @@ import perveance.files.toml.Problems;
  * @param unit unit as written; empty when the head states none
  */
 record ColumnHead(Column column, String unit) {
-  /** Reads "Va", "Va (V)", "Ia [mA]", "Ia/mA", "Ia mA", "Ia_mA"; empty after a complaint. */
+  /**
+   * Reads "Va", "Va (V)", "Ia [mA]", "Ia/mA", "Ia mA", "Ia_mA", "plate mA"; empty after a
+   * complaint.
+   */
   static Optional<ColumnHead> read(String text, int line, Problems problems) {
     String head = text.strip();
     Optional<ColumnHead> read = split(head);
@@ -51,6 +55,18 @@ record ColumnHead(Column column, String unit) {
     return head.replaceAll("[(\\[/].*", "");
   }
 
+  private static Optional<Column> ofElectrode(String name, String unit) {
+    for (Unit each : List.of(Unit.VOLT, Unit.AMPERE)) {
+      try {
+        QuantityParser.parse("1 " + unit, each);
+        return Column.ofElectrode(name, each);
+      } catch (QuantityException notThisOne) {
+        continue;
+      }
+    }
+    return Optional.empty();
+  }
+
   private static Optional<ColumnHead> split(String head) {
     Optional<Column> whole = Column.named(head);
     if (whole.isPresent()) {
@@ -58,9 +74,10 @@ record ColumnHead(Column column, String unit) {
     }
     for (int i = head.length() - 1; i > 0; i--) {
       if ("([/ _".indexOf(head.charAt(i)) >= 0) {
-        Optional<Column> column = Column.named(head.substring(0, i));
+        String name = head.substring(0, i);
+        String unit = head.substring(i + 1).replaceAll("[)\\]]$", "").strip();
+        Optional<Column> column = Column.named(name).or(() -> ofElectrode(name, unit));
         if (column.isPresent()) {
-          String unit = head.substring(i + 1).replaceAll("[)\\]]$", "").strip();
           return Optional.of(new ColumnHead(column.get(), unit));
         }
       }

@@ -14,7 +14,6 @@ import perveance.engine.device.fit.FitResult;
 import perveance.engine.device.fit.LawFit;
 import perveance.engine.device.fit.SpecimenFit;
 import perveance.files.WholeFile;
-import perveance.files.device.DeviceWriter;
 import perveance.plot.CurvePictures;
 import perveance.plot.FitPlot;
 import picocli.CommandLine.Command;
@@ -90,8 +89,7 @@ final class FitCommand implements Callable<Integer> {
     print(FitReportText.of(input, fit, common.vocabulary()));
     Device device = input.sheet().with(fit.law(), fit.summary(), fit.validity());
     if (output != null) {
-      String text = DeviceWriter.fresh(input.sheet(), fit.law(), fit.summary(), fit.validity());
-      byte[] bytes = text.getBytes(StandardCharsets.UTF_8);
+      byte[] bytes = input.text(fit).getBytes(StandardCharsets.UTF_8);
       WholeFile.write(output, List.of(file), out -> out.write(bytes));
       print("Device file: " + output.toAbsolutePath().normalize() + "\n");
     }

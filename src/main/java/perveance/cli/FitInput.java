@@ -12,12 +12,14 @@ import perveance.engine.device.fit.Filament;
 import perveance.engine.device.fit.FitConditions;
 import perveance.engine.device.fit.FitResult;
 import perveance.engine.device.fit.Heating;
+import perveance.engine.device.fit.LawFit;
 import perveance.engine.device.fit.LawFitter;
 import perveance.engine.device.fit.PentodeFitter;
 import perveance.engine.device.fit.RectifierFitter;
 import perveance.engine.device.fit.TriodeFitter;
 import perveance.files.device.DeviceReader;
 import perveance.files.device.DeviceSheet;
+import perveance.files.device.DeviceWriter;
 import perveance.files.readings.CurveReadings;
 import perveance.files.readings.CurveReadingsReader;
 import perveance.files.toml.SourceText;
@@ -26,17 +28,18 @@ import perveance.files.toml.SourceText;
  * What a fit starts from.
  *
  * @param sheet what is published or measured
- * @param readings whether the evidence is one person's readings rather than publications
+ * @param deviceFile the device file that it stands in; empty when the evidence is one person's
+ *     readings rather than publications
  */
-record FitInput(DeviceSheet sheet, boolean readings) {
+record FitInput(DeviceSheet sheet, Optional<SourceText> deviceFile) {
   static FitInput read(Path file) throws BadInputException {
     SourceText source = SourceText.read(file);
     if (source.text().contains("perveance_device")) {
-      return new FitInput(DeviceReader.readSheet(source), false);
+      return new FitInput(DeviceReader.readSheet(source), Optional.of(source));
     }
     CurveReadings readings = CurveReadingsReader.read(source);
     String name = file.getFileName().toString().replaceFirst("\\.[^.]*$", "");
-    return new FitInput(measured(readings, name), true);
+    return new FitInput(measured(readings, name), Optional.empty());
   }
 
   private static DeviceSheet measured(CurveReadings readings, String name) {
@@ -62,6 +65,17 @@ record FitInput(DeviceSheet sheet, boolean readings) {
     return evidence.stream().allMatch(e -> e.gridVoltage().isEmpty()) ? "rectifier" : "triode";
   }
 
+  boolean readings() {
+    return deviceFile.isEmpty();
+  }
+
+  /** A device file with the law: everything that stood in one before stays as it was written. */
+  String text(LawFit fit) {
+    return deviceFile
+        .map(file -> DeviceWriter.update(file, fit.law(), fit.summary(), fit.validity()))
+        .orElseGet(() -> DeviceWriter.fresh(sheet, fit.law(), fit.summary(), fit.validity()));
+  }
+
   FitResult fit() {
     LawFitter fitter =
         switch (sheet.kind()) {
@@ -75,6 +89,6 @@ record FitInput(DeviceSheet sheet, boolean readings) {
     if (filament.isPresent()) {
       conditions = conditions.with(new Filament(filament.get().voltage(), Heating.ALTERNATING));
     }
-    return fitter.fit(sheet.evidence(), readings ? conditions.forReadings() : conditions);
+    return fitter.fit(sheet.evidence(), readings() ? conditions.forReadings() : conditions);
   }
 }

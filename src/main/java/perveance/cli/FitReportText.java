@@ -21,20 +21,18 @@ final class FitReportText {
 
   static String of(FitInput input, LawFit fit, Vocabulary vocabulary) {
     List<String> lines = new ArrayList<>();
-    lines.add(
-        String.format(
-            Locale.ROOT,
-            "%s: %s; error %.1f %% median, %.1f %% at worst",
-            input.sheet().type(),
-            fit.summary().method(),
-            100 * fit.summary().medianError(),
-            100 * fit.summary().worstError()));
+    lines.addAll(TextTable.wrap(head(input, fit), WIDTH));
     lines.add("");
     lines.addAll(parameters(fit));
     lines.add("");
     lines.addAll(residuals(fit));
     for (Evidence e : fit.distrusted()) {
-      lines.add("Distrusted: " + place(e) + "; it was given little weight. Measure it again.");
+      lines.add(
+          String.format(
+              Locale.ROOT,
+              "Distrusted: %s, %.0f %% off; it was given little weight. Measure it again.",
+              place(e),
+              100 * worst(fit, e)));
     }
     for (String assumption : fit.summary().assumptions()) {
       lines.addAll(TextTable.wrap("Assumed: " + assumption, WIDTH));
@@ -50,6 +48,17 @@ final class FitReportText {
     return vocabulary.say(String.join("\n", lines)) + "\n";
   }
 
+  private static String head(FitInput input, LawFit fit) {
+    return String.format(
+        Locale.ROOT,
+        "%s: %s; error %.1f %% median, %.1f %% at worst%s",
+        input.sheet().type(),
+        fit.summary().method(),
+        100 * fit.summary().medianError(),
+        100 * fit.summary().worstError(),
+        fit.distrusted().isEmpty() ? "" : " without what is distrusted");
+  }
+
   private static List<String> parameters(LawFit fit) {
     TextTable table = new TextTable(2, WIDTH);
     List<LawParameter> parameters = fit.law().parameters();
@@ -61,9 +70,14 @@ final class FitReportText {
               : String.format(
                   Locale.ROOT, "\u00b1 %.2g", Math.sqrt(fit.covariance()[fitted][fitted]));
       table.row(
-          p.key(), String.format(Locale.ROOT, "%.5g", p.value()), error, p.unit(), p.meaning());
+          p.key(), String.format(Locale.ROOT, "%.5g", rounded(p)), error, p.unit(), p.meaning());
     }
     return table.lines();
+  }
+
+  /** A parameter that a fit drove against zero is zero, not 7e-37. */
+  private static double rounded(LawParameter parameter) {
+    return Math.abs(parameter.value()) < 1e-12 ? 0 : parameter.value();
   }
 
   private static List<String> residuals(LawFit fit) {
@@ -77,6 +91,14 @@ final class FitReportText {
           String.format(Locale.ROOT, "%+.1f %%", 100 * r.relativeError()));
     }
     return table.lines();
+  }
+
+  private static double worst(LawFit fit, Evidence evidence) {
+    return fit.residuals().stream()
+        .filter(r -> r.evidence().equals(evidence))
+        .mapToDouble(r -> Math.abs(r.relativeError()))
+        .max()
+        .orElse(0);
   }
 
   private static String place(Evidence e) {

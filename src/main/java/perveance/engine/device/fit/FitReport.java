@@ -5,6 +5,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import perveance.engine.device.DeviceLaw;
+import perveance.engine.device.Evidence;
 import perveance.engine.device.FitSummary;
 import perveance.engine.numeric.FitOutcome;
 import perveance.engine.numeric.Statistics;
@@ -12,6 +14,43 @@ import perveance.engine.numeric.Statistics;
 /** Puts into words and figures how good a fit is. */
 final class FitReport {
   private FitReport() {}
+
+  /**
+   * The fit as a whole.
+   *
+   * @param law the law found
+   * @param used the evidence that it was fitted to
+   * @param observations its figures, in the order in which they were fitted
+   * @param fitted the fit's outcome
+   * @param fittedKeys the parameters that were fitted, as keys of the law
+   * @param assumptions what had to be assumed
+   */
+  static LawFit of(
+      DeviceLaw law,
+      List<Evidence> used,
+      List<Observation> observations,
+      FitOutcome.Fitted fitted,
+      List<String> fittedKeys,
+      List<String> assumptions) {
+    List<Evidence> distrusted =
+        fitted.distrusted().stream()
+            // behind the observations stand the usual values that guide a fit
+            .filter(place -> place < observations.size())
+            .map(place -> observations.get(place).evidence())
+            .distinct()
+            .toList();
+    List<Residual> residuals = new LawReadings(law).compare(used);
+    List<Residual> trusted =
+        residuals.stream().filter(r -> !distrusted.contains(r.evidence())).toList();
+    return new LawFit(
+        law,
+        summary(observations, trusted, fitted, assumptions),
+        EvidenceRange.of(used),
+        residuals,
+        fittedKeys,
+        fitted.covariance(),
+        distrusted);
+  }
 
   static FitSummary summary(
       List<Observation> observations,

@@ -198,22 +198,8 @@ final class PentodeTrial {
 
   LawFit result() {
     FitOutcome.Fitted fitted = fitted();
-    SpreadPentodeLaw law = law(fitted.parameters());
-    List<Residual> residuals = new LawReadings(law).compare(used);
-    List<Evidence> distrusted =
-        fitted.distrusted().stream()
-            .filter(place -> place < observations.size())
-            .map(place -> observations.get(place).evidence())
-            .distinct()
-            .toList();
-    return new LawFit(
-        law,
-        FitReport.summary(observations, residuals, fitted, assumptions(fitted)),
-        EvidenceRange.of(used),
-        residuals,
-        fittedKeys(),
-        fitted.covariance(),
-        distrusted);
+    return FitReport.of(
+        law(fitted.parameters()), used, observations, fitted, fittedKeys(), assumptions(fitted));
   }
 
   private List<String> fittedKeys() {

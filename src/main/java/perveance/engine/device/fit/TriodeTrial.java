@@ -170,22 +170,9 @@ final class TriodeTrial {
 
   LawFit result() {
     FitOutcome.Fitted fitted = fitted();
-    SpreadTriodeLaw law = law(fitted.parameters());
-    List<Residual> residuals = new LawReadings(law).compare(used);
-    List<Evidence> distrusted =
-        fitted.distrusted().stream()
-            .filter(place -> place < observations.size())
-            .map(place -> observations.get(place).evidence())
-            .distinct()
-            .toList();
-    return new LawFit(
-        law,
-        FitReport.summary(observations, residuals, fitted, assumptions(fitted)),
-        EvidenceRange.of(used),
-        residuals,
-        remote ? FITTED : FITTED.subList(0, REMOTE),
-        fitted.covariance(),
-        distrusted);
+    List<String> keys = remote ? FITTED : FITTED.subList(0, REMOTE);
+    return FitReport.of(
+        law(fitted.parameters()), used, observations, fitted, keys, assumptions(fitted));
   }
 
   private List<String> assumptions(FitOutcome.Fitted fitted) {

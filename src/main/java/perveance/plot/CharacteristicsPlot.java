@@ -180,7 +180,7 @@ public final class CharacteristicsPlot {
     double py = view.current() / family.highestCurrent();
     Rectangle2D words = new Rectangle2D.Double(x, y, WORDS_WIDE, WORDS_HIGH);
     return words.intersects(px - NEAR, py - NEAR, 2 * NEAR + WORDS_WIDE, 2 * NEAR)
-        || Stream.of(view.dc(), view.ac(), view.excursion())
+        || Stream.of(view.dc(), view.ac(), view.excursion(), view.reactive())
             .anyMatch(line -> crosses(line, words, family));
   }
 
@@ -208,6 +208,9 @@ public final class CharacteristicsPlot {
     series.add(line("dc load line", PlotSeries.Role.DC_LINE, view.dc()));
     series.add(line("ac load line", PlotSeries.Role.AC_LINE, view.ac()));
     series.add(line("swing", PlotSeries.Role.EXCURSION, view.excursion()));
+    if (!view.reactive().isEmpty()) {
+      series.add(line("reactive load", PlotSeries.Role.MAIN, view.reactive()));
+    }
     PlotPoint q = new PlotPoint(view.anode(), view.current() / MILLI);
     series.add(new PlotSeries("operating point", PlotSeries.Role.POINT, List.of(q)));
     boolean right = q.x() < 0.6 * family.highestVoltage();

@@ -114,7 +114,12 @@ public final class StagePlots {
       LoadLineView view, double point, double farthest, ToDoubleFunction<LoadLineView.Point> axis) {
     double lines =
         Stream.of(view.dc(), view.ac()).flatMap(List::stream).mapToDouble(axis).max().orElse(0);
-    double swing = view.excursion().stream().mapToDouble(axis).max().orElse(0);
+    double swing =
+        Stream.of(view.excursion(), view.reactive())
+            .flatMap(List::stream)
+            .mapToDouble(axis)
+            .max()
+            .orElse(0);
     return Math.max(swing, Math.min(lines, farthest * point));
   }
 

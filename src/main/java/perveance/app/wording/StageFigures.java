@@ -72,6 +72,7 @@ public final class StageFigures {
     smallSignal(answer, rows);
     clean(answer, rows);
     answer.driven().ifPresent(d -> driven(d, rows));
+    rows.addAll(LargeSignalFigures.of(answer.large()));
     SmallSignalAnswer small = answer.smallSignal();
     rows.add(
         new FigureRow(

@@ -102,6 +102,7 @@ final class LoadLineLayer extends Region {
     line(g, view.dc(), Skin.ink(settings), 1.6, false);
     line(g, view.ac(), Skin.accent(settings), 1.5, true);
     line(g, view.excursion(), Skin.accent(settings), 4.5, false);
+    line(g, view.reactive(), Skin.accent(settings), 1.8, false);
     band(g, answer, view, settings);
     g.restore();
     grips(view);

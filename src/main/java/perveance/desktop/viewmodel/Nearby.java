@@ -132,6 +132,7 @@ final class Nearby {
         a.clean(),
         a.driven(),
         a.levels(),
+        a.large(),
         parts,
         a.readings(),
         a.loadLine(),

@@ -1,8 +1,10 @@
 package perveance.engine.analysis;
 
+import java.util.List;
 import java.util.Optional;
 import perveance.engine.base.Finding;
 import perveance.engine.base.PreferredSeries;
+import perveance.engine.base.QuantityFormat;
 import perveance.engine.base.Remedy;
 import perveance.engine.base.Severity;
 import perveance.engine.base.SignalMessage;
@@ -12,15 +14,9 @@ import perveance.engine.circuit.Element.Capacitor;
 import perveance.engine.circuit.MidbandSolution;
 
 /**
- * Blocking: a drive of twice the clean input lets grid current charge the capacitor before the
- * grid; when the drive has gone, the bias is too deep until the charge has leaked away.
- *
- * @param capacitor the capacitor before the grid
- * @param charge volts that the overload adds across it [V]
- * @param resistance through which they leak away [ohm]
- * @param seconds until the bias is within a tenth of itself [s]
+ * Blocking: what an overload of 6 dB over the clean input leaves on the capacitor before a grid.
  */
-record Blocking(InputCapacitor capacitor, double charge, double resistance, double seconds) {
+final class Blocking {
   /** An overload of 6 dB, usual in instrument amplifiers [1]. */
   private static final double OVERLOAD = 2;
 
@@ -33,17 +29,35 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
   /** What is left of the low end when the capacitor is made smaller [Hz]. */
   private static final double LOW = 20;
 
-  /** What blocking does to a stage; empty where no stated capacitor stands before the grid. */
-  static Optional<Blocking> of(FindingContext context) {
-    StageModel model = context.model();
+  private final Recovery recovery;
+  private final InputCapacitor capacitor;
+
+  private Blocking(Recovery recovery) {
+    this.recovery = recovery;
+    this.capacitor = recovery.capacitor();
+  }
+
+  /**
+   * Recovery of a stage; empty where no stated capacitor stands before the grid.
+   *
+   * @param model the stage
+   * @param levels drives it
+   * @param clean peak of its clean input [V]
+   * @param bias grid to cathode at rest [V]
+   * @param stated capacitor through which it is driven, where one is stated
+   */
+  static Optional<Recovery> recovery(
+      StageModel model,
+      DrivenLevels levels,
+      double clean,
+      double bias,
+      Optional<InputCapacitor> stated) {
     Optional<Capacitor> before = before(model);
-    if (before.isEmpty() || context.inputCapacitor().isEmpty()) {
+    if (before.isEmpty() || stated.isEmpty()) {
       return Optional.empty();
     }
     Capacitor c = before.get();
-    InputCapacitor stated = context.inputCapacitor().get();
-    Optional<MidbandSolution> overload =
-        new DrivenLevels(model).cycle(OVERLOAD * context.answer().clean().inputPeak());
+    Optional<MidbandSolution> overload = levels.cycle(OVERLOAD * clean);
     Optional<Double> resistance =
         WithoutCapacitor.signal(model, c).map(s -> s.midbandOutputResistance(c.a(), c.b()));
     if (overload.isEmpty() || resistance.isEmpty()) {
@@ -51,10 +65,11 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
     }
     double idle = model.dc().voltage(c.a()) - model.dc().voltage(c.b());
     double charge = overload.get().meanVoltage(c.a(), c.b()) - idle;
-    double left = RECOVERED * Math.abs(context.answer().points().get(0).grid());
+    double left = RECOVERED * Math.abs(bias);
     double time =
-        charge > left ? resistance.get() * stated.capacitance() * Math.log(charge / left) : 0;
-    return Optional.of(new Blocking(stated, charge, resistance.get(), time));
+        charge > left ? resistance.get() * stated.get().capacitance() * Math.log(charge / left) : 0;
+    return Optional.of(
+        new Recovery(stated.get(), OVERLOAD * clean, charge, resistance.get(), left, time));
   }
 
   private static Optional<Capacitor> before(StageModel model) {
@@ -68,7 +83,37 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
   }
 
   static Optional<Finding> finding(FindingContext context) {
-    return of(context).filter(b -> b.seconds() > HEARD).map(b -> b.told(context));
+    return context
+        .answer()
+        .large()
+        .recovery()
+        .filter(r -> r.seconds() > HEARD)
+        .map(r -> new Blocking(r).told(context));
+  }
+
+  /** The hand sum of a recovery that takes any time. */
+  static List<HandSum> sums(Optional<Recovery> recovery) {
+    return recovery
+        .filter(r -> r.seconds() > 0)
+        .map(
+            r ->
+                new HandSum(
+                    "recovery after overload",
+                    "t = R C ln(charge / rest)",
+                    Sum.ohms(r.resistance())
+                        + " x "
+                        + Sum.farads(r.capacitor().capacitance())
+                        + " x ln("
+                        + Sum.volts(r.charge())
+                        + " / "
+                        + Sum.volts(r.left())
+                        + ")",
+                    QuantityFormat.TYPESET.reading(r.seconds(), Unit.SECOND, 3),
+                    "after "
+                        + Sum.volts(r.inputPeak())
+                        + " peak in, until the bias is within a tenth of itself"))
+        .stream()
+        .toList();
   }
 
   private Finding told(FindingContext context) {
@@ -79,9 +124,9 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
                 context.ref(),
                 context.ref(),
                 name(),
-                Words.roughly(charge, Unit.VOLT),
-                Words.roughly(seconds, Unit.SECOND))
-            .withValue(seconds, HEARD, Unit.SECOND)
+                Words.roughly(recovery.charge(), Unit.VOLT),
+                Words.roughly(recovery.seconds(), Unit.SECOND))
+            .withValue(recovery.seconds(), HEARD, Unit.SECOND)
             .onPart(capacitor.owner() + "." + capacitor.key());
     return remedy(context).map(finding::withRemedy).orElse(finding);
   }
@@ -97,6 +142,8 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
 
   /** A smaller capacitor that shortens the gap and still passes the lowest notes. */
   private Optional<Remedy> remedy(FindingContext context) {
+    double seconds = recovery.seconds();
+    double resistance = recovery.resistance();
     double enough = capacitor.capacitance() * HEARD / seconds;
     double least = 1 / (2 * Math.PI * LOW * resistance);
     double value = PreferredSeries.E6.above(Math.max(enough, least));
@@ -112,10 +159,7 @@ record Blocking(InputCapacitor capacitor, double charge, double resistance, doub
             + ".";
     return Optional.of(
         capacitor.owner().equals(context.ref())
-            ? Remedy.set(
-                text,
-                capacitor.key(),
-                perveance.engine.base.QuantityFormat.PLAIN.part(value, Unit.FARAD))
+            ? Remedy.set(text, capacitor.key(), QuantityFormat.PLAIN.part(value, Unit.FARAD))
             : Remedy.byHand(text));
   }
 }

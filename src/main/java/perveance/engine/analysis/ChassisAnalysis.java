@@ -98,6 +98,7 @@ public final class ChassisAnalysis {
     findings.addAll(SwingFindings.of(context));
     findings.addAll(OutputFindings.of(context));
     findings.addAll(OutputLoadFindings.of(context));
+    findings.addAll(ReactiveFindings.of(context));
     findings.addAll(ResponseFindings.of(context));
     findings.addAll(PartFindings.of(context));
     findings.addAll(DataFindings.of(context));

@@ -12,7 +12,7 @@ import perveance.engine.stage.StageEntry;
  * @param key key that states it
  * @param capacitance [F]
  */
-record InputCapacitor(String owner, String key, double capacitance) {
+public record InputCapacitor(String owner, String key, double capacitance) {
   /** The capacitor before a stage; empty where none is stated. */
   static Optional<InputCapacitor> of(Chassis chassis, String ref) {
     Optional<InputCapacitor> own =

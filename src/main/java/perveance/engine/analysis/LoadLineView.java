@@ -11,6 +11,7 @@ import java.util.List;
  *     the difference of the two currents against one valve's anode voltage, from the resting
  *     voltage on
  * @param excursion path of the driven or clean swing
+ * @param reactive closed path into a reactive load, empty where none is stated
  * @param anode operating point [V]
  * @param current operating point [A]
  * @param dcResistance slope of the dc line [ohm]
@@ -21,6 +22,7 @@ public record LoadLineView(
     List<Point> dc,
     List<Point> ac,
     List<Point> excursion,
+    List<Point> reactive,
     double anode,
     double current,
     double dcResistance,
@@ -30,6 +32,7 @@ public record LoadLineView(
     dc = List.copyOf(dc);
     ac = List.copyOf(ac);
     excursion = List.copyOf(excursion);
+    reactive = List.copyOf(reactive);
   }
 
   /**

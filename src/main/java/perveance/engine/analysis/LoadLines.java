@@ -24,9 +24,11 @@ final class LoadLines {
    * @param seen what the valve sees
    * @param ref the valve
    * @param excursion path of the swing
+   * @param reactive path into a reactive load
    * @return the view; empty when the circuit without the valve has no answer
    */
-  static Optional<LoadLineView> of(LoadSeen seen, String ref, List<Point> excursion) {
+  static Optional<LoadLineView> of(
+      LoadSeen seen, String ref, List<Point> excursion, List<Point> reactive) {
     double anode = seen.point().voltage(ElectrodeCurrents.ANODE);
     double current = seen.point().current(ElectrodeCurrents.ANODE);
     Optional<Double> open = seen.dcVoltage(0);
@@ -45,6 +47,7 @@ final class LoadLines {
             dc,
             straight(anode, seen.composite() ? 0 : current, ac.get()),
             excursion,
+            reactive,
             anode,
             current,
             dcResistance,

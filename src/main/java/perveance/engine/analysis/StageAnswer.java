@@ -19,6 +19,7 @@ import perveance.engine.stage.StageCircuit;
  * @param clean clean swing
  * @param driven at the stated drive, empty when none is stated
  * @param levels against level, rising
+ * @param large overload and reactive load
  * @param parts what each part has to stand
  * @param readings expected meter readings in measuring order
  * @param loadLine load lines, empty when the kind has none
@@ -37,6 +38,7 @@ public record StageAnswer(
     CleanSwing clean,
     Optional<DrivenAnswer> driven,
     List<DrivenAnswer> levels,
+    LargeSignalAnswer large,
     List<PartDuty> parts,
     List<ExpectedReading> readings,
     Optional<LoadLineView> loadLine,
@@ -73,6 +75,7 @@ public record StageAnswer(
         clean,
         driven,
         levels,
+        large,
         parts,
         readings,
         loadLine,

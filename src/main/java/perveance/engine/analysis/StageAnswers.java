@@ -54,6 +54,8 @@ final class StageAnswers {
         drive.isPresent() ? levels.cycle(drive.getAsDouble()) : Optional.empty();
     atDrive.ifPresent(cycle -> drain.add(model, cycle));
     Optional<DrivenAnswer> driven = atDrive.map(c -> driven(model, c, drive.getAsDouble()));
+    LargeSignalAnswer large =
+        options.details() ? large(model, values, levels, clean, points) : LargeSignalAnswer.NONE;
     SmallSignalAnswer small =
         withBands(new SmallSignalFigures(model).answer(options.details()), bands);
     return new StageAnswer(
@@ -67,12 +69,42 @@ final class StageAnswers {
         bands.map(b -> withBands(clean, b)).orElse(clean),
         driven,
         options.levels() ? levels.ladder(clean.inputPeak(), drive) : List.of(),
+        large,
         options.details() ? parts(model, values, atDrive) : List.of(),
         readings(model, points, bands),
-        loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak()))),
-        options.details() ? HandSums.of(model, points, small, clean, drive) : List.of(),
+        loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak())), large),
+        options.details() ? sums(model, points, small, clean, drive, large) : List.of(),
         model.stage().assumptions(),
         List.of());
+  }
+
+  private LargeSignalAnswer large(
+      StageModel model,
+      StageValues values,
+      DrivenLevels levels,
+      CleanSwing clean,
+      List<DevicePoint> points) {
+    double peak = clean.inputPeak();
+    return new LargeSignalAnswer(
+        Blocking.recovery(
+            model,
+            levels,
+            peak,
+            points.get(0).grid(),
+            InputCapacitor.of(chassis.chassis(), model.stage().ref())),
+        ReactiveLoad.of(model, values, values.number("drive", peak)));
+  }
+
+  private static List<HandSum> sums(
+      StageModel model,
+      List<DevicePoint> points,
+      SmallSignalAnswer small,
+      CleanSwing clean,
+      OptionalDouble drive,
+      LargeSignalAnswer large) {
+    List<HandSum> sums = new ArrayList<>(HandSums.of(model, points, small, clean, drive));
+    sums.addAll(Blocking.sums(large.recovery()));
+    return sums;
   }
 
   private DrivenAnswer driven(StageModel model, MidbandSolution cycle, double drive) {
@@ -136,7 +168,7 @@ final class StageAnswers {
   }
 
   private static Optional<LoadLineView> loadLine(
-      StageModel model, Optional<MidbandSolution> cycle) {
+      StageModel model, Optional<MidbandSolution> cycle, LargeSignalAnswer large) {
     boolean composite = model.stage().loadLine().map(LoadLineSpec::composite).orElse(false);
     return model
         .stage()
@@ -145,7 +177,8 @@ final class StageAnswers {
         .flatMap(
             ref -> {
               List<Point> path = cycle.map(c -> DrivenLevels.path(model, c, ref)).orElse(List.of());
-              return LoadLines.of(new LoadSeen(model, ref, composite), ref, path);
+              List<Point> reactive = large.reactive().map(ReactiveAnswer::path).orElse(List.of());
+              return LoadLines.of(new LoadSeen(model, ref, composite), ref, path, reactive);
             });
   }
 }

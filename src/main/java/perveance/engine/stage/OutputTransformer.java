@@ -1,6 +1,9 @@
 package perveance.engine.stage;
 
 import static perveance.engine.stage.StageKeys.LEAKAGE_INDUCTANCE;
+import static perveance.engine.stage.StageKeys.LOAD_CAPACITANCE;
+import static perveance.engine.stage.StageKeys.LOAD_FREQUENCY;
+import static perveance.engine.stage.StageKeys.LOAD_INDUCTANCE;
 import static perveance.engine.stage.StageKeys.PRIMARY;
 import static perveance.engine.stage.StageKeys.PRIMARY_INDUCTANCE;
 import static perveance.engine.stage.StageKeys.SECONDARY_LOAD;
@@ -29,7 +32,10 @@ final class OutputTransformer {
           PRIMARY_INDUCTANCE,
           LEAKAGE_INDUCTANCE,
           SECONDARY_LOAD,
-          SECONDARY_RESISTANCE);
+          SECONDARY_RESISTANCE,
+          LOAD_INDUCTANCE,
+          LOAD_CAPACITANCE,
+          LOAD_FREQUENCY);
 
   private final StageWiring wiring;
   private final List<Winding> windings = new ArrayList<>();
@@ -94,6 +100,9 @@ final class OutputTransformer {
     } else {
       wiring.outerResistor(SECONDARY_LOAD.key(), out, 0, load);
       wiring.assume("The secondary's load is not stated; output figures hold at the primary.");
+    }
+    if (values.has(LOAD_CAPACITANCE.key())) {
+      wiring.stray(LOAD_CAPACITANCE.key(), out, 0, values.number(LOAD_CAPACITANCE.key()));
     }
     wiring.output("output", out, 0, Optional.of(wiring.name(SECONDARY_LOAD.key())));
     assume(values);

@@ -139,6 +139,10 @@ final class StageKeys {
   static final KeySpec LOAD2 = ohms("load2", "resistance of what the second output drives");
   static final KeySpec LOAD_CAPACITANCE =
       farads("load_capacitance", "capacitance of what the stage drives");
+  static final KeySpec LOAD_INDUCTANCE =
+      henries("load_inductance", "inductance in series with the load's resistance");
+  static final KeySpec LOAD_FREQUENCY =
+      quantity("load_frequency", Unit.HERTZ, 1, 1e6, "frequency for the figures into that load");
   static final KeySpec DRIVES =
       new KeySpec(
           "drives", Form.STAGE, Unit.RATIO, 0, 0, false, List.of(), "stage that the output drives");

@@ -34,6 +34,7 @@ final class StageJson {
       sink.object("driven", () -> driven(driven));
     }
     sink.objects("levels", stage.levels(), this::level);
+    new LargeSignalJson(sink).write(stage.large());
     Map<String, Band> bands = new HashMap<>(stage.smallSignal().bands());
     bands.putAll(stage.clean().bands());
     BandJson.write(bands, sink);

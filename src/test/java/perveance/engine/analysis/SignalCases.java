@@ -146,6 +146,42 @@ final class SignalCases {
                 "drive",
                 "30 V"));
     cases.put(
+        OutputMessage.REACTIVE_CUT_OFF,
+        () ->
+            FindingCases.single(
+                250,
+                "2A3",
+                "primary",
+                "2k5",
+                "secondary_load",
+                "8R",
+                "grid_bias",
+                "-45 V",
+                "primary_inductance",
+                "3",
+                "load_frequency",
+                "40 Hz"));
+    cases.put(
+        OutputMessage.REACTIVE_DISSIPATION,
+        () ->
+            FindingCases.pair(
+                430,
+                "EL34",
+                "primary",
+                "3k4",
+                "secondary_load",
+                "8R",
+                "grid_bias",
+                "-36 V",
+                "screen_resistor",
+                "1k",
+                "load_capacitance",
+                "10u",
+                "load_frequency",
+                "2 kHz",
+                "drive",
+                "34 V"));
+    cases.put(
         OutputMessage.SCREEN_RISES,
         () ->
             pair(

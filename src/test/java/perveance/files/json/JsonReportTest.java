@@ -57,6 +57,30 @@ class JsonReportTest {
   }
 
   @Test
+  void overloadAndReactiveLoadHaveTheirOwnNames() {
+    Map<String, Object> stage = objects(root, "stages").get(0);
+    assertEquals(
+        Map.of(
+            "input_peak_V", 3.0,
+            "capacitor", "V1a.input_coupling",
+            "capacitor_F", 1e-7,
+            "charge_V", 1.25,
+            "leak_ohm", 2.2e5,
+            "recovery_s", 0.045),
+        object(stage, "recovery"));
+    Map<String, Object> reactive = object(stage, "reactive");
+    requires(
+        reactive,
+        "frequency_Hz input_peak_V output_V_rms output_W peak_anode_V peak_anode_A anode_W"
+            + " peak_anode_W crosses_dissipation cut_off");
+    assertEquals(440.5, reactive.get("peak_anode_V"));
+    assertEquals(List.of(8.75), reactive.get("anode_W"));
+    assertEquals(19.5, reactive.get("peak_anode_W"));
+    assertEquals(true, reactive.get("crosses_dissipation"));
+    assertEquals(false, reactive.get("cut_off"));
+  }
+
+  @Test
   void everyFigureStandsUnderItsOwnName() {
     Map<String, Object> stage = objects(root, "stages").get(0);
     assertEquals("V1a", stage.get("ref"));

@@ -11,9 +11,13 @@ import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.Discharge;
 import perveance.engine.analysis.DrivenAnswer;
 import perveance.engine.analysis.ExpectedReading;
+import perveance.engine.analysis.InputCapacitor;
 import perveance.engine.analysis.Intermodulation;
+import perveance.engine.analysis.LargeSignalAnswer;
 import perveance.engine.analysis.LimitUse;
 import perveance.engine.analysis.PartDuty;
+import perveance.engine.analysis.ReactiveAnswer;
+import perveance.engine.analysis.Recovery;
 import perveance.engine.analysis.SmallSignalAnswer;
 import perveance.engine.analysis.StageAnswer;
 import perveance.engine.analysis.SupplyAnswer;
@@ -99,6 +103,25 @@ final class SampleAnswer {
     return stage(point, Optional.empty(), small(OptionalDouble.empty()));
   }
 
+  private static LargeSignalAnswer large(String ref) {
+    InputCapacitor capacitor = new InputCapacitor(ref, "input_coupling", 1e-7);
+    return new LargeSignalAnswer(
+        Optional.of(new Recovery(capacitor, 3, 1.25, 2.2e5, 0.16, 0.045)),
+        Optional.of(
+            new ReactiveAnswer(
+                2e3,
+                3,
+                4.5,
+                2.5,
+                440.5,
+                0.075,
+                List.of(8.75),
+                19.5,
+                OptionalDouble.of(12),
+                false,
+                List.of())));
+  }
+
   private static StageAnswer stage(
       DevicePoint point, Optional<DrivenAnswer> driven, SmallSignalAnswer small) {
     StageCircuit circuit =
@@ -152,6 +175,7 @@ final class SampleAnswer {
             Map.of("inputPeak", band(1.4, 1.6))),
         driven,
         List.of(driven(0.1), driven(0.5)),
+        large(point.ref()),
         List.of(
             new PartDuty(
                 part,

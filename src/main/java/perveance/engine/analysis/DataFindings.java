@@ -2,8 +2,10 @@ package perveance.engine.analysis;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import perveance.engine.analysis.Band.Share;
 import perveance.engine.base.DataMessage;
 import perveance.engine.base.Finding;
@@ -13,8 +15,9 @@ import perveance.engine.base.Severity;
 import perveance.engine.base.Unit;
 import perveance.engine.device.Device;
 import perveance.engine.device.Evidence;
-import perveance.engine.device.FitSummary;
 import perveance.engine.device.LawParameter;
+import perveance.engine.device.fit.LawReadings;
+import perveance.engine.device.fit.Residual;
 import perveance.engine.stage.ChassisNames;
 import perveance.engine.stage.StageCircuit.Part;
 import perveance.engine.stage.StageCircuit.StageDevice;
@@ -23,6 +26,9 @@ import perveance.engine.stage.StageCircuit.StageDevice;
 final class DataFindings {
   /** A law that misses its data by more than this is loose [1]. */
   private static final double LOOSE = 0.10;
+
+  /** A device file keeps its worst error to three figures [1]. */
+  private static final double ROUNDING = 0.01;
 
   /** A cause with this share of a band is worth measuring [1]. */
   private static final double MOST = 0.4;
@@ -40,12 +46,13 @@ final class DataFindings {
       all.outside(point);
     }
     context.answer().circuit().devices().stream()
-        .map(StageDevice::device)
-        .distinct()
+        .collect(
+            Collectors.toMap(StageDevice::device, d -> d, (one, other) -> one, LinkedHashMap::new))
+        .values()
         .forEach(
             d -> {
-              all.fit(d.type(), d.fit());
-              all.spreadOfGrid(d);
+              all.fit(d);
+              all.spreadOfGrid(d.device());
             });
     context.answer().points().stream().findFirst().ifPresent(all::cause);
     return all.findings;
@@ -66,17 +73,43 @@ final class DataFindings {
                         .onPart(point.ref())));
   }
 
-  private void fit(String type, FitSummary fit) {
-    if (fit.worstError() > LOOSE) {
-      findings.add(
-          Finding.of(
-                  DataMessage.FIT_LOOSE,
-                  Severity.NOTE,
-                  context.ref(),
-                  type,
-                  Words.percent(fit.worstError()))
-              .withValue(fit.worstError(), LOOSE, Unit.RATIO));
+  /** The figure that the law misses most, of those that are for this way of connecting it. */
+  private void fit(StageDevice valve) {
+    Device device = valve.device();
+    if (device.fit().worstError() <= LOOSE) {
+      return;
     }
+    boolean tied = valve.connection().equals("triode");
+    List<Evidence> fitted =
+        device.evidence().stream()
+            .filter(e -> e.fit() && e.connection().equals("triode") == tied)
+            .toList();
+    // what is further off was distrusted when the law was fitted
+    double most = device.fit().worstError() * (1 + ROUNDING);
+    new LawReadings(device.law())
+        .compare(fitted).stream()
+            .filter(r -> Math.abs(r.relativeError()) > LOOSE && Math.abs(r.relativeError()) <= most)
+            .max(Comparator.comparingDouble(r -> Math.abs(r.relativeError())))
+            .ifPresent(r -> findings.add(loose(device.type(), r)));
+  }
+
+  private Finding loose(String type, Residual worst) {
+    double error = Math.abs(worst.relativeError());
+    String place =
+        Words.of(worst.evidence().anodeVoltage(), Unit.VOLT)
+            + worst.evidence().gridVoltage().stream()
+                .mapToObj(v -> " and " + Words.of(v, Unit.VOLT) + " of bias")
+                .findFirst()
+                .orElse("");
+    return Finding.of(
+            DataMessage.FIT_LOOSE,
+            Severity.NOTE,
+            context.ref(),
+            type,
+            worst.figure().word(),
+            place,
+            Words.percent(error))
+        .withValue(error, LOOSE, Unit.RATIO);
   }
 
   /** With one published point nothing tells how uneven the grid is; its class does. */

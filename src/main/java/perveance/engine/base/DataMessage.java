@@ -6,7 +6,7 @@ public enum DataMessage implements MessageCode {
   SPREAD_ASSUMED(
       "{0}: one published point only; the spread of its grid is the usual one of its class, {1}."),
   BAND_CAUSE("{0}: {1} of the doubt in the {2} comes from {3}; measured, the band is {4}."),
-  FIT_LOOSE("{0}: the law misses its published data by up to {1}."),
+  FIT_LOOSE("{0}: the law misses the {1} at {2}, one of the figures it was fitted to, by {3}."),
   NOT_SOLVED("{0}: no operating point was found: {1}.");
 
   private final String template;

@@ -1,6 +1,7 @@
 package perveance.engine.numeric;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.apache.commons.math3.fitting.leastsquares.ValueAndJacobianFunction;
 import org.apache.commons.math3.linear.Array2DRowRealMatrix;
@@ -102,8 +103,24 @@ final class FitProblem implements ValueAndJacobianFunction {
 
   private double[] predicted(double[] inner) {
     double[] predicted = new double[observed.length];
-    prediction.predict(toOuter(inner), predicted);
+    double[] outer = toOuter(inner);
+    if (lawful(outer)) {
+      prediction.predict(outer, predicted);
+    } else {
+      Arrays.fill(predicted, Double.NaN);
+    }
     return predicted;
+  }
+
+  /** A long step may carry a logarithm so far that the parameter is infinite, or rounds to 0. */
+  private boolean lawful(double[] outer) {
+    for (int j = 0; j < outer.length; j++) {
+      boolean positive = parameters.get(j).domain() instanceof ParameterDomain.Positive;
+      if (!Double.isFinite(outer[j]) || (positive && outer[j] == 0)) {
+        return false;
+      }
+    }
+    return true;
   }
 
   private double[] misfit(double[] inner) {

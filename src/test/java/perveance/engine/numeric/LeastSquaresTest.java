@@ -149,6 +149,25 @@ class LeastSquaresTest {
     assertEquals(0.5, fitted.parameters()[0], 1e-8);
   }
 
+  /**
+   * Derived: atan(ln p) is flat at p = e^60, and the first step, -0.447 x 3601, would carry the
+   * logarithm to -1550, where p rounds to 0. The law must never see that.
+   */
+  @Test
+  void aStepThatWouldRoundAPositiveParameterToNothingIsRefused() {
+    FitOutcome.Fitted fitted =
+        fitted(
+            LeastSquares.fit(
+                (p, y) -> {
+                  assertTrue(p[0] > 0 && Double.isFinite(p[0]), () -> "asked at " + p[0]);
+                  y[0] = Math.atan(Math.log(p[0]));
+                },
+                List.of(FitParameter.positive("p", Math.exp(60))),
+                new double[] {Math.atan(2)},
+                ones(1)));
+    assertEquals(Math.exp(2), fitted.parameters()[0], 1e-6);
+  }
+
   /** Derived: a line with two wild readings among twenty; the rest lie exactly on 2 + 3 x. */
   @Test
   void robustFitSetsOutliersAside() {

@@ -51,7 +51,7 @@ final class LibraryEvidence implements AccuracySource {
     return lines;
   }
 
-  private static String kind(Residual residual) {
+  static String kind(Residual residual) {
     Evidence evidence = residual.evidence();
     String tied =
         evidence.connection().equals("triode") && evidence.screenVoltage().isPresent()
@@ -88,7 +88,7 @@ final class LibraryEvidence implements AccuracySource {
     };
   }
 
-  private static String sources(List<Residual> residuals) {
+  static String sources(List<Residual> residuals) {
     Set<String> sources = new LinkedHashSet<>();
     for (Residual residual : residuals) {
       sources.add(shortened(residual.evidence()));

@@ -7,7 +7,6 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Optional;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -15,15 +14,8 @@ import org.junit.jupiter.params.provider.MethodSource;
 import perveance.engine.base.BadInputException;
 import perveance.engine.device.Device;
 import perveance.engine.device.LawParameter;
-import perveance.engine.device.fit.Filament;
-import perveance.engine.device.fit.FitConditions;
 import perveance.engine.device.fit.FitResult;
-import perveance.engine.device.fit.Heating;
 import perveance.engine.device.fit.LawFit;
-import perveance.engine.device.fit.LawFitter;
-import perveance.engine.device.fit.PentodeFitter;
-import perveance.engine.device.fit.RectifierFitter;
-import perveance.engine.device.fit.TriodeFitter;
 import perveance.files.device.DeviceReader;
 import perveance.files.device.DeviceSheet;
 import perveance.files.device.DeviceWriter;
@@ -45,14 +37,6 @@ class LibraryRefitTest {
     }
   }
 
-  private static LawFitter fitter(DeviceSheet sheet) {
-    return switch (sheet.kind()) {
-      case "triode" -> new TriodeFitter();
-      case "rectifier" -> new RectifierFitter();
-      default -> new PentodeFitter(sheet.kind().equals("beam"));
-    };
-  }
-
   /**
    * Pinned: the law in the file is what its evidence gives. Files keep six figures; 1e-5 of the
    * value (or of the unit for numbers near zero) leaves room for their rounding only.
@@ -63,7 +47,7 @@ class LibraryRefitTest {
   void theLawIsWhatTheEvidenceGives(Path file) throws IOException, BadInputException {
     String text = Files.readString(file);
     DeviceSheet sheet = DeviceReader.readSheet(SourceText.of(file.toString(), text));
-    FitResult result = fitter(sheet).fit(sheet.evidence(), conditions(sheet));
+    FitResult result = LibraryFits.fit(sheet.kind(), sheet.heaters(), sheet.evidence());
     LawFit fit = assertInstanceOf(FitResult.Fitted.class, result, () -> file + ": " + result).fit();
     if (WRITE) {
       SourceText source = SourceText.of(file.toString(), text);
@@ -87,15 +71,5 @@ class LibraryRefitTest {
     assertEquals(fit.summary().assumptions(), device.fit().assumptions(), sheet.type());
     assertEquals(fit.summary().worstError(), device.fit().worstError(), 5e-4, sheet.type());
     assertEquals(fit.summary().medianError(), device.fit().medianError(), 5e-4, sheet.type());
-  }
-
-  /** The conditions that a sheet tells: a filament is heated with alternating current. */
-  static FitConditions conditions(DeviceSheet sheet) {
-    Optional<Filament> filament =
-        sheet.heaters().stream()
-            .filter(heater -> heater.directlyHeated())
-            .map(heater -> new Filament(heater.voltage(), Heating.ALTERNATING))
-            .findFirst();
-    return filament.map(FitConditions.USUAL::with).orElse(FitConditions.USUAL);
   }
 }

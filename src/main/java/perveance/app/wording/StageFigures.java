@@ -2,6 +2,7 @@ package perveance.app.wording;
 
 import java.util.ArrayList;
 import java.util.List;
+import perveance.engine.analysis.BiasSupplyAnswer;
 import perveance.engine.analysis.CleanSwing;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.DrivenAnswer;
@@ -73,6 +74,7 @@ public final class StageFigures {
     clean(answer, rows);
     answer.driven().ifPresent(d -> driven(d, rows));
     rows.addAll(LargeSignalFigures.of(answer.large()));
+    answer.biasSupply().ifPresent(b -> rows.add(biasRange(b)));
     SmallSignalAnswer small = answer.smallSignal();
     rows.add(
         new FigureRow(
@@ -83,6 +85,15 @@ public final class StageFigures {
             "",
             "20 Hz to 20 kHz"));
     return rows;
+  }
+
+  private static FigureRow biasRange(BiasSupplyAnswer supply) {
+    String range =
+        Figures.reading(supply.least(), Unit.VOLT)
+            + " to "
+            + Figures.reading(supply.most(), Unit.VOLT);
+    return new FigureRow(
+        "bias can be set", range, "", Figures.reading(supply.current(), Unit.AMPERE) + " taken");
   }
 
   private static void smallSignal(StageAnswer answer, List<FigureRow> rows) {

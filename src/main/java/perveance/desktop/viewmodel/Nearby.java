@@ -133,6 +133,7 @@ final class Nearby {
         a.driven(),
         a.levels(),
         a.large(),
+        a.biasSupply(),
         parts,
         a.readings(),
         a.loadLine(),

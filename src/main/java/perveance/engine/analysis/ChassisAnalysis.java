@@ -94,6 +94,7 @@ public final class ChassisAnalysis {
     List<Finding> findings = new ArrayList<>();
     findings.addAll(RatingFindings.of(context));
     findings.addAll(BiasFindings.of(context));
+    findings.addAll(BiasSupplyFindings.of(context));
     findings.addAll(GridFindings.of(context));
     findings.addAll(SwingFindings.of(context));
     findings.addAll(OutputFindings.of(context));

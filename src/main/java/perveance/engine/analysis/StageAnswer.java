@@ -20,6 +20,7 @@ import perveance.engine.stage.StageCircuit;
  * @param driven at the stated drive, empty when none is stated
  * @param levels against level, rising
  * @param large overload and reactive load
+ * @param biasSupply how far a fixed bias can be set, empty where the stage states no control
  * @param parts what each part has to stand
  * @param readings expected meter readings in measuring order
  * @param loadLine load lines, empty when the kind has none
@@ -39,6 +40,7 @@ public record StageAnswer(
     Optional<DrivenAnswer> driven,
     List<DrivenAnswer> levels,
     LargeSignalAnswer large,
+    Optional<BiasSupplyAnswer> biasSupply,
     List<PartDuty> parts,
     List<ExpectedReading> readings,
     Optional<LoadLineView> loadLine,
@@ -76,6 +78,7 @@ public record StageAnswer(
         driven,
         levels,
         large,
+        biasSupply,
         parts,
         readings,
         loadLine,

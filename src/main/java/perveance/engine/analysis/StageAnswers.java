@@ -70,6 +70,7 @@ final class StageAnswers {
         driven,
         options.levels() ? levels.ladder(clean.inputPeak(), drive) : List.of(),
         large,
+        BiasDivider.of(values).flatMap(d -> d.answer(values.number("grid_bias"))),
         options.details() ? parts(model, values, atDrive) : List.of(),
         readings(model, points, bands),
         loadLine(model, atDrive.or(() -> levels.cycle(clean.inputPeak())), large),

@@ -38,6 +38,10 @@ public record PartRatings(OptionalDouble power, OptionalDouble voltage) {
               StageKeys.SECONDARY_RESISTANCE,
               StageKeys.SECONDARY_LOAD,
               StageKeys.CURRENT_SOURCE_RESISTANCE,
+              StageKeys.BIAS_TOP,
+              StageKeys.BIAS_POT,
+              StageKeys.BIAS_BOTTOM,
+              StageKeys.BIAS_HOLD,
               StageKeys.STRAY_GRID_ANODE,
               StageKeys.STRAY_GRID,
               StageKeys.STRAY_ANODE)

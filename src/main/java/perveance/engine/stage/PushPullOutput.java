@@ -29,6 +29,7 @@ final class PushPullOutput implements StageKind {
               List.of(SCREEN_DROPPER, SCREEN_BYPASS),
               OutputTransformer.KEYS,
               List.of(CATHODE_RESISTOR, CATHODE_BYPASS, SHARED, GRID_BIAS),
+              BiasControl.KEYS,
               GridInput.KEYS,
               CommonKeys.LIST));
 
@@ -52,6 +53,7 @@ final class PushPullOutput implements StageKind {
     List<Complaint> complaints = new ArrayList<>(OutputFeed.check(values));
     complaints.addAll(ScreenDropper.check(values));
     complaints.addAll(CathodeBias.check(values));
+    complaints.addAll(BiasControl.check(values));
     complaints.addAll(ValvePair.checkNames(values));
     complaints.addAll(Sections.check(values));
     if (values.device().law().kind() != values.secondDevice().law().kind()) {

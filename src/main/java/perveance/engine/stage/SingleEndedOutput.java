@@ -23,6 +23,7 @@ final class SingleEndedOutput implements StageKind {
               OutputTransformer.KEYS,
               CathodeBias.KEYS,
               List.of(GRID_BIAS),
+              BiasControl.KEYS,
               GridInput.KEYS,
               CommonKeys.LIST));
 
@@ -45,6 +46,7 @@ final class SingleEndedOutput implements StageKind {
   public List<Complaint> check(StageValues values) {
     List<Complaint> complaints = new ArrayList<>(OutputFeed.check(values));
     complaints.addAll(CathodeBias.check(values));
+    complaints.addAll(BiasControl.check(values));
     complaints.addAll(Sections.check(values));
     boolean dropped = values.has(SCREEN_RESISTOR.key());
     if (values.has(SCREEN_BYPASS.key()) && (!dropped || !ScreenFeed.fed(values))) {

@@ -94,6 +94,15 @@ final class StageKeys {
   static final KeySpec GRID_STOPPER = ohms("grid_stopper", "resistor in series with the grid");
   static final KeySpec GRID_BIAS =
       volts("grid_bias", -5000, 5000, "voltage to chassis at the foot of the grid leak");
+  static final KeySpec BIAS_SUPPLY =
+      volts("bias_supply", -5000, -0.1, "negative voltage that the bias is taken from");
+  static final KeySpec BIAS_TOP =
+      ohms("bias_top", "resistor from the bias supply to the bias control");
+  static final KeySpec BIAS_POT = ohms("bias_pot", "potentiometer that sets the bias");
+  static final KeySpec BIAS_BOTTOM =
+      ohms("bias_bottom", "resistor from the bias control to chassis");
+  static final KeySpec BIAS_HOLD =
+      ohms("bias_hold", "resistor from the wiper of the bias control to the bias supply");
   static final KeySpec GRID_BYPASS = farads("grid_bypass", "capacitor from the grid to chassis");
   static final KeySpec SECOND_GRID_LEAK =
       ohms("second_grid_leak", "resistor that biases the second grid");

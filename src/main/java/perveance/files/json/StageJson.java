@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.util.HashMap;
 import java.util.Map;
 import perveance.engine.analysis.Band;
+import perveance.engine.analysis.BiasSupplyAnswer;
 import perveance.engine.analysis.CleanSwing;
 import perveance.engine.analysis.DevicePoint;
 import perveance.engine.analysis.DrivenAnswer;
@@ -35,6 +36,10 @@ final class StageJson {
     }
     sink.objects("levels", stage.levels(), this::level);
     new LargeSignalJson(sink).write(stage.large());
+    if (stage.biasSupply().isPresent()) {
+      BiasSupplyAnswer supply = stage.biasSupply().get();
+      sink.object("bias_supply", () -> biasSupply(supply));
+    }
     Map<String, Band> bands = new HashMap<>(stage.smallSignal().bands());
     bands.putAll(stage.clean().bands());
     BandJson.write(bands, sink);
@@ -71,6 +76,15 @@ final class StageJson {
     sink.number("screen_W", point.screenDissipation());
     BandJson.write(point.bands(), sink);
     sink.text("outside_evidence", point.outsideEvidence());
+  }
+
+  private void biasSupply(BiasSupplyAnswer supply) throws IOException {
+    sink.number("voltage_V", supply.raw());
+    sink.number("current_A", supply.current());
+    sink.number("most_negative_V", supply.most());
+    sink.number("least_negative_V", supply.least());
+    sink.number("setting", supply.setting());
+    sink.number("open_wiper_V", supply.openWiper());
   }
 
   private void smallSignal(SmallSignalAnswer answer) throws IOException {

@@ -116,8 +116,34 @@ final class FindingCases {
         () -> standard(310, "cathode_resistor", "", "cathode_bypass", "", "grid_leak", "10M"));
     cases.put(BiasMessage.COLD_START_GRID, FindingCases::follower);
     cases.put(
+        BiasMessage.BIAS_OUT_OF_RANGE, () -> control("bias_top", "33k", "bias_bottom", "22k"));
+    cases.put(
+        BiasMessage.BIAS_RANGE_SMALL,
+        () -> control("bias_pot", "10k", "bias_top", "47k", "bias_bottom", "91k"));
+    cases.put(BiasMessage.BIAS_WIPER_OPEN, () -> control("bias_top", "13k", "bias_bottom", "36k"));
+    cases.put(
         BiasMessage.FIXED_BIAS_SPREAD,
         () -> pair(430, "EL34", "primary", "3k4", "grid_bias", "-38 V", "screen_resistor", "1k"));
+  }
+
+  /** A pair at -38 V from a bias supply of -58 V through 25 k. */
+  static Bench control(String... keysAndTexts) {
+    String[] usual = {
+      "primary",
+      "3k4",
+      "grid_bias",
+      "-38 V",
+      "screen_resistor",
+      "1k",
+      "bias_supply",
+      "-58 V",
+      "bias_pot",
+      "25k"
+    };
+    String[] all = new String[usual.length + keysAndTexts.length];
+    System.arraycopy(usual, 0, all, 0, usual.length);
+    System.arraycopy(keysAndTexts, 0, all, usual.length, keysAndTexts.length);
+    return pair(430, "EL34", all);
   }
 
   private static Bench follower() {

@@ -67,7 +67,8 @@ final class RandomChassis {
     Map<String, Double> usual = UsualStages.of(kind.name(), random);
     for (KeySpec key : kind.keys()) {
       Double value = usual.get(key.key());
-      boolean extra = random.nextInt(12) == 0;
+      // one part of a bias control by itself is refused; a whole one is among the usual values
+      boolean extra = random.nextInt(12) == 0 && !key.key().startsWith("bias_");
       switch (key.form()) {
         case QUANTITY -> {
           if (value != null && random.nextInt(15) != 0) {

@@ -85,6 +85,13 @@ final class UsualStages {
   /** A kind's keys with what surrounds any stage, at random. */
   static Map<String, Double> of(String kind, Random random) {
     Map<String, Double> values = new LinkedHashMap<>(ALL.getOrDefault(kind, Map.of()));
+    if (kind.endsWith("-output") && random.nextInt(6) == 0) {
+      values.put("grid_bias", -38.0);
+      values.put("bias_supply", -58.0);
+      values.put("bias_top", 14e3);
+      values.put("bias_pot", 25e3);
+      values.put("bias_bottom", 42e3);
+    }
     if (random.nextBoolean()) {
       values.put("coupling", 22e-9);
       values.put("load", 470e3);

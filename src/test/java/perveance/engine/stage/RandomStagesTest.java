@@ -58,9 +58,10 @@ class RandomStagesTest {
     StageBench bench =
         new StageBench(kind, pentode ? StageSamples.PENTODE : YardstickTriode.T12AX7);
     double share = random.nextDouble();
-    // what a part is rated for changes neither the circuit nor the drawing
+    // what a part is rated for and what sets a bias change neither the circuit nor the drawing
     List<KeySpec> keys = new ArrayList<>(bench.kind.keys());
     keys.removeAll(PartRatings.keys(keys));
+    keys.removeAll(BiasControl.KEYS);
     for (KeySpec key : keys) {
       boolean wanted = key.required() || random.nextDouble() < share;
       if (wanted && key.form() != KeySpec.Form.DEVICE) {

@@ -81,6 +81,18 @@ class JsonReportTest {
   }
 
   @Test
+  void theBiasSupplyHasItsOwnNames() {
+    assertEquals(
+        Map.of(
+            "voltage_V", -58.0,
+            "current_A", 7.2e-4,
+            "most_negative_V", -48.0,
+            "least_negative_V", -30.0,
+            "setting", 0.25),
+        object(objects(root, "stages").get(0), "bias_supply"));
+  }
+
+  @Test
   void everyFigureStandsUnderItsOwnName() {
     Map<String, Object> stage = objects(root, "stages").get(0);
     assertEquals("V1a", stage.get("ref"));

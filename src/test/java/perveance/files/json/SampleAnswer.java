@@ -5,6 +5,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import perveance.engine.analysis.Band;
+import perveance.engine.analysis.BiasSupplyAnswer;
 import perveance.engine.analysis.ChassisAnswer;
 import perveance.engine.analysis.CleanSwing;
 import perveance.engine.analysis.DevicePoint;
@@ -176,6 +177,9 @@ final class SampleAnswer {
         driven,
         List.of(driven(0.1), driven(0.5)),
         large(point.ref()),
+        Optional.of(
+            new BiasSupplyAnswer(
+                -58, 7.2e-4, -48, -30, OptionalDouble.of(0.25), OptionalDouble.empty())),
         List.of(
             new PartDuty(
                 part,

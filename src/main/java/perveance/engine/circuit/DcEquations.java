@@ -79,6 +79,14 @@ final class DcEquations {
     }
   }
 
+  /** Ties every unknown node by a conductance to where it stands [S], [V]. */
+  void hold(double conductance, double[] at) {
+    for (int row = 0; row < topology.unknownNodes; row++) {
+      system.linear[row * system.size + row] += conductance;
+      system.constant[row] -= conductance * at[row];
+    }
+  }
+
   private void stampWindings(Transformer transformer, int firstBranch) {
     for (int w = 0; w < transformer.windings().size(); w++) {
       Winding winding = transformer.windings().get(w);

@@ -11,7 +11,9 @@ public sealed interface DcOutcome {
     /** Leaks from every node to chassis, reduced step by step to none. */
     GMIN_STEPPING,
     /** Sources raised step by step to their value. */
-    SOURCE_STEPPING
+    SOURCE_STEPPING,
+    /** Every node held where it was, less and less, as if each had a capacitor. */
+    PSEUDO_TIME
   }
 
   /** Why there is no point. */
@@ -22,6 +24,8 @@ public sealed interface DcOutcome {
     SOURCE_LOOP,
     /** The equations determine no point. */
     SINGULAR,
+    /** Rounding of such high voltages across such low resistances leaves more than 1 nA. */
+    ROUNDING,
     /** The search ended without a point at which Kirchhoff's law holds. */
     NO_CONVERGENCE
   }

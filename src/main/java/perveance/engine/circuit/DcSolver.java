@@ -157,6 +157,10 @@ public final class DcSolver {
       if (left < RESIDUAL) {
         return new Converged(solution, stepping.method(), stepping.iterations(), left);
       }
+      return failed(
+          Cause.ROUNDING,
+          "resistances are so low for such voltages that rounding alone leaves currents over",
+          left);
     }
     return end == Newton.End.SINGULAR
         ? failed(Cause.SINGULAR, "the wiring does not determine every voltage and current", left)

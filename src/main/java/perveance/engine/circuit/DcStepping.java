@@ -4,14 +4,18 @@ import java.util.Arrays;
 import perveance.engine.circuit.DcOutcome.Method;
 
 /**
- * Newton's method with its two fallbacks: leaks to chassis that are taken away step by step, and
+ * Newton's method with its fallbacks: leaks to chassis that are taken away step by step, and
  * sources that are raised step by step (both are common practice in circuit simulation: L. W.
- * Nagel, Memorandum ERL-M520, University of California, Berkeley, 1975).
+ * Nagel, Memorandum ERL-M520, University of California, Berkeley, 1975); at last pseudo-transient
+ * continuation, every node held where it was by less and less (C. T. Kelley and D. E. Keyes, SIAM
+ * J. Numer. Anal. 35, 508, 1998).
  */
 final class DcStepping {
   private static final double FIRST_LEAK = 1e-2;
   private static final double LAST_LEAK = 1e-13;
   private static final double SMALLEST_STEP = 1e-4;
+  private static final double FIRST_HOLD = 1;
+  private static final int MOST_HOLDS = 300;
 
   private final DcEquations equations;
   private final Newton newton;
@@ -49,6 +53,10 @@ final class DcStepping {
     }
     if (raiseSources(x)) {
       method = Method.SOURCE_STEPPING;
+      return Newton.End.CONVERGED;
+    }
+    if (letGo(x)) {
+      method = Method.PSEUDO_TIME;
       return Newton.End.CONVERGED;
     }
     System.arraycopy(start, 0, x, 0, x.length);
@@ -101,6 +109,34 @@ final class DcStepping {
       }
     }
     return attempt(x, 1, 0) == Newton.End.CONVERGED;
+  }
+
+  /**
+   * The last resort: where every hold down to a leak was followed, the point counts if Kirchhoff's
+   * law holds at it, though voltages that only rounding or leakage decides may still move.
+   */
+  private boolean letGo(double[] x) {
+    Arrays.fill(x, 0);
+    double hold = FIRST_HOLD;
+    for (int i = 0; i < MOST_HOLDS && hold > LAST_LEAK; i++) {
+      System.arraycopy(x, 0, kept, 0, x.length);
+      equations.stamp(1, 0);
+      equations.hold(hold, kept);
+      newton.prepare();
+      boolean reached =
+          newton.solve(x) == Newton.End.CONVERGED || newton.kirchhoffResidual() <= Newton.KIRCHHOFF;
+      iterations += newton.iterations();
+      if (!reached) {
+        System.arraycopy(kept, 0, x, 0, x.length);
+      }
+      hold *= reached ? 0.5 : 4;
+    }
+    System.arraycopy(x, 0, kept, 0, x.length);
+    if (attempt(x, 1, 0) == Newton.End.CONVERGED) {
+      return true;
+    }
+    System.arraycopy(kept, 0, x, 0, x.length);
+    return hold <= LAST_LEAK && newton.balance(x) <= Newton.KIRCHHOFF;
   }
 
   private boolean raiseSources(double[] x) {

@@ -140,7 +140,13 @@ final class Newton {
 
   private void complete(double[] x) {
     condensation.backward(unknowns, x);
+    balance(x);
+  }
+
+  /** Largest current that the present equations leave over at a whole point [A]. */
+  double balance(double[] x) {
     kirchhoff = system.kirchhoff(x, left);
+    return kirchhoff;
   }
 
   private End iterate() {

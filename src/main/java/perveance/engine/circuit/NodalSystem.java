@@ -10,7 +10,7 @@ import java.util.Arrays;
  */
 final class NodalSystem {
   /** Currents too small to look at twice [A]. */
-  private static final double NEGLIGIBLE = 1e-11;
+  private static final double NEGLIGIBLE = 1e-12;
 
   private static final double ROUNDING = 4 * Math.ulp(1.0);
 

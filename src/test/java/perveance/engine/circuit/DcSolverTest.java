@@ -98,6 +98,24 @@ class DcSolverTest {
     assertEquals(301, warm.solution().voltage("B"));
   }
 
+  /**
+   * derived: 1 A at 100 kV through two milliohm: a voltage there is told to 1.5e-11 V, which is 15
+   * nA in a milliohm, more than an answer may leave over.
+   */
+  @Test
+  void whatRoundingLeavesOverIsRefusedAsThat() {
+    Circuit circuit =
+        new CircuitSketch()
+            .source("supply", "in", "0", 1e5)
+            .resistor("r1", "in", "a", 1e-3)
+            .resistor("r2", "a", "b", 1e-3)
+            .resistor("load", "b", "0", 1e5)
+            .build();
+    NotConverged outcome = assertInstanceOf(NotConverged.class, new DcSolver(circuit).solve());
+    assertEquals(Cause.ROUNDING, outcome.cause());
+    assertTrue(outcome.residual() > 1e-9 && outcome.residual() < 1e-7, outcome.toString());
+  }
+
   @Test
   void gridBehindACapacitorIsRefusedByName() {
     Circuit circuit =

@@ -43,7 +43,7 @@ public final class StageStarter {
           Map.entry("second_grid_bypass", "100n"),
           Map.entry("tail_resistor", "47k"),
           Map.entry("divider_top", "1M"),
-          Map.entry("divider_bottom", "1M"),
+          Map.entry("divider_bottom", "18k"),
           Map.entry("divider_second", "1M"),
           Map.entry("screen_resistor", "1M"),
           Map.entry("screen_bypass", "100n"),
@@ -53,7 +53,7 @@ public final class StageStarter {
           Map.entry("source", "10k"),
           Map.entry("load", "470k"),
           Map.entry("load2", "470k"),
-          Map.entry("drive", "0.5 V"),
+          Map.entry("drive", "0.2 V"),
           Map.entry("primary", "5k"),
           Map.entry("secondary_load", "8R"),
           Map.entry("connection", "triode"));
@@ -62,17 +62,36 @@ public final class StageStarter {
   private static final Map<String, String> USUAL_OUTPUT =
       Map.of(
           "cathode_resistor",
-          "330R",
+          "270R",
           "cathode_bypass",
           "100u",
           "drive",
-          "5 V",
+          "3 V",
           "grid_leak",
           "470k");
 
+  /** Where anode and cathode both give an output, both see the same load. */
+  private static final Map<String, String> USUAL_SPLIT = Map.of("anode_load", "47k");
+
+  /** Where one valve stands on another, its cathode is far from the chassis. */
+  private static final Map<String, String> USUAL_STACKED = Map.of("heater_elevation", "60 V");
+
   private static final List<String> USUAL_VALVES =
       List.of("12AX7", "12AU7", "EL84", "300B", "EL34");
-  private static final List<String> WELCOME = List.of("grid_leak", "coupling", "load", "drive");
+
+  /** Bias first: what follows takes its foot from there. */
+  private static final List<String> WELCOME =
+      List.of(
+          "cathode_resistor",
+          "cathode_bypass",
+          "grid_leak",
+          "second_grid_leak",
+          "second_grid_bypass",
+          "coupling",
+          "load",
+          "load2",
+          "heater_elevation",
+          "drive");
 
   private final Engine engine;
 
@@ -106,8 +125,12 @@ public final class StageStarter {
     return Optional.empty();
   }
 
+  private static boolean takes(StageKind kind, String key) {
+    return kind.keys().stream().anyMatch(k -> k.key().equals(key));
+  }
+
   private static boolean isOutput(StageKind kind) {
-    return kind.keys().stream().anyMatch(k -> k.key().equals("primary"));
+    return takes(kind, "primary");
   }
 
   private List<String> valves(StageKind kind) {
@@ -207,8 +230,15 @@ public final class StageStarter {
   }
 
   private static String usual(StageKind kind, String key) {
-    String plain = USUAL.getOrDefault(key, "");
-    return isOutput(kind) ? USUAL_OUTPUT.getOrDefault(key, plain) : plain;
+    Map<String, String> special = Map.of();
+    if (isOutput(kind)) {
+      special = USUAL_OUTPUT;
+    } else if (takes(kind, "cathode_load") && takes(kind, "load2")) {
+      special = USUAL_SPLIT;
+    } else if (takes(kind, "upper_resistor")) {
+      special = USUAL_STACKED;
+    }
+    return special.getOrDefault(key, USUAL.getOrDefault(key, ""));
   }
 
   /**

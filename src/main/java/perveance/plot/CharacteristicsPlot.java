@@ -26,6 +26,9 @@ public final class CharacteristicsPlot {
 
   private static final double WORDS_HIGH = 0.06;
 
+  /** The whole picture, in parts of itself. */
+  private static final Rectangle2D PICTURE = new Rectangle2D.Double(0, 0, 1, 1);
+
   /** Which of the points of the dissipation limit carries its label. */
   private static final int LIMIT_LABEL = 24;
 
@@ -149,15 +152,26 @@ public final class CharacteristicsPlot {
       points.add(new PlotPoint(v, watts / v / MILLI));
     }
     series.add(new PlotSeries(watts + " W limit", PlotSeries.Role.LIMIT, points));
+    labels.add(limitLabel(trim(watts) + " W limit", points, spared, family));
+  }
+
+  /** Beyond the hyperbola, or within it where all places beyond it are taken. */
+  private static PlotDescription.Label limitLabel(
+      String name, List<PlotPoint> points, Optional<LoadLineView> spared, CurveFamily family) {
+    PlotDescription.Anchor anchor = PlotDescription.Anchor.BOTTOM_LEFT;
     List<PlotPoint> places = new ArrayList<>(limitPlaces(points));
-    spared.ifPresent(view -> places.sort(Comparator.comparing(p -> isNear(p, view, family))));
-    labels.add(
-        new PlotDescription.Label(
-            trim(watts) + " W limit",
-            places.get(0),
-            PlotDescription.Anchor.BOTTOM_LEFT,
-            false,
-            places));
+    if (spared.isPresent()) {
+      LoadLineView view = spared.get();
+      for (PlotDescription.Anchor side :
+          List.of(PlotDescription.Anchor.BOTTOM_LEFT, PlotDescription.Anchor.TOP_RIGHT)) {
+        anchor = side;
+        places.sort(Comparator.comparing(p -> isNear(p, side, view, family)));
+        if (!isNear(places.get(0), side, view, family)) {
+          break;
+        }
+      }
+    }
+    return new PlotDescription.Label(name, places.get(0), anchor, false, places);
   }
 
   /** From the middle of the hyperbola outward, to both sides in turn. */
@@ -172,14 +186,18 @@ public final class CharacteristicsPlot {
     return places;
   }
 
-  /** Whether the words would stand on the operating point or on a line, in parts of the picture. */
-  private static boolean isNear(PlotPoint place, LoadLineView view, CurveFamily family) {
-    double x = place.x() / family.highestVoltage();
-    double y = place.y() * MILLI / family.highestCurrent();
+  /** Whether the words would stand on the operating point, on a line or across the edge. */
+  private static boolean isNear(
+      PlotPoint place, PlotDescription.Anchor side, LoadLineView view, CurveFamily family) {
+    boolean beyond = side == PlotDescription.Anchor.BOTTOM_LEFT;
+    double x = place.x() / family.highestVoltage() - (beyond ? 0 : WORDS_WIDE);
+    double y = place.y() * MILLI / family.highestCurrent() - (beyond ? 0 : WORDS_HIGH);
     double px = view.anode() / family.highestVoltage();
     double py = view.current() / family.highestCurrent();
     Rectangle2D words = new Rectangle2D.Double(x, y, WORDS_WIDE, WORDS_HIGH);
-    return words.intersects(px - NEAR, py - NEAR, 2 * NEAR + WORDS_WIDE, 2 * NEAR)
+    double left = x > px ? px - NEAR : px - NEAR - WORDS_WIDE;
+    return !PICTURE.contains(words)
+        || words.intersects(left, py - NEAR, 2 * NEAR + WORDS_WIDE, 2 * NEAR)
         || Stream.of(view.dc(), view.ac(), view.excursion(), view.reactive())
             .anyMatch(line -> crosses(line, words, family));
   }

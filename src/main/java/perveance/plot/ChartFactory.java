@@ -2,8 +2,12 @@ package perveance.plot;
 
 import java.awt.BasicStroke;
 import java.awt.Font;
+import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
+import java.text.NumberFormat;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.axis.LogAxis;
 import org.jfree.chart.axis.NumberAxis;
@@ -134,7 +138,15 @@ public final class ChartFactory {
     double span = description.high() - description.low();
     axis.setTickUnit(new NumberTickUnit(roundStep(span / 5)));
     axis.setAutoRangeIncludesZero(false);
+    axis.setNumberFormatOverride(figures());
     return axis;
+  }
+
+  /** The same figures everywhere, with a minus as long as a plus. */
+  private static NumberFormat figures() {
+    DecimalFormatSymbols symbols = DecimalFormatSymbols.getInstance(Locale.ROOT);
+    symbols.setMinusSign('\u2212');
+    return new DecimalFormat("0.######", symbols);
   }
 
   private static ValueAxis logarithmic(PlotAxis description) {

@@ -11,7 +11,7 @@ import java.awt.Color;
  * @param faint grid lines
  * @param accent the operating point and what follows the hand
  * @param limit limits and cautions
- * @param shade regions, for example grid current
+ * @param shade regions, for example the samples of a histogram
  * @param print true when it goes to paper: heavier lines, no reliance on grey
  */
 public record Look(
@@ -44,7 +44,7 @@ public record Look(
           new Color(0xe3, 0xe7, 0xe9),
           new Color(0x0a, 0x6b, 0x73),
           new Color(0xb3, 0x1b, 0x1b),
-          new Color(0xf3, 0xef, 0xe6),
+          new Color(0xdc, 0xec, 0xee),
           false);
 
   /** The window by night. */
@@ -56,6 +56,6 @@ public record Look(
           new Color(0x33, 0x3a, 0x3f),
           new Color(0x4c, 0xc2, 0xcb),
           new Color(0xff, 0x8a, 0x80),
-          new Color(0x24, 0x26, 0x22),
+          new Color(0x1c, 0x46, 0x4b),
           false);
 }

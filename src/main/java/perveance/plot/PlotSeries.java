@@ -23,6 +23,8 @@ public record PlotSeries(String name, Role role, List<PlotPoint> points) {
     MINOR_CURVE,
     /** A limit, dashed. */
     LIMIT,
+    /** A place on the axis, such as a corner; not a limit. */
+    MARK,
     /** dc load line, full. */
     DC_LINE,
     /** ac load line, dashed. */

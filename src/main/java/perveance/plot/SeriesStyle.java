@@ -25,6 +25,7 @@ final class SeriesStyle {
       case CURVE -> line(look.ink(), 0.9f, FULL);
       case MINOR_CURVE -> line(look.soft(), 0.6f, FULL);
       case LIMIT -> line(look.limit(), 1.2f, DOTTED);
+      case MARK -> line(look.soft(), 1f, DOTTED);
       case DC_LINE -> line(look.ink(), 1.3f, FULL);
       case AC_LINE -> line(look.accent(), 1.1f, DASHED);
       case EXCURSION -> line(look.accent(), 3.2f, FULL);

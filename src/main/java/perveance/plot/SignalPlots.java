@@ -205,7 +205,7 @@ public final class SignalPlots {
     series.add(
         new PlotSeries(
             "corner",
-            Role.LIMIT,
+            Role.MARK,
             List.of(new PlotPoint(frequency, low), new PlotPoint(frequency, high))));
     String text =
         frequency < 1e3

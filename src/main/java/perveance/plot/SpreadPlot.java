@@ -71,7 +71,7 @@ public final class SpreadPlot {
         name,
         new PlotAxis(
             name + prefix.before(unit), (left - edge) / scale, (right + edge) / scale, false),
-        new PlotAxis("share of the samples, %", 0, top, false),
+        new PlotAxis("share, %", 0, top, false),
         series,
         labels);
   }

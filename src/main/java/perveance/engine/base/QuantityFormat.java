@@ -26,7 +26,7 @@ public enum QuantityFormat {
   private static final int MOST_ZEROS = 9;
 
   /** However narrow its band, a value is not printed to more figures. */
-  private static final int MOST_FIGURES = 6;
+  private static final int MOST_FIGURES = 4;
 
   /** Figures for a value whose band has no width. */
   private static final int FIGURES_WITHOUT_BAND = 3;

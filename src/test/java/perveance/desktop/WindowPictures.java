@@ -34,6 +34,7 @@ public final class WindowPictures {
       List.of("characteristics", "transfer", "waveform", "distortion", "response", "spread");
 
   private final Path folder;
+  private double text = 1;
   private @Nullable Desk desk;
 
   private WindowPictures(Path folder) {
@@ -64,7 +65,22 @@ public final class WindowPictures {
         }
       }
     }
+    pictures.large(args);
     javafx.application.Platform.exit();
+  }
+
+  /** With large text in the smaller window, where room is short. */
+  private void large(String[] files) {
+    int[] size = {1280, 800};
+    for (double times : new double[] {1.25, 1.5}) {
+      text = times;
+      String name = "text-" + times;
+      views(name, null, size, false);
+      for (int i = 1; i < files.length; i++) {
+        first(name + "-" + i, Path.of(files[i]), size, false);
+      }
+    }
+    text = 1;
   }
 
   private void views(String name, @Nullable Path file, int[] size, boolean dark) {
@@ -116,7 +132,7 @@ public final class WindowPictures {
     return Toolkit.on(
         () -> {
           ObjectProperty<Settings> settings =
-              new SimpleObjectProperty<>(Settings.USUAL.withDark(dark));
+              new SimpleObjectProperty<>(Settings.USUAL.withDark(dark).withTextSize(text));
           Desks desks = new Desks(Runnable::run, Runnable::run, Runnable::run);
           desk = Wiring.desk(folder.resolve("home"), settings, new Answers(), desks);
           MainWindow window = new MainWindow(shown());

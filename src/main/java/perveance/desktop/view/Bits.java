@@ -58,6 +58,8 @@ final class Bits {
     value.getStyleClass().add("figure-value");
     value.setMinWidth(Region.USE_PREF_SIZE);
     note.getStyleClass().add("figure-note");
-    return new VBox(label(heading, "figure-label"), value, note);
+    Label name = label(heading, "figure-label");
+    name.setMinWidth(Region.USE_PREF_SIZE);
+    return new VBox(name, value, note);
   }
 }

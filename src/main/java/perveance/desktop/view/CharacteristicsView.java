@@ -7,11 +7,13 @@ import javafx.geometry.Bounds;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.geometry.Rectangle2D;
+import javafx.geometry.VPos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.StackPane;
@@ -33,15 +35,13 @@ import perveance.plot.StagePlots;
  * operating point and swing are drawn anew with each answer.
  */
 final class CharacteristicsView extends StackPane {
-  private static final double MOVERS_HEIGHT = 24;
-
   private final Desk desk;
   private final Workbench bench;
   private final PlotFonts fonts;
   private final ArtworkNode family = new ArtworkNode();
   private final LoadLineLayer lines;
   private final Pane words = new Pane();
-  private final Label loads = Bits.label("", "small");
+  private final Label loads = Bits.wrapped("", "small", "loads");
   private final Label readout = Bits.label("", "readout");
   private Optional<PlotDescription> frame = Optional.empty();
   private String drawnFor = "";
@@ -57,10 +57,7 @@ final class CharacteristicsView extends StackPane {
     words.setMouseTransparent(true);
     readout.setVisible(false);
     words.getChildren().add(readout);
-    for (Node layer : List.of(family, lines, words)) {
-      StackPane.setMargin(layer, new Insets(0, 0, MOVERS_HEIGHT, 0));
-      getChildren().add(layer);
-    }
+    getChildren().addAll(family, lines, words);
     family.onDrawn(this::drawLines);
     lines.setOnMouseMoved(e -> read(e.getX(), e.getY()));
     lines.setOnMouseExited(e -> readout.setVisible(false));
@@ -73,7 +70,9 @@ final class CharacteristicsView extends StackPane {
   /** What moves when the operating point is dragged: the person chooses. */
   private void movers() {
     ToggleGroup group = new ToggleGroup();
-    HBox bar = new HBox(8, Bits.label("The point moves by", "soft", "small"));
+    FlowPane choices = new FlowPane(8, 0, Bits.label("The point moves by", "soft", "small"));
+    choices.setPrefWrapLength(0);
+    choices.setRowValignment(VPos.BASELINE);
     for (PointDrag.Mover mover : PointDrag.Mover.values()) {
       ToggleButton choice = new ToggleButton(desk.say(mover.word()));
       choice.getStyleClass().setAll("tab-word", "small");
@@ -86,15 +85,20 @@ final class CharacteristicsView extends StackPane {
             choice.setSelected(true);
             dragging.mover(mover);
           });
-      bar.getChildren().add(choice);
+      choices.getChildren().add(choice);
     }
     loads.setId("load-lines");
-    loads.setMinWidth(USE_PREF_SIZE);
-    bar.getChildren().addAll(Bits.gap(), loads);
-    bar.setAlignment(Pos.CENTER_LEFT);
+    HBox bar = new HBox(8, Bits.growing(choices), loads);
     bar.setMaxHeight(USE_PREF_SIZE);
+    bar.heightProperty().addListener((o, was, is) -> leaveRoom(is.doubleValue()));
     StackPane.setAlignment(bar, Pos.BOTTOM_LEFT);
     getChildren().add(bar);
+  }
+
+  private void leaveRoom(double beneath) {
+    for (Node layer : List.of(family, lines, words)) {
+      StackPane.setMargin(layer, new Insets(0, 0, beneath, 0));
+    }
   }
 
   /** Told when a hand lets go. */

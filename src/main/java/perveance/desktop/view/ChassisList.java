@@ -88,7 +88,7 @@ final class ChassisList extends VBox {
     }
     worst(stage.ref()).ifPresent(s -> dot.getStyleClass().add(s));
     Label second =
-        Bits.label(
+        Bits.wrapped(
             desk.say(kind) + (device == null ? "" : " \u00b7 " + device.text()), "soft", "small");
     HBox top =
         new HBox(
@@ -113,12 +113,7 @@ final class ChassisList extends VBox {
     place.setAlignment(javafx.geometry.Pos.TOP_CENTER);
     place.setPadding(new javafx.geometry.Insets(3, 0, 0, 0));
     HBox graphic = new HBox(8, place, words);
-    Button row = new Button();
-    row.getStyleClass().setAll("chassis-row");
-    row.setGraphic(graphic);
-    row.setMaxWidth(Double.MAX_VALUE);
-    graphic.prefWidthProperty().bind(rows.widthProperty().subtract(22));
-    return row;
+    return new RowButton(graphic);
   }
 
   /** Colour of the dot: what the worst finding of the stage is. */

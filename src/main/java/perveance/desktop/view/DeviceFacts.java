@@ -33,7 +33,7 @@ final class DeviceFacts {
       }
       lines.add(pins.substring(0, pins.length() - 1));
     }
-    return lines;
+    return lines.stream().map(Bits::kept).toList();
   }
 
   private static String ratings(Ratings r) {

@@ -19,6 +19,9 @@ import perveance.engine.analysis.StageAnswer;
 final class FiguresRow extends VBox {
   private static final int COLUMNS = 4;
 
+  /** A column narrower than this, with text of the usual size, cuts the names of figures. */
+  private static final double LEAST_WIDTH = 108;
+
   /** A band that is out of date until the new one comes. */
   private static final double FADED = 0.45;
 
@@ -40,12 +43,26 @@ final class FiguresRow extends VBox {
     grid.setHgap(14);
     grid.setVgap(8);
     getChildren().addAll(grid, basis);
+    grid.widthProperty().addListener((o, was, is) -> widen());
+  }
+
+  private int columns(int figures) {
+    int usual = figures > TWO_ROWS ? COLUMNS + 1 : COLUMNS;
+    double least = LEAST_WIDTH * desk.settings().get().textSize();
+    int most = grid.getWidth() > 0 ? (int) (grid.getWidth() / least) : usual;
+    return Math.max(1, Math.min(usual, most));
+  }
+
+  private void widen() {
+    if (!cells.isEmpty() && columns(cells.size()) != grid.getColumnCount()) {
+      place();
+    }
   }
 
   /** The labels of one figure; their texts change, they stay. */
   private record Cell(VBox box, Label name, Label value, Label band, Label note) {
     static Cell empty() {
-      Label name = Bits.label("", "figure-label");
+      Label name = Bits.wrapped("", "figure-label");
       Label value = Bits.label("", "figure-value");
       Label band = Bits.label("", "figure-note");
       Label note = Bits.wrapped("", "figure-note");
@@ -75,6 +92,8 @@ final class FiguresRow extends VBox {
   private void showAll(List<FigureRow> rows) {
     if (cells.size() != rows.size()) {
       layOut(rows.size());
+    } else {
+      widen();
     }
     for (int i = 0; i < rows.size(); i++) {
       show(cells.get(i), rows.get(i));
@@ -105,7 +124,15 @@ final class FiguresRow extends VBox {
   }
 
   private void layOut(int figures) {
-    int columns = figures > TWO_ROWS ? COLUMNS + 1 : COLUMNS;
+    cells.clear();
+    for (int i = 0; i < figures; i++) {
+      cells.add(Cell.empty());
+    }
+    place();
+  }
+
+  private void place() {
+    int columns = columns(cells.size());
     grid.getChildren().clear();
     grid.getColumnConstraints().clear();
     for (int i = 0; i < columns; i++) {
@@ -113,11 +140,8 @@ final class FiguresRow extends VBox {
       column.setPercentWidth(100.0 / columns);
       grid.getColumnConstraints().add(column);
     }
-    cells.clear();
-    for (int i = 0; i < figures; i++) {
-      Cell cell = Cell.empty();
-      grid.add(cell.box(), i % columns, i / columns);
-      cells.add(cell);
+    for (int i = 0; i < cells.size(); i++) {
+      grid.add(cells.get(i).box(), i % columns, i / columns);
     }
   }
 

@@ -33,7 +33,9 @@ final class FindingsPane extends VBox {
     this.bench = desk.bench();
     getStyleClass().add("card");
     setSpacing(8);
-    HBox head = new HBox(Bits.label("Findings", "strong"), Bits.gap(), count);
+    Label findings = Bits.label("Findings", "strong");
+    findings.setMinWidth(USE_PREF_SIZE);
+    HBox head = new HBox(8, findings, Bits.gap(), count);
     ScrollPane scroll = new ScrollPane(cards);
     scroll.setFitToWidth(true);
     getChildren().addAll(head, Bits.growing(scroll));
@@ -104,6 +106,10 @@ final class FindingsPane extends VBox {
     Label name = Bits.wrapped(title, "strong");
     HBox.setHgrow(name, javafx.scene.layout.Priority.ALWAYS);
     name.setMaxWidth(Double.MAX_VALUE);
+    // a name is broken between words, never within one
+    if (title.indexOf(' ') < 0) {
+      name.setMinWidth(USE_PREF_SIZE);
+    }
     HBox head = new HBox(8, shape, name, word);
     head.setAlignment(javafx.geometry.Pos.CENTER_LEFT);
     VBox card = new VBox(head, Bits.wrapped(Bits.kept(desk.say(text))));

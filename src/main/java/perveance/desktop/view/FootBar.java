@@ -27,13 +27,13 @@ final class FootBar extends HBox {
   private final Workbench bench;
   private final Slider slider = new Slider(0, 1, 0);
   private final Label drive = Bits.label("");
-  private final Label range = Bits.label("");
+  private final Label range = Bits.wrapped("");
   private final Label output = Bits.label("");
-  private final Label power = Bits.label("");
+  private final Label power = Bits.wrapped("");
   private final Label distortion = Bits.label("");
-  private final Label harmonics = Bits.label("");
+  private final Label harmonics = Bits.wrapped("");
   private final Label headroom = Bits.label("");
-  private final Label headroomNote = Bits.label("");
+  private final Label headroomNote = Bits.wrapped("");
   private final Label message = Bits.wrapped("", "message");
   private boolean setting;
   private boolean dragging;
@@ -99,7 +99,7 @@ final class FootBar extends HBox {
             .findFirst()
             .orElse(""));
     distortion.setText(driven.map(d -> Figures.percent(d.distortion())).orElse("\u2013"));
-    harmonics.setText(driven.map(FootBar::harmonics).orElse(""));
+    harmonics.setText(Bits.kept(driven.map(FootBar::harmonics).orElse("")));
     headroom.setText(
         clean.headroom().isPresent()
             ? QuantityFormat.TYPESET.level(clean.headroom().getAsDouble(), 1)

@@ -57,7 +57,7 @@ final class KindPicker {
     ScrollPane scroll = new ScrollPane(tiles);
     scroll.setFitToWidth(true);
     scroll.setPrefViewportHeight(500);
-    scroll.setPrefViewportWidth(880);
+    scroll.setPrefViewportWidth(910);
     return scroll;
   }
 

@@ -3,6 +3,9 @@ package perveance.desktop.view;
 import java.io.File;
 import java.nio.file.Path;
 import java.util.List;
+import javafx.beans.binding.Bindings;
+import javafx.beans.property.DoubleProperty;
+import javafx.beans.property.SimpleDoubleProperty;
 import javafx.scene.Scene;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.KeyCode;
@@ -25,6 +28,21 @@ public final class MainWindow {
   /** Large type must not push the drawing out of the window. */
   private static final double FIGURES_SHARE = 0.27;
 
+  /** The drawing's part of what the findings leave, in parts of the whole. */
+  private static final double DRAWING_SHARE = 0.53;
+
+  /** The findings' part with text of the usual size, in per cent; it grows with the text. */
+  private static final double FINDINGS_PERCENT = 22.5;
+
+  private static final double MOST_FINDINGS_PERCENT = 30;
+
+  /**
+   * The chassis list with text of the usual size, in pixels; and at most, in parts of the whole.
+   */
+  private static final double SIDE_WIDTH = 206;
+
+  private static final double SIDE = 0.185;
+
   private final Desk desk;
   private final PlotFonts fonts = new PlotFonts();
   private final BorderPane root = new BorderPane();
@@ -38,6 +56,8 @@ public final class MainWindow {
   private final PlotCard plots;
   private final FiguresRow figures;
   private final CappedScroll low = new CappedScroll();
+  private final GridPane middle = new GridPane();
+  private final DoubleProperty sideWidth = new SimpleDoubleProperty();
   private final FindingsPane findings;
   private final FootBar foot;
   private final Commands commands;
@@ -112,15 +132,10 @@ public final class MainWindow {
     root.getStyleClass().add("window");
     root.setTop(top);
     root.setLeft(chassis);
-    GridPane middle = new GridPane();
+    chassis.prefWidthProperty().bind(Bindings.min(sideWidth, scene.widthProperty().multiply(SIDE)));
     middle.setHgap(10);
     middle.setVgap(10);
     middle.setPadding(new javafx.geometry.Insets(10));
-    for (double percent : new double[] {41, 36.5, 22.5}) {
-      ColumnConstraints column = new ColumnConstraints();
-      column.setPercentWidth(percent);
-      middle.getColumnConstraints().add(column);
-    }
     RowConstraints high = new RowConstraints();
     high.setVgrow(Priority.ALWAYS);
     RowConstraints flat = new RowConstraints();
@@ -172,6 +187,17 @@ public final class MainWindow {
 
   private void dress() {
     Skin.dress(root, desk.settings().get());
+    double findings =
+        Math.min(MOST_FINDINGS_PERCENT, FINDINGS_PERCENT * desk.settings().get().textSize());
+    double rest = 100 - findings;
+    sideWidth.set(SIDE_WIDTH * desk.settings().get().textSize());
+    middle.getColumnConstraints().clear();
+    for (double percent :
+        new double[] {DRAWING_SHARE * rest, (1 - DRAWING_SHARE) * rest, findings}) {
+      ColumnConstraints column = new ColumnConstraints();
+      column.setPercentWidth(percent);
+      middle.getColumnConstraints().add(column);
+    }
     refresh();
   }
 
@@ -189,7 +215,9 @@ public final class MainWindow {
     schematic.refresh();
     foot.refresh();
     // what a hand drags must not move because a line of the figures comes or goes
-    low.setPrefHeight(desk.drag().isHeld() ? low.getHeight() : Region.USE_COMPUTED_SIZE);
+    for (Region beneath : List.of(low, foot)) {
+      beneath.setPrefHeight(desk.drag().isHeld() ? beneath.getHeight() : Region.USE_COMPUTED_SIZE);
+    }
     figures.refresh();
     // lists follow when the hand rests, so that a drag stays light
     if (!desk.drag().isHeld()) {

@@ -25,6 +25,7 @@ import perveance.plot.SpreadPlot;
 final class SpreadView extends VBox {
   private static final int MOST_CAUSES = 4;
   private static final double PICTURE_SHARE = 0.55;
+  private static final double[] COLUMNS = {40, 25, 35};
 
   private final Desk desk;
   private final PlotFonts fonts;
@@ -37,12 +38,12 @@ final class SpreadView extends VBox {
     super(4);
     this.desk = desk;
     this.fonts = fonts;
-    ScrollPane scroll = new ScrollPane(rows);
+    ScrollPane scroll = new ScrollPane(new VBox(4, causes, rows));
     scroll.setFitToWidth(true);
     picture.setId("spread-picture");
     causes.setId("spread-causes");
     picture.minHeightProperty().bind(heightProperty().multiply(PICTURE_SHARE));
-    getChildren().addAll(picture, causes, Bits.growing(scroll));
+    getChildren().addAll(picture, Bits.growing(scroll));
     scroll.setMinHeight(60);
     scroll.setPrefHeight(60);
   }
@@ -98,12 +99,9 @@ final class SpreadView extends VBox {
 
   private Button row(SpreadFigure figure) {
     GridPane numbers = numbers(figure);
-    numbers.prefWidthProperty().bind(rows.widthProperty().subtract(24));
-    Button row = new Button();
-    row.getStyleClass().setAll("chassis-row", "spread-row");
+    Button row = new RowButton(numbers);
+    row.getStyleClass().add("spread-row");
     row.setId("spread-" + figure.name());
-    row.setMaxWidth(Double.MAX_VALUE);
-    row.setGraphic(numbers);
     row.setAccessibleText(
         desk.say(figure.name() + " " + value(figure) + ", band " + band(figure) + limit(figure)));
     row.setOnAction(
@@ -117,15 +115,15 @@ final class SpreadView extends VBox {
   private GridPane numbers(SpreadFigure figure) {
     GridPane grid = new GridPane();
     grid.setHgap(8);
-    for (double percent : new double[] {45, 18, 37}) {
+    for (double percent : COLUMNS) {
       ColumnConstraints column = new ColumnConstraints();
       column.setPercentWidth(percent);
       grid.getColumnConstraints().add(column);
     }
     Label value = Bits.label(value(figure), "strong");
-    grid.add(Bits.label(desk.say(figure.name())), 0, 0);
+    grid.add(Bits.wrapped(desk.say(figure.name())), 0, 0);
     grid.add(value, 1, 0);
-    grid.add(Bits.label(band(figure) + limit(figure), "soft", "small"), 2, 0);
+    grid.add(Bits.wrapped(Bits.kept(band(figure) + limit(figure)), "soft", "small"), 2, 0);
     GridPane.setHalignment(value, HPos.RIGHT);
     return grid;
   }

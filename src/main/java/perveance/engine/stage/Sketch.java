@@ -54,7 +54,15 @@ final class Sketch {
   /** A source of this stage with what is stated for it, as it is written. */
   void source(SymbolType type, int x, int y, KeySpec key, Side label, String what) {
     String stated = values.word(key.key()).orElse("");
-    add(type, x, y, false, false, name(key.key()), label, (what + " " + stated.replace('-', '\u2212')).strip());
+    add(
+        type,
+        x,
+        y,
+        false,
+        false,
+        name(key.key()),
+        label,
+        (what + " " + stated.replace('-', '\u2212')).strip());
   }
 
   /** The rail of the supply that a key names. */

@@ -8,8 +8,9 @@ package perveance.engine.device.fit;
  * single-ended stages (power and mean screen current at full drive): EL84 at 250 V with 4.5k and
  * 5.2k for pentodes, the three rows of the 6V6GT for beam tetrodes. They are not fitted to any
  * single type. That of small pentodes is a little wider, as their published ra at 100 V shows
- * (6AU6, 6SK7). The spread of small pentodes comes from the types whose tables fix it (6AU6 0.7,
- * 6SK7 0.7, EF80 0.45).
+ * (6AU6, 6SK7). The spread comes from what the types' tables say when nothing holds it: small
+ * pentodes 6AU6 0.7, 6SK7 0.7, EF80 0.45; output pentodes 6F6 0.47, EL84 and EL34 near 0; beam
+ * tetrodes 6L6 0.46, 6V6GT 0.47, 6AQ5 0.64, KT66 near 0.
  */
 public enum PentodeClass {
   /** Suppressor grid, cathode current of 25 mA or less. */
@@ -17,7 +18,7 @@ public enum PentodeClass {
   /** The same with a grid of uneven pitch for remote cut-off. */
   REMOTE("remote cut-off pentodes", 0.5, 0.05, 0.003, 0.2, 0.5, 0, 0.08, 1.5),
   /** Suppressor grid, larger currents. */
-  POWER("output pentodes", 0.4, 0.15, 0.03, 0.2, 0.5, 0, 0.065, 1.5),
+  POWER("output pentodes", 0.3, 0.15, 0.03, 0.2, 0.5, 0, 0.065, 1.5),
   /** Beam plates and aligned grids. */
   BEAM("beam tetrodes", 0.4, 0.15, 0.03, 1, 0.8, 0.35, 0.09, 3);
 

@@ -6,11 +6,14 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Objects;
+import javafx.scene.AccessibleRole;
 import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.control.Button;
+import javafx.scene.control.ButtonBase;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
@@ -20,6 +23,9 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import perveance.desktop.view.WindowProbe;
 
 /** Everything by keyboard, and every place that the keyboard reaches has a name to be read out. */
 class KeyboardTest {
@@ -76,11 +82,60 @@ class KeyboardTest {
     assertTrue(visited.containsAll(wanted), "of " + wanted + " reached only " + visited);
   }
 
-  @Test
-  void whateverTakesTheFocusHasAName() {
+  /** In every view, with everything unfolded, and in the pickers. */
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "tab-characteristics",
+        "tab-transfer",
+        "tab-waveform",
+        "tab-distortion",
+        "tab-response",
+        "tab-spread",
+        "tab-values values-fold",
+        "hand-sums"
+      })
+  void whateverTakesTheFocusHasANameAndARole(String presses) {
+    for (String press : presses.split(" ")) {
+      Toolkit.run(() -> ((ButtonBase) window.find("#" + press)).fire());
+    }
+    assertEquals(List.of(), nameless(window.stage.getScene().getRoot()));
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"kind", "device"})
+  void soDoesWhateverAPickerHolds(String picker) {
+    assertEquals(List.of(), nameless(Toolkit.on(() -> WindowProbe.picker(window.desk, picker))));
+  }
+
+  private static List<String> nameless(Node root) {
     List<String> nameless = new ArrayList<>();
-    Toolkit.run(() -> collect(window.stage.getScene().getRoot(), nameless));
-    assertEquals(List.of(), nameless);
+    Toolkit.run(() -> collect(root, nameless));
+    return nameless;
+  }
+
+  @Test
+  void whatPartsAreRatedForIsFoldedAway() {
+    Toolkit.run(() -> ((ButtonBase) window.find("#tab-values")).fire());
+    assertTrue(window.shown("#value-anode_load"));
+    assertFalse(window.shown("#value-anode_load_power"));
+    Toolkit.run(() -> window.find("#values-fold").requestFocus());
+    window.press(KeyCode.SPACE);
+    assertTrue(window.shown("#value-anode_load_power"));
+    TextField rating = (TextField) window.find("#value-anode_load_power");
+    Toolkit.run(
+        () -> {
+          rating.setText("1 W");
+          rating.fireEvent(OpenWindow.key(KeyCode.ENTER));
+        });
+    assertEquals("1 W", window.setting("anode_load_power"));
+    Toolkit.run(() -> ((ButtonBase) window.find("#values-fold")).fire());
+    assertTrue(window.shown("#value-anode_load_power"), "what is stated stays in sight");
+    assertFalse(window.shown("#value-stray_anode"));
+  }
+
+  private static AccessibleRole role(Node node) {
+    return Objects.requireNonNullElse(node.getAccessibleRole(), AccessibleRole.NODE);
   }
 
   private static boolean isSaid(@Nullable String words) {
@@ -94,6 +149,10 @@ class KeyboardTest {
     }
     if (node.isFocusTraversable() && !(node instanceof ScrollPane) && !says) {
       nameless.add(node.getClass().getSimpleName() + " " + node.getId());
+    }
+    boolean plain = EnumSet.of(AccessibleRole.NODE, AccessibleRole.PARENT).contains(role(node));
+    if (node.isFocusTraversable() && plain) {
+      nameless.add("no role: " + node.getClass().getSimpleName() + " " + node.getId());
     }
     if (node instanceof Parent parent) {
       parent.getChildrenUnmodifiable().forEach(child -> collect(child, nameless));

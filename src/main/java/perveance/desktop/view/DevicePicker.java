@@ -46,7 +46,9 @@ final class DevicePicker {
     search.setText(searched);
     search.setPromptText(desk.say("Type or alias of a valve"));
     search.setId("device-search");
+    search.setAccessibleText(desk.say("Find a valve by type or another name of it"));
     hits.setId("device-hits");
+    hits.setAccessibleText(desk.say("Valves found"));
     hits.setCellFactory(list -> new Cell());
     hits.getSelectionModel().selectedItemProperty().addListener((o, was, is) -> look(is));
     search.textProperty().addListener((o, was, is) -> find(is));

@@ -89,6 +89,7 @@ final class FindingsPane extends VBox {
             finding.severity().code().replace('-', ' '));
     card.setOnMouseClicked(e -> choose(finding));
     card.setFocusTraversable(true);
+    card.setAccessibleRole(javafx.scene.AccessibleRole.BUTTON);
     card.setOnKeyPressed(
         e -> {
           if (e.getCode() == javafx.scene.input.KeyCode.ENTER && e.getTarget() == card) {

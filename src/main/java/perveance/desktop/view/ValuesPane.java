@@ -1,6 +1,9 @@
 package perveance.desktop.view;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextField;
@@ -16,12 +19,16 @@ import perveance.engine.stage.StageEntry;
 import perveance.engine.stage.StageKind;
 import perveance.engine.stage.StageKinds;
 
-/** Every key of a stage in one list, also those that no symbol of the drawing shows. */
+/**
+ * Every key of a stage in one list, also those that no symbol of the drawing shows. What parts are
+ * rated for, and strays, are folded away until they are stated or asked for.
+ */
 final class ValuesPane extends ScrollPane {
   private final Desk desk;
   private final Workbench bench;
   private final GridPane grid = new GridPane();
   private String shownFor = "";
+  private boolean unfolded;
 
   ValuesPane(Desk desk) {
     this.desk = desk;
@@ -48,20 +55,73 @@ final class ValuesPane extends ScrollPane {
       shownFor = "";
       return;
     }
-    String key = ref + " " + kind.get().name() + desk.settings().get().vocabulary();
+    List<KeySpec> shown = shown(stage.get(), kind.get());
+    String key = ref + " " + shown + unfolded + desk.settings().get().vocabulary();
     if (!key.equals(shownFor)) {
       shownFor = key;
-      grid.getChildren().clear();
-      int row = 0;
-      for (KeySpec spec : kind.get().keys()) {
-        row(row++, ref, spec);
-      }
+      build(ref, shown, kind.get());
     }
     for (javafx.scene.Node node : grid.getChildren()) {
       if (node instanceof TextField field && !field.isFocused()) {
         field.setText(text(stage.get(), field.getId().substring("value-".length())));
       }
     }
+  }
+
+  private List<KeySpec> shown(StageEntry stage, StageKind kind) {
+    List<KeySpec> main = new ArrayList<>();
+    List<KeySpec> more = new ArrayList<>();
+    for (KeySpec spec : kind.keys()) {
+      boolean folds = folds(spec, kind);
+      if (!folds || unfolded || stage.settings().containsKey(spec.key())) {
+        (folds ? more : main).add(spec);
+      }
+    }
+    main.addAll(more);
+    return main;
+  }
+
+  /** A rating belongs to a part that has a key of its own. */
+  private static boolean folds(KeySpec spec, StageKind kind) {
+    String part = spec.key().replaceFirst("_(power|voltage)$", "");
+    return spec.key().startsWith("stray_")
+        || (!part.equals(spec.key())
+            && kind.keys().stream().anyMatch(k -> k.key().equals(part)));
+  }
+
+  private void build(String ref, List<KeySpec> shown, StageKind kind) {
+    grid.getChildren().clear();
+    int row = 0;
+    boolean folded = false;
+    for (KeySpec spec : shown) {
+      if (folds(spec, kind) && !folded) {
+        folded = true;
+        fold(row++, kind);
+      }
+      row(row++, ref, spec);
+    }
+    if (!folded) {
+      fold(row, kind);
+    }
+  }
+
+  private void fold(int row, StageKind kind) {
+    long count = kind.keys().stream().filter(k -> folds(k, kind)).count();
+    if (count > 0) {
+      String words =
+          unfolded
+              ? "Fewer: without ratings and strays that are not stated"
+              : "More: ratings of parts, strays (" + count + ")";
+      Button fold = Bits.button(words, this::turn, "link");
+      fold.setId("values-fold");
+      grid.add(fold, 0, row, 3, 1);
+    }
+  }
+
+  private void turn() {
+    unfolded = !unfolded;
+    refresh();
+    grid.lookupAll("#values-fold").forEach(javafx.scene.Node::requestFocus);
   }
 
   private static String text(StageEntry stage, String key) {
@@ -125,9 +185,15 @@ final class ValuesPane extends ScrollPane {
   }
 
   void focus(String key) {
-    grid.getChildren().stream()
-        .filter(n -> ("value-" + key).equals(n.getId()))
-        .findFirst()
-        .ifPresent(javafx.scene.Node::requestFocus);
+    Optional<javafx.scene.Node> field = field(key);
+    if (field.isEmpty() && !unfolded) {
+      turn();
+      field = field(key);
+    }
+    field.ifPresent(javafx.scene.Node::requestFocus);
+  }
+
+  private Optional<javafx.scene.Node> field(String key) {
+    return grid.getChildren().stream().filter(n -> ("value-" + key).equals(n.getId())).findFirst();
   }
 }

@@ -1,7 +1,9 @@
 package perveance.desktop;
 
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
+import perveance.desktop.viewmodel.DocumentException;
 import perveance.desktop.viewmodel.Press;
 import perveance.desktop.viewmodel.Settings;
 import perveance.engine.analysis.ChassisAnswer;
@@ -24,5 +26,15 @@ final class SheetPress implements Press {
                 LocalDate.now(java.time.ZoneId.systemDefault()),
                 version))
         .render(answer);
+  }
+
+  @Override
+  public List<String> printers() {
+    return Printers.names();
+  }
+
+  @Override
+  public void print(byte[] sheet, String printer, Settings settings) throws DocumentException {
+    Printers.print(sheet, printer, settings.letter());
   }
 }

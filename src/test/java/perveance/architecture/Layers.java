@@ -130,7 +130,7 @@ final class Layers {
                   "desktop.task",
                   "desktop.viewmodel",
                   "desktop.view"),
-              with(FILE_JDK, "javafx..")),
+              with(FILE_JDK, "javafx..", "javax.print..")),
           new Layer(
               "launch",
               with(ENGINE, "app", "files", "plot", "report", "cli", "desktop"),

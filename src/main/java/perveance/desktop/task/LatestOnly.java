@@ -54,6 +54,11 @@ public final class LatestOnly<Q, A> {
     background.execute(() -> answer(question, number));
   }
 
+  /** Nobody waits any more: whatever was asked will not be delivered. */
+  public void cancel() {
+    newest.incrementAndGet();
+  }
+
   private void answer(Q question, long number) {
     if (superseded(number)) {
       return;

@@ -66,6 +66,8 @@ final class Commands {
             Action.of("Save as\u2026", "Shortcut+Shift+S", files::saveAs)),
         List.of(
             Action.of("Print the sheet (PDF)\u2026", "Shortcut+P", files::sheet),
+            Action.of("Print the sheet on paper\u2026", "Shortcut+Shift+P", files::paper),
+            Action.of("Stop what is being made", "Shortcut+PERIOD", files.work()::stop),
             Action.of("Export the figures (CSV)\u2026", "", files::figures),
             Action.of(
                 "Export this chart (SVG)\u2026",

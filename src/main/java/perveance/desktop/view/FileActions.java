@@ -6,7 +6,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Supplier;
-import perveance.desktop.task.LatestOnly;
 import perveance.desktop.viewmodel.Asking;
 import perveance.desktop.viewmodel.Desk;
 import perveance.desktop.viewmodel.DocumentException;
@@ -25,13 +24,16 @@ final class FileActions {
   private static final double BITMAP_SCALE = 2;
 
   private final Desk desk;
-  private final LatestOnly<Order, Made> sheets;
+  private final SideWork work;
 
   FileActions(Desk desk) {
     this.desk = desk;
-    sheets =
-        desk.bench()
-            .aside((order, progress) -> new Made(order.file(), order.press().get()), this::write);
+    work = new SideWork(desk);
+  }
+
+  /** What is being made beside the window. */
+  SideWork work() {
+    return work;
   }
 
   /** Something that may fail for a reason that a person can mend. */
@@ -123,46 +125,72 @@ final class FileActions {
     return plain.isEmpty() ? "chassis" : plain;
   }
 
-  private void export(String what, String suffix, String ending, byte[] content) {
-    fileToWrite(what, suffix, ending).ifPresent(file -> write(new Made(file, content)));
+  /** Asks where to, then makes it beside the window. */
+  private void export(String what, String suffix, String ending, Supplier<byte[]> maker) {
+    desk.asking()
+        .fileToWrite(what, name() + suffix, ending)
+        .ifPresent(file -> work.order(what, maker, content -> write(file, content)));
   }
 
-  private Optional<Path> fileToWrite(String what, String suffix, String ending) {
-    return desk.asking().fileToWrite(what, name() + suffix, ending);
+  private void write(Path file, byte[] content) throws DocumentException {
+    desk.document().documents().write(file, content);
+    desk.bench().say("Written: " + file);
   }
 
-  private void write(Made made) {
-    if (attempt(() -> desk.document().documents().write(made.file(), made.content()))) {
-      desk.bench().say("Written: " + made.file());
-    }
-  }
-
-  void sheet() {
+  /** The sheet of what stands on the bench, to be made; empty while figures are worked out. */
+  private Optional<Supplier<byte[]>> pressed() {
     ChassisAnswer answer = desk.bench().answer().get();
     if (answer == null || !desk.bench().settled().get()) {
       desk.bench().say("The figures are still being worked out; print again in a moment.");
-      return;
+      return Optional.empty();
     }
-    fileToWrite("Print the sheet", "-sheet", "pdf")
-        .ifPresent(
-            file -> {
-              desk.bench().say("The sheet is being printed\u2026");
-              Settings settings = desk.settings().get();
-              sheets.ask(new Order(file, () -> desk.press().sheet(answer, settings)));
-            });
+    Settings settings = desk.settings().get();
+    return Optional.of(() -> desk.press().sheet(answer, settings));
   }
 
-  /** A file that takes a while to make. */
-  private record Order(Path file, Supplier<byte[]> press) {}
+  void sheet() {
+    pressed().ifPresent(maker -> export("Print the sheet", "-sheet", "pdf", maker));
+  }
 
-  /** A file that is made. */
-  private record Made(Path file, byte[] content) {}
+  /** The same sheet, on paper. */
+  void paper() {
+    List<String> printers = desk.press().printers();
+    if (printers.isEmpty()) {
+      desk.asking()
+          .tell(
+              "The sheet was not printed.",
+              "No printer that takes PDF is set up on this machine.",
+              "Write the sheet as a PDF file with \u201cPrint the sheet (PDF)\u201d and print that.");
+      return;
+    }
+    pressed()
+        .ifPresent(
+            maker ->
+                desk.asking()
+                    .choose("Print the sheet on which printer?", printers)
+                    .map(printers::get)
+                    .ifPresent(printer -> paper(printer, maker)));
+  }
+
+  private void paper(String printer, Supplier<byte[]> maker) {
+    Settings settings = desk.settings().get();
+    work.order(
+        "Print the sheet on " + printer,
+        maker,
+        sheet -> {
+          desk.press().print(sheet, printer, settings);
+          desk.bench().say("Sent to " + printer + ".");
+        });
+  }
 
   void figures() {
     ChassisAnswer answer = desk.bench().answer().get();
     if (answer != null) {
-      String table = FiguresTable.csv(answer);
-      export("Export the figures", "-figures", "csv", table.getBytes(StandardCharsets.UTF_8));
+      export(
+          "Export the figures",
+          "-figures",
+          "csv",
+          () -> FiguresTable.csv(answer).getBytes(StandardCharsets.UTF_8));
     }
   }
 
@@ -171,12 +199,11 @@ final class FileActions {
       desk.bench().say("There is nothing to export in this view.");
       return;
     }
-    byte[] svg = Pictures.svg(artwork.get(), Look.LIGHT, CHART_WIDTH, CHART_HEIGHT);
-    export("Export " + what, "-" + what, "svg", svg);
+    export("Export " + what, "-" + what, "svg", () -> svg(artwork.get()));
   }
 
   void bitmap(String what, Optional<Artwork> artwork) {
-    artwork.ifPresent(a -> export("Export " + what, "-" + what, "png", png(a)));
+    artwork.ifPresent(a -> export("Export " + what, "-" + what, "png", () -> png(a)));
   }
 
   static byte[] png(Artwork artwork) {

@@ -1,8 +1,13 @@
 package perveance.desktop.view;
 
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.control.ProgressBar;
 import javafx.scene.control.Slider;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
@@ -38,7 +43,7 @@ final class FootBar extends HBox {
   private boolean setting;
   private boolean dragging;
 
-  FootBar(Desk desk) {
+  FootBar(Desk desk, SideWork work) {
     this.desk = desk;
     this.bench = desk.bench();
     getStyleClass().add("foot");
@@ -59,16 +64,36 @@ final class FootBar extends HBox {
             Bits.figure("Output", output, power),
             Bits.figure("Distortion", distortion, harmonics),
             Bits.figure("Headroom", headroom, headroomNote),
-            message);
+            message,
+            busy(work));
     HBox.setHgrow(message, javafx.scene.layout.Priority.ALWAYS);
     message.textProperty().bind(bench.message());
     slider.valueProperty().addListener((o, was, is) -> driven(is.doubleValue()));
     slider.valueChangingProperty().addListener((o, was, is) -> dragging = dragging && is);
   }
 
+  /** What is being made beside the window, with the press that stops it. */
+  private static HBox busy(SideWork work) {
+    ProgressBar bar = new ProgressBar();
+    bar.setPrefWidth(90);
+    bar.accessibleTextProperty().bind(work.making());
+    Label what = Bits.wrapped("", "soft", "small");
+    what.textProperty().bind(work.making().concat("\u2026"));
+    Button stop = Bits.button("Stop", work::stop, "link");
+    stop.setId("stop-making");
+    stop.accessibleTextProperty().bind(Bindings.concat("Stop: ", work.making()));
+    HBox busy = new HBox(8, new VBox(2, what, bar), stop);
+    busy.setMinWidth(USE_PREF_SIZE);
+    busy.visibleProperty().bind(work.making().isNotEmpty());
+    busy.managedProperty().bind(busy.visibleProperty());
+    return busy;
+  }
+
   void refresh() {
     Optional<StageAnswer> answer = bench.stageAnswer();
-    setDisable(answer.isEmpty());
+    for (Node part : List.of(slider, output, distortion, headroom)) {
+      part.setDisable(answer.isEmpty());
+    }
     answer.ifPresent(this::show);
   }
 

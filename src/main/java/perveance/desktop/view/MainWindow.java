@@ -79,7 +79,7 @@ public final class MainWindow {
     plots = new PlotCard(desk, fonts);
     figures = new FiguresRow(desk);
     findings = new FindingsPane(desk);
-    foot = new FootBar(desk);
+    foot = new FootBar(desk, files.work());
     commands = new Commands(desk, files, list, schematic, plots, findings, pickers);
     top = new TopBar(desk, files, new SearchField(commands::all, desk.settings()::get));
     commands.menus().forEach(top::menu);

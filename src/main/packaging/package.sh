@@ -13,6 +13,7 @@ cp -r "$target/lib" "$work/input/lib"
 # The window opens a second earlier when the second compiler does not compete with it, and hours of
 # edits stay below 400 MB with this heap.
 jpackage --type app-image --name perveance --app-version "$version" \
+  --vendor "Perveance" \
   --description "Design assistant for valve amplifier stages" \
   --input "$work/input" --main-jar perveance.jar --main-class perveance.launch.DesktopMain \
   --add-launcher perveance-cli="$here/cli.properties" \
@@ -21,6 +22,7 @@ jpackage --type app-image --name perveance --app-version "$version" \
   --jlink-options "--strip-debug --no-man-pages --no-header-files --generate-cds-archive" \
   --dest "$work"
 jpackage --type deb --name perveance --app-version "$version" \
+  --vendor "Perveance" --linux-deb-maintainer "perveance@localhost" \
   --description "Design assistant for valve amplifier stages" \
   --app-image "$work/perveance" \
   --file-associations "$here/chassis-file.properties" --resource-dir "$here/resources" \

@@ -51,6 +51,7 @@ final class Printers {
     return new DocumentException(
         "The sheet was not printed.",
         why,
-        "Look whether the printer is switched on, or write the sheet as a PDF file and print that.");
+        "Look whether the printer is switched on, or write the sheet as a PDF file and print"
+            + " that.");
   }
 }

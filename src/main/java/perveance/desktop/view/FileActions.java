@@ -160,7 +160,8 @@ final class FileActions {
           .tell(
               "The sheet was not printed.",
               "No printer that takes PDF is set up on this machine.",
-              "Write the sheet as a PDF file with \u201cPrint the sheet (PDF)\u201d and print that.");
+              "Write the sheet as a PDF file with \u201cPrint the sheet (PDF)\u201d and print"
+                  + " that.");
       return;
     }
     pressed()

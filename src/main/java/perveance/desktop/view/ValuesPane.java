@@ -85,8 +85,7 @@ final class ValuesPane extends ScrollPane {
   private static boolean folds(KeySpec spec, StageKind kind) {
     String part = spec.key().replaceFirst("_(power|voltage)$", "");
     return spec.key().startsWith("stray_")
-        || (!part.equals(spec.key())
-            && kind.keys().stream().anyMatch(k -> k.key().equals(part)));
+        || (!part.equals(spec.key()) && kind.keys().stream().anyMatch(k -> k.key().equals(part)));
   }
 
   private void build(String ref, List<KeySpec> shown, StageKind kind) {

@@ -171,6 +171,6 @@ public final class KeyEditor {
    * @return for example {@code anode load}
    */
   public static String words(String key) {
-    return key.replace('_', ' ');
+    return key.replace('_', ' ').replaceAll("(?<=[a-z])(?=2( |$))", " ");
   }
 }

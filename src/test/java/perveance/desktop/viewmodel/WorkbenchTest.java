@@ -41,6 +41,17 @@ class WorkbenchTest {
     return setting == null ? "" : setting.text();
   }
 
+  @ParameterizedTest
+  @CsvSource({
+    "anode_load, anode load",
+    "anode_load2, anode load 2",
+    "anode_load2_power, anode load 2 power",
+    "device2, device 2"
+  })
+  void keysAreReadAsWords(String key, String words) {
+    assertEquals(words, KeyEditor.words(key));
+  }
+
   @Test
   void anEditIsAnsweredAndUndone() {
     double before = bench.stageAnswer().orElseThrow().smallSignal().gain();

@@ -1,6 +1,7 @@
 package perveance.accuracy;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import org.junit.jupiter.api.Tag;
@@ -27,8 +28,8 @@ class PublishedPentodesTest {
    * Tabulated points not marked low (RCA, Philips, GE, G.E.C. and Tung-Sol sheets as named in the
    * device files). Current and gm 6 %, mu 8 % (printed to two figures, rounded to 8 or 10), screen
    * current 20 % (printed to half a milliampere), ra 25 % (rounded guesses), triode-connected
-   * points 10 %. These points are in the fit. Two exceptions stand with their reason in {@link
-   * #allowed}.
+   * points 10 %. These points are in the fit. An exception stands with its reason in {@link
+   * #allowed}; the EL34's triode table at 375 V has the test below.
    */
   @ParameterizedTest
   @ValueSource(
@@ -45,6 +46,10 @@ class PublishedPentodesTest {
       if (!evidence.kind().equals("point") || evidence.confidence().equals("low")) {
         continue;
       }
+      if (type.equals("EL34") && evidence.anodeVoltage() == 375) {
+        assertFalse(evidence.fit(), "likely a table of supply voltages");
+        continue;
+      }
       assertEquals(0, residual.relativeError(), allowed(type, residual), type + " " + residual);
       figures++;
     }
@@ -57,10 +62,6 @@ class PublishedPentodesTest {
       // a check, not in the fit: the same 3.0 mA is printed at -2.2 V and at -2.0 V, where 2.2 mA/V
       // times 0.2 V is 15 %; and 2.0 mA/V beside 2.2 mA/V, which rises by 8 % on the way
       return 0.19;
-    }
-    if (type.equals("EL34") && evidence.anodeVoltage() == 375) {
-      // 70 mA at 250 V, -15.5 V and mu 10.5 make 87 mA at 375 V, -25.9 V, not the printed 70
-      return 0.30;
     }
     if (evidence.connection().equals("triode")) {
       return 0.10;
@@ -75,20 +76,31 @@ class PublishedPentodesTest {
   }
 
   /**
-   * EL34 triode at 375 V with the 370 ohm that the sheet puts in its cathode: the exception above
-   * as the stage it comes from. Expected 70 mA (Philips, memory). Tolerance 10 %, that of
-   * triode-connected points: the resistor holds the current where the bare bias would not.
+   * EL34 triode-connected, 375 V, 370 ohm in the cathode, 70 mA (Philips, memory); not in the fit.
+   * Between anode and cathode the two triode tables ask for a mu of (375 - 250) V / (25.9 - 15.5) V
+   * = 12.0 where 10.5 is printed; with 375 V as the supply, 349.1 V there, it is 9.5, and the
+   * current is as printed: 4 %, that of a tabulated triode-connected current. If the 375 V were the
+   * anode's after all, the resistor holds the current within the 10 % of triode-connected points.
    */
   @Test
   void el34TriodeSettlesOnItsCathodeResistor() {
+    assertEquals(0.07, settled(375, 370, 370), 0.04 * 0.07);
+    assertEquals(0.07, settled(375, 370, 0), 0.1 * 0.07);
+  }
+
+  /**
+   * Cathode current of an EL34 triode with a cathode resistor, of which a part is in the supply.
+   */
+  private static double settled(double supply, double resistor, double inSupply) {
     DeviceLaw law = Library.device("EL34").law();
+    ElectrodeCurrents out = new ElectrodeCurrents();
     double current = 0.07;
     for (int i = 0; i < 200; i++) {
-      ElectrodeCurrents out = new ElectrodeCurrents();
-      law.evaluate(375, -370 * current, 375, out);
+      double anode = supply - inSupply * current;
+      law.evaluate(anode, -resistor * current, anode, out);
       current += 0.1 * (out.current(ANODE) + out.current(SCREEN) - current);
     }
-    assertEquals(0.07, current, 0.007);
+    return current;
   }
 
   /**

@@ -215,8 +215,12 @@ public final class MainWindow {
     schematic.refresh();
     foot.refresh();
     // what a hand drags must not move because a line of the figures comes or goes
-    for (Region beneath : List.of(low, foot)) {
-      beneath.setPrefHeight(desk.drag().isHeld() ? beneath.getHeight() : Region.USE_COMPUTED_SIZE);
+    for (Region beneath : List.of(low, figures, foot)) {
+      double height = desk.drag().isHeld() ? beneath.getHeight() : Region.USE_COMPUTED_SIZE;
+      // all three, or the texts in it are measured again for each frame
+      beneath.setMinHeight(height);
+      beneath.setPrefHeight(height);
+      beneath.setMaxHeight(height);
     }
     figures.refresh();
     // lists follow when the hand rests, so that a drag stays light

@@ -10,6 +10,7 @@ import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
 import javafx.stage.Popup;
+import perveance.app.wording.Vocabulary;
 import perveance.desktop.viewmodel.Settings;
 
 /** Finds a part, a valve or an action by its words. */
@@ -74,20 +75,24 @@ final class SearchField extends TextField {
     }
   }
 
-  /** Actions whose words hold every word of the text, best first. */
+  /** Actions whose words, in either vocabulary, hold every word of the text, best first. */
   List<Action> find(String text) {
     String[] words = text.toLowerCase(Locale.ROOT).strip().split("\\s+");
     return source.get().stream()
         .filter(Action::isPossible)
-        .filter(
-            a ->
-                List.of(words).stream()
-                    .allMatch(w -> a.words().toLowerCase(Locale.ROOT).contains(w)))
+        .filter(a -> holds(a, List.of(words)))
         .sorted(
             java.util.Comparator.comparing(
                 a -> !a.words().toLowerCase(Locale.ROOT).startsWith(words[0])))
         .limit(MOST)
         .toList();
+  }
+
+  private static boolean holds(Action action, List<String> words) {
+    String said = action.words().toLowerCase(Locale.ROOT);
+    String both = said + " " + Vocabulary.AMERICAN.say(said);
+    return words.stream()
+        .allMatch(w -> both.contains(w) || both.contains(Vocabulary.AMERICAN.say(w)));
   }
 
   private void keyed(KeyEvent event) {

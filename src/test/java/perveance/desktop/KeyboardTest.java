@@ -168,6 +168,8 @@ class KeyboardTest {
     Toolkit.run(() -> search.setText("cathode resistor"));
     window.press(KeyCode.ENTER);
     assertEquals("V1a.cathode_resistor", window.desk.bench().chosenPart().get());
+    // what was chosen has the focus now
+    Toolkit.run(search::requestFocus);
     Toolkit.run(() -> search.setText("V1a plate load"));
     window.press(KeyCode.ENTER);
     assertEquals("V1a.anode_load", window.desk.bench().chosenPart().get(), "in American words");

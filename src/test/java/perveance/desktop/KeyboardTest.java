@@ -98,6 +98,8 @@ class KeyboardTest {
   void whateverTakesTheFocusHasANameAndARole(String presses) {
     for (String press : presses.split(" ")) {
       Toolkit.run(() -> ((ButtonBase) window.find("#" + press)).fire());
+      // a pane that scrolls holds its content only once it was laid out
+      Toolkit.frames();
     }
     assertEquals(List.of(), nameless(window.stage.getScene().getRoot()));
   }
@@ -117,6 +119,7 @@ class KeyboardTest {
   @Test
   void whatPartsAreRatedForIsFoldedAway() {
     Toolkit.run(() -> ((ButtonBase) window.find("#tab-values")).fire());
+    Toolkit.frames();
     assertTrue(window.shown("#value-anode_load"));
     assertFalse(window.shown("#value-anode_load_power"));
     Toolkit.run(() -> window.find("#values-fold").requestFocus());
